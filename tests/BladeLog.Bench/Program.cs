@@ -1,0 +1,3 @@
+BenchmarkDotNet.Running.BenchmarkSwitcher.FromAssembly(typeof(Program).Assembly).Run(args);
+
+internal partial class Program;
