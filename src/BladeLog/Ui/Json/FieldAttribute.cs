@@ -1,4 +1,4 @@
-namespace BladeLog.Features.Api.Reading;
+namespace BladeLog.Ui.Json;
 
 /// <summary>
 /// A field of a JSON body: its name with the unit in it, its bounds, and how to speak of it. One attribute serves the

@@ -4,7 +4,7 @@ using System.Runtime.CompilerServices;
 using System.Text.Json;
 using System.Text.Json.Serialization.Metadata;
 
-namespace BladeLog.Features.Api.Reading;
+namespace BladeLog.Ui.Json;
 
 /// <summary>The fields a body type declares, and the names they have in JSON.</summary>
 internal static class Fields

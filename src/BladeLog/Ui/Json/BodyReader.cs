@@ -3,7 +3,7 @@ using System.Globalization;
 using System.Runtime.CompilerServices;
 using System.Text.Json;
 
-namespace BladeLog.Features.Api.Reading;
+namespace BladeLog.Ui.Json;
 
 /// <summary>
 /// Reads a JSON body field by field. The framework's binding answers an unknown field or a text for a number with an

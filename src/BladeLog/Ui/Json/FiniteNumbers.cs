@@ -1,7 +1,7 @@
 using System.Text.Json;
 using System.Text.Json.Serialization;
 
-namespace BladeLog.Features.Api.Reading;
+namespace BladeLog.Ui.Json;
 
 /// <summary>No answer carries a NaN or an Infinity: what has no finite value is null.</summary>
 internal sealed class FiniteNumbers : JsonConverter<double>
