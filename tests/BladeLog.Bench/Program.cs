@@ -1,3 +1,8 @@
-BenchmarkDotNet.Running.BenchmarkSwitcher.FromAssembly(typeof(Program).Assembly).Run(args);
+using BenchmarkDotNet.Running;
 
-internal partial class Program;
+namespace BladeLog.Bench;
+
+internal static class Entry
+{
+    private static void Main(string[] args) => BenchmarkSwitcher.FromAssembly(typeof(Entry).Assembly).Run(args);
+}
