@@ -13,7 +13,7 @@ public static class BandFrequency
     /// Range: n at least 1, v below c. Against a full gyroscopic solution within 0.2 % at wood speeds, 1.5 % at worst.
     /// The speed factor is that of a travelling string (Mote; Wickert and Mote).
     /// </remarks>
-    /// <source key="from-memory" where="travelling string; band stability specification 6"/>
+    /// <source key="wickert-mote" where="travelling string; from memory"/>
     public static Frequency Lateral(GuidedBand b, int mode = 1)
     {
         BandSection s = BandSection.Of(b);
@@ -26,7 +26,7 @@ public static class BandFrequency
     /// f = n √c²/(2S) · (1 − v²/c²), c² = (G J + T r² + E Iw a²)/(ρ A r²), a = nπ/S. r² = (b² + t²)/12 m²; G J torsion, E Iw warping stiffness;
     /// other symbols, range and origin as for <see cref="Lateral"/>. Against a full gyroscopic solution within 0.12 %.
     /// </remarks>
-    /// <source key="from-memory" where="travelling string; band stability specification 6"/>
+    /// <source key="wickert-mote" where="travelling string; from memory"/>
     public static Frequency Torsional(GuidedBand b, int mode = 1)
     {
         BandSection s = BandSection.Of(b);

@@ -28,6 +28,9 @@ public static class LateralBuckling
     /// The torsion constant of a thin rectangle is quoted from memory (Timoshenko and Goodier).
     /// </remarks>
     /// <source key="derived" where="energy of a tied band under edge thrust; checked by an independent finite-element program, band stability specification 3"/>
+    /// <source key="pahlitzsch-puttkammer-1974" where="critical total feed force by energy and series; abstracts"/>
+    /// <source key="timoshenko-gere" where="ch. 6, the beam without tension; from memory"/>
+    /// <source key="timoshenko-goodier" where="torsion constant; from memory"/>
     public static Force CriticalThrust(GuidedBand b, int terms = 12, bool prebuckling = true, Stress bias = default)
     {
         CheckTerms(terms);

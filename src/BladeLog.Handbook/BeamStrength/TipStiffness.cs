@@ -19,6 +19,7 @@ public static class TipStiffness
     /// prebuckling term) it is nothing. Teeth are rigid.
     /// </remarks>
     /// <source key="derived" where="exact at rest, series under thrust; checked by an independent finite-element program, band stability specification 5.1"/>
+    /// <source key="lehmann-1993" where="abstract: what tip stiffness means for the cut"/>
     public static Stiffness AtPoint(GuidedBand b, Force thrust)
     {
         BandSection s = BandSection.Of(b);

@@ -14,7 +14,7 @@ public class ExtremeBandTests
     [InlineData(25, 0.9, 5, 1e-9, 200, 150, 100)]
     public void No_band_overflows(double w, double t, double g, double sigma, double S, double h, double xc)
     {
-        GuidedBand band = Band(w, t, g, sigma, S, h, xc);
+        GuidedBand band = Guided(w, t, g, sigma, S, h, xc);
         ThrustLimits limits = ThrustLimit.Of(band, PlateUse.Always);
         double[] figures =
         [
@@ -30,7 +30,7 @@ public class ExtremeBandTests
     {
         // tanh(βS/2)/(2β) → 1/(2β), β = √(12σ/E)/b; βS = 1.6e4 here, far beyond what cosh can hold.
         double beta = Math.Sqrt(12 * 1500.0 / 206000) / 0.9;
-        Near(1 / (2 * beta), FrontEdge.GreatestMoment(Band(1, 0.3, 0.1, 1500, 50000, 1e-4, 25000)).Millimetres, 1e-4);
+        Near(1 / (2 * beta), FrontEdge.GreatestMoment(Guided(1, 0.3, 0.1, 1500, 50000, 1e-4, 25000)).Millimetres, 1e-4);
     }
 
     public static TheoryData<Func<GuidedBand, GuidedBand>, string> Impossible => new()
@@ -53,7 +53,7 @@ public class ExtremeBandTests
     [MemberData(nameof(Impossible))]
     public void Impossible_bands_are_refused_with_a_sentence(Func<GuidedBand, GuidedBand> spoil, string sentence)
     {
-        GuidedBand band = spoil(Band(25, 0.9, 5, 100, 200, 150, 100));
+        GuidedBand band = spoil(Guided(25, 0.9, 5, 100, 200, 150, 100));
         var refused = Assert.Throws<ArgumentOutOfRangeException>(() => ThrustLimit.Of(band, PlateUse.Never));
         Assert.StartsWith(sentence, refused.Message, StringComparison.Ordinal);
         Assert.Throws<ArgumentOutOfRangeException>(() => FrontEdge.SlackThrust(band));
@@ -63,7 +63,7 @@ public class ExtremeBandTests
     [Fact]
     public void Impossible_questions_are_refused_too()
     {
-        GuidedBand band = Band(25, 0.9, 5, 100, 200, 150, 100);
+        GuidedBand band = Guided(25, 0.9, 5, 100, 200, 150, 100);
         Assert.Throws<ArgumentOutOfRangeException>(() => LateralBuckling.CriticalThrust(band, 0));
         Assert.Throws<ArgumentOutOfRangeException>(() => PlateBuckling.CriticalThrust(band, 8, 0));
         Assert.Throws<ArgumentOutOfRangeException>(() => PlateBuckling.CriticalThrust(band, 25));

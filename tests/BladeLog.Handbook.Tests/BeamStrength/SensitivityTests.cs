@@ -29,7 +29,7 @@ public class SensitivityTests
     public void Each_figure_answers_each_measure_as_in_the_reference(
         double w, double t, double S, double h, string measure, double P1, double Pcr, double k0, double lateral, double torsional)
     {
-        Func<double, GuidedBand> band = share => Band(
+        Func<double, GuidedBand> band = share => Guided(
             measure == "w" ? w * share : w,
             measure == "t" ? t * share : t,
             0,
@@ -61,7 +61,7 @@ public class SensitivityTests
         {
             if (ratios[i] > 0)
             {
-                Assert.Equal(ratios[i], Ratio(Band(w, t, 0, 100, spans[i], spans[i] / 2, spans[i] / 2)), 0.006);
+                Assert.Equal(ratios[i], Ratio(Guided(w, t, 0, 100, spans[i], spans[i] / 2, spans[i] / 2)), 0.006);
             }
         }
     }
@@ -78,10 +78,10 @@ public class SensitivityTests
     [InlineData(150, 1.3, 0.72, 0.41, 0.47, 0.75)]
     public void Tension_and_thickness_shift_which_comes_first(double w, double t, double slack, double tight, double thin, double thick)
     {
-        Assert.Equal(slack, Ratio(Band(w, t, 0, 70, 300, 150, 150)), 0.006);
-        Assert.Equal(tight, Ratio(Band(w, t, 0, 200, 300, 150, 150)), 0.006);
-        Assert.Equal(thin, Ratio(Band(w, t * 0.8, 0, 100, 300, 150, 150)), 0.006);
-        Assert.Equal(thick, Ratio(Band(w, t * 1.25, 0, 100, 300, 150, 150)), 0.006);
+        Assert.Equal(slack, Ratio(Guided(w, t, 0, 70, 300, 150, 150)), 0.006);
+        Assert.Equal(tight, Ratio(Guided(w, t, 0, 200, 300, 150, 150)), 0.006);
+        Assert.Equal(thin, Ratio(Guided(w, t * 0.8, 0, 100, 300, 150, 150)), 0.006);
+        Assert.Equal(thick, Ratio(Guided(w, t * 1.25, 0, 100, 300, 150, 150)), 0.006);
     }
 
     private static double Ratio(GuidedBand band) =>

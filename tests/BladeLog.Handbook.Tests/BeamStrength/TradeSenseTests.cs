@@ -18,7 +18,7 @@ public class TradeSenseTests
         from height in Gen.Double[0.03, 1]
         from place in Gen.Double[0, 1]
         let h = height * S
-        select Band(w, t * (0.6 + (w / 150)), gullet * w, sigma, S, h, (h / 2) + (place * (S - h)));
+        select Guided(w, t * (0.6 + (w / 150)), gullet * w, sigma, S, h, (h / 2) + (place * (S - h)));
 
     [Fact]
     public void A_raised_guide_costs_thrust_and_never_gives_any() => Bands.Sample(band =>
@@ -87,9 +87,10 @@ public class TradeSenseTests
         }
     }, iter: 500);
 
+    // Forty terms: with twelve, a short cut right beside a guide is not yet resolved to the last percent.
     private static void Less(GuidedBand less, GuidedBand more)
     {
-        ThrustLimits a = ThrustLimit.Of(less, PlateUse.Never), b = ThrustLimit.Of(more, PlateUse.Never);
+        ThrustLimits a = ThrustLimit.Of(less, PlateUse.Never, terms: 40), b = ThrustLimit.Of(more, PlateUse.Never, terms: 40);
         Assert.True(a.FrontEdge.Newtons < b.FrontEdge.Newtons, FormattableString.Invariant($"slack {a.FrontEdge} {b.FrontEdge}"));
         Assert.True(a.Buckling.Newtons < b.Buckling.Newtons, FormattableString.Invariant($"buckling {a.Buckling} {b.Buckling}"));
         Assert.True(a.Allowed.Newtons < b.Allowed.Newtons);

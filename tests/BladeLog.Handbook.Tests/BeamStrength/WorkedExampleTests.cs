@@ -68,5 +68,5 @@ public class WorkedExampleTests
     }
 
     private static GuidedBand Carbon(double w, double t, double g, double sigma, double S, double h, double xc) =>
-        Band(w, t, g, sigma, S, h, xc) with { Steel = Steel.Carbon };
+        Guided(w, t, g, sigma, S, h, xc) with { Steel = Steel.Carbon };
 }
