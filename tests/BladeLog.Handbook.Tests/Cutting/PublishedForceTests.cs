@@ -61,7 +61,10 @@ public sealed class PublishedForceTests
         // Common practice: 1.1 kW resaws 150 mm of softwood at 1 to 3 m/min with a sharp blade. Figures 2.5 and 0.24 by the independent program.
         CutCase c = A(rake: 10) with
         {
-            Thickness = Mm(0.8), Kerf = Mm(1.35), Pitch = Mm(8.47), BandSpeed = new Speed(15.2),
+            Thickness = Mm(0.8),
+            Kerf = Mm(1.35),
+            Pitch = Mm(8.47),
+            BandSpeed = new Speed(15.2),
         };
         double sharp = CuttingForce.FeedAtPower(c, new Power(935)).MetresPerMinute;
         Assert.InRange(sharp, 1, 3);

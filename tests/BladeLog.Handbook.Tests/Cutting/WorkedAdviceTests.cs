@@ -10,14 +10,34 @@ public sealed class WorkedAdviceTests
 {
     private static CutCase Beam => new()
     {
-        Thickness = Mm(0.9), Kerf = Mm(1.45), Pitch = Mm(12.7), GulletDepth = Mm(5.0), Form = ToothForm.Hook, Rake = Angle.FromDegrees(10), Tip = TipKind.Set,
-        EdgeRadius = EdgeRadius.After(Length.FromMicrometres(8), 2.5, 1.2), BandSpeed = new Speed(20.7), CutHeight = Mm(300), Density12 = new Density(538), MoisturePercent = 18,
+        Thickness = Mm(0.9),
+        Kerf = Mm(1.45),
+        Pitch = Mm(12.7),
+        GulletDepth = Mm(5.0),
+        Form = ToothForm.Hook,
+        Rake = Angle.FromDegrees(10),
+        Tip = TipKind.Set,
+        EdgeRadius = EdgeRadius.After(Length.FromMicrometres(8), 2.5, 1.2),
+        BandSpeed = new Speed(20.7),
+        CutHeight = Mm(300),
+        Density12 = new Density(538),
+        MoisturePercent = 18,
     };
 
     private static CutCase Puzzle => new()
     {
-        Thickness = Mm(0.635), Kerf = Mm(1.05), Pitch = Mm(25.4 / 14), GulletDepth = Mm(0.7), Form = ToothForm.Regular, Rake = Angle.FromDegrees(0), Tip = TipKind.Set,
-        EdgeRadius = EdgeRadius.After(Length.FromMicrometres(8), 2.5, 0.15), BandSpeed = new Speed(7.6), CutHeight = Mm(6), Density12 = new Density(706), MoisturePercent = 8,
+        Thickness = Mm(0.635),
+        Kerf = Mm(1.05),
+        Pitch = Mm(25.4 / 14),
+        GulletDepth = Mm(0.7),
+        Form = ToothForm.Regular,
+        Rake = Angle.FromDegrees(0),
+        Tip = TipKind.Set,
+        EdgeRadius = EdgeRadius.After(Length.FromMicrometres(8), 2.5, 0.15),
+        BandSpeed = new Speed(7.6),
+        CutHeight = Mm(6),
+        Density12 = new Density(706),
+        MoisturePercent = 8,
     };
 
     [Fact]
