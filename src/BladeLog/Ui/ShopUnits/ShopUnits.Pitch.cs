@@ -62,7 +62,8 @@ public sealed partial record ShopUnits
         }
 
         var plain = Amount.TryRead(bare, _ => false, out var one, out var rest) && rest.Length == 0;
-        if (perInch || (plain && IsInch && !pitchWord && one.Written is Written.Plain or Written.DecimalComma && IsInch && !pitchWord))
+        var inchShopTeeth = plain && IsInch && !pitchWord && one.Written is (Written.Plain or Written.DecimalComma);
+        if (perInch || inchShopTeeth)
             return plain ? Teeth(one.Value, one.Value, points, typed) : NotA<ToothPitch>(typed, field, PitchExamples);
         var length = ReadMetres(bare, field, ShowSpacing);
         return length.IsGood
