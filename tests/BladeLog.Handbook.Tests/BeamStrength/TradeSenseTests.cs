@@ -9,7 +9,7 @@ namespace BladeLog.Handbook.Tests.BeamStrength;
 public class TradeSenseTests
 {
     /// <summary>Thickness 0.6 to 1.4 % of the span of wheels such bands run on, gullets a fifth at most, cuts anywhere between the guides.</summary>
-    private static readonly Gen<GuidedBand> Bands =
+    internal static readonly Gen<GuidedBand> Bands =
         from w in Gen.Double[3, 150]
         from t in Gen.Double[0.4, 1.0]
         from gullet in Gen.Double[0, 0.25]

@@ -67,6 +67,15 @@ public class WorkedExampleTests
         }
     }
 
+    [Fact]
+    public void A_short_cut_on_a_wide_thin_blade_is_resolved()
+    {
+        GuidedBand band = Carbon(80, 0.6, 12, 140, 300, 18, 60);
+        double rules = ThrustLimit.Of(band, PlateUse.WhereItMatters).Buckling.Newtons;
+        Assert.True(rules < 0.95 * PlateBuckling.CriticalThrust(band).Newtons);
+        Near(PlateBuckling.CriticalThrust(band, 24, 6).Newtons, rules, 0.05);
+    }
+
     private static GuidedBand Carbon(double w, double t, double g, double sigma, double S, double h, double xc) =>
         Guided(w, t, g, sigma, S, h, xc) with { Steel = Steel.Carbon };
 }
