@@ -90,6 +90,9 @@ public sealed class ShopAdvice
     public Choice Try(CutWork work, BladeAdvice blade, SawNow saw, double? speedMps = null) =>
         speedMps is { } v ? desk.At(work, blade, saw, v) : desk.Best(work, blade, saw);
 
+    /// <summary>What a change would do to a choice: half the teeth, a raised guide, a wider blade, a slack one. Only what matters there, unless all is asked.</summary>
+    public IReadOnlyList<WhatIf> WhatIf(Choice choice, bool all = false) => new WhatIfs(desk, Beams, Settings, Words).Of(choice, For(choice.Work.Cut).Choices, all);
+
     /// <summary>The order of the day over the cuts that wait.</summary>
     public DayPlan Plan() => plan ??= DayPlan.Of(
         [.. Now.Saws.Where(s => s.Saw.Active)],
