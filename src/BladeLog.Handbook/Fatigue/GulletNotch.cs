@@ -8,7 +8,7 @@ public static class GulletNotch
 {
     /// <summary>The elastic stress factor of a row of gullets under tension, on the body section.</summary>
     /// <remarks>
-    /// K_t = 1 + 0.45 (p/r)^0.64. p pitch, m; r gullet radius, m; fitted to ±5 of 100 over 0.06 ≤ r/p ≤ 0.29, outside it throws.
+    /// K_t = 1 + 0.45 (p/r)^0.64. p pitch, m; r gullet radius, m; fitted to ±5 of 100 over 0.06 ≤ r/p ≤ 0.29 (0.058 and 0.29 unrounded), outside it throws.
     /// The single-notch formula 1 + 2√(h/r) does not apply: neighbouring gullets shield each other.
     /// </remarks>
     /// <source key="derived" where="own plane-stress finite-element series, fitted; isolated notch 3.064 against 3.065 in pilkey"/>
@@ -16,7 +16,7 @@ public static class GulletNotch
     {
         double p = Require.Positive(pitch, nameof(pitch), "pitch");
         double r = Require.Positive(gulletRadius, nameof(gulletRadius), "gullet radius");
-        return r / p is >= 0.06 and <= 0.29
+        return r / p is >= 0.058 and <= 0.29
             ? 1 + 0.45 * Math.Pow(p / r, 0.64)
             : throw new ArgumentOutOfRangeException(nameof(gulletRadius), r, "The gullet radius must lie between 0.06 and 0.29 of the pitch.");
     }

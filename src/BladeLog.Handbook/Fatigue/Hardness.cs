@@ -37,7 +37,7 @@ public static class Hardness
     public static Stress TableTensileStrength(double hrc) => new(Between(hrc, row => row.Ksi) * 1000 * Units.Exact.Psi);
 
     /// <summary>Tensile strength from Brinell hardness: the value the fatigue chapter uses.</summary>
-    /// <remarks>S_u = 3.45 HB, MPa. HB above zero; within ±7 of 100 of the table from 20 to 58 HRC.</remarks>
+    /// <remarks>S_u = 3.45 HB, MPa. HB above zero; within 7 of 100 of the table from 20 to 54 HRC, 9 of 100 under it at 58.</remarks>
     /// <source key="dowling-book" where="S_u = 3.45 HB, from memory; shigley prints 3.4 HB"/>
     public static Stress TensileStrength(double brinell)
     {
