@@ -78,13 +78,21 @@ internal readonly struct BandSection
 
     private static double Positive(double value, string what)
     {
-        Refuse(!(double.IsFinite(value) && value > 0), "band", what + " must be greater than zero.");
+        if (!(double.IsFinite(value) && value > 0))
+        {
+            Refuse(true, "band", what + " must be greater than zero.");
+        }
+
         return value;
     }
 
     private static double NotNegative(double value, string what)
     {
-        Refuse(!(double.IsFinite(value) && value >= 0), "band", what + " must not be negative.");
+        if (!(double.IsFinite(value) && value >= 0))
+        {
+            Refuse(true, "band", what + " must not be negative.");
+        }
+
         return value;
     }
 

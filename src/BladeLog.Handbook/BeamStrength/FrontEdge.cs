@@ -17,13 +17,8 @@ public static class FrontEdge
     public static Force SlackThrust(GuidedBand b, Stress bias = default)
     {
         BandSection s = BandSection.Of(b);
-        double sigma_bias = bias.Pascals;
-        if (!(s.sigma + sigma_bias > 0 && double.IsFinite(sigma_bias)))
-        {
-            throw new ArgumentOutOfRangeException(nameof(bias), "The tooth edge must have some tension before the cut.");
-        }
-
-        return new Force(Slack(s, new InPlane(s), sigma_bias));
+        CheckBias(s, bias);
+        return new Force(Slack(s, new InPlane(s), bias.Pascals));
     }
 
     /// <summary>Gives the greatest moment in the band's own plane per unit of total thrust, a length.</summary>
@@ -46,6 +41,14 @@ public static class FrontEdge
     /// </remarks>
     /// <source key="derived" where="tied beam; band stability specification 2.2"/>
     public static Length WeakestPoint(GuidedBand b) => new(new InPlane(BandSection.Of(b)).Peak());
+
+    internal static void CheckBias(in BandSection s, Stress bias)
+    {
+        if (!(s.sigma + bias.Pascals > 0 && double.IsFinite(bias.Pascals)))
+        {
+            throw new ArgumentOutOfRangeException(nameof(bias), "The tooth edge must have some tension before the cut.");
+        }
+    }
 
     internal static double Slack(in BandSection s, in InPlane plane, double sigma_bias)
     {

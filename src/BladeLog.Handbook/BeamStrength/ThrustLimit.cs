@@ -58,7 +58,7 @@ public static class ThrustLimit
     /// <param name="terms">N of the beam series.</param>
     /// <remarks>
     /// P_allowed = min(P₁/SF₁, Pcr/SF₂); P_stop = Pcr/SF₂; Pcr the beam value, or the plate value where that is lower and
-    /// w ≥ 40 mm or w/S &gt; 0.2. P₁ by <see cref="BeamStrength.FrontEdge.SlackThrust"/>, Pcr by <see cref="LateralBuckling"/> and
+    /// w ≥ 40 mm or w/S &gt; 0.2; 8 terms along and 4 across, 20 along where it rules and the cut is shorter than an eighth of the span. P₁ by <see cref="BeamStrength.FrontEdge.SlackThrust"/>, Pcr by <see cref="LateralBuckling"/> and
     /// <see cref="BeamStrength.PlateBuckling"/>; w width over all m, S guide span m. At half of Pcr a band keeps 53 to 65 % of its tip stiffness.
     /// Range: as for those. Factors under 1 throw. Tension is the worst-known input: P₁ follows it one to one.
     /// </remarks>
@@ -80,7 +80,7 @@ public static class ThrustLimit
             PlateUse.WideBandsOnly => wide,
             _ => wide || stout,
         };
-        double? asPlate = rules || plate == PlateUse.Always ? BeamStrength.PlateBuckling.Critical(s, plane) : null;
+        double? asPlate = rules || plate == PlateUse.Always ? BeamStrength.PlateBuckling.Critical(s, plane, rules ? BeamStrength.PlateBuckling.TermsFor(s) : 8) : null;
         double Pcr = rules && asPlate < beam ? asPlate.Value : beam;
 
         double slack = P1 / frontEdgeFactor, stop = Pcr / bucklingFactor;

@@ -19,6 +19,7 @@ public static class TipStiffness
     /// prebuckling term) it is nothing. Teeth are rigid.
     /// </remarks>
     /// <source key="derived" where="exact at rest, series under thrust; checked by an independent finite-element program, band stability specification 5.1"/>
+    /// <source key="lehmann-1993" where="abstract: what tip stiffness means for the cut"/>
     public static Stiffness AtPoint(GuidedBand b, Force thrust)
     {
         BandSection s = BandSection.Of(b);
@@ -32,7 +33,12 @@ public static class TipStiffness
         double delta = Tie(s.EIy, s.Tg, x, S) + (s.e * s.e * Tie(s.EIw, s.GJt, x, S));
         if (P > 0)
         {
-            delta += Give(s, f, P) - Give(s, f, 0);
+            delta += Give(s, f, P);
+            for (int i = 0; i < f.Length; i++)
+            {
+                double a = (i + 1) * Math.PI / S, a2 = a * a;
+                delta -= f[i] * f[i] * ((1 / ((s.EIy * a2) + s.Tg)) + (s.e * s.e / (s.GJt + (s.EIw * a2)))) * 2 / (S * a2);
+            }
         }
 
         return new Stiffness(double.IsFinite(delta) ? 1 / delta : 0);
@@ -117,7 +123,7 @@ public static class TipStiffness
         return ((x * (S - x) / S) - (SinhSinhOverSinh(kappa * x, kappa * (S - x), kappa * S) / kappa)) / pull;
     }
 
-    private static double Thrust(Force thrust)
+    internal static double Thrust(Force thrust)
     {
         if (!(thrust.Newtons >= 0 && double.IsFinite(thrust.Newtons)))
         {

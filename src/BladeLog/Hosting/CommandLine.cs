@@ -1,8 +1,6 @@
 namespace BladeLog.Hosting;
 
-/// <summary>What the program was asked to do. Anything it does not know of its own goes to the framework.</summary>
-/// <param name="Verb">A command such as verify; null: serve.</param>
-/// <param name="Wrong">What was wrong with the call, and what would be right.</param>
+/// <summary>What the program was asked to do. No verb: serve. Wrong: what was wrong with the call, and what would be right.</summary>
 internal sealed record Call(string? Verb, string? Operand, string? DataDir, bool Sample, string? Urls, string[] ForTheFramework, string? Wrong = null);
 
 internal static class CommandLine

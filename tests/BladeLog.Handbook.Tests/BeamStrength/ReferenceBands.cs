@@ -34,7 +34,7 @@ internal static class ReferenceBands
     public static Row Find(string id) => All.Single(row => row.Id == id);
 
     /// <summary>Millimetres and megapascals, as the reference is written.</summary>
-    public static GuidedBand Band(double w, double t, double g, double sigma, double S, double h, double xc) => new()
+    public static GuidedBand Guided(double w, double t, double g, double sigma, double S, double h, double xc) => new()
     {
         Width = Length.FromMillimetres(w),
         Thickness = Length.FromMillimetres(t),
@@ -59,7 +59,7 @@ internal static class ReferenceBands
         foreach (string[] line in lines.Skip(1))
         {
             var figures = lines[0].Zip(line).Skip(1).ToDictionary(cell => cell.First, cell => double.Parse(cell.Second, CultureInfo.InvariantCulture));
-            GuidedBand band = Band(figures["w"], figures["t"], figures["g"], figures["sigma"], figures["S"], figures["h"], figures["xc"]);
+            GuidedBand band = Guided(figures["w"], figures["t"], figures["g"], figures["sigma"], figures["S"], figures["h"], figures["xc"]);
             rows.Add(new Row(line[0], band, figures));
         }
 

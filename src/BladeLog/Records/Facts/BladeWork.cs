@@ -59,6 +59,9 @@ public sealed class Split : Fact
     public int ParentId { get; set; }
 
     public int ChildId { get; set; }
+
+    /// <summary>Width of the child as it was cut from its parent.</summary>
+    public double? WidthM { get; set; }
 }
 
 /// <summary>Use before this record began, as a range of life used.</summary>

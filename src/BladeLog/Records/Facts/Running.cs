@@ -53,6 +53,16 @@ public sealed class Dismount : Fact
     public OffReason Reason { get; set; }
 }
 
+/// <summary>The tension let off at the end of the day, or put on again.</summary>
+public sealed class Slack : Fact
+{
+    public int SawId { get; set; }
+
+    public Saw Saw { get; set; } = null!;
+
+    public bool LetOff { get; set; }
+}
+
 public enum EpochReason
 {
     First,
@@ -68,6 +78,7 @@ public sealed class MeterEpoch : Fact
 
     public EpochReason Reason { get; set; }
 
+    /// <summary>What the meter stood at when the epoch began; below zero where it rolled over.</summary>
     public long StartReadingMs { get; set; }
 }
 
@@ -132,16 +143,15 @@ public enum FeedGrade
     Assumed,
 }
 
+/// <summary>
+/// A cut that was made. Its time is when it ended; the spell it was cut in is whatever was on the saw then, so a mount
+/// entered late or struck out moves the cut with it.
+/// </summary>
 public sealed class CutDone : Fact
 {
     public int SawId { get; set; }
 
     public Saw Saw { get; set; } = null!;
-
-    /// <summary>The spell it was cut in; null when no blade is known, and asked about.</summary>
-    public int? MountId { get; set; }
-
-    public Mount? Mount { get; set; }
 
     public int? QueuedCutId { get; set; }
 

@@ -97,6 +97,14 @@ public sealed class Blade : Thing
     public DateTime AddedUtc { get; set; }
 }
 
+/// <summary>Every tag ever painted. Filled by the database itself, so that a tag is never used again.</summary>
+public sealed class TagUsed
+{
+    public required string Tag { get; set; }
+
+    public int BladeId { get; set; }
+}
+
 public sealed class Saw : Thing
 {
     /// <summary>Unique without case.</summary>
