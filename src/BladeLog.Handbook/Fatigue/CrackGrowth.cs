@@ -109,7 +109,7 @@ public static class CrackGrowth
         }
 
         double low = 0, high = longest;
-        while (high - low > 1e-12 * longest)
+        while (high - low > 1e-13 * high)
         {
             double middle = (low + high) / 2;
             (low, high) = reached(middle) ? (low, middle) : (middle, high);
