@@ -19,7 +19,7 @@ public static class CurveRadius
     }
 
     /// <summary>R_min: the tightest curve that goes without relief cuts.</summary>
-    /// <remarks>R_min = a·R_geo, a = 1.45 (range 1.3 to 1.65): the published tables are 1.33 to 1.62 times R_geo.</remarks>
+    /// <remarks>R_min = a·R_geo, a = 1.45 (range 1.3 to 1.65): the published tables are 1.33 to 1.70 times R_geo.</remarks>
     /// <source key="radius-tables" where="how-to article and machine manuals; the factor fitted here"/>
     public static Length Usual(Length width, Length kerf, Length thickness, double factor = 1.45)
     {

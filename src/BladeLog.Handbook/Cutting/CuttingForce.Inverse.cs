@@ -78,16 +78,16 @@ public static partial class CuttingForce
     private static Length? RadiusFor(double target, double sharp, double slope, double c_e, CutModel m)
     {
         double r_s = m.ReferenceRadius.Metres;
-        double r_1 = Math.Max(r_s, c_e / m.Lambda); // beyond it the edge terms fade
-        double fade = c_e / (m.Lambda * r_1);
-        double atReference = Math.Min(1, c_e / (m.Lambda * r_s)) * sharp;
+        bool chip = c_e >= m.Lambda * r_s;
+        double r_1 = chip ? c_e / m.Lambda : r_s; // beyond it the edge terms fade
+        double atReference = (chip ? 1 : c_e / (m.Lambda * r_s)) * sharp;
         if (target < atReference)
         {
             return new Length(0);
         }
 
         double r = r_s + (target - sharp) / slope;
-        if (r <= r_1 && fade >= 1)
+        if (chip && r <= r_1)
         {
             return new Length(r);
         }

@@ -79,4 +79,10 @@ public static class Kerf
             (true, true) => 0.40,
             (false, true) => 0.45,
         }));
+
+    /// <summary>Bite over side clearance, dimensionless: whether the dust can slip past the body.</summary>
+    /// <remarks>c/s. c bite, m; s side clearance, m. A warning only on power-fed mills with c above 0.10 mm; every hand-fed cut lies far below 1.</remarks>
+    /// <source key="from-memory" where="sawmill texts: bite no less than the side clearance"/>
+    public static double SpillRatio(Length bite, Length sideClearance) =>
+        Require.NotNegative(bite.Metres, "bite") / Require.Positive(sideClearance.Metres, "side clearance");
 }

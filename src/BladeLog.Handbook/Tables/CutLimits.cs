@@ -45,11 +45,11 @@ public static class CutLimits
     /// <summary>Least teeth in the cut.</summary>
     public static Limit LeastTeeth { get; } = new(3, "fewer snatch and strip", Provenance.CommonPractice, "common-practice");
 
-    /// <summary>Push by hand, green, N (what most people can keep up, 70 N).</summary>
-    public static Limit PushGreen { get; } = new(70, "hand push anyone can keep up", Provenance.Published, "hse-l23");
+    /// <summary>Push by hand, green, N.</summary>
+    public static Limit PushGreen { get; } = new(70, "guideline push to keep a load moving, women", Provenance.Published, "hse-l23");
 
-    /// <summary>Push by hand, amber, N (100 N).</summary>
-    public static Limit PushAmber { get; } = new(100, "hand push a strong worker can keep up", Provenance.Published, "hse-l23");
+    /// <summary>Push by hand, amber, N.</summary>
+    public static Limit PushAmber { get; } = new(100, "guideline push to keep a load moving, men", Provenance.Published, "hse-l23");
 
     /// <summary>Push with fingers within 150 mm of the blade: amber above, N.</summary>
     public static Limit PushPrecision { get; } = new(50, "fingers near the blade", Provenance.EngineeringDefault, "engineering-default");

@@ -22,7 +22,9 @@ public sealed record WearLevel(double LnMean, double LnSd)
     public double Fractile(double p) =>
         Math.Exp(LnMean + LnSd * Math.Sqrt(2) * SpecialFunctions.ErfInv(2 * Require.Within(p, 1e-9, 1 - 1e-9, "The share must lie between 0 and 1.") - 1));
 
-    /// <summary>The handbook's word: the tabulated rate as median, wide on purpose (ln 2.5; engineering default).</summary>
+    /// <summary>The handbook's word before the shop has records: the tabulated rate as median, wide on purpose.</summary>
+    /// <remarks>μ₀ = ln w, s₀ = ln 2.5: nine in ten within a factor of 4.5. w in µm per equivalent km, above zero.</remarks>
+    /// <source key="engineering-default" where="spread of the tabulated wear rates"/>
     public static WearLevel FromTable(double wearPerKm_um) => new(Math.Log(Require.Positive(wearPerKm_um, "wear rate")), Math.Log(2.5));
 }
 

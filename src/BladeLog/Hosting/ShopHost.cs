@@ -71,7 +71,7 @@ internal static class ShopHost
         {
             json.SerializerOptions.Converters.Add(new FiniteNumbers());
             json.SerializerOptions.Converters.Add(new JsonStringEnumConverter(System.Text.Json.JsonNamingPolicy.SnakeCaseLower));
-            json.SerializerOptions.TypeInfoResolver = new DefaultJsonTypeInfoResolver { Modifiers = { Fields.Name } };
+            json.SerializerOptions.TypeInfoResolver = new DefaultJsonTypeInfoResolver { Modifiers = { BodyFields.Name } };
         });
 
         // Keys live with the data, so that a restart or a move leaves open forms good.

@@ -71,7 +71,7 @@ internal sealed class BodyReader
         }
 
         var seen = new HashSet<string>(StringComparer.Ordinal);
-        var fields = Fields.Of(type);
+        var fields = BodyFields.Of(type);
         foreach (var item in element.EnumerateObject())
         {
             if (NameOf(item) is null)
@@ -83,7 +83,7 @@ internal sealed class BodyReader
             var at = path.Length == 0 ? item.Name : $"{path}.{item.Name}";
             if (!fields.TryGetValue(item.Name, out var field))
             {
-                Say(at.Length > 80 ? at[..80] : at, $"There is no such field. {Fields.Nearest(item.Name, fields.Keys)}");
+                Say(at.Length > 80 ? at[..80] : at, $"There is no such field. {BodyFields.Nearest(item.Name, fields.Keys)}");
                 continue;
             }
 
@@ -161,7 +161,7 @@ internal sealed class BodyReader
 
         if (type.IsEnum)
         {
-            var words = Fields.WordsOf(type);
+            var words = BodyFields.WordsOf(type);
             return TextOf(value) is { } word && words.TryGetValue(word, out var chosen)
                 ? chosen
                 : Refused(at, $"{Sentence(field)} is one of: {string.Join(", ", words.Keys)}.");

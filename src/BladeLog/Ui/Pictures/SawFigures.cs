@@ -11,5 +11,5 @@ public sealed record SawFigures(double? Body, double? BendStress, double? GuideS
 {
     /// <summary>Where bending is hardest: the smaller wheel.</summary>
     public static WheelDrawing BendingWheel(SawDrawing drawing) =>
-        drawing.Wheels.OrderBy(w => w.Radius).ThenBy(w => w.Centre.Y).First();
+        drawing.Wheels.OrderBy(w => w.Radius).ThenBy(w => w.Centre.Y).ThenByDescending(w => w.Centre.X).First();
 }

@@ -78,13 +78,13 @@ public sealed class RandomBodiesTests(EmptyShop shop) : IClassFixture<EmptyShop>
     private static Dictionary<string, string> Scattered(Random random, string working, Type type, bool wild)
     {
         var body = Of(working);
-        foreach (var (name, field) in Fields.Of(type))
+        foreach (var (name, field) in BodyFields.Of(type))
         {
             if (field.Type.IsEnum)
             {
                 if (field.Required || random.Next(2) == 0)
                 {
-                    var words = Fields.WordsOf(field.Type).Keys.ToArray();
+                    var words = BodyFields.WordsOf(field.Type).Keys.ToArray();
                     body[name] = $"\"{words[random.Next(words.Length)]}\"";
                 }
             }

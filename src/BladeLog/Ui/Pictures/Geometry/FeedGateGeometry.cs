@@ -90,7 +90,8 @@ public sealed record FeedGateGeometry(GateVerdict Verdict, double From, double T
     {
         var gate = Of(noChip, rubs, limits, true, false);
         var ends = gate.Verdict == GateVerdict.Fits ? limits.MinBy(l => l.Green) : limits.MinBy(l => l.Amber);
-        var range = ends is null ? $"from {Figures.Feed(gate.From)} m/min on, nothing closes it"
+        var range = gate.Verdict == GateVerdict.Shut ? ""
+            : ends is null ? $"from {Figures.Feed(gate.From)} m/min on, nothing closes it"
             : $"from {Figures.Feed(gate.From)} to {Figures.Feed(gate.To)} m/min, then {ends.Name} closes it";
         var words = gate.Verdict switch
         {

@@ -74,7 +74,8 @@ public static class LifeBandGeometry
         }
 
         Above(marks, y, xm, 0, $"half of such blades broken: {Text(life.Median, life.Unit)}", right: false, "gov");
-        Above(marks, y, xl, 1, $"1 in 10: {Text(life.OneInTen, life.Unit)}", right: xl <= 44, null);
+        // The nearer the median's leader stands, the sooner the label must turn to the left.
+        Above(marks, y, xl, 1, $"1 in 10: {Text(life.OneInTen, life.Unit)}", right: xl <= 44 - 0.75 * (100 - xm), null);
         var run = $"run {Text(life.Used, life.Unit)}";
         if (xp is not { } x)
         {

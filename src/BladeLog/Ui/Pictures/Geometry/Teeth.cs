@@ -50,7 +50,7 @@ public readonly record struct Gap(Point Foot, Point Centre, double Radius, Point
         var (r, s, centre) = Face(pitch, depth, form, hook);
         return form == ToothForm.Skip
             ? s > 0 && centre.X < pitch / 2 - 0.11 * pitch
-            : s > 0 && (new Point(pitch, 0) - centre).Length > r;
+            : s > 0 && centre.X + r < pitch && (new Point(pitch, 0) - centre).Length > r;
     }
 
     public static Gap Of(double pitch, double depth, ToothForm form, double hook)

@@ -7,7 +7,7 @@ using System.Text.Json.Serialization.Metadata;
 namespace BladeLog.Ui.Json;
 
 /// <summary>The fields a body type declares, and the names they have in JSON.</summary>
-internal static class Fields
+internal static class BodyFields
 {
     private static readonly ConcurrentDictionary<Type, IReadOnlyDictionary<string, Field>> Known = new();
     private static readonly ConcurrentDictionary<Type, IReadOnlyDictionary<string, object>> Words = new();
