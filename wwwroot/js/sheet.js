@@ -22,7 +22,8 @@
   // Drafts: what was typed survives a locked screen and a reload. Never secrets, never hidden fields.
   const keeps = field => field.name && !field.closest('[data-nodraft]')
     && !['password', 'hidden', 'file', 'submit', 'button'].includes(field.type);
-  const keyOf = form => PREFIX + location.pathname + '|' + form.getAttribute('action');
+  // By where it is sent: the page itself may answer under another address.
+  const keyOf = form => PREFIX + (form.getAttribute('action') ?? location.pathname);
   const store = {
     get(key) { try { return JSON.parse(localStorage.getItem(key)); } catch { return null; } },
     set(key, value) { try { localStorage.setItem(key, JSON.stringify(value)); } catch { /* full or forbidden: no draft */ } },

@@ -17,8 +17,8 @@ public class ShopUnitsQuantityTests
         { "stress", "103.4 MPa", 103.4e6 }, { "stress", "103,4 mpa", 103.4e6 }, { "stress", "103.4 N/mm2", 103.4e6 }, { "stress", "103.4 N/mm²", 103.4e6 },
         { "stress", "15,000 psi", 103421359.4 }, { "stress", "15000psi", 103421359.4 }, { "stress", "15 000 psi", 103421359.4 }, { "stress", "15 ksi", 103421359.4 }, { "stress", "15 kpsi", 103421359.4 },
         { "stress", "15.0 KSI", 103421359.4 }, { "stress", "1034 bar", 103.4e6 }, { "stress", "15000 lb/in2", 103421359.4 }, { "stress", "0.1 GPa", 1e8 },
-        { "force", "1400 N", 1400 }, { "force", "1,400 N", 1400 }, { "force", "1.4 kN", 1400 }, { "force", "1,4 kN", 1400 }, { "force", "312.5 lbf", 1390.06925 }, { "force", "312.5 lb", 1390.06925 },
-        { "force", "312,5 lbs", 1390.06925 }, { "force", "100 kgf", 980.665 }, { "force", "100 kg", 980.665 }, { "force", "140 daN", 1400 },
+        { "force", "1400 N", 1400 }, { "force", "1,400 N", 1400 }, { "force", "1.4 kN", 1400 }, { "force", "1,4 kN", 1400 }, { "force", "312.5 lbf", 1390.0692547689 }, { "force", "312.5 lb", 1390.0692547689 },
+        { "force", "312,5 lbs", 1390.0692547689 }, { "force", "100 kgf", 980.665 }, { "force", "100 kg", 980.665 }, { "force", "140 daN", 1400 },
         { "band", "25.4 m/s", 25.4 }, { "band", "5000 fpm", 25.4 }, { "band", "5,000 fpm", 25.4 }, { "band", "5000 ft/min", 25.4 }, { "band", "5000 sfpm", 25.4 }, { "band", "5000 feet per minute", 25.4 }, { "band", "1524 m/min", 25.4 }, { "band", "15,2 m/s", 15.2 },
         { "feed", "3 m/min", 0.05 }, { "feed", "50 mm/s", 0.05 }, { "feed", "0.05 m/s", 0.05 }, { "feed", "10 fpm", 0.0508 }, { "feed", "10 ft/min", 0.0508 }, { "feed", "120 in/min", 0.0508 }, { "feed", "120 ipm", 0.0508 }, { "feed", "2,5 m/min", 0.0416666667 },
         { "power", "2.2 kW", 2200 }, { "power", "2,2 kw", 2200 }, { "power", "2200 W", 2200 }, { "power", "2,200 W", 2200 }, { "power", "3 hp", 2237.099615 }, { "power", "3HP", 2237.099615 }, { "power", "3 PS", 2206.49625 }, { "power", "1 1/2 hp", 1118.549807 },
@@ -158,6 +158,17 @@ public class ShopUnitsQuantityTests
         Assert.Equal("tire", mill.Spell("tyre", "tire"));
         Assert.StartsWith("\"-1\" cannot be right. A strain lies", mill.ReadStress("-1").Problem, StringComparison.Ordinal);
         Assert.Equal("tension", _metric.PullName);
+    }
+
+    [Fact]
+    public void Every_outcome_can_be_printed()
+    {
+        Assert.Equal("Metric, UTC", _metric.ToString());
+        Assert.Equal("120\u00A0MPa", _metric.ReadStress("120").ToString());
+        Assert.Equal("\"x\" is not a tension. Write 120, 120 MPa or 15000 psi.", _metric.ReadStress("x").ToString());
+        Assert.Equal("Nothing is typed.", default(Parsed<long>).ToString());
+        Assert.Contains("is not a time", _metric.ReadTime("x", DateTime.UnixEpoch).ToString(), StringComparison.Ordinal);
+        Assert.False(_metric.ReadStress("x").TryGet(out _, out var problem) || problem.Length == 0);
     }
 
     [Theory]

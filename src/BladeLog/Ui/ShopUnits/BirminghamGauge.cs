@@ -4,9 +4,9 @@ using BladeLog.Handbook.Units;
 namespace BladeLog.Ui;
 
 /// <summary>
-/// Birmingham (Stubs) wire gauge, by which wide band steel is sold. The table is defined in inches; the figures agree
-/// in three published tables (see docs/sources.md, key bwg). Other gauges (standard wire gauge, sheet gauges) give
-/// other thicknesses for the same number.
+/// Birmingham (Stubs) wire gauge, by which wide band steel is sold. The table is defined in inches; the figures are
+/// those of Holtzapffel's measured table as reprinted in building handbooks, and later tables of wire and tube makers
+/// agree with it. Other gauges (standard wire gauge, sheet gauges) give other thicknesses for the same number.
 /// </summary>
 public static class BirminghamGauge
 {

@@ -33,7 +33,7 @@ public sealed partial record ShopUnits
     public Parsed<BladePrint> ReadBladePrint(string? text)
     {
         var typed = (text ?? "").Trim();
-        var print = new Field("a blade print", 0, 0);
+        var print = new TypedField("a blade print", 0, 0);
         var clean = Amount.Clean(text);
         if (Blank<BladePrint>(typed, clean, print, PrintExamples) is { } blank)
             return blank;

@@ -35,7 +35,7 @@ public sealed partial record ShopUnits
     /// Reads a duration to the millisecond: 1.5, 1h30, 1:30, 90 min, 2 h 5 m. A bare number is in the field's unit,
     /// hours where it names none; 1:30 is always an hour and a half.
     /// </summary>
-    public Parsed<TimeSpan> ReadDuration(string? text, Field? field = null)
+    public Parsed<TimeSpan> ReadDuration(string? text, TypedField? field = null)
     {
         field ??= Fields.RunHours;
         const string Examples = "1.5, 1:30 or 90 min";
@@ -52,9 +52,9 @@ public sealed partial record ShopUnits
     }
 
     /// <summary>1 h 30 min; an hour meter is shown in hours and hundredths.</summary>
-    public string Show(TimeSpan time, Field? field = null) => ShowSeconds(time.TotalSeconds, field ?? Fields.RunHours);
+    public string Show(TimeSpan time, TypedField? field = null) => ShowSeconds(time.TotalSeconds, field ?? Fields.RunHours);
 
-    private static string ShowSeconds(double total, Field field)
+    private static string ShowSeconds(double total, TypedField field)
     {
         if (field.Large)
             return With(total / Hour, 2, "h");
@@ -84,7 +84,7 @@ public sealed partial record ShopUnits
         return Of("m") < 60 && Of("s") < 60;
     }
 
-    private static bool TryParts(string clean, Field field, out double seconds)
+    private static bool TryParts(string clean, TypedField field, out double seconds)
     {
         seconds = 0;
         var last = double.PositiveInfinity;

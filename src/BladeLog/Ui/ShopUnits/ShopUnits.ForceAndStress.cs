@@ -37,11 +37,11 @@ public sealed partial record ShopUnits
     });
 
     /// <summary>Reads a stress; a bare number is MPa or psi.</summary>
-    public Parsed<Stress> ReadStress(string? text, Field? field = null)
+    public Parsed<Stress> ReadStress(string? text, TypedField? field = null)
         => ReadOne(text, field ?? PullField, StressFamily, si => Show(new Stress(si))).As(si => new Stress(si), Show);
 
     /// <summary>Reads a force; pounds and kilograms are taken as pounds-force and kilograms-force.</summary>
-    public Parsed<Force> ReadForce(string? text, Field? field = null)
+    public Parsed<Force> ReadForce(string? text, TypedField? field = null)
         => ReadOne(text, field ?? Fields.Force, ForceFamily, si => Show(new Force(si))).As(si => new Force(si), Show);
 
     /// <summary>120 MPa, or 17405 psi.</summary>
@@ -54,5 +54,5 @@ public sealed partial record ShopUnits
         ? With(force.Newtons / Exact.PoundForce, 1, "lbf")
         : With(force.Newtons, Math.Abs(force.Newtons) < 100 ? 1 : 0, "N");
 
-    private Field PullField => Fields.Stress with { Name = "a " + PullName };
+    private TypedField PullField => Fields.Stress with { Name = "a " + PullName };
 }

@@ -43,14 +43,14 @@ public sealed partial record ShopUnits
     });
 
     /// <summary>Reads a length.</summary>
-    public Parsed<Length> ReadLength(string? text, Field? field = null)
+    public Parsed<Length> ReadLength(string? text, TypedField? field = null)
     {
         field ??= Fields.AnyLength;
         string Shown(double si) => Show(new Length(si), field);
         return ReadMetres(text, field, Shown).As(si => new Length(si), l => Show(l, field));
     }
 
-    private Parsed<double> ReadMetres(string? text, Field field, Func<double, string> show)
+    private Parsed<double> ReadMetres(string? text, TypedField field, Func<double, string> show)
     {
         var typed = (text ?? "").Trim();
         var clean = Amount.Clean(text);
@@ -93,7 +93,7 @@ public sealed partial record ShopUnits
     };
 
     /// <summary>Shows a length in the shop's unit: 12.7 mm, or 1/2 in.</summary>
-    public string Show(Length length, Field? field = null)
+    public string Show(Length length, TypedField? field = null)
     {
         field ??= Fields.AnyLength;
         if (!double.IsFinite(length.Metres))
@@ -109,7 +109,7 @@ public sealed partial record ShopUnits
     }
 
     /// <summary>Both systems: 12.7 mm (1/2 in).</summary>
-    public string ShowBoth(Length length, Field? field = null) => $"{Show(length, field)} ({Other.Show(length, field)})";
+    public string ShowBoth(Length length, TypedField? field = null) => $"{Show(length, field)} ({Other.Show(length, field)})";
 
     private static string? Fraction(double inches)
     {

@@ -7,7 +7,7 @@ namespace BladeLog.Ui;
 public sealed partial record ShopUnits
 {
     /// <summary>Reads an amount of money to minor units. More digits than the currency has are refused, not rounded.</summary>
-    public Parsed<long> ReadMoney(string? text, Field? field = null)
+    public Parsed<long> ReadMoney(string? text, TypedField? field = null)
     {
         field ??= Fields.Money;
         var typed = (text ?? "").Trim();

@@ -23,7 +23,7 @@ public sealed partial record ShopUnits
     });
 
     /// <summary>Reads a percentage, in percent: "12 %" gives 12.</summary>
-    public Parsed<double> ReadPercent(string? text, Field? field = null) => ReadOne(text, field ?? Fields.Percent, PercentFamily, ShowPercent);
+    public Parsed<double> ReadPercent(string? text, TypedField? field = null) => ReadOne(text, field ?? Fields.Percent, PercentFamily, ShowPercent);
 
     /// <summary>Reads a moisture content in percent of the dry weight.</summary>
     public Parsed<double> ReadMoisture(string? text) => ReadPercent(text, Fields.Moisture);
@@ -32,7 +32,7 @@ public sealed partial record ShopUnits
     public Parsed<double> ReadRevolutions(string? text) => ReadOne(text, Fields.Revolutions, RevolutionsFamily, ShowRevolutions);
 
     /// <summary>Reads a whole number; "1,200" and "1 200" are twelve hundred, "3 pcs" is three.</summary>
-    public Parsed<long> ReadCount(string? text, Field? field = null)
+    public Parsed<long> ReadCount(string? text, TypedField? field = null)
     {
         field ??= Fields.Count;
         const string Examples = "12 or 1200";

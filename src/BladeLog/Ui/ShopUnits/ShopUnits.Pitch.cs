@@ -41,24 +41,21 @@ public sealed partial record ShopUnits
         var pitchWord = PitchWord().IsMatch(clean);
         var bare = PitchWord().Replace(PerInch().Replace(Points().Replace(clean, ""), ""), "").Trim();
 
-        if (Range().Match(bare) is { Success: true } r)
+        var r = Range().Match(bare);
+        var slash = r.Groups["mark"].Value == "/";
+        var unit = r.Groups["unit"].Value;
+        // With a unit of length behind it, or the word pitch, a slash is a part of an inch.
+        if (r.Success && !(slash && !perInch && (unit.Length > 0 || pitchWord)))
         {
-            var slash = r.Groups["mark"].Value == "/";
-            if (slash && !perInch && AskOrInch(bare, typed, pitchWord) is { } asked)
+            if (slash && !perInch && AskOrInch(bare, typed) is { } asked)
                 return asked;
-            if (!Amount.TryReadAll(r.Groups["a"].Value, false, out var a) || !Amount.TryReadAll(r.Groups["b"].Value, false, out var b)
-                || a.Value <= 0 || b.Value <= 0)
-            {
+            if (!Amount.TryReadAll(r.Groups["a"].Value, false, out var a) || !Amount.TryReadAll(r.Groups["b"].Value, false, out var b))
                 return NotA<ToothPitch>(typed, field, PitchExamples);
-            }
-
-            var unit = r.Groups["unit"].Value;
-            var twoLengths = !slash && (unit.Length > 0 || pitchWord);
-            if (!twoLengths && unit.Length == 0)
+            if (unit.Length == 0 && !pitchWord)
                 return Teeth(a.Value, b.Value, points, typed);
-            if (Find(LengthFamily, field, unit) is not { } u || perInch)
-                return NotA<ToothPitch>(typed, field, PitchExamples);
-            return Spaced(a.Value * u.Si, b.Value * u.Si, typed);
+            return Find(LengthFamily, field, unit) is { } u && !perInch
+                ? Spaced(a.Value * u.Si, b.Value * u.Si, typed)
+                : NotA<ToothPitch>(typed, field, PitchExamples);
         }
 
         var plain = Amount.TryRead(bare, _ => false, out var one, out var rest) && rest.Length == 0;
@@ -88,9 +85,9 @@ public sealed partial record ShopUnits
             : Show(pitch.Fine, Fields.Pitch);
     }
 
-    private Parsed<ToothPitch>? AskOrInch(string bare, string typed, bool pitchWord)
+    private Parsed<ToothPitch>? AskOrInch(string bare, string typed)
     {
-        if (pitchWord || !Amount.TryReadAll(bare, false, out var f))
+        if (!Amount.TryReadAll(bare, false, out var f))
             return null;
         if (bare.Replace(" ", "", StringComparison.Ordinal) is "1/2" or "3/4" or "5/8")
             return Parsed<ToothPitch>.Refused(typed, $"{Quote(typed)} can be teeth per inch or a part of an inch. Write {bare} TPI or {bare} in.");
@@ -102,7 +99,7 @@ public sealed partial record ShopUnits
     private Parsed<ToothPitch> Teeth(double a, double b, bool points, string typed)
     {
         var less = points ? 1 : 0;
-        return a - less > 0 && b - less > 0
+        return a > less && b > less
             ? Spaced(Exact.Inch / (a - less), Exact.Inch / (b - less), typed)
             : Parsed<ToothPitch>.Refused(typed, PitchRange(typed));
     }

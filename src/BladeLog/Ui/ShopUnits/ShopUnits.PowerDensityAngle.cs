@@ -45,15 +45,15 @@ public sealed partial record ShopUnits
     });
 
     /// <summary>Reads a power; hp is the mechanical horsepower, PS the metric one.</summary>
-    public Parsed<Power> ReadPower(string? text, Field? field = null)
+    public Parsed<Power> ReadPower(string? text, TypedField? field = null)
         => ReadOne(text, field ?? Fields.Power, PowerFamily, si => Show(new Power(si))).As(si => new Power(si), Show);
 
     /// <summary>Reads a density.</summary>
-    public Parsed<Density> ReadDensity(string? text, Field? field = null)
+    public Parsed<Density> ReadDensity(string? text, TypedField? field = null)
         => ReadOne(text, field ?? Fields.Density, DensityFamily, si => Show(new Density(si))).As(si => new Density(si), Show);
 
     /// <summary>Reads an angle; a bare number is degrees, and 10°30' is ten and a half.</summary>
-    public Parsed<Angle> ReadAngle(string? text, Field? field = null)
+    public Parsed<Angle> ReadAngle(string? text, TypedField? field = null)
     {
         field ??= Fields.AnyAngle;
         var typed = (text ?? "").Trim();

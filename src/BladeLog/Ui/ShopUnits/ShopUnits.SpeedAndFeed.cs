@@ -41,11 +41,11 @@ public sealed partial record ShopUnits
     };
 
     /// <summary>Reads a band speed; a bare number is m/s or ft/min.</summary>
-    public Parsed<Speed> ReadBandSpeed(string? text, Field? field = null)
+    public Parsed<Speed> ReadBandSpeed(string? text, TypedField? field = null)
         => ReadOne(text, field ?? Fields.BandSpeed, BandSpeedFamily, si => ShowBandSpeed(new Speed(si))).As(si => new Speed(si), ShowBandSpeed);
 
     /// <summary>Reads a feed; a bare number is m/min or ft/min.</summary>
-    public Parsed<Speed> ReadFeed(string? text, Field? field = null)
+    public Parsed<Speed> ReadFeed(string? text, TypedField? field = null)
         => ReadOne(text, field ?? Fields.Feed, FeedFamily, si => ShowFeed(new Speed(si))).As(si => new Speed(si), ShowFeed);
 
     /// <summary>15.2 m/s, or 2992 ft/min.</summary>

@@ -20,6 +20,9 @@ public sealed record TypedMoment(IReadOnlyList<Moment> Candidates, string? Probl
 
     /// <summary>The moment, UTC. Ask <see cref="IsGood"/> first.</summary>
     public DateTime Utc => IsGood ? Candidates[0].Utc : throw new InvalidOperationException(Problem ?? "Two moments carry this time.");
+
+    /// <summary>The moments, or the sentence.</summary>
+    public override string ToString() => Problem ?? string.Join(" or ", Candidates.Select(c => c.Words));
 }
 
 /// <content>Dates and times typed on the shop's clock.</content>

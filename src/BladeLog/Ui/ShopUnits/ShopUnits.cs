@@ -26,7 +26,7 @@ public enum PullWord
 /// Typed text to quantity and quantity to text, by the shop's settings. The only place where typed text becomes SI.
 /// Rule of the bare number: it is in the shop's unit, but a bare fraction (1/2, 1-1/4) or a number that begins with
 /// its decimal mark (.025) is a length in inches, as the trade prints it. What was understood is always shown back.
-/// Rule of the comma: see <see cref="Field.Large"/>; units so small that nobody writes three decimals of them
+/// Rule of the comma: see <see cref="TypedField.Large"/>; units so small that nobody writes three decimals of them
 /// (psi, ft/min, N, lbf, W, kg/m³) take "15,000" as thousands.
 /// </summary>
 public sealed partial record ShopUnits
@@ -58,6 +58,9 @@ public sealed partial record ShopUnits
     /// <summary>The spelling the shop has chosen: <c>Spell("tyre", "tire")</c>.</summary>
     public string Spell(string uk, string us) => UkSpelling ? uk : us;
 
+    /// <summary>The system and the place; <see cref="Other"/> would print itself without end.</summary>
+    public override string ToString() => $"{Units}, {Zone.Id}";
+
     private bool IsInch => Units == UnitSystem.Inch;
 
     /// <summary>A unit: its size in SI, the sign it is shown with, and whether "15,000" of it is thousands.</summary>
@@ -68,10 +71,10 @@ public sealed partial record ShopUnits
 
     private string Examples(Family family) => IsInch ? family.ExamplesInch : family.ExamplesMetric;
 
-    private Unit BareUnit(Family family, Field field) => family.Names[field.Bare ?? (IsInch ? family.BareInch : family.BareMetric)];
+    private Unit BareUnit(Family family, TypedField field) => family.Names[field.Bare ?? (IsInch ? family.BareInch : family.BareMetric)];
 
     /// <summary>One number with a unit, in SI.</summary>
-    private Parsed<double> ReadOne(string? text, Field field, Family family, Func<double, string> show)
+    private Parsed<double> ReadOne(string? text, TypedField field, Family family, Func<double, string> show)
     {
         var typed = (text ?? "").Trim();
         var clean = Amount.Clean(text);
@@ -93,7 +96,7 @@ public sealed partial record ShopUnits
         return InRange(amount.Value * found.Si, typed, field, show);
     }
 
-    private Unit? Find(Family family, Field field, string unitText)
+    private Unit? Find(Family family, TypedField field, string unitText)
         => unitText.Length == 0 ? BareUnit(family, field) : family.Names.GetValueOrDefault(UnitKey(unitText));
 
     private static string UnitKey(string unit) => unit
@@ -102,7 +105,7 @@ public sealed partial record ShopUnits
         .Replace(" ", "", StringComparison.Ordinal)
         .TrimEnd('.');
 
-    private static Parsed<double> InRange(double si, string typed, Field field, Func<double, string> show)
+    private static Parsed<double> InRange(double si, string typed, TypedField field, Func<double, string> show)
     {
         // A hair of tolerance, or an end of the range typed in another unit would fail its own limit.
         var slack = 1e-9 * Math.Abs(field.Most);
@@ -111,17 +114,17 @@ public sealed partial record ShopUnits
             : OutOfRange<double>(typed, field, show);
     }
 
-    private static Parsed<T>? Blank<T>(string typed, string clean, Field field, string examples)
+    private static Parsed<T>? Blank<T>(string typed, string clean, TypedField field, string examples)
     {
         if (clean.Length == 0)
             return Parsed<T>.Refused(typed, $"Nothing is typed. Write {field.Name} such as {examples}.");
         return typed.Length > LongestText ? NotA<T>(typed, field, examples) : null;
     }
 
-    private static Parsed<T> NotA<T>(string typed, Field field, string examples)
+    private static Parsed<T> NotA<T>(string typed, TypedField field, string examples)
         => Parsed<T>.Refused(typed, $"{Quote(typed)} is not {field.Name}. Write {examples}.");
 
-    private static Parsed<T> OutOfRange<T>(string typed, Field field, Func<double, string> show)
+    private static Parsed<T> OutOfRange<T>(string typed, TypedField field, Func<double, string> show)
         => Parsed<T>.Refused(typed, $"{Quote(typed)} cannot be right. {field.Capital} lies between {show(field.Least)} and {show(field.Most)}.");
 
     private static string Quote(string typed) => $"\"{(typed.Length > 40 ? typed[..40] + "…" : typed)}\"";

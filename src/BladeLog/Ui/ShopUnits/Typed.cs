@@ -46,6 +46,9 @@ public readonly record struct Parsed<T>
         return _good;
     }
 
+    /// <summary>What was understood, or the sentence. Never throws, unlike the printing the compiler would write.</summary>
+    public override string ToString() => Problem ?? Understood ?? Text;
+
     internal static Parsed<T> Good(T value, string text, string understood) => new(true, value, text, understood, null);
 
     internal static Parsed<T> Refused(string text, string problem) => new(false, default, text, null, problem);
