@@ -1,0 +1,67 @@
+using Microsoft.EntityFrameworkCore;
+using Microsoft.EntityFrameworkCore.Metadata;
+
+namespace BladeLog.Records.Configuration;
+
+/// <summary>
+/// CHECK constraints made from the columns' names. SQLite stores Infinity without a word, so every REAL column refuses
+/// it; a length, speed, pull or power must be above zero unless it is listed as one that may be zero.
+/// </summary>
+public static class Checks
+{
+    private static readonly HashSet<string> MayBeZero =
+    [
+        "lower_guide_m", "clearance_m", "idle_w", "crack_length_m", "angle_rad", "bevel_rad",
+    ];
+
+    private static readonly string[] AboveZero = ["_m", "_mps", "_pa", "_w", "_n", "_n_per_m", "_hrc", "_h"];
+
+    private static readonly HashSet<string> AnySign = ["rake_rad", "angle_rad", "value", "start_reading_ms", "count"];
+
+    /// <summary>Whole numbers that must be above zero.</summary>
+    private static readonly HashSet<string> WholeAboveZero = ["running_ms", "ms", "pieces", "number", "version"];
+
+    public static void Apply(IMutableModel model)
+    {
+        foreach (var entity in model.GetEntityTypes())
+        {
+            foreach (var property in entity.GetProperties())
+            {
+                var rule = Rule(property.GetColumnName(), Nullable.GetUnderlyingType(property.ClrType) ?? property.ClrType);
+                if (rule is not null)
+                {
+                    entity.AddCheckConstraint($"ck_{entity.GetTableName()}_{property.GetColumnName()}", rule);
+                }
+            }
+        }
+    }
+
+    private static string? Rule(string column, Type type)
+    {
+        var quoted = $"\"{column}\"";
+        if (type == typeof(double))
+        {
+            if (AnySign.Contains(column))
+            {
+                return $"{quoted} > -1e300 and {quoted} < 1e300";
+            }
+
+            var above = AboveZero.Any(s => column.EndsWith(s, StringComparison.Ordinal)) || column == "meter_factor";
+            return above && !MayBeZero.Contains(column)
+                ? $"{quoted} > 0 and {quoted} < 1e300"
+                : $"{quoted} >= 0 and {quoted} < 1e300";
+        }
+
+        if (type == typeof(long) || type == typeof(int))
+        {
+            if (AnySign.Contains(column) || column.EndsWith("id", StringComparison.Ordinal))
+            {
+                return null;
+            }
+
+            return WholeAboveZero.Contains(column) ? $"{quoted} > 0" : $"{quoted} >= 0";
+        }
+
+        return null;
+    }
+}

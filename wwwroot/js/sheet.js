@@ -1,0 +1,77 @@
+// Small comforts; every page works without this file.
+(() => {
+  'use strict';
+  const DOUBLE_TAP_MS = 700, DRAFT_DAYS = 3, PREFIX = 'draft:';
+
+  // A second tap within 700 ms is a bounce of the finger, not a wish.
+  document.addEventListener('submit', event => {
+    const form = event.target, now = performance.now();
+    if (form.sheetSentAt && now - form.sheetSentAt < DOUBLE_TAP_MS) {
+      event.preventDefault();
+      event.stopImmediatePropagation();
+      return;
+    }
+    form.sheetSentAt = now;
+    const button = event.submitter;
+    if (button?.classList.contains('btn')) {
+      button.classList.add('sent');
+      setTimeout(() => button.classList.remove('sent'), 8000);
+    }
+  }, true);
+
+  // Drafts: what was typed survives a locked screen and a reload. Never secrets, never hidden fields.
+  const keeps = field => field.name && !field.closest('[data-nodraft]')
+    && !['password', 'hidden', 'file', 'submit', 'button'].includes(field.type);
+  const keyOf = form => PREFIX + location.pathname + '|' + form.getAttribute('action');
+  const store = {
+    get(key) { try { return JSON.parse(localStorage.getItem(key)); } catch { return null; } },
+    set(key, value) { try { localStorage.setItem(key, JSON.stringify(value)); } catch { /* full or forbidden: no draft */ } },
+    drop(key) { try { localStorage.removeItem(key); } catch { /* forbidden: there is none */ } },
+  };
+
+  function save(form) {
+    if (form.method !== 'post' || form.closest('[data-nodraft]') || form.closest('.block')) return;
+    const values = [...form.elements].filter(keeps)
+      .map(f => ['radio', 'checkbox'].includes(f.type) ? [f.name, f.value, f.checked] : [f.name, f.value]);
+    if (values.length) store.set(keyOf(form), { at: Date.now(), values });
+  }
+
+  function restore(form) {
+    const key = keyOf(form), draft = store.get(key);
+    if (!draft) return;
+    if (Date.now() - draft.at > DRAFT_DAYS * 864e5) { store.drop(key); return; }
+    // A form that came back with errors already holds what was typed.
+    if (document.querySelector('.problems')) return;
+    for (const [name, value, checked] of draft.values) {
+      for (const field of form.elements) {
+        if (field.name !== name || !keeps(field)) continue;
+        if (checked === undefined) field.value = value;
+        else if (field.value === value) field.checked = checked;
+      }
+    }
+  }
+
+  document.addEventListener('input', event => { if (event.target.form) save(event.target.form); });
+
+  // A submitted form's draft goes once another page has come; it stays when the answer is the form with errors.
+  let sent = null;
+  document.addEventListener('submit', event => { if (event.target.method === 'post') sent = keyOf(event.target); });
+  function arrived() {
+    const asked = sent ?? sessionStorage.getItem('sent');
+    if (asked && !document.querySelector('.problems')) store.drop(asked);
+    sent = null;
+    sessionStorage.removeItem('sent');
+    for (const form of document.querySelectorAll('main form[method=post]')) restore(form);
+  }
+  addEventListener('pagehide', () => { if (sent) sessionStorage.setItem('sent', sent); });
+
+  // After a swap the focus goes to the first thing to read: the errors, else the title.
+  document.addEventListener('htmx:after:swap', () => {
+    arrived();
+    const goal = document.querySelector('[role=alert]') ?? document.querySelector('h1');
+    if (!goal || document.activeElement !== document.body) return;
+    goal.tabIndex = -1;
+    goal.focus({ preventScroll: goal.matches('h1') });
+  });
+  arrived();
+})();
