@@ -43,6 +43,7 @@ def write_facts(folder, batches, sharpenings, spells_by_saw, spells_by_tag, runs
     facts.sharpenings(book, sharpenings, batches)
     facts.breaks(book, spells_by_tag)
     facts.ends_and_joints(book, spells_by_tag)
+    facts.hangs(book, spells_by_tag, sharpenings)
     cracks = facts.holds(book, sharpenings, spells_by_tag)
     chosen = inspections.choose(spells_by_tag, sharpenings, cracks, rng)
     facts.inspections(book, chosen, cracks, rng)
@@ -60,6 +61,8 @@ def write_things(folder):
     write_lines(folder, "setups", ["ref", "day", "time", *tables.SETUP_HEADINGS], setups)
     write_csv(folder, "specs", list(spec_row(next(iter(tables.SPECS.values())))), map(spec_row, tables.SPECS.values()))
     write_csv(folder, "blades", list(blade_row(tables.BLADES["Q-01"])), map(blade_row, tables.BLADES.values()))
+    species = ["species", "key", "material_kind", "wood_class"]
+    write_csv(folder, "species", species, [dict(zip(species, s)) for s in tables.SPECIES])
     write_lines(folder, "queue", tables.QUEUE_HEADINGS, tables.QUEUE)
 
 
@@ -76,10 +79,10 @@ def spec_row(s):
 
 
 def blade_row(b):
-    first = tables.PERIODS.get(b["tag"], (-60,))[0] - 1
-    return {"tag": b["tag"], "spec": b["spec"], "parent": "Q-04" if b["tag"] == "Q-04b" else "", "hook": b["hook"],
-            "folded": b["folded"], "inspect_every": {"mount": "mount", "4": "4 h"}.get(b["inspect"], ""),
-            "stock_day": max(first, tables.FIRST_DAY)}
+    return {"tag": b["tag"], "spec": b["spec"], "parent": "Q-04" if b["tag"] == "Q-04b" else "",
+            "folded": b["folded"], "inspect_every_h": tables.INSPECT_EVERY_H if b["inspect"] in ("", "mount") else b["inspect"],
+            "inspect_each_mount": "yes" if b["inspect"] == "mount" else "no",
+            "stock_day": facts.stock_day(b["tag"])}
 
 
 if __name__ == "__main__":

@@ -217,7 +217,7 @@ def check_inspections(files, spells, shares):
 def check_counts(files, two):
     counts = {"sharpenings": 113, "inspections": 655, "tension_readings": 212, "breaks": 9, "retirements": 2, "holds": 2,
               "holds_cleared": 1, "joints": 4, "splits": 1, "batches": 14, "specs": 22, "blades": 41, "queue": 15,
-              "saws": 5, "retags": 1, "prior_use": 1, "meter_epochs": 4}
+              "saws": 5, "retags": 1, "hangs": sum(1 for b in BLADES.values() if b["hook"]), "prior_use": 1, "meter_epochs": 4}
     for name, count in counts.items():
         require(len(getattr(files, name)) == count, f"{len(getattr(files, name))} {name}, not {count}")
     require(abs(len(files.mounts) - 540) <= 10, f"{len(files.mounts)} mounts")
@@ -227,7 +227,7 @@ def check_counts(files, two):
 
 
 def check_past(files):
-    names = ("mounts", "cuts", "sharpenings", "batches", "returns", "joints", "splits", "holds", "holds_cleared", "inspections",
+    names = ("mounts", "cuts", "sharpenings", "batches", "returns", "joints", "splits", "holds", "holds_cleared", "inspections", "hangs",
              "tension_readings", "breaks", "retirements", "retags", "voids", "meter_readings", "meter_epochs", "prior_use")
     for name in names:
         for r in files._read(name):

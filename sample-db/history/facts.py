@@ -3,7 +3,7 @@
 from .book import day_time
 from .cuts import OPERATORS
 from .plan import DAY, works
-from .tables import BLADES, BROKE, OPEN_BATCH, OPEN_BATCH_TAGS, RUN_SOURCE, SAWS, SPECS, UNIT_MS
+from .tables import BLADES, BROKE, FIRST_DAY, OPEN_BATCH, OPEN_BATCH_TAGS, PERIODS, RUN_SOURCE, SAWS, SPECS, UNIT_MS
 
 # The first reading of each hour meter; Osprey's and Longreach's follow from the stories.
 OLD_HERON_FIRST = 6204.3
@@ -79,7 +79,7 @@ def _meter(book, saw, runs, rng):
     for run in runs:
         if run is new_meter:
             assert tenths == round(OSPREY_LAST_OF_OLD_METER * 10)
-            epoch = _epoch(book, saw, run.start - 8, 0, "replaced", tenths / 10)
+            epoch = _epoch(book, saw, run.start - 8, 0, "new_meter", tenths / 10)
             tenths = 0
         tenths += run.units
         who = rng.choice(OPERATORS[saw])
@@ -215,7 +215,7 @@ def breaks(book, spells_by_tag):
 
 
 def ends_and_joints(book, spells_by_tag):
-    for tag, reason, who in (("Q-38", "width", "OT"), ("Q-39", "teeth_stripped", "OT")):
+    for tag, reason, who in (("Q-38", "width_limit", "OT"), ("Q-39", "teeth_stripped", "OT")):
         at = spells_by_tag[tag][-1].off + 30
         note = "under its least width after a deep grind" if tag == "Q-38" else "nail: 40 teeth stripped"
         book.add("retirements", at, tag=tag, **day_time(at), reason=reason, cut_up="yes", note=note, who=who)
@@ -223,7 +223,7 @@ def ends_and_joints(book, spells_by_tag):
         at = (spells_by_tag[tag][0].on // DAY - 1) * DAY + 15 * 60
         _joint(book, tag, at, 1425, 1, "good", "made up from coil")
     cut_down = spells_by_tag["Q-04"][-1].off + 5 * DAY
-    book.add("splits", cut_down, parent="Q-04", child="Q-04b", **day_time(cut_down), cut_out_mm=615, who="OT")
+    book.add("splits", cut_down, parent="Q-04", child="Q-04b", **day_time(cut_down), cut_out_mm=615, width_mm=BLADES["Q-04"]["width"], who="OT")
     _joint(book, "Q-04b", cut_down + 40, 5075, 2, "doubtful", "shortened after the break at its first weld")
     at = spells_by_tag["Q-06"][0].on - DAY
     book.add("prior_use", at, tag="Q-06", **day_time(at), low_used=0.2, high_used=0.6, width_mm=22.1,
@@ -232,7 +232,7 @@ def ends_and_joints(book, spells_by_tag):
 
 def _joint(book, tag, at, loop, number, quality, note):
     book.add("joints", at, tag=tag, **day_time(at), loop_mm=loop, joint_number=number, quality=quality,
-             method="butt_welded", annealed="yes", dressed="yes", note=note, who="OT")
+             method="butt welded", annealed="yes", dressed="yes", note=note, who="OT")
 
 
 def holds(book, all_sharpenings, spells_by_tag):
@@ -242,7 +242,7 @@ def holds(book, all_sharpenings, spells_by_tag):
     found = before.off + 9
     hold = _hold(book, s.tag, found, 0.8, "found when it came off")
     cleared = s.at + 20
-    book.add("holds_cleared", cleared, hold=hold, tag=s.tag, **day_time(cleared), how="ground_out", who="OT")
+    book.add("holds_cleared", cleared, hold=hold, tag=s.tag, **day_time(cleared), how="ground out", who="OT")
     spell = spells_by_tag["Q-14"][-1]
     _hold(book, "Q-14", spell.off + 9, 2.6, "after clicking was heard")
     return {(s.tag, found - 1): 0.8, ("Q-14", spell.off + 8): 2.6}
@@ -258,12 +258,27 @@ def _hold(book, tag, at, crack, note):
     return book.add("holds", at, tag=tag, **day_time(at), kind="crack", crack_mm=crack, place="gullet", note=note, who="OT")
 
 
+def hangs(book, spells_by_tag, all_sharpenings):
+    """Where each blade was put away last."""
+    for tag, blade in BLADES.items():
+        if blade["hook"]:
+            ends = [s.off + 15 for s in spells_by_tag.get(tag, [])] + [s.at + 15 for s in all_sharpenings if s.tag == tag]
+            at = max(ends, default=stock_day(tag) * DAY + 600)
+            book.add("hangs", at, tag=tag, **day_time(at), place="rack", hook=blade["hook"], who="OT" if ends else "MI")
+
+
+def stock_day(tag):
+    if tag == "Q-24":
+        return PERIODS["Q-25"][0] - 2        # lay beside the blade it shared its label with
+    return max(PERIODS.get(tag, (-60,))[0] - 1, FIRST_DAY)
+
+
 def inspections(book, chosen, cracks, rng):
     for tag, times in chosen.items():
         for t in times:
             crack = cracks.get((tag, t))
             who = "OT" if crack else rng.choice(("OT", "JP", "RU", "JP"))
-            book.add("inspections", t, tag=tag, **day_time(t), finding="crack" if crack else "clean",
+            book.add("inspections", t, tag=tag, **day_time(t), finding="crack" if crack else "nothing_seen",
                      crack_mm=crack or "", place="gullet" if crack else "", who=who)
 
 

@@ -164,15 +164,15 @@ def _dismount(spells):
         end = spell.parts[-1].end
         if after is None and ON_SAW_NOW[spell.saw] == spell.tag:
             continue
-        spell.off, spell.reason = end + 2, "end_of_job"
+        spell.off, spell.reason = end + 2, "still_sharp"
         if spell.tag in BROKE and spell.final and spell.last:
             spell.off, spell.reason = end, "broke"
         elif spell.tag == "Q-14" and spell.final and spell.last:
-            spell.reason = "crack"
+            spell.reason = "crack_or_clicking"
         elif spell.last and not spell.final:
             spell.reason = "dull"
         elif not spell.last and after is not None and after.tag != spell.tag:
-            spell.off, spell.reason = max(end + 1, after.on - 10), "swap"
+            spell.off, spell.reason = max(end + 1, after.on - 10), "other_work"
 
 
 def runs_of(saw, spells):
@@ -198,7 +198,7 @@ def _read_once(part, after, shared):
         return part.spell.reason == "broke"
     near = after.start - part.end < 60
     plain = not (part.spell.final or after.spell.final or part.spell.tag == after.spell.tag)
-    return near and plain and shared < 2 and part.spell.saw in ("S1", "S2", "S3") and part.spell.reason == "swap"
+    return near and plain and shared < 2 and part.spell.saw in ("S1", "S2", "S3") and part.spell.reason == "other_work"
 
 
 def set_sharpening_times(sharpenings, spells_by_tag, batches):

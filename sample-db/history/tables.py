@@ -2,12 +2,11 @@
 
 FIRST_DAY = -548
 UNIT_MS = 360_000          # a tenth of an hour, the last figure of an hour meter
-INSPECT_EVERY_H = 8.0      # the shop's own rule, unless the blade says otherwise
+INSPECT_EVERY_H = 8        # the shop's own rule, unless the blade has another
 
 SHOP = [
     ("name", "Quillmere Joinery & Boat Shed"), ("zone", "UTC"), ("units", "metric"), ("spelling", "uk"),
     ("currency_digits", "2"), ("shop_rate_minor_per_h", "4800"), ("timber_value_minor_per_m3", "80000"),
-    ("retire_mark", "0.80"), ("weld_limit", "2"), ("inspect_every_h", "8"),
 ]
 
 # initials, name, may clear holds, may sharpen, may weld
@@ -28,11 +27,11 @@ SETUP_HEADINGS = (
     "feeder_max_m_min,change_min,break_cost_minor,tilt_deg,meter_factor"
 ).split(",")
 SETUPS = [
-    "S1,900|900,2,20.7,5690,30,30,10,50,60,10,500,12000,beam|board,no,6600,sprung,5.5,0.10,400,8,12,7500,40,1",
-    "S2,700|700,2,23.5,5080,25,25,6,50,50,10,450,3600,board|resaw,no,5200,sprung,5.5,0.10,250,8,8,7500,0,1",
-    "S3,356|356,2,15.2|7.6,2667,12,12,3,19,40,8,300,2000,board|resaw,supervised,800,sprung,1.1,0.10,,,6,4000,0,1",
-    "S4,205|205|205,3,12.0,1425,8,8,3,10,35,6,100,1000,board,yes,280,sprung,0.4,0.10,,,5,3000,0,1",
-    "S5,489|489,2,25.0,4013,20,20,24,38,40,40,620,6000,beam|log,no,4200,sprung,18.0,0.10,500,20,4,5500,0,1",
+    "S1,900|900,2,20.7,5690,30,30,10,50,60,10,500,12000,beam|board,no,6600,sprung,5.5,,400,8,12,7500,40,1",
+    "S2,700|700,2,23.5,5080,25,25,6,50,50,10,450,3600,board|resaw,no,5200,sprung,5.5,,250,8,8,7500,0,1",
+    "S3,356|356,2,15.2|7.6,2667,12,12,3,19,40,8,300,2000,board|resaw,supervised,800,sprung,1.1,,,,6,4000,0,1",
+    "S4,205|205|205,3,12.0,1425,8,8,3,10,35,6,100,1000,board,yes,280,sprung,0.4,,,,5,3000,0,1",
+    "S5,489|489,2,25.0,4013,20,20,24,38,40,40,620,6000,beam|log,no,4200,sprung,18.0,,500,20,4,5500,0,1",
 ]
 # code: name, hour meter, usual speed m/s, loop mm, reference feed m/min
 SAWS = {
@@ -133,26 +132,37 @@ BROKE = ("Q-04", "Q-22", "Q-23", "Q-26", "Q-27", "Q-28", "Q-29", "Q-36", "Q-37")
 OPEN_BATCH = "B-031"
 OPEN_BATCH_TAGS = ("Q-07", "Q-10", "Q-33", "Q-34", "Q-35")
 
+# what the shop calls it, key and wear class of the handbook's table
+SPECIES = [
+    ("European oak", "european_oak", "wood", "A3"), ("European larch", "european_larch", "wood", "A2"),
+    ("Scots pine", "scots_pine", "wood", "A1"), ("sugar maple", "sugar_maple", "wood", "A3"),
+    ("Douglas-fir (coast)", "douglas_fir", "wood", "A2"), ("Norway spruce", "norway_spruce", "wood", "A1"),
+    ("European ash", "european_ash", "wood", "A3"), ("black walnut", "black_walnut", "wood", "A2"),
+    ("black cherry", "black_cherry", "wood", "A2"), ("yellow-poplar", "yellow_poplar", "wood", "A1"),
+    ("Indian rosewood", "indian_rosewood", "wood", "A4"), ("birch plywood", "birch_plywood", "panel", "P"),
+    ("aluminium", "aluminium", "other", ""),
+]
+
 QUEUE_HEADINGS = (
     "number,job,material_kind,species,height_mm,length_mm,pieces,tightest_radius_mm,bevel_deg,moisture_pct,"
-    "frozen,dirt,direction,kind,finish,nail_chance,timber_value_minor_per_m3,class_work,order,due_day"
+    "frozen,dirt,direction,kind,finish,nail_chance,timber_value_minor_per_m3,class_work,order,added_day,due_day"
 ).split(",")
 QUEUE = [
-    "1,chair back legs,wood,European oak,45,800,12,90,0,10,no,clean,rip,board,medium,0,,no,1,2",
-    "2,drawer-front resaw,wood,black cherry,200,1200,6,,0,9,no,clean,rip,resaw,medium,0,250000,no,2,2",
-    "3,guitar backs,wood,Indian rosewood,190,560,10,,0,8,no,clean,rip,resaw,medium,0,9000000,no,3,5",
-    "4,soundboards,wood,Norway spruce,220,600,8,,0,8,no,clean,rip,resaw,medium,0,1500000,no,4,5",
-    "5,\"dinghy frames, rolling bevel to 22 deg\",wood,European oak,50,1400,14,400,22,18,no,clean,rip,board,rough,0,,no,5,7",
-    "6,larch planking,wood,European larch,28,4500,18,3000,0,16,no,clean,rip,board,medium,0,,no,6,7",
-    "7,beam resaw,wood,Douglas-fir (coast),300,3000,4,,0,18,no,clean,rip,beam,medium,0,,no,7,3",
-    "8,plywood brackets,panel,birch plywood,12,300,60,20,0,9,no,clean,rip,board,fine,0,,no,8,9",
-    "9,puzzle boxes,wood,sugar maple,6,400,40,5,0,8,no,clean,rip,board,fine,0,,no,9,12",
-    "10,\"bowl blanks, green\",wood,black walnut,100,900,8,140,0,60,no,clean,rip,board,rough,0,,no,10,1",
-    "11,slabs,wood,European ash,320,2600,9,,0,45,no,bark_on,rip,log,rough,0,,no,11,4",
-    "12,\"reclaimed beam, nail risk\",wood,Scots pine,180,3200,5,,0,14,no,reclaimed,rip,beam,rough,0.3,,no,12,6",
-    "13,aluminium angle,other,aluminium,3,500,6,,0,0,no,clean,rip,board,rough,0,,no,13,6",
-    "14,face veneers 4 mm,wood,sugar maple,160,900,9,,0,8,no,clean,rip,resaw,medium,0,300000,no,14,8",
-    "15,scroll corbels (class),wood,yellow-poplar,19,400,20,12,0,9,no,clean,rip,board,medium,0,,yes,15,3",
+    "1,chair back legs,wood,European oak,45,800,12,90,0,10,no,clean,rip,board,medium,0,,no,1,-2,2",
+    "2,drawer-front resaw,wood,black cherry,200,1200,6,,0,9,no,clean,rip,resaw,medium,0,250000,no,2,-2,2",
+    "3,guitar backs,wood,Indian rosewood,190,560,10,,0,8,no,clean,rip,resaw,medium,0,9000000,no,3,-2,5",
+    "4,soundboards,wood,Norway spruce,220,600,8,,0,8,no,clean,rip,resaw,medium,0,1500000,no,4,-2,5",
+    "5,\"dinghy frames, rolling bevel to 22 deg\",wood,European oak,50,1400,14,400,22,18,no,clean,rip,board,rough,0,,no,5,-2,7",
+    "6,larch planking,wood,European larch,28,4500,18,3000,0,16,no,clean,rip,board,medium,0,,no,6,-2,7",
+    "7,beam resaw,wood,Douglas-fir (coast),300,3000,4,,0,18,no,clean,rip,beam,medium,0,,no,7,-2,3",
+    "8,plywood brackets,panel,birch plywood,12,300,60,20,0,9,no,clean,rip,board,fine,0,,no,8,-2,9",
+    "9,puzzle boxes,wood,sugar maple,6,400,40,5,0,8,no,clean,rip,board,fine,0,,no,9,-2,12",
+    "10,\"bowl blanks, green\",wood,black walnut,100,900,8,140,0,60,no,clean,rip,board,rough,0,,no,10,-2,1",
+    "11,slabs,wood,European ash,320,2600,9,,0,45,no,bark_on,rip,log,rough,0,,no,11,-2,4",
+    "12,\"reclaimed beam, nail risk\",wood,Scots pine,180,3200,5,,0,14,no,reclaimed,rip,beam,rough,0.3,,no,12,-2,6",
+    "13,aluminium angle,other,aluminium,3,500,6,,0,0,no,clean,rip,board,rough,0,,no,13,-2,6",
+    "14,face veneers 4 mm,wood,sugar maple,160,900,9,,0,8,no,clean,rip,resaw,medium,0,300000,no,14,-2,8",
+    "15,scroll corbels (class),wood,yellow-poplar,19,400,20,12,0,9,no,clean,rip,board,medium,0,,yes,15,-2,3",
 ]
 
 
