@@ -53,11 +53,11 @@ def write_facts(folder, batches, sharpenings, spells_by_saw, spells_by_tag, runs
 
 def write_things(folder):
     write_csv(folder, "shop", ["key", "value"], [{"key": k, "value": v} for k, v in tables.SHOP])
-    people = ["initials", "name", "may_clear_holds", "may_sharpen", "may_weld"]
-    write_csv(folder, "people", people, [dict(zip(people, p)) for p in tables.PEOPLE])
+    people = ["initials", "name", "may_clear_holds", "may_sharpen", "may_weld", "since_day"]
+    write_csv(folder, "people", people, [dict(zip(people, (*p, tables.FIRST_DAY))) for p in tables.PEOPLE])
     write_csv(folder, "saws", ["code", "name", "has_hour_meter"],
               [{"code": c, "name": s[0], "has_hour_meter": "yes" if s[1] else "no"} for c, s in tables.SAWS.items()])
-    setups = [f"u-{n:02d},{tables.FIRST_DAY},00:00,{line}" for n, line in enumerate(tables.SETUPS, 1)]
+    setups = [f"f-{n:02d},{tables.FIRST_DAY},00:00,{line}" for n, line in enumerate(tables.SETUPS, 1)]
     write_lines(folder, "setups", ["ref", "day", "time", *tables.SETUP_HEADINGS], setups)
     write_csv(folder, "specs", list(spec_row(next(iter(tables.SPECS.values())))), map(spec_row, tables.SPECS.values()))
     write_csv(folder, "blades", list(blade_row(tables.BLADES["Q-01"])), map(blade_row, tables.BLADES.values()))

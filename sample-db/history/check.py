@@ -48,6 +48,7 @@ def check(folder):
     check_cuts(files, spells)
     check_paths(files)
     check_sharpenings(files, spells)
+    check_loops(files)
     check_away_and_held(files, spells)
     check_inspections(files, spells, shares)
     check_counts(files, two)
@@ -179,6 +180,17 @@ def check_sharpenings(files, spells):
         require(len(own) == b["grinds"], f"{tag} has {len(own)} sharpenings, not {b['grinds']}")
         widths = [b["width_new"]] + [float(s["width_mm"]) for s in own]
         require(widths == sorted(widths, reverse=True) and widths[-1] == b["width"], f"{tag}: widths {widths}")
+
+
+def check_loops(files):
+    """Every blade that ran is as long as its saw takes, by its own joint or as its specification comes."""
+    joints = {j["tag"]: int(j["loop_mm"]) for j in files.joints}
+    setups = {u["saw"]: u for u in files.setups}
+    for m in files.mounts:
+        loop = joints.get(m["tag"], SPECS[BLADES[m["tag"]]["spec"]]["loop"])
+        u = setups[m["saw"]]
+        off = loop - int(u["loop_mm"])
+        require(-int(u["takeup_low_mm"]) <= off <= int(u["takeup_high_mm"]), f"{m['ref']}: {loop} mm does not fit {m['saw']}")
 
 
 def off_saw(spells, tag, start, end):

@@ -219,9 +219,9 @@ def ends_and_joints(book, spells_by_tag):
         at = spells_by_tag[tag][-1].off + 30
         note = "under its least width after a deep grind" if tag == "Q-38" else "nail: 40 teeth stripped"
         book.add("retirements", at, tag=tag, **day_time(at), reason=reason, cut_up="yes", note=note, who=who)
-    for tag in ("Q-27", "Q-28", "Q-29"):
+    for tag in ("Q-14", "Q-28", "Q-29"):     # Q-14 is of a specification that otherwise comes in Old Heron's length
         at = (spells_by_tag[tag][0].on // DAY - 1) * DAY + 15 * 60
-        _joint(book, tag, at, 1425, 1, "good", "made up from coil")
+        _joint(book, tag, at, SAWS[BLADES[tag]["saw"]][3], 1, "good", "made up from coil")
     cut_down = spells_by_tag["Q-04"][-1].off + 5 * DAY
     book.add("splits", cut_down, parent="Q-04", child="Q-04b", **day_time(cut_down), cut_out_mm=615, width_mm=BLADES["Q-04"]["width"], who="OT")
     _joint(book, "Q-04b", cut_down + 40, 5075, 2, "doubtful", "shortened after the break at its first weld")

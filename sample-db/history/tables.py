@@ -5,7 +5,7 @@ UNIT_MS = 360_000          # a tenth of an hour, the last figure of an hour mete
 INSPECT_EVERY_H = 8        # the shop's own rule, unless the blade has another
 
 SHOP = [
-    ("name", "Quillmere Joinery & Boat Shed"), ("zone", "UTC"), ("units", "metric"), ("spelling", "uk"),
+    ("name", "Quillmere Joinery & Boat Shed"), ("zone", "UTC"), ("lengths", "millimetre"), ("spelling", "uk"), ("pull_word", "tension"),
     ("currency_digits", "2"), ("shop_rate_minor_per_h", "4800"), ("timber_value_minor_per_m3", "80000"),
 ]
 
