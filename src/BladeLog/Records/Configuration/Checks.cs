@@ -21,6 +21,13 @@ public static class Checks
     /// <summary>Whole numbers that must be above zero.</summary>
     private static readonly HashSet<string> WholeAboveZero = ["running_ms", "ms", "pieces", "number", "version"];
 
+    /// <summary>The tables that carry such constraints, to read a constraint's name again.</summary>
+    internal static IReadOnlyCollection<string> Tables { get; } =
+        [.. typeof(ShopDb).Assembly.GetTypes().Where(t => t.Namespace == typeof(ShopDb).Namespace && t is { IsClass: true, IsAbstract: false }).Select(Naming.Table)];
+
+    internal static bool MayBeZeroOrLess(string column) =>
+        MayBeZero.Contains(column) || AnySign.Contains(column) || !(IsAboveZero(column) || WholeAboveZero.Contains(column));
+
     public static void Apply(IMutableModel model)
     {
         foreach (var entity in model.GetEntityTypes())
@@ -46,8 +53,7 @@ public static class Checks
                 return $"{quoted} > -1e300 and {quoted} < 1e300";
             }
 
-            var above = AboveZero.Any(s => column.EndsWith(s, StringComparison.Ordinal)) || column == "meter_factor";
-            return above && !MayBeZero.Contains(column)
+            return IsAboveZero(column)
                 ? $"{quoted} > 0 and {quoted} < 1e300"
                 : $"{quoted} >= 0 and {quoted} < 1e300";
         }
@@ -64,4 +70,7 @@ public static class Checks
 
         return null;
     }
+
+    private static bool IsAboveZero(string column) =>
+        !MayBeZero.Contains(column) && (column == "meter_factor" || AboveZero.Any(s => column.EndsWith(s, StringComparison.Ordinal)));
 }

@@ -1,3 +1,4 @@
+using System.Text.Json.Serialization;
 using BladeLog.Handbook.Quantities;
 
 namespace BladeLog.Records;
@@ -91,6 +92,7 @@ public sealed class SawSetup : Fact
 
     public List<SetupSpeed> Speeds { get; } = [];
 
+    [JsonIgnore]
     public double UsualSpeedMps => (Speeds.FirstOrDefault(s => s.Usual) ?? Speeds[0]).SpeedMps;
 }
 

@@ -7,7 +7,8 @@ public static class BladeFold
     {
         var now = new BladeNow { BladeId = start.BladeId, Place = Place.Rack, WidthM = start.WidthM, LoopM = start.NewLoopM };
         var spot = Place.Rack;
-        var gone = false;
+        // A blade cut from another is there only while that cut stands.
+        var gone = start.CutFromAnother;
         var mounted = new Dictionary<int, int>();
         var held = new List<int>();
         foreach (var e in InOrder(events))
@@ -32,8 +33,12 @@ public static class BladeFold
                     spot = e.Place;
                     now.WidthM = e.Number ?? now.WidthM;
                     break;
-                case BladeEventKind.Sharpened or BladeEventKind.PriorUse or BladeEventKind.CutFromParent:
+                case BladeEventKind.Sharpened or BladeEventKind.PriorUse:
                     now.WidthM = e.Number ?? now.WidthM;
+                    break;
+                case BladeEventKind.CutFromParent:
+                    now.WidthM = e.Number ?? now.WidthM;
+                    gone = false;
                     break;
                 case BladeEventKind.Joined:
                     (now.LoopM, now.JointId) = (e.Number, e.Id);

@@ -79,6 +79,6 @@ public static class FactReader
     {
         var things = db.Blades.AsNoTracking();
         things = blades is null ? things : things.Where(b => blades.Contains(b.Id));
-        return await things.Select(b => new BladeStart(b.Id, b.Spec.WidthM, b.ParentId == null ? b.Spec.NewLoopM : null)).ToListAsync();
+        return await things.Select(b => new BladeStart(b.Id, b.Spec.WidthM, b.ParentId == null ? b.Spec.NewLoopM : null, b.ParentId != null)).ToListAsync();
     }
 }

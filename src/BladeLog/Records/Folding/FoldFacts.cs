@@ -47,4 +47,4 @@ public readonly record struct BladeEvent(
     int BladeId, DateTime At, int Id, BladeEventKind Kind, int Reference = 0, double? Number = null, string? Hook = null, Place Place = Place.Rack);
 
 /// <summary>The blade as a thing: what the fold starts from.</summary>
-public readonly record struct BladeStart(int BladeId, double WidthM, double? NewLoopM);
+public readonly record struct BladeStart(int BladeId, double WidthM, double? NewLoopM, bool CutFromAnother = false);

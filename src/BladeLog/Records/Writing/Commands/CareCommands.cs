@@ -1,0 +1,112 @@
+namespace BladeLog.Records.Writing;
+
+public sealed record RecordSharpening(string Tag, GrindKind Kind) : Command
+{
+    public bool SetAgain { get; init; }
+
+    public double? WidthM { get; init; }
+
+    public string? WidthTyped { get; init; }
+
+    public double? GulletM { get; init; }
+
+    public double? KerfM { get; init; }
+
+    public double? EdgeAfterM { get; init; }
+
+    public long? PriceMinor { get; init; }
+
+    public DateTime? At { get; init; }
+
+    /// <summary>One more tap: wider than last time, and meant.</summary>
+    public bool WiderMeant { get; init; }
+}
+
+public sealed record SendBatch(string Number, string Service, IReadOnlyList<string> Tags, DateTime? PromisedUtc = null, DateTime? At = null) : Command;
+
+/// <summary>What came back from the sharpener; what is not named stays away.</summary>
+public sealed record TakeBack(string Number, IReadOnlyList<BackLine> Lines, DateTime? At = null) : Command;
+
+/// <summary>One blade come back. A rejected one may be retired in the same breath.</summary>
+public sealed record BackLine(string Tag, ReturnOutcome Outcome)
+{
+    public double? WidthM { get; init; }
+
+    public GrindKind Kind { get; init; }
+
+    public bool SetAgain { get; init; }
+
+    public double? GulletM { get; init; }
+
+    public double? KerfM { get; init; }
+
+    public double? EdgeAfterM { get; init; }
+
+    public long? PriceMinor { get; init; }
+
+    public bool Retire { get; init; }
+}
+
+public sealed record RecordHold(string Tag, HoldKind Kind) : Command
+{
+    public double? CrackLengthM { get; init; }
+
+    public string? CrackTyped { get; init; }
+
+    public CrackPlace? Place { get; init; }
+
+    public string? Note { get; init; }
+
+    public DateTime? At { get; init; }
+}
+
+/// <summary>Only by a person who may clear holds.</summary>
+public sealed record ClearHold(string Tag, string How, DateTime? At = null) : Command;
+
+/// <summary>A crack found puts the blade on hold in the same group.</summary>
+public sealed record RecordInspection(string Tag, Found Found) : Command
+{
+    public double? CrackLengthM { get; init; }
+
+    public string? CrackTyped { get; init; }
+
+    public CrackPlace? Place { get; init; }
+
+    public string? Note { get; init; }
+
+    public DateTime? At { get; init; }
+}
+
+public sealed record RecordBreak(string Tag, BreakSite Site) : Command
+{
+    /// <summary>Null: the same as the latest.</summary>
+    public DateTime? EarliestUtc { get; init; }
+
+    /// <summary>Null: now.</summary>
+    public DateTime? LatestUtc { get; init; }
+
+    public double? HoursLow { get; init; }
+
+    public double? HoursHigh { get; init; }
+
+    public double? MinutesLost { get; init; }
+
+    public long? CostMinor { get; init; }
+
+    public string? Note { get; init; }
+}
+
+public sealed record RecordRetirement(string Tag, RetireReason Reason) : Command
+{
+    public bool CutUp { get; init; }
+
+    public string? Note { get; init; }
+
+    public DateTime? At { get; init; }
+
+    /// <summary>One more tap: it is on a saw, and comes off with this.</summary>
+    public bool TakeOff { get; init; }
+}
+
+/// <summary>Strikes an entry out, with what stands or falls with it.</summary>
+public sealed record VoidEntry(int EntryId, string Reason) : Command;

@@ -1,0 +1,82 @@
+using Microsoft.EntityFrameworkCore;
+
+namespace BladeLog.Records.Writing;
+
+internal static class TakeBackHandler
+{
+    public static async Task Handle(WriteSession w, TakeBack c)
+    {
+        var at = w.At(c.At);
+        var number = c.Number.Trim();
+        var batch = await w.Db.Batches.AsNoTracking().Include(b => b.Entry).SingleOrDefaultAsync(b => b.Number == number);
+        w.RefuseUnless(batch is not null, nameof(c.Number), $"There is no batch {number}.");
+        w.RefuseUnless(c.Lines.Count > 0, nameof(c.Lines), "Say which blades came back.");
+        if (batch is null || !w.Stands)
+        {
+            return;
+        }
+
+        w.RefuseUnless(at >= batch.Entry.AtUtc, nameof(c.At), $"Batch {number} was sent on {w.Say(batch.Entry.AtUtc)}, after this.");
+        var lines = await w.Db.BatchLines.AsNoTracking().Where(l => l.BatchId == batch.EntryId).ToListAsync();
+        var back = await w.Db.BatchReturns.AsNoTracking().Where(r => r.Line.BatchId == batch.EntryId).Select(r => r.LineId).ToListAsync();
+        var seen = new HashSet<int>();
+        for (var i = 0; i < c.Lines.Count; i++)
+        {
+            if (await w.FindBlade(c.Lines[i].Tag, $"Lines[{i}].Tag") is { } blade)
+            {
+                await One(w, c.Lines[i], blade, lines.Find(l => l.BladeId == blade.Id), back, batch, at, $"Lines[{i}].", seen);
+            }
+        }
+
+        w.AnswerPath = "/bench";
+    }
+
+    private static async Task One(
+        WriteSession w, BackLine c, Blade blade, BatchLine? line, List<int> back, Batch batch, DateTime at, string field, HashSet<int> seen)
+    {
+        if (line is null)
+        {
+            w.Refuse($"{field}Tag", $"{blade.Tag} was not in batch {batch.Number}: it is a stranger in the bundle.");
+            return;
+        }
+
+        if (back.Contains(line.EntryId) || !seen.Add(blade.Id))
+        {
+            w.Refuse($"{field}Tag", $"{blade.Tag} is back from batch {batch.Number} already.");
+            return;
+        }
+
+        var now = await w.NowOf(blade);
+        RecordSharpeningHandler.Check(w, blade, now, c.WidthM, c.GulletM, c.KerfM, field);
+        if (!w.Stands)
+        {
+            return;
+        }
+
+        w.Add(new BatchReturn { LineId = line.EntryId, Outcome = c.Outcome, WidthM = c.WidthM }, at);
+        if (c.Outcome == ReturnOutcome.Sharpened)
+        {
+            w.Add(
+                new Sharpening
+                {
+                    BladeId = blade.Id,
+                    Kind = c.Kind,
+                    SetAgain = c.SetAgain,
+                    WidthM = c.WidthM,
+                    GulletM = c.GulletM,
+                    KerfM = c.KerfM,
+                    EdgeAfterM = c.EdgeAfterM,
+                    PriceMinor = c.PriceMinor,
+                    BatchId = batch.EntryId,
+                },
+                at);
+        }
+
+        if (c.Retire || c.Outcome == ReturnOutcome.Lost)
+        {
+            w.Add(new Retirement { BladeId = blade.Id, Reason = c.Outcome == ReturnOutcome.Lost ? RetireReason.Lost : RetireReason.Rejected }, at);
+        }
+
+        w.Touched.Blades.Add(blade.Id);
+    }
+}
