@@ -102,4 +102,23 @@ public sealed class WholeShopTests(DemoShopFixture shop) : IClassFixture<DemoSho
         Choice c = shop.Advice.Try(shop.Advice.For(shop.Cut(2)).Work, advice, shop.Saw("S2"));
         Assert.Equal((BladeState.Look, Verdict.WithCare, "inspection overdue"), (advice.State, c.Verdict, c.Reason.Sentence));
     }
+
+    [Fact]
+    public void A_watched_blade_is_looked_at_before_it_goes_on_again_but_not_while_it_is_on()
+    {
+        BladeFile onSaw = shop.Blade("Q-32") with { MountedSinceInspection = true, LastInspectedUtc = DemoShopFixture.Today.AddDays(-2) };
+        BladeAdvice on = shop.Advice.On(onSaw, shop.Saw("S5")), off = shop.Advice.On(onSaw with { Place = Place.Rack, SawId = null }, shop.Saw("S5"));
+        CutWork beam = shop.Advice.For(shop.Cut(12)).Work;
+        Assert.Equal(Verdict.Fits, shop.Advice.Try(beam, on, shop.Saw("S5")).Verdict);
+        Choice again = shop.Advice.Try(beam, off, shop.Saw("S5"));
+        Assert.Equal((Verdict.WithCare, "inspect it before it goes on"), (again.Verdict, again.Reason.Sentence));
+    }
+
+    [Fact]
+    public void A_kerf_narrower_than_the_body_is_refused_in_words()
+    {
+        BladeFile slip = shop.Blade("Q-08") with { KerfM = 0.5e-3 };
+        Choice c = shop.Advice.Try(shop.Advice.For(shop.Cut(2)).Work, shop.Advice.On(slip, shop.Saw("S2")), shop.Saw("S2"));
+        Assert.Equal("its kerf is entered narrower than its body: measure both", c.Reason.Sentence);
+    }
 }
