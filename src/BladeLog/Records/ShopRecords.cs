@@ -10,6 +10,7 @@ public static class ShopRecords
         services.AddSingleton(file);
         services.AddPooledDbContextFactory<ShopDb>(file.Configure);
         services.AddScoped(s => s.GetRequiredService<IDbContextFactory<ShopDb>>().CreateDbContext());
+        services.AddSingleton<Writing.ShopWriter>();
         return services;
     }
 }

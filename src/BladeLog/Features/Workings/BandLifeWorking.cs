@@ -70,8 +70,11 @@ internal sealed record BandLifeOut(
 
 internal static class BandLifeWorking
 {
-    public static readonly IReadOnlyList<string> Sources =
-        ["derived", "astm-e140", "dowling-2009", "roessle-fatemi-2000", "shigley", "haibach", "engineering-default"];
+    private static readonly string[] Always =
+    [
+        "derived", "mote-1965", "astm-e140", "dowling-book", "roessle-fatemi-2000", "noll-lipson-1946", "dowling-2009", "haibach", "miner-1945",
+        "engineering-default",
+    ];
 
     public static BandLifeOut? Answer(BandLifeIn body, BodyReader reader)
     {
@@ -118,8 +121,19 @@ internal static class BandLifeWorking
             Site(life.Weld),
             new BladeOut(life.MedianBends, life.MedianHours, life.TenthPercentileBends),
             life.Verdict,
-            Sources,
-            ["A planning figure. Look at the blade before use; it cannot see cracks, burns or a bad weld."]);
+            [.. Always, .. body.Width is null ? (string[])[] : ["ashwell-1950"], .. body.CutValley is null ? (string[])[] : ["astm-e1049"]],
+            Cautions(life));
+    }
+
+    private static List<string> Cautions(BandLifeResult life)
+    {
+        List<string> said = ["A planning figure. Look at the blade before use; it cannot see cracks, burns or a bad weld."];
+        if (life.TakesSet)
+        {
+            said.Add("This band takes a set on the wheel: tension and bending together pass what the body springs back from.");
+        }
+
+        return said;
     }
 
     private static SiteOut Site(SiteLife site) =>

@@ -17,7 +17,11 @@ public sealed record ShopNow(
 }
 
 /// <summary>A saw with the setup in force and what is on it.</summary>
-public sealed record SawNow(Saw Saw, SawSetup Setup, int? MountedBladeId, DateTime? MountedSince, long RunningMs, long NoBladeKnownMs);
+public sealed record SawNow(Saw Saw, SawSetup Setup, int? MountedBladeId, DateTime? MountedSince, long RunningMs, long NoBladeKnownMs)
+{
+    /// <summary>The tension is let off.</summary>
+    public bool Slack { get; init; }
+}
 
 /// <summary>
 /// Hours on one saw at one speed and tension. The tension is that of the spell where it was measured; null asks the
