@@ -17,6 +17,7 @@ internal static class Registration
     public static void MapFeatures(this WebApplication app)
     {
         StartPages.Map(app);
+        CutsPages.Map(app);
 
         var api = app.MapGroup("/api/v1").DisableAntiforgery();
         WorkingsJson.Map(api);
