@@ -1,3 +1,4 @@
+using BladeLog.Features.Saws;
 using BladeLog.Features.Start;
 using BladeLog.Features.Workings;
 
@@ -14,6 +15,7 @@ internal static class Registration
     public static void MapFeatures(this WebApplication app)
     {
         StartPages.Map(app);
+        SawForms.Map(app);
         WorkingsJson.Map(app.MapGroup("/api/v1"));
     }
 }
