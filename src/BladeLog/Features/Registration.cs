@@ -18,6 +18,7 @@ internal static class Registration
     {
         StartPages.Map(app);
         CutsPages.Map(app);
+        SawForms.Map(app);
 
         var api = app.MapGroup("/api/v1").DisableAntiforgery();
         WorkingsJson.Map(api);
