@@ -1,3 +1,5 @@
+using BladeLog.Features.Floor;
+using BladeLog.Features.Rack;
 using BladeLog.Features.Start;
 using BladeLog.Features.Workings;
 
@@ -14,6 +16,8 @@ internal static class Registration
     public static void MapFeatures(this WebApplication app)
     {
         StartPages.Map(app);
+        FloorPages.Map(app);
+        RackPages.Map(app);
         WorkingsJson.Map(app.MapGroup("/api/v1"));
     }
 }
