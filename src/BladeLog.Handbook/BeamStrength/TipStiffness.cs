@@ -117,7 +117,7 @@ public static class TipStiffness
     }
 
     /// <summary>Movement at x per unit of force there of a simply held beam under a pull.</summary>
-    private static double Tie(double EI, double pull, double x, double S)
+    internal static double Tie(double EI, double pull, double x, double S)
     {
         double kappa = Math.Sqrt(pull / EI);
         return ((x * (S - x) / S) - (SinhSinhOverSinh(kappa * x, kappa * (S - x), kappa * S) / kappa)) / pull;

@@ -44,6 +44,18 @@ public sealed record BandCase
     /// <summary>How far the push of the wood lowers the gullet's stress once in each turn of the loop; held to the running tension. Left out: no such valley.</summary>
     public Stress? CutValley { get; init; }
 
+    /// <summary>
+    /// How far the tension of the span that leads onto each wheel lies over the running tension (under it: below zero), in the order of the wheels;
+    /// the wood is cut in the span that leads onto the first. Left out: all spans alike.
+    /// </summary>
+    public IReadOnlyList<Stress>? SpanOffsets { get; init; }
+
+    /// <summary>The pull along the edges at each place where tilted guides twist the band, on the way in and out of the cut. Each adds a cycle of the gullet to a turn of the loop.</summary>
+    public IReadOnlyList<Stress> TwistPulls { get; init; } = [];
+
+    /// <summary>The gullet's pitch and radius, where known: the two gullet factors then come from them. Left out: the factors above.</summary>
+    public KnownGullet? Gullet { get; init; }
+
     /// <summary>The elastic constants and the density.</summary>
     public Steel Steel { get; init; } = Steel.Carbon;
 
@@ -56,6 +68,11 @@ public sealed record BandCase
     /// <summary>Rust in the gullets.</summary>
     public bool Rusty { get; init; }
 }
+
+/// <summary>A gullet whose shape was measured.</summary>
+/// <param name="Pitch">Tooth to tooth.</param>
+/// <param name="Radius">Radius at the bottom of the gullet, 0.06 to 0.29 of the pitch.</param>
+public sealed record KnownGullet(Length Pitch, Length Radius);
 
 /// <summary>The ladder by the blade's median bends.</summary>
 public enum LifeVerdict
@@ -78,7 +95,11 @@ public enum LifeVerdict
 /// <param name="MedianBends">Bends by which half have broken: wheels times turns of the loop.</param>
 /// <param name="MedianHours">The same in hours of running.</param>
 /// <param name="DamagePerHour">The share of the median life an hour of running uses.</param>
-public sealed record SiteLife(IReadOnlyList<Stress> EquivalentAmplitude, double MedianBends, double MedianHours, double DamagePerHour);
+public sealed record SiteLife(IReadOnlyList<Stress> EquivalentAmplitude, double MedianBends, double MedianHours, double DamagePerHour)
+{
+    /// <summary>The fully reversed amplitude of the cycles that come beside the wheels' bends, from twist and unequal spans; their damage is in the life.</summary>
+    public IReadOnlyList<Stress> Beside { get; init; } = [];
+}
 
 /// <summary>The life of a band on a saw.</summary>
 /// <param name="Bending">Bending stress on each wheel.</param>

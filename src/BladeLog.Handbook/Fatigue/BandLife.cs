@@ -9,22 +9,21 @@ public static class BandLife
     /// <summary>Searle's number above which the middle of the width is stiffer than a beam by enough to count.</summary>
     private const double WideBand = 15;
 
-    /// <summary>Yield point as a share of tensile strength: an engineering default.</summary>
-    private const double YieldShare = 0.9;
-
     /// <summary>The life of a band on a saw.</summary>
     /// <remarks>
     /// Each wheel bends every point of the band once in a turn of the loop, to the same side: at a site with factors K_ft and K_fb the stress goes
     /// from K_ft σ_T to σ_max = K_ft σ_T + K_fb σ_b and back, so σ_a = K_fb σ_b/2.
     /// σ_ar = min(σ_max, S_y)^(1−γ) σ_a^γ, S_y = 0.9 S_u, then N(σ_ar), and N = n / Σ 1/N_i over the n wheels. At the weld both factors are 1/k_w, the
     /// hardness is 40 HRC at most, and σ_b is multiplied by φ where the body width is known and b²/(R t) is over 15. A cut valley takes
-    /// K_ft times its depth off one trough of the gullet's history, which is then counted by rainflow: the greatest bend gets the larger range.
+    /// K_ft times its depth off one trough of the gullet's history, unequal spans lift or lower theirs, a twist adds K_ft times its pull; the turn is then
+    /// counted by rainflow (the greatest bend gets the largest range), and N = n / Σ 1/N_i over all its cycles. A known gullet gives K_ft and K_fb.
     /// Meant for 10⁴ to 10⁹ bends. Where σ_T + σ_b reaches S_y the band takes a set: computed all the same and said in <see cref="BandLifeResult.TakesSet"/>.
     /// </remarks>
     /// <source key="dowling-2009" where="Walker equation and its exponent"/>
     /// <source key="roessle-fatemi-2000" where="stress-life line from hardness"/>
     /// <source key="haibach" where="slope 2k − 1 beyond the knee"/>
     /// <source key="miner-1945" where="damage summed over unequal wheels; from memory"/>
+    /// <source key="astm-e1049" where="section 5.4.5, turn of the loop with a cut valley, unequal spans or twist"/>
     public static BandLifeResult Of(BandCase c)
     {
         ArgumentNullException.ThrowIfNull(c);
@@ -36,14 +35,12 @@ public static class BandLife
         double bendsPerHour = LoopCycles.BendsPerHour(n, c.BandSpeed, c.Loop);
 
         SiteMaterial body = SiteMaterial.Of(c, c.BodyHrc);
-        double[] gulletBending = [.. bending.Select(b => c.GulletBendingFactor * b.Pascals)];
-        double gulletTension = c.GulletTensionFactor * running.Pascals;
-        double valley = c.GulletTensionFactor * Math.Min(c.CutValley?.Pascals ?? 0, running.Pascals);
-        SiteLife gullet = Site(body, History(gulletTension, gulletBending, valley), bendsPerHour);
+        SiteLife gullet = Site(body, LoopHistory.Gullet(c, running, bending, outer: true).Cycles(), bendsPerHour);
 
         double kw = WeldSite.StrengthFactor(c.Weld);
         double[] weldBending = [.. c.Wheels.Select((D, i) => WideFactor(c, D) * bending[i].Pascals / kw)];
-        SiteLife weld = Site(SiteMaterial.Of(c, WeldSite.Hrc(c.BodyHrc)), History(running.Pascals / kw, weldBending, 0), bendsPerHour);
+        double[] weldSpans = [.. LoopHistory.Spans(c, running).Select(s => s / kw)];
+        SiteLife weld = Site(SiteMaterial.Of(c, WeldSite.Hrc(c.BodyHrc)), new LoopHistory(weldSpans, weldBending, 0, []).Cycles(), bendsPerHour);
 
         double median = Miner.SystemMedian(gullet.MedianBends, weld.MedianBends, c.WeibullShape);
         return new BandLifeResult(
@@ -73,7 +70,7 @@ public static class BandLife
         _ => LifeVerdict.NotLimiting,
     };
 
-    private static void Check(BandCase c)
+    internal static void Check(BandCase c)
     {
         if (c.Wheels.Count == 0)
         {
@@ -85,6 +82,16 @@ public static class BandLife
         Require.Between(c.GulletTensionFactor, 1, 10, nameof(c.GulletTensionFactor), "gullet's factor on tension");
         Require.Between(c.GulletBendingFactor, 1, 10, nameof(c.GulletBendingFactor), "gullet's factor on bending");
         Require.NotNegative(c.CutValley ?? default, nameof(c.CutValley), "valley of the cut");
+        if (c.SpanOffsets is { } spans && spans.Count != c.Wheels.Count)
+        {
+            throw new ArgumentOutOfRangeException(nameof(c), "There must be one span for each wheel.");
+        }
+
+        foreach (Stress pull in c.TwistPulls)
+        {
+            Require.NotNegative(pull, nameof(c.TwistPulls), "pull at the edge from twist");
+        }
+
         Require.Positive(c.KneeBends, nameof(c.KneeBends), "number of bends at the knee");
     }
 
@@ -93,47 +100,12 @@ public static class BandLife
             ? BendingStress.PlaneStrainFactor(b, c.Thickness, wheel, c.Steel.Poisson)
             : 1;
 
-    /// <summary>Greatest stress and amplitude of each wheel's cycle, in Pa, in the order of the wheels.</summary>
-    private static (double Greatest, double Amplitude)[] History(double tension, double[] bending, double valley)
+    private static SiteLife Site(SiteMaterial m, (StressCycle[] Wheels, StressCycle[] Beside) turn, double bendsPerHour)
     {
-        (double, double)[] cycles = [.. bending.Select(b => (tension + b, b / 2))];
-        if (valley == 0)
-        {
-            return cycles;
-        }
-
-        double[] loop = [.. bending.SelectMany((b, i) => new[] { i == 0 ? tension - valley : tension, tension + b })];
-        IEnumerable<RainflowCycle> counted = Rainflow.CountLoop(loop)
-            .OrderByDescending(c => c.Greatest)
-            .ThenByDescending(c => c.Range)
-            .SelectMany(c => Enumerable.Repeat(c, (int)c.Count));
-        IEnumerable<int> wheels = Enumerable.Range(0, bending.Length).OrderByDescending(i => bending[i]);
-        foreach ((RainflowCycle cycle, int wheel) in counted.Zip(wheels))
-        {
-            cycles[wheel] = (cycle.Greatest, cycle.Range / 2);
-        }
-
-        return cycles;
-    }
-
-    private static SiteLife Site(SiteMaterial m, (double Greatest, double Amplitude)[] cycles, double bendsPerHour)
-    {
-        Stress[] equivalent = [.. cycles.Select(c =>
-            MeanStress.Walker(new Stress(Math.Max(Math.Min(c.Greatest, m.Yield), c.Amplitude)), new Stress(c.Amplitude), m.WalkerExponent))];
-        double perLoop = equivalent.Sum(s => 1 / m.Curve.Cycles(s));
+        Stress[] equivalent = [.. turn.Wheels.Select(m.Equivalent)];
+        Stress[] beside = [.. turn.Beside.Select(m.Equivalent)];
+        double perLoop = equivalent.Concat(beside).Sum(s => 1 / m.Curve.Cycles(s));
         double bends = equivalent.Length / perLoop;
-        return new SiteLife(equivalent, bends, bends / bendsPerHour, bendsPerHour / bends);
-    }
-
-    private sealed record SiteMaterial(double Yield, double WalkerExponent, SnCurve Curve)
-    {
-        public static SiteMaterial Of(BandCase c, double hrc)
-        {
-            double HB = Hardness.Brinell(hrc);
-            Stress Su = Hardness.TensileStrength(HB);
-            double Cs = Surface.Factor(c.Finish, Su, c.Rusty);
-            SnCurve curve = new(Basquin.RoessleFatemi(HB).WithSurface(Cs, c.KneeBends), c.KneeBends);
-            return new SiteMaterial(YieldShare * Su.Pascals, MeanStress.WalkerExponent(Su), curve);
-        }
+        return new SiteLife(equivalent, bends, bends / bendsPerHour, bendsPerHour / bends) { Beside = beside };
     }
 }

@@ -49,7 +49,9 @@ public static class Miner
             throw new ArgumentOutOfRangeException(nameof(gulletMedian), Math.Min(gulletMedian, weldMedian), "The median lives must be above zero.");
         }
 
-        return double.IsPositiveInfinity(Math.Min(gulletMedian, weldMedian)) ? double.PositiveInfinity : 1 / SystemUsed(1 / gulletMedian, 1 / weldMedian, beta);
+        double weaker = Math.Min(gulletMedian, weldMedian);
+        // Rounding of the two reciprocals must not lift the blade's life over that of its weaker place.
+        return double.IsPositiveInfinity(weaker) ? weaker : Math.Min(weaker, 1 / SystemUsed(1 / gulletMedian, 1 / weldMedian, beta));
     }
 
     /// <summary>The life by which one in ten has broken, as a share of the median life.</summary>

@@ -90,6 +90,17 @@ public sealed class ShopAdvice
     public Choice Try(CutWork work, BladeAdvice blade, SawNow saw, double? speedMps = null) =>
         speedMps is { } v ? desk.At(work, blade, saw, v) : desk.Best(work, blade, saw);
 
+    /// <summary>What an hour of running at a choice's speed takes from its blade.</summary>
+    public Damage Rate(Choice choice)
+    {
+        ArgumentNullException.ThrowIfNull(choice);
+        BladeFile file = choice.Blade.File;
+        return damage.Of(choice.Blade.Body, file.Weld, choice.Saw.Setup, choice.SpeedMps, choice.Tension!.Stress.Value, file.LoopM ?? choice.Saw.Setup.LoopM);
+    }
+
+    /// <summary>What a change would do to a choice: half the teeth, a raised guide, a wider blade, a slack one. Only what matters there, unless all is asked.</summary>
+    public IReadOnlyList<WhatIf> WhatIf(Choice choice, bool all = false) => new WhatIfs(desk, Beams, Settings, Words).Of(choice, For(choice.Work.Cut).Choices, all);
+
     /// <summary>The order of the day over the cuts that wait.</summary>
     public DayPlan Plan() => plan ??= DayPlan.Of(
         [.. Now.Saws.Where(s => s.Saw.Active)],

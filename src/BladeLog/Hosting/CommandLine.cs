@@ -6,7 +6,7 @@ internal sealed record Call(string? Verb, string? Operand, string? DataDir, bool
 internal static class CommandLine
 {
     private static readonly string[] Verbs = ["verify", "backup", "restore"];
-    private static readonly string[] FrameworkOptions = ["urls", "environment", "contentroot", "applicationname", "data", "sample"];
+    private static readonly string[] FrameworkOptions = ["environment", "contentroot", "applicationname"];
 
     public static Call Read(string[] args)
     {
@@ -40,6 +40,8 @@ internal static class CommandLine
                     sample = true;
                     passOn.Add("--sample=true");
                     break;
+                case "sample":
+                    return Refuse("--sample takes no value: give it alone, or leave it out to serve the shop's own records.");
                 case "data":
                     value ??= Next(args, ref i);
                     if (string.IsNullOrWhiteSpace(value))

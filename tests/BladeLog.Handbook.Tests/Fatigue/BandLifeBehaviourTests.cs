@@ -27,9 +27,12 @@ public class BandLifeBehaviourTests
     public void A_larger_wheel_lengthens_the_life() =>
         Shop.Sample(s => Life(s.T, s.Wheel * 1.05, s.Tension, s.Hrc) > Life(s.T, s.Wheel, s.Tension, s.Hrc));
 
+    // Where the pull outweighs the bend, Walker's mean-stress term grows with hardness faster than the strength does:
+    // 0.44 mm on a 1,451 mm wheel at 198 MPa lives no longer at 53 HRC than at 52. Bands that tire at all are bent harder than pulled.
     [Fact]
-    public void A_harder_body_lengthens_the_life() =>
-        Shop.Sample(s => Life(s.T, s.Wheel, s.Tension, s.Hrc + 1) > Life(s.T, s.Wheel, s.Tension, s.Hrc));
+    public void A_harder_body_lengthens_the_life_of_a_band_that_bends_more_than_it_is_pulled() =>
+        Shop.Where(s => Steel.Carbon.YoungsModulus.Megapascals * s.T / (s.Wheel + s.T) >= s.Tension)
+            .Sample(s => Life(s.T, s.Wheel, s.Tension, s.Hrc + 1) > Life(s.T, s.Wheel, s.Tension, s.Hrc));
 
     [Fact]
     public void A_worse_weld_or_gullet_does_not_lengthen_the_life() =>

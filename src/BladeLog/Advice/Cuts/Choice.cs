@@ -60,6 +60,11 @@ public sealed record Choice
     /// <summary>Whether the sawing goes with relief cuts.</summary>
     public bool Relief { get; init; }
 
+    /// <summary>Metres to dull at this cut's depth and working feed; null where it is refused.</summary>
+    public MetresLeft? MetresLeft => Gate?.AdvisedMps is { } feed
+        ? Blade.Edge.LeftAt(Work.HeightM, feed, Blade.File.LoopM ?? Saw.Setup.LoopM, SpeedMps, Work.WoodFactor.Value, Work.DirtFactor.Value, Work.Cut.Number)
+        : null;
+
     public double TeethInCut => Kinematics.TeethInCut(new Length(Work.HeightM), new Length(Blade.Body.PitchMean));
 }
 

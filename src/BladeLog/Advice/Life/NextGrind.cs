@@ -90,8 +90,10 @@ public sealed record NextGrind
         ArgumentNullException.ThrowIfNull(file);
         ArgumentNullException.ThrowIfNull(body);
         ArgumentNullException.ThrowIfNull(settings);
-        double lost = body.NewWidth.Value - body.Width.Value;
-        return file.Sharpenings > 0 && lost > 0 ? lost / file.Sharpenings : settings[BladeSettings.Grind] * 1e-3;
+        // What a blade lost before this record began was lost in grinds nobody counted.
+        double from = file.PriorUse is null ? body.NewWidth.Value : file.PriorUse.WidthM ?? body.Width.Value, lost = from - body.Width.Value;
+        double counted = file.Sharpenings - (file.PriorUse?.Sharpenings ?? 0);
+        return counted > 0 && lost > 0 ? lost / counted : settings[BladeSettings.Grind] * 1e-3;
     }
 
     private static (double Hours, IntervalFrom From) Interval(BladeFile file, LifeOfBlade life, Sharpness edge, AdviceSettings settings)

@@ -70,9 +70,6 @@ internal sealed record BandLifeOut(
 
 internal static class BandLifeWorking
 {
-    public static readonly IReadOnlyList<string> Sources =
-        ["derived", "astm-e140", "dowling-2009", "roessle-fatemi-2000", "shigley", "haibach", "engineering-default"];
-
     public static BandLifeOut? Answer(BandLifeIn body, BodyReader reader)
     {
         for (var i = 0; i < body.Wheels.Count; i++)
@@ -118,8 +115,19 @@ internal static class BandLifeWorking
             Site(life.Weld),
             new BladeOut(life.MedianBends, life.MedianHours, life.TenthPercentileBends),
             life.Verdict,
-            Sources,
-            ["A planning figure. Look at the blade before use; it cannot see cracks, burns or a bad weld."]);
+            [.. AnswerSources.BandLife, .. body.Width is null ? (string[])[] : ["ashwell-1950"], .. body.CutValley is null ? (string[])[] : ["astm-e1049"]],
+            Cautions(life));
+    }
+
+    private static List<string> Cautions(BandLifeResult life)
+    {
+        List<string> said = ["A planning figure. Look at the blade before use; it cannot see cracks, burns or a bad weld."];
+        if (life.TakesSet)
+        {
+            said.Add("This band takes a set on the wheel: tension and bending together pass what the body springs back from.");
+        }
+
+        return said;
     }
 
     private static SiteOut Site(SiteLife site) =>

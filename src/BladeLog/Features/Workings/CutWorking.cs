@@ -179,7 +179,7 @@ internal static class CutWorking
                 CurveRadius.Hard(width, cut.Kerf, cut.Thickness).Millimetres),
             CuttingForce.ShearFactor(cut).Megapascals,
             CuttingForce.ReferenceThickness(cut.Rake).Micrometres,
-            ["derived", "gullet-note", "loehnertz-cooz", "woodson-1979", "from-memory", "engineering-default"],
+            AnswerSources.Cut,
             [.. CutChecks.Cautions(cut, feed), "Forces and power hold within -30 to +40 per cent until the shop's own ammeter readings have taught the factor."]);
     }
 }

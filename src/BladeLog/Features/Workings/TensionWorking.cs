@@ -67,12 +67,12 @@ internal static class TensionWorking
         }
 
         Length t = Length.FromMillimetres(body.Thickness), b = Length.FromMillimetres(body.Width - body.Gullet);
-        var (tension, method, source) = body switch
+        var (tension, method) = body switch
         {
-            { Force: { } force } => (Tension.FromStrandForce(new Force(force), t, b), TensionMethod.StrandForce, "derived"),
-            { WheelLoad: { } load } => (Tension.FromWheelLoad(new Force(load), t, b), TensionMethod.WheelLoad, "derived"),
-            { Stretch: { } stretch } => (Tension.FromStretch(Length.FromMillimetres(stretch), Length.FromMillimetres(body.GaugeLength!.Value), Steel.Carbon.YoungsModulus), TensionMethod.Stretch, "derived"),
-            _ => (Tension.FromPluck(new Frequency(body.Pluck!.Value), Length.FromMillimetres(body.FreeSpan!.Value), t, b, Length.FromMillimetres(body.Gullet), Steel.Carbon), TensionMethod.Pluck, "from-memory"),
+            { Force: { } force } => (Tension.FromStrandForce(new Force(force), t, b), TensionMethod.StrandForce),
+            { WheelLoad: { } load } => (Tension.FromWheelLoad(new Force(load), t, b), TensionMethod.WheelLoad),
+            { Stretch: { } stretch } => (Tension.FromStretch(Length.FromMillimetres(stretch), Length.FromMillimetres(body.GaugeLength!.Value), Steel.Carbon.YoungsModulus), TensionMethod.Stretch),
+            _ => (Tension.FromPluck(new Frequency(body.Pluck!.Value), Length.FromMillimetres(body.FreeSpan!.Value), t, b, Length.FromMillimetres(body.Gullet), Steel.Carbon), TensionMethod.Pluck),
         };
         var reading = TensionReading.Of(tension, method);
         return new TensionOut(
@@ -81,7 +81,7 @@ internal static class TensionWorking
             reading.High.Megapascals,
             Tension.StrandForce(reading.Value, t, b).Newtons,
             "body",
-            [source, "engineering-default"],
+            method == TensionMethod.Pluck ? ["derived", "fletcher-rossing", "engineering-default"] : ["derived", "engineering-default"],
             ["Do not exceed the tension the saw's maker states."]);
     }
 

@@ -7,16 +7,16 @@ namespace BladeLog.Features.Workings;
 
 internal sealed record ThrustLimitsIn
 {
-    [Field("width_mm", "the width over the teeth in mm", Over = 0, Most = 500)]
+    [Field("width_mm", "the width over the teeth in mm", Least = 1, Most = 500)]
     public required double Width { get; init; }
 
-    [Field("thickness_mm", "the band's thickness in mm", Over = 0, Most = 5)]
+    [Field("thickness_mm", "the band's thickness in mm", Least = 0.05, Most = 5)]
     public required double Thickness { get; init; }
 
     [Field("gullet_mm", "the gullet depth in mm", Least = 0, Most = 100)]
     public required double Gullet { get; init; }
 
-    [Field("tension_mpa", "the running tension on the body in MPa", Over = 0, Most = 600)]
+    [Field("tension_mpa", "the running tension on the body in MPa", Least = 0.1, Most = 600)]
     public required double Tension { get; init; }
 
     [Field("guide_span_mm", "the span between the guides in mm", Least = 5, Most = 5000)]
@@ -112,7 +112,7 @@ internal static class ThrustLimitsWorking
             TipStiffness.AtPoint(band, limits.Allowed).NewtonsPerMillimetre,
             BandFrequency.Lateral(band).Hertz,
             BandFrequency.Torsional(band).Hertz,
-            ["derived", "timoshenko-gere", "engineering-default"],
+            AnswerSources.Thrust,
             ["Tension is the worst-known figure here: a fifth less tension is about a fifth less thrust."]);
     }
 }

@@ -1,3 +1,6 @@
+using BladeLog.Records.Folding;
+using BladeLog.Records.Sample;
+
 namespace BladeLog.Records;
 
 /// <summary>The invented shop, read from the CSV files beside the program.</summary>
@@ -5,10 +8,31 @@ public static class SampleShop
 {
     public static string Folder { get; } = Path.Combine(AppContext.BaseDirectory, "sample-db");
 
+    /// <summary>Fills an empty file in one transaction; day 0 of the files becomes the shop's date of <paramref name="now"/>.</summary>
     public static async Task Fill(ShopDb db, string folder, DateTime now)
     {
-        _ = now;
-        db.Shops.Add(new Shop { Uid = Guid.NewGuid(), Name = Path.GetFileName(folder), Zone = "UTC", IsSample = true });
-        await db.SaveChangesAsync();
+        var tracks = db.ChangeTracker.AutoDetectChangesEnabled;
+        db.ChangeTracker.AutoDetectChangesEnabled = false;
+        try
+        {
+            await using var transaction = await db.Database.BeginTransactionAsync();
+            var things = SampleThings.Read(folder, now);
+            db.AddRange(things.All);
+            await db.SaveChangesAsync();
+
+            var ledger = new SampleLedger();
+            new SampleFacts(folder, things, ledger).Read();
+            db.ChangeTracker.Clear();
+            db.AddRange(ledger.Close());
+            await db.SaveChangesAsync();
+            db.ChangeTracker.Clear();
+
+            await Kept.Rebuild(db);
+            await transaction.CommitAsync();
+        }
+        finally
+        {
+            db.ChangeTracker.AutoDetectChangesEnabled = tracks;
+        }
     }
 }

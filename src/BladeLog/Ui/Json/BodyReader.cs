@@ -74,6 +74,12 @@ internal sealed class BodyReader
         var fields = BodyFields.Of(type);
         foreach (var item in element.EnumerateObject())
         {
+            if (NameOf(item) is null)
+            {
+                Say(path.Length == 0 ? "body" : path, "A field's name has a character that cannot be read.");
+                continue;
+            }
+
             var at = path.Length == 0 ? item.Name : $"{path}.{item.Name}";
             if (!fields.TryGetValue(item.Name, out var field))
             {
@@ -136,19 +142,19 @@ internal sealed class BodyReader
 
         if (type == typeof(Guid))
         {
-            return value.ValueKind == JsonValueKind.String && Guid.TryParse(value.GetString(), out var id) ? id : Refused(at, $"{Sentence(field)} is a GUID, such as 6f9619ff-8b86-d011-b42d-00c04fc964ff.");
+            return Guid.TryParse(TextOf(value), out var id) ? id : Refused(at, $"{Sentence(field)} is a GUID, such as 6f9619ff-8b86-d011-b42d-00c04fc964ff.");
         }
 
         if (type == typeof(DateTimeOffset))
         {
-            return value.ValueKind == JsonValueKind.String && DateTimeOffset.TryParse(value.GetString(), CultureInfo.InvariantCulture, DateTimeStyles.AssumeUniversal, out var when)
+            return DateTimeOffset.TryParse(TextOf(value), CultureInfo.InvariantCulture, DateTimeStyles.AssumeUniversal, out var when)
                 ? when
                 : Refused(at, $"{Sentence(field)} is a date and time such as 2026-05-04T07:30:00Z.");
         }
 
         if (type == typeof(DateOnly))
         {
-            return value.ValueKind == JsonValueKind.String && DateOnly.TryParseExact(value.GetString(), "yyyy-MM-dd", CultureInfo.InvariantCulture, DateTimeStyles.None, out var day)
+            return DateOnly.TryParseExact(TextOf(value), "yyyy-MM-dd", CultureInfo.InvariantCulture, DateTimeStyles.None, out var day)
                 ? day
                 : Refused(at, $"{Sentence(field)} is a date such as 2026-05-04.");
         }
@@ -156,7 +162,7 @@ internal sealed class BodyReader
         if (type.IsEnum)
         {
             var words = BodyFields.WordsOf(type);
-            return value.ValueKind == JsonValueKind.String && words.TryGetValue(value.GetString()!, out var chosen)
+            return TextOf(value) is { } word && words.TryGetValue(word, out var chosen)
                 ? chosen
                 : Refused(at, $"{Sentence(field)} is one of: {string.Join(", ", words.Keys)}.");
         }
@@ -222,20 +228,39 @@ internal sealed class BodyReader
             return (string?)Refused(at, $"{Sentence(field)} is a text in quotes.");
         }
 
-        string text;
-        try
+        if (TextOf(value)?.Trim() is not { } text)
         {
-            text = value.GetString()!.Trim();
-        }
-        catch (InvalidOperationException)
-        {
-            // A lone surrogate such as "\ud800": valid JSON, not a text.
             return (string?)Refused(at, $"{Sentence(field)} has a character that cannot be read.");
         }
 
         return text.Length == 0 || text.Length > field.Longest || text.Any(char.IsControl)
             ? (string?)Refused(at, $"{Sentence(field)} is a text of 1 to {field.Longest} characters.")
             : text;
+    }
+
+    /// <summary>Null for what is no text, and for a lone surrogate such as "\ud800": valid JSON, not a text.</summary>
+    private static string? TextOf(JsonElement value)
+    {
+        try
+        {
+            return value.ValueKind == JsonValueKind.String ? value.GetString() : null;
+        }
+        catch (InvalidOperationException)
+        {
+            return null;
+        }
+    }
+
+    private static string? NameOf(JsonProperty property)
+    {
+        try
+        {
+            return property.Name;
+        }
+        catch (InvalidOperationException)
+        {
+            return null;
+        }
     }
 
     private object? Refused(string at, string sentence)

@@ -1,0 +1,1 @@
+"""Makes the invented history of the sample shop."""
