@@ -18,7 +18,7 @@ public static class GuideTwist
         return new Stress(G * t * theta / l);
     }
 
-    /// <summary>The pull along both edges of a twisted band, over that of its middle's share: the edges are the longer helix.</summary>
+    /// <summary>The pull that twisting adds along both edges of a band, which follow a longer path than its middle.</summary>
     /// <remarks>
     /// σ = E (θ/l)² b²/12. b width of the body, m; θ, l, E as for the shear. The middle of the width is relieved by half as much.
     /// Elastic, and for edges that lean little: b θ/l well under 1.

@@ -1,9 +1,105 @@
+using System.Globalization;
+using BladeLog.Advice;
+using BladeLog.Records;
+using BladeLog.Records.Writing;
+using BladeLog.Ui;
+using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Features;
 
-/// <summary>What every page has at hand for one request: the moment, and what its title block says.</summary>
-internal sealed class Desk(TimeProvider clock)
+/// <summary>
+/// What every page has at hand for one request: the moment, the shop read once, the advice on it, its units, the title
+/// block, and the one way to record. Scoped to the request.
+/// </summary>
+internal sealed class Desk(TimeProvider clock, ShopDb db, ShopWriter writer, IHttpContextAccessor accessor)
 {
+    /// <summary>The person who said last who is at this tablet.</summary>
+    public const string WhoCookie = "who";
+
+    /// <summary>What was just recorded and can be taken back: entry, words, time.</summary>
+    private const string SavedCookie = "saved";
+
+    private static readonly TimeSpan UndoFor = TimeSpan.FromSeconds(60);
+
+    private ShopNow? _shop;
+    private ShopAdvice? _advice;
+    private Person? _who;
+
     /// <summary>Taken once, so that one request has one now.</summary>
     public DateTime Now { get; } = clock.GetUtcNow().UtcDateTime;
+
+    public ShopDb Db => db;
+
+    private HttpContext Http => accessor.HttpContext!;
+
+    public async Task<ShopNow> Shop() => _shop ??= await ShopNowReader.Read(db, Now);
+
+    public async Task<ShopAdvice> Advice() => _advice ??= new ShopAdvice(await Shop());
+
+    public async Task<ShopUnits> Units() => Units((await Shop()).Shop);
+
+    public static ShopUnits Units(Shop shop) => new()
+    {
+        Units = shop.Lengths == LengthUnit.Inch ? UnitSystem.Inch : UnitSystem.Metric,
+        UkSpelling = shop.Spelling == Spelling.Uk,
+        Pull = shop.PullWord == Records.PullWord.Strain ? Ui.PullWord.Strain : Ui.PullWord.Tension,
+        CurrencyDigits = shop.CurrencyDigits,
+        Zone = TimeZoneInfo.TryFindSystemTimeZoneById(shop.Zone, out var zone) ? zone : TimeZoneInfo.Utc,
+    };
+
+    /// <summary>The person at this tablet, by the initials they tapped; null when nobody has said.</summary>
+    public async Task<Person?> Who()
+    {
+        var initials = Http.Request.Cookies[WhoCookie];
+        if (string.IsNullOrEmpty(initials))
+        {
+            return null;
+        }
+
+        return _who ??= await db.People.AsNoTracking().Include(p => p.Roles).FirstOrDefaultAsync(p => p.Initials == initials && p.Active);
+    }
+
+    public async Task<Chrome> Chrome()
+    {
+        var shop = await Shop();
+        var (savedAt, undo) = LastSaved(Units(shop.Shop));
+        return new Chrome(shop.Shop.Name, (await Who())?.Initials, savedAt, undo);
+    }
+
+    public async Task<IResult> Page<TView, TModel>(TModel model, int status = StatusCodes.Status200OK)
+        where TView : View<TModel> => Html.View<TView, TModel>(model, await Chrome(), status);
+
+    /// <summary>Records a form's command. A form without an op, or with one that is no GUID, gets a new one: it cannot be sent twice then.</summary>
+    public async Task<WriteResult> Write(Command command, string? op, string answerPath, string? typedAt = null) =>
+        await writer.Write(
+            command,
+            new Sent(Guid.TryParse(op, out var id) ? id : Guid.NewGuid(), Now, (await Who())?.Id, null, typedAt, answerPath),
+            Http.RequestAborted);
+
+    /// <summary>Where a recorded form leads: to its page, with an undo for a minute.</summary>
+    public IResult Saved(WriteResult.Done done, string what, bool canUndo = true)
+    {
+        Http.Response.Cookies.Append(
+            SavedCookie,
+            string.Create(CultureInfo.InvariantCulture, $"{(canUndo ? done.EntryId : 0)}|{new DateTimeOffset(Now).ToUnixTimeSeconds()}|{what}"),
+            new CookieOptions { HttpOnly = true, SameSite = SameSiteMode.Strict, MaxAge = TimeSpan.FromHours(12), IsEssential = true });
+        return Results.Redirect(done.AnswerPath);
+    }
+
+    private (string? SavedAt, UndoOffer? Undo) LastSaved(ShopUnits units)
+    {
+        var parts = Http.Request.Cookies[SavedCookie]?.Split('|', 3);
+        if (parts is not [var entry, var seconds, var what] || !int.TryParse(entry, out var id)
+            || !long.TryParse(seconds, NumberStyles.None, CultureInfo.InvariantCulture, out var unix) || unix > 253_402_300_799)
+        {
+            return (null, null);
+        }
+
+        var at = DateTimeOffset.FromUnixTimeSeconds(unix).UtcDateTime;
+        var local = TimeZoneInfo.ConvertTimeFromUtc(at, units.Zone).ToString("HH:mm", CultureInfo.InvariantCulture);
+        var undo = id > 0 && Now - at is var age && age >= TimeSpan.Zero && age < UndoFor
+            ? new UndoOffer(what, $"/record/{id.ToString(CultureInfo.InvariantCulture)}/void", Guid.NewGuid().ToString())
+            : null;
+        return (local, undo);
+    }
 }

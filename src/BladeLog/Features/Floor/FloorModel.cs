@@ -1,0 +1,199 @@
+using BladeLog.Advice;
+using BladeLog.Advice.Cuts;
+using BladeLog.Advice.Life;
+using BladeLog.Records;
+using BladeLog.Ui;
+using BladeLog.Ui.Pictures.Geometry;
+
+namespace BladeLog.Features.Floor;
+
+/// <summary>A large figure: the text of the dimension line below it. The line is a wear line or a life band, never both.</summary>
+public sealed record BigFigure(string Number, string Unit, string Way, string Stop, string Description)
+{
+    public double? Worn { get; init; }
+
+    public LifeFigures? Life { get; init; }
+}
+
+/// <summary>The next cut of a saw and what to do for it.</summary>
+public sealed record NextLine(string Number, string Wood, string Height, string Before, string Bold, string After);
+
+/// <summary>One saw as it stands on the floor.</summary>
+public sealed record SawTile
+{
+    public required string Code { get; init; }
+
+    public required string Name { get; init; }
+
+    public required string Under { get; init; }
+
+    public required SawShape Shape { get; init; }
+
+    /// <summary>runs, look, slack, sharpen, hold or empty.</summary>
+    public required string State { get; init; }
+
+    public string? Tag { get; init; }
+
+    public ToothSpec? Teeth { get; init; }
+
+    public BigFigure? Edge { get; init; }
+
+    public BigFigure? Limit { get; init; }
+
+    /// <summary>In the place of figures: a hold, an empty saw, a life that has no hours.</summary>
+    public string? Big { get; init; }
+
+    public string? Small { get; init; }
+
+    public NextLine? Next { get; init; }
+}
+
+public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
+{
+    /// <summary>One window height for all saws, so that they share one scale.</summary>
+    public double Height => SawShape.CommonHeight(Tiles.Select(t => t.Shape));
+
+    public static FloorModel Of(ShopAdvice advice, ShopUnits units, IReadOnlySet<int> slack)
+    {
+        ArgumentNullException.ThrowIfNull(advice);
+        ArgumentNullException.ThrowIfNull(units);
+        ArgumentNullException.ThrowIfNull(slack);
+        return new FloorModel([.. advice.Now.Saws.Where(s => s.Saw.Active).Select(s => Tile(s, advice, units, slack.Contains(s.Saw.Id)))]);
+    }
+
+    private static SawTile Tile(SawNow saw, ShopAdvice advice, ShopUnits units, bool slack)
+    {
+        PlannedCut? next = advice.NextCut(saw);
+        SawTile bare = new()
+        {
+            Code = saw.Saw.Code,
+            Name = saw.Saw.Name,
+            Under = Said.Wheels(saw.Setup, units),
+            Shape = Drawn.Saw(saw.Setup),
+            State = "empty",
+            Next = next is null ? null : Next(next, slack, advice.Words),
+        };
+        if (advice.Now.Blades.FirstOrDefault(b => b.Blade.Id == saw.MountedBladeId) is not { } file)
+        {
+            return bare with { Big = Ready(saw, advice) };
+        }
+
+        BladeAdvice blade = advice.On(file, saw);
+        SawTile on = bare with { Tag = file.Blade.Tag, Teeth = Drawn.Teeth(blade.Body, file.Spec) };
+        if (file.Hold is { } hold)
+        {
+            return on with { State = "hold", Big = Heard(hold, advice, units), Small = hold.Kind == HoldKind.Clicking ? "A crack may be starting. A named person clears it after a look." : "A named person clears it after a look." };
+        }
+
+        (BigFigure? limit, string? words) = Limit(blade, advice, units);
+        return on with
+        {
+            State = slack ? "slack" : blade.State switch
+            {
+                BladeState.Sharpen => "sharpen",
+                BladeState.Look => "look",
+                _ => "runs",
+            },
+            Edge = Edge(blade, next, units),
+            Limit = limit,
+            Small = words,
+        };
+    }
+
+    private static string Heard(Hold hold, ShopAdvice advice, ShopUnits units)
+    {
+        string what = hold.Kind == HoldKind.Clicking ? "Clicking heard" : Said.Capital(LifeWords.Hold(hold, advice.Words)["on hold: ".Length..]);
+        string when = hold.Entry is { } entry ? " " + Said.When(entry.AtUtc, advice.Now.AsOf, units) : "";
+        string who = hold.Entry?.Person is { } person ? " by " + person.Initials : "";
+        return $"Do not run. {what}{when}{who}.";
+    }
+
+    private static string Ready(SawNow saw, ShopAdvice advice)
+    {
+        int ready = advice.Now.Blades.Count(b => b.Place == Place.Rack && ShopAdvice.Fits(b, saw) && advice.Of(b).State == BladeState.Ready);
+        return ready switch
+        {
+            0 => "No blade that fits is ready.",
+            1 => "1 blade that fits is ready.",
+            _ => $"{ready} blades that fit are ready.",
+        };
+    }
+
+    private static BigFigure? Edge(BladeAdvice blade, PlannedCut? next, ShopUnits units)
+    {
+        MetresLeft? left = next is { Choice: { Mounted: true, Gate.AdvisedMps: { } feed } c }
+            ? blade.Edge.LeftAt(c.Work.HeightM, feed, blade.File.LoopM ?? c.Saw.Setup.LoopM, c.SpeedMps, c.Work.WoodFactor.Value, c.Work.DirtFactor.Value, c.Work.Cut.Number)
+            : blade.Edge.Left;
+        if (left is null)
+        {
+            return null;
+        }
+
+        (double value, string unit) = Said.Cut(left.Metres, units);
+        string depth = left.CutNumber is { } n ? $"in cut {n}" : $"in clean wood {Wording.Number(left.DepthM * 1e3, 0)} mm deep at {Wording.Number(left.FeedMps * 60, 1)} m/min";
+        // An edge that will not be ground again runs into the scrap, not into the grinder.
+        string stop = blade.Grind.Pays ? "grind" : "scrap";
+        return new BigFigure(Figures.Floor(value), unit, "to", stop, $"Sharpness: {Figures.Number(value)} {unit} left {depth}") { Worn = blade.Edge.Used };
+    }
+
+    private static (BigFigure? Figure, string? Words) Limit(BladeAdvice blade, ShopAdvice advice, ShopUnits units)
+    {
+        LifeOfBlade life = blade.Record;
+        if (life.UnknownHistory)
+        {
+            return (null, "History unknown: inspect it before each mount.");
+        }
+
+        if (Drawn.Life(blade) is { } band)
+        {
+            (double hours, string way, string stop) = life.Reckoned.Blade < advice.Settings.WatchMark ? (life.HoursToWatch!.Value, "to", "look")
+                : !blade.PastRetireMark ? (life.HoursToRetire!.Value, "to", "retire")
+                : (0, "past", "mark");
+            return (new BigFigure(Hours(hours), "h", way, stop, LifeBandGeometry.Describe(band)) { Life = band }, null);
+        }
+
+        if (life.Verdict == Handbook.Fatigue.LifeVerdict.Unsuitable)
+        {
+            return (null, LifeWords.Ladder(Handbook.Fatigue.LifeVerdict.Unsuitable));
+        }
+
+        return Drawn.OtherLimit(blade) switch
+        {
+            { Kind: LimitKind.Sharpenings } grinds => (Grinds(blade, grinds.Share), null),
+            { Kind: LimitKind.Width } width => (WidthLeft(blade, width.Share, units), null),
+            _ => (null, "Flexing will not end it; its edge will."),
+        };
+    }
+
+    private static BigFigure Grinds(BladeAdvice blade, double used)
+    {
+        int left = Math.Max(0, blade.File.Spec.MostSharpenings!.Value - blade.File.Sharpenings);
+        string word = left == 1 ? "grind" : "grinds";
+        return new BigFigure(Figures.Floor(left), "", word, "left", $"{left} {word} left; flexing will not end it") { Worn = used };
+    }
+
+    private static BigFigure WidthLeft(BladeAdvice blade, double used, ShopUnits units)
+    {
+        double left = Math.Max(0, blade.Body.Width.Value - blade.Body.LeastWidth.Value);
+        (string number, string unit) = units.Units == UnitSystem.Inch
+            ? ((left / Handbook.Units.Exact.Inch).ToString("0.00", System.Globalization.CultureInfo.InvariantCulture), "in")
+            : (left < 0.00995 ? (left * 1e3).ToString("0.0", System.Globalization.CultureInfo.InvariantCulture) : Figures.Floor(left * 1e3), "mm");
+        return new BigFigure(number, unit, "width", "left", $"{number} {unit} of width left; flexing will not end it") { Worn = used };
+    }
+
+    /// <summary>Under ten hours a decimal matters, unless it is nought.</summary>
+    private static string Hours(double hours) => hours is > 0 and < 9.95
+        ? hours.ToString("0.#", System.Globalization.CultureInfo.InvariantCulture)
+        : Figures.Floor(hours);
+
+    private static NextLine Next(PlannedCut next, bool slack, Wording words)
+    {
+        Choice c = next.Choice;
+        NextLine line = new($"Cut {next.Cut.Number}", next.Cut.SpeciesTyped, words.Length(next.Cut.HeightM).Replace(' ', Figures.Glue), "use ", c.Tag, "");
+        return next.ChangeBefore || !slack
+            ? c.Verdict == Verdict.WithCare ? line with { Before = "", After = " with care" }
+                : next.ChangeBefore ? line
+                : line with { Before = "", After = " stays on" }
+            : line with { Before = "", Bold = $"{words.Tension} on", After = " first" };
+    }
+}

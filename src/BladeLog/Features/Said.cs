@@ -1,0 +1,102 @@
+using BladeLog.Advice;
+using BladeLog.Handbook.Quantities;
+using BladeLog.Handbook.Units;
+using BladeLog.Records;
+using BladeLog.Ui;
+
+namespace BladeLog.Features;
+
+/// <summary>Words that several pages use for the same thing.</summary>
+internal static class Said
+{
+    /// <summary>"3 TPI hook", "2-3 TPI tipped", "22 mm hook": how the trade calls a row of teeth.</summary>
+    public static string Teeth(Spec spec)
+    {
+        ArgumentNullException.ThrowIfNull(spec);
+        string form = spec.TipKind switch
+        {
+            TipKind.Tipped => "tipped",
+            TipKind.Swaged => "swaged",
+            _ => spec.ToothForm switch
+            {
+                ToothForm.Hook => "hook",
+                ToothForm.Skip => "skip",
+                _ => "regular",
+            },
+        };
+        double few = Exact.Inch / spec.PitchCoarseM, many = Exact.Inch / spec.PitchFineM;
+        string pitch = Whole(few) && Whole(many)
+            ? spec.PitchCoarseM == spec.PitchFineM ? $"{few:0.#} TPI" : $"{few:0.#}-{many:0.#} TPI"
+            : $"{Figures.Number(spec.PitchMeanM * 1e3, 1)} mm".Replace(".0 mm", " mm", StringComparison.Ordinal);
+        return $"{pitch.Replace(' ', Figures.Glue)} {form}";
+    }
+
+    /// <summary>"38 × 0.9": width now by thickness, in the shop's unit.</summary>
+    public static string Section(BladeFile blade, ShopUnits units)
+    {
+        ArgumentNullException.ThrowIfNull(blade);
+        ArgumentNullException.ThrowIfNull(units);
+        return units.Units == UnitSystem.Inch
+            ? $"{units.Show(new Length(blade.Spec.WidthM), Fields.BladeWidth)} × {units.Show(new Length(blade.ThicknessM), Fields.Thickness)}"
+            : $"{blade.Spec.WidthM * 1e3:0.###} × {blade.ThicknessM * 1e3:0.###}";
+    }
+
+    public static string Width(double metres, ShopUnits units)
+    {
+        ArgumentNullException.ThrowIfNull(units);
+        return units.Units == UnitSystem.Inch ? Figures.With(Figures.Number(metres / Exact.Inch, 3), "in") : Figures.With(Figures.Number(metres * 1e3, 1), "mm");
+    }
+
+    public static (double Value, string Unit) Cut(double metres, ShopUnits units)
+    {
+        ArgumentNullException.ThrowIfNull(units);
+        return units.Units == UnitSystem.Inch ? (metres / Exact.Foot, "ft") : (metres, "m");
+    }
+
+    /// <summary>"900 mm wheels", "3 wheels, 205 mm", "489 mm, mill", "356 mm, 2 speeds".</summary>
+    public static string Wheels(SawSetup setup, ShopUnits units)
+    {
+        ArgumentNullException.ThrowIfNull(setup);
+        ArgumentNullException.ThrowIfNull(units);
+        double[] sizes = [.. setup.Wheels.Select(w => w.DiameterM).Distinct()];
+        string size = string.Join(" and ", sizes.Select(d => units.Units == UnitSystem.Inch ? Figures.With(Figures.Number(d / Exact.Inch, 1), "in") : units.Show(new Length(d), Fields.WheelDiameter)));
+        return setup.Wheels.Count > 2 ? $"{setup.Wheels.Count} wheels, {size}"
+            : setup.Takes.HasFlag(Takes.Log) ? $"{size}, mill"
+            : setup.Speeds.Count > 1 ? $"{size}, {setup.Speeds.Count} speeds"
+            : $"{size} wheels";
+    }
+
+    public static string Count(int n, string one, string many) => n == 1 ? $"1{Figures.Glue}{one}" : $"{Figures.Number(n)}{Figures.Glue}{many}";
+
+    /// <summary>The cut as a line names it: "oak 50 mm".</summary>
+    public static string Wood(QueuedCut cut, Wording words)
+    {
+        ArgumentNullException.ThrowIfNull(cut);
+        ArgumentNullException.ThrowIfNull(words);
+        return $"{cut.SpeciesTyped} {words.Length(cut.HeightM).Replace(' ', Figures.Glue)}";
+    }
+
+    public static string When(DateTime utc, DateTime now, ShopUnits units)
+    {
+        ArgumentNullException.ThrowIfNull(units);
+        DateTime at = Local(utc, units), today = Local(now, units).Date;
+        int days = (today - at.Date).Days;
+        return days switch
+        {
+            0 => at.ToString("HH:mm", System.Globalization.CultureInfo.InvariantCulture),
+            > 0 and < 7 => at.ToString("ddd HH:mm", System.Globalization.CultureInfo.InvariantCulture),
+            _ when at.Year == today.Year => at.ToString("d MMM", System.Globalization.CultureInfo.InvariantCulture),
+            _ => at.ToString("d MMM yyyy", System.Globalization.CultureInfo.InvariantCulture),
+        };
+    }
+
+    public static DateTime Local(DateTime utc, ShopUnits units)
+    {
+        ArgumentNullException.ThrowIfNull(units);
+        return TimeZoneInfo.ConvertTimeFromUtc(DateTime.SpecifyKind(utc, DateTimeKind.Utc), units.Zone);
+    }
+
+    public static string Capital(string words) => words.Length == 0 ? words : char.ToUpperInvariant(words[0]) + words[1..];
+
+    private static bool Whole(double teeth) => Math.Abs((teeth * 2) - Math.Round(teeth * 2)) < 0.02;
+}
