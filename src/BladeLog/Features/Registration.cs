@@ -1,3 +1,4 @@
+using BladeLog.Features.Blades;
 using BladeLog.Features.Floor;
 using BladeLog.Features.Rack;
 using BladeLog.Features.Start;
@@ -18,6 +19,7 @@ internal static class Registration
         StartPages.Map(app);
         FloorPages.Map(app);
         RackPages.Map(app);
+        BladePages.Map(app);
         WorkingsJson.Map(app.MapGroup("/api/v1"));
     }
 }
