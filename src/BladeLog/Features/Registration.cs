@@ -1,6 +1,8 @@
 using BladeLog.Features.Blades;
 using BladeLog.Features.Floor;
+using BladeLog.Features.More;
 using BladeLog.Features.Rack;
+using BladeLog.Features.Saws;
 using BladeLog.Features.Start;
 using BladeLog.Features.Workings;
 
@@ -20,6 +22,8 @@ internal static class Registration
         FloorPages.Map(app);
         RackPages.Map(app);
         BladePages.Map(app);
+        SawPages.Map(app);
+        MorePages.Map(app);
         WorkingsJson.Map(app.MapGroup("/api/v1"));
     }
 }

@@ -22,7 +22,7 @@ internal static class BladePageModel
         {
             Tag = file.Blade.Tag,
             Title = $"{LowerFirst(blade.Advice.Do).TrimEnd('.')}",
-            Lede = blade.Advice.Because,
+            Lede = blade.State == BladeState.Hold ? [.. blade.Advice.Because.Take(1)] : blade.Advice.Because,
             State = StateOf(blade),
             Teeth = Drawn.Teeth(blade.Body, file.Spec),
             NewWidth = blade.Body.NewWidth.Value * 1e3,
@@ -123,7 +123,7 @@ internal static class BladePageModel
         }
         else if (blade.State == BladeState.Look)
         {
-            yield return new("A narrow blade often goes without ticking first: that it is silent does not mean that it is whole.", "Reported by users.");
+            yield return new("A narrow blade often goes without ticking first: that it is silent does not mean that it is whole.", "Common practice.");
         }
     }
 

@@ -104,7 +104,7 @@ internal sealed class BladeParts(BladeAdvice blade, ShopAdvice advice, ShopUnits
     {
         Sharpness edge = blade.Edge;
         string used = $"Rounded to {Wording.Edge(edge.RadiusM).Replace(' ', Figures.Glue)}; dull at {Wording.Number(advice.Settings[LifeSettings.Dull], 0)}{Figures.Glue}µm.";
-        if (edge.Left is not { } left || !Usable)
+        if (edge.Left is not { } left || !Usable || blade.State == BladeState.Hold)
         {
             return ("Teeth", used);
         }
