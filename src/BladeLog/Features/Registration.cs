@@ -1,3 +1,4 @@
+using BladeLog.Features.Blades;
 using BladeLog.Features.Saws;
 using BladeLog.Features.Start;
 using BladeLog.Features.Workings;
@@ -16,6 +17,7 @@ internal static class Registration
     {
         StartPages.Map(app);
         SawForms.Map(app);
+        BladeForms.Map(app);
         WorkingsJson.Map(app.MapGroup("/api/v1"));
     }
 }
