@@ -27,6 +27,7 @@ internal static class Registration
         BladePages.Map(app);
         SawPages.Map(app);
         MorePages.Map(app);
+        BladeForms.Map(app);
 
         var api = app.MapGroup("/api/v1").DisableAntiforgery();
         WorkingsJson.Map(api);
