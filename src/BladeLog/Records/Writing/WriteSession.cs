@@ -1,6 +1,5 @@
 using System.Globalization;
 using BladeLog.Handbook.Units;
-using BladeLog.Records.Folding;
 using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Records.Writing;
@@ -155,9 +154,6 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
 
         return blade;
     }
-
-    public async Task<SawFold> Fold(int sawId) =>
-        new(sawId, await FactReader.ReadSpells(Db, [sawId]), [], await FactReader.Setups(Db, sawId));
 
     public Task<BladeNow> NowOf(Blade blade) => Db.BladesNow.AsNoTracking().SingleAsync(b => b.BladeId == blade.Id);
 

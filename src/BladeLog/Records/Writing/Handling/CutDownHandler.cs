@@ -23,7 +23,7 @@ internal static class CutDownHandler
         var known = await w.Db.Splits.Where(s => s.ParentId == parent.Id)
             .Join(w.Db.Blades, s => s.ChildId, b => b.Id, (_, b) => b.Tag).FirstOrDefaultAsync();
         w.RefuseUnless(known is null, nameof(c.ParentTag), $"{parent.Tag} was cut down to {known} already.");
-        var later = (await FactReader.ReadSpells(w.Db, blades: [parent.Id])).Cast<Spell?>().FirstOrDefault(s => s!.Value.End > at);
+        var later = (await FactReader.ReadSpells(w.Db, blade: parent.Id)).Cast<Spell?>().FirstOrDefault(s => s!.Value.End > at);
         if (later is { } on)
         {
             w.Refuse(nameof(c.ParentTag), $"{await SpellRules.Words(w, on)}: take it off first.");
