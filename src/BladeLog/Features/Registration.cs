@@ -1,5 +1,8 @@
+using BladeLog.Features.Blades;
+using BladeLog.Features.Cuts;
 using BladeLog.Features.Floor;
 using BladeLog.Features.Rack;
+using BladeLog.Features.Saws;
 using BladeLog.Features.Start;
 using BladeLog.Features.Workings;
 
@@ -16,8 +19,15 @@ internal static class Registration
     public static void MapFeatures(this WebApplication app)
     {
         StartPages.Map(app);
+        CutsPages.Map(app);
+        SawForms.Map(app);
         FloorPages.Map(app);
         RackPages.Map(app);
-        WorkingsJson.Map(app.MapGroup("/api/v1"));
+
+        var api = app.MapGroup("/api/v1").DisableAntiforgery();
+        WorkingsJson.Map(api);
+        BladesJson.Map(api);
+        SawsJson.Map(api);
+        CutsJson.Map(api);
     }
 }
