@@ -29,5 +29,7 @@ internal static class Registration
         BladesJson.Map(api);
         SawsJson.Map(api);
         CutsJson.Map(api);
+        BladeForms.Map(app);
+        WorkingsJson.Map(app.MapGroup("/api/v1"));
     }
 }
