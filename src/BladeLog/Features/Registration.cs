@@ -30,6 +30,7 @@ internal static class Registration
         SawsJson.Map(api);
         CutsJson.Map(api);
         BladeForms.Map(app);
+        BladePages.Map(app);
         WorkingsJson.Map(app.MapGroup("/api/v1"));
     }
 }
