@@ -31,6 +31,5 @@ internal static class Registration
         CutsJson.Map(api);
         BladeForms.Map(app);
         BladePages.Map(app);
-        WorkingsJson.Map(app.MapGroup("/api/v1"));
     }
 }
