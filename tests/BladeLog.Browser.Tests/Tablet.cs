@@ -53,6 +53,22 @@ public sealed class Tablet
         await what.TapAsync();
     }
 
+    /// <summary>Two taps as fast as a bouncing finger makes them, before the first one's answer.</summary>
+    public async Task DoubleTap(ILocator what)
+    {
+        ArgumentNullException.ThrowIfNull(what);
+        await what.ScrollIntoViewIfNeededAsync();
+        var box = await what.BoundingBoxAsync();
+        Assert.NotNull(box);
+        Taps += 2;
+        var (x, y) = (box.X + (box.Width / 2), box.Y + (box.Height / 2));
+        await Task.WhenAll(Page.Touchscreen.TapAsync(x, y), Page.Touchscreen.TapAsync(x, y));
+    }
+
+    public ILocator Tile(string saw) => Page.Locator($"#saw-{saw}");
+
+    public ILocator OnTile(string saw, string name) => Tile(saw).GetByRole(AriaRole.Link, new() { Name = name, Exact = true });
+
     public ILocator Link(string name) => Page.GetByRole(AriaRole.Link, new() { Name = name, Exact = true });
 
     public ILocator Button(string name) => Page.GetByRole(AriaRole.Button, new() { Name = name, Exact = true });
