@@ -1,15 +1,11 @@
-using BladeLog.Advice;
-using BladeLog.Records;
 using BladeLog.Records.Writing;
 using BladeLog.Ui.Json;
 
 namespace BladeLog.Features;
 
-/// <summary>What the shop's JSON addresses share: the advice they read, and how they refuse.</summary>
+/// <summary>What the shop's JSON addresses share: how they refuse, and how they say times and lengths.</summary>
 internal static class JsonAnswers
 {
-    public static async Task<ShopAdvice> Advice(ShopDb db, Desk desk) => new(await ShopNowReader.Read(db, desk.Now));
-
     public static IResult NotFound(string sentence) => Results.Problem(title: sentence, statusCode: StatusCodes.Status404NotFound);
 
     /// <summary>A form that was not recorded, as problem details. Fields keep the names they were sent under.</summary>

@@ -13,18 +13,18 @@ internal static class BladesJson
         blades.MapGet("/{tag}", One).Produces<BladeOut>().ProducesProblem(StatusCodes.Status404NotFound).WithSummary("One blade");
     }
 
-    private static async Task<IResult> All(ShopDb db, Desk desk)
+    private static async Task<IResult> All(Desk desk)
     {
-        var advice = await JsonAnswers.Advice(db, desk);
-        var paths = await WoodPaths(db);
+        var advice = await desk.Advice();
+        var paths = await WoodPaths(desk.Db);
         return Results.Ok(advice.Now.Blades.OrderBy(b => b.Blade.Tag, StringComparer.OrdinalIgnoreCase).Select(b => BladeOut.Of(advice, b, paths)).ToList());
     }
 
-    private static async Task<IResult> One(string tag, ShopDb db, Desk desk)
+    private static async Task<IResult> One(string tag, Desk desk)
     {
-        var advice = await JsonAnswers.Advice(db, desk);
+        var advice = await desk.Advice();
         return advice.Now.Blade(Tags.Read(tag)) is { } blade
-            ? Results.Ok(BladeOut.Of(advice, blade, await WoodPaths(db)))
+            ? Results.Ok(BladeOut.Of(advice, blade, await WoodPaths(desk.Db)))
             : JsonAnswers.NotFound($"There is no blade {tag} here.");
     }
 

@@ -38,21 +38,21 @@ internal static partial class CutsJson
             .WithSummary("Put cuts on the list, all of them or none");
     }
 
-    private static async Task<IResult> All(ShopDb db, Desk desk)
+    private static async Task<IResult> All(Desk desk)
     {
-        var now = await ShopNowReader.Read(db, desk.Now);
+        var now = await desk.Shop();
         return Results.Ok(now.Cuts.Where(c => c.DroppedUtc is null).Select(QueuedCutOut.Of).ToList());
     }
 
-    private static async Task<IResult> Choices(int number, ShopDb db, Desk desk)
+    private static async Task<IResult> Choices(int number, Desk desk)
     {
-        var advice = await JsonAnswers.Advice(db, desk);
+        var advice = await desk.Advice();
         return advice.Now.Cuts.FirstOrDefault(c => c.Number == number) is { } cut
             ? Results.Ok(ChoicesOut.Of(advice, cut))
             : JsonAnswers.NotFound($"There is no cut {number} on the list.");
     }
 
-    private static async Task<IResult> Add(HttpRequest request, ShopDb db, ShopWriter writer, Desk desk)
+    private static async Task<IResult> Add(HttpRequest request, Desk desk)
     {
         var reader = new BodyReader();
         if (await reader.Read<CutsIn>(request) is not { } body)
@@ -68,8 +68,8 @@ internal static partial class CutsJson
         }
 
         var command = new ImportRows("cuts", Sha256(body)) { Rows = [.. rows.Select((row, i) => new ImportRow(i, new QueueCut(row!)))] };
-        var result = await writer.Write(command, new Sent(body.Op, desk.Now, AnswerPath: "/cuts"), request.HttpContext.RequestAborted);
-        return result is WriteResult.Done ? Results.Ok(await Added(db, rows!)) : JsonAnswers.NotRecorded(result, NameOf);
+        var result = await desk.Write(command, body.Op.ToString(), "/cuts");
+        return result is WriteResult.Done ? Results.Ok(await Added(desk.Db, rows!)) : JsonAnswers.NotRecorded(result, NameOf);
     }
 
     private static async Task<CutsAdded> Added(ShopDb db, List<QueuedCut> rows)

@@ -35,19 +35,19 @@ internal static class SawsJson
             .WithSummary("Record running of a saw");
     }
 
-    private static async Task<IResult> All(ShopDb db, Desk desk)
+    private static async Task<IResult> All(Desk desk)
     {
-        var advice = await JsonAnswers.Advice(db, desk);
+        var advice = await desk.Advice();
         return Results.Ok(advice.Now.Saws.Select(s => SawOut.Of(advice, s)).ToList());
     }
 
-    private static async Task<IResult> One(string code, ShopDb db, Desk desk)
+    private static async Task<IResult> One(string code, Desk desk)
     {
-        var advice = await JsonAnswers.Advice(db, desk);
+        var advice = await desk.Advice();
         return advice.Now.Saw(code) is { } saw ? Results.Ok(SawOut.Of(advice, saw)) : JsonAnswers.NotFound($"There is no saw {code} here.");
     }
 
-    private static async Task<IResult> Run(HttpRequest request, ShopDb db, ShopWriter writer, Desk desk)
+    private static async Task<IResult> Run(HttpRequest request, Desk desk)
     {
         var reader = new BodyReader();
         if (await reader.Read<RunIn>(request) is not { } body)
@@ -55,7 +55,7 @@ internal static class SawsJson
             return reader.Refusal();
         }
 
-        var now = await ShopNowReader.Read(db, desk.Now);
+        var now = await desk.Shop();
         Check(body, now.Saw(body.Saw), now, reader);
         if (reader.Errors.Count > 0)
         {
@@ -63,9 +63,9 @@ internal static class SawsJson
         }
 
         var code = now.Saw(body.Saw)!.Saw.Code;
-        var result = await writer.Write(Command(body, code), new Sent(body.Op, desk.Now), request.HttpContext.RequestAborted);
+        var result = await desk.Write(Command(body, code), body.Op.ToString(), $"/saws/{code}");
         return result is WriteResult.Done done
-            ? Results.Ok(new RunsOut(done.EntryId, code, await Recorded(db, body.Op)))
+            ? Results.Ok(new RunsOut(done.EntryId, code, await Recorded(desk.Db, body.Op)))
             : JsonAnswers.NotRecorded(result, field => SentAs.GetValueOrDefault(field, "body"));
     }
 

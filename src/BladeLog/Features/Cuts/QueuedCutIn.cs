@@ -12,10 +12,10 @@ internal sealed record CutsIn
     public required Guid Op { get; init; }
 
     [Field("cuts", "the cuts", Longest = 200)]
-    public required List<CutIn> Cuts { get; init; }
+    public required List<QueuedCutIn> Cuts { get; init; }
 }
 
-internal sealed record CutIn
+internal sealed record QueuedCutIn
 {
     [Field("job", "what it is for", Longest = 100)]
     public required string Job { get; init; }
