@@ -1,6 +1,7 @@
 using BladeLog.Features.Blades;
 using BladeLog.Features.Cuts;
 using BladeLog.Features.Floor;
+using BladeLog.Features.More;
 using BladeLog.Features.Rack;
 using BladeLog.Features.Saws;
 using BladeLog.Features.Start;
@@ -23,6 +24,10 @@ internal static class Registration
         SawForms.Map(app);
         FloorPages.Map(app);
         RackPages.Map(app);
+        BladePages.Map(app);
+        SawPages.Map(app);
+        MorePages.Map(app);
+        BladeForms.Map(app);
 
         var api = app.MapGroup("/api/v1").DisableAntiforgery();
         WorkingsJson.Map(api);

@@ -18,7 +18,7 @@ public class RandomHistoryTests(ITestOutputHelper output)
 {
     private const int Batches = 40;
     private const int HistoriesInBatch = 25;
-    private const int Kinds = 20;
+    private const int Kinds = 21;
 
     private static readonly Gen<Step[]> History = Gen.Select(Gen.Int[0, Kinds - 1], Gen.Int[0, 2], Gen.Int[0, 999], Gen.Int[0, 480], Gen.Int[1, 60])
         .Select((kind, which, pick, at, length) => new Step(kind, which, pick, at, length)).Array[18];
@@ -134,6 +134,7 @@ public class RandomHistoryTests(ITestOutputHelper output)
                 new AddBlades($"P{name}", Enumerable.Range(0, 3).Select(i => $"B{name}.{i}").ToList()) { At = Start.AddDays(-1) },
                 new Swap($"X{name}") { OnTag = $"B{name}.0", At = Start },
                 new Swap($"Y{name}") { OnTag = $"B{name}.1", At = Start },
+                new SendBatch($"{name}-first", "a service", [$"B{name}.2"], At: Start),
             })
             {
                 Assert.IsType<WriteResult.Done>(await writer.Write(command, new Sent(Guid.NewGuid(), _now, _ot)));
@@ -171,7 +172,7 @@ public class RandomHistoryTests(ITestOutputHelper output)
                     1 => new RecordInspection(blade, Found.Crack) { At = at },
                     _ => new ClearHold(blade, "ground out", _now),
                 },
-                17 => await BladeWork(db, s, blade, at),
+                17 or 18 => await BladeWork(db, s, blade, at),
                 _ => await Strike(db, s) ?? Cut(saw, s, at),
             };
         }

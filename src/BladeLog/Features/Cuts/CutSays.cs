@@ -21,7 +21,8 @@ internal static class CutSays
         return "Nothing fits: " + Instead(answer);
     }
 
-    private static string Instead(CutAnswer answer) => answer.Proposals is [var first, ..]
+    /// <summary>What to do where nothing fits.</summary>
+    public static string Instead(CutAnswer answer) => answer.Proposals is [var first, ..]
         ? first.Kind switch
         {
             ProposalKind.Stack => $"stack {Few(first.Outcome.Work.Stack)} {(answer.Work.Cut.Material == MaterialKind.Panel ? "sheets" : "pieces")}",
@@ -31,7 +32,7 @@ internal static class CutSays
             ProposalKind.Buy => $"buy another blade for {first.Outcome.Saw.Saw.Name}",
             _ => $"wait for {first.Outcome.Tag}",
         }
-        : answer.Work.IsWood ? "see why below" : CutWords.NotWood(answer.Work);
+        : answer.Work.IsWood ? "see why below" : CutWords.NotWood(answer.Work).Split(':')[0];
 
     /// <summary>"1.8 to 4.8 m/min".</summary>
     public static string Window(Choice choice, ShopUnits units)
@@ -132,13 +133,13 @@ internal static class CutSays
         return units.ShowMoney((long)Math.Round(minor, MidpointRounding.AwayFromZero));
     }
 
-    public static string Kind(CutKind kind) => kind switch
+    /// <summary>A figure for a field that names its unit: "190" of "190 mm".</summary>
+    public static string Bare(string figure)
     {
-        CutKind.Board => "boards",
-        CutKind.Resaw => "resawing",
-        CutKind.Beam => "a beam",
-        _ => "a log",
-    };
+        ArgumentNullException.ThrowIfNull(figure);
+        int unit = figure.LastIndexOf(Figures.Glue);
+        return unit > 0 ? figure[..unit] : figure;
+    }
 
     public static string Few(int n) => n switch { 2 => "two", 3 => "three", 4 => "four", 5 => "five", _ => Figures.Number(n) };
 }

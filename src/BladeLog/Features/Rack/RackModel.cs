@@ -1,6 +1,5 @@
 using BladeLog.Advice;
 using BladeLog.Advice.Life;
-using BladeLog.Handbook.Tables;
 using BladeLog.Records;
 using BladeLog.Ui;
 using BladeLog.Ui.Pictures.Geometry;
@@ -63,20 +62,10 @@ public sealed record RackModel
             Filters = [.. Kinds.Select(k => new RackFilter(k.Key, k.Name, all.Count(b => k.Is(b.File, b.Advice)))).Where(f => f.Count > 0 || f.Key == "all")],
             Show = sought.Length > 0 ? "" : chosen.Key,
             Query = sought.Length > 0 ? sought : null,
-            Nearest = sought.Length > 0 && shown.Length == 0 ? NearestTags(advice.Now, sought) : [],
+            Nearest = sought.Length > 0 && shown.Length == 0 ? NearestTags.To(sought, advice.Now) : [],
             Groups = Grouped(shown, advice, units, folded: chosen.Key != "gone" && sought.Length == 0),
             NoBlades = all.Length == 0,
         };
-    }
-
-    /// <summary>The tags a mistyped one may have meant.</summary>
-    public static IReadOnlyList<string> NearestTags(ShopNow shop, string typed)
-    {
-        ArgumentNullException.ThrowIfNull(shop);
-        ArgumentNullException.ThrowIfNull(typed);
-        string sought = typed.ToUpperInvariant();
-        return [.. shop.Blades.Select(b => b.Blade.Tag)
-            .OrderBy(t => EditDistance.Between(sought, t.ToUpperInvariant())).ThenBy(t => t, NaturalOrder.Instance).Take(6)];
     }
 
     private static string Found(int count, string sought) => count switch
