@@ -55,7 +55,7 @@ public static class History
                 VoidWhy = e.Void.Reason,
             })
             .ToListAsync();
-        var said = new Dictionary<int, Said>();
+        var said = new Dictionary<int, Spoken>();
         foreach (var kind in page.GroupBy(e => e.Kind))
         {
             foreach (var one in await HistoryKinds.Say(db, kind.Key, [.. kind.Select(e => e.Id)]))
@@ -77,4 +77,4 @@ public static class History
 }
 
 /// <summary>What a fact says of itself.</summary>
-internal sealed record Said(int EntryId, string? Tag, string? Saw, params HistoryPart[] Parts);
+internal sealed record Spoken(int EntryId, string? Tag, string? Saw, params HistoryPart[] Parts);

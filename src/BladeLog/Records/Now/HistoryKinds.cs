@@ -35,7 +35,7 @@ internal static class HistoryKinds
         .Concat(Ids(db.Drifts.Where(f => f.SawId == id)))
         .Concat(Ids(db.Breaks.Where(f => f.SawId == id)));
 
-    public static Task<List<Said>> Say(ShopDb db, string kind, IReadOnlyCollection<int> ids) => kind switch
+    public static Task<List<Spoken>> Say(ShopDb db, string kind, IReadOnlyCollection<int> ids) => kind switch
     {
         nameof(SawSetup) => Of(db.SawSetups.Include(f => f.Saw), ids, f => new(f.EntryId, null, f.Saw.Code, Length("loop", f.LoopM), Length("widest blade", f.WidthMostM))),
         nameof(Mount) => Of(db.Mounts.Include(f => f.Saw).Include(f => f.Blade), ids, f =>
@@ -56,11 +56,11 @@ internal static class HistoryKinds
         _ => HistoryOfBlades.Say(db, kind, ids),
     };
 
-    internal static async Task<List<Said>> Of<T>(IQueryable<T> facts, IReadOnlyCollection<int> ids, Func<T, Said> say)
+    internal static async Task<List<Spoken>> Of<T>(IQueryable<T> facts, IReadOnlyCollection<int> ids, Func<T, Spoken> say)
         where T : Fact =>
         [.. (await facts.IgnoreQueryFilters().AsNoTracking().Where(f => ids.Contains(f.EntryId)).ToListAsync()).Select(say).Select(Trim)];
 
-    internal static async Task<List<Said>> Both<T>(
+    internal static async Task<List<Spoken>> Both<T>(
         ShopDb db, IQueryable<T> facts, IReadOnlyCollection<int> ids, Func<T, (int? Blade, int? Saw)> of, Func<T, HistoryPart[]> parts)
         where T : Fact
     {
@@ -71,7 +71,7 @@ internal static class HistoryKinds
         var codes = await db.Saws.Where(s => saws.Contains(s.Id)).ToDictionaryAsync(s => s.Id, s => s.Code);
         return
         [
-            .. rows.Select(r => Trim(new Said(
+            .. rows.Select(r => Trim(new Spoken(
                 r.EntryId,
                 of(r).Blade is { } blade ? tags[blade] : null,
                 of(r).Saw is { } saw ? codes[saw] : null,
@@ -89,11 +89,11 @@ internal static class HistoryKinds
 
     internal static HistoryPart Time(string word, DateTime utc) => new(word, utc.ToString("O", System.Globalization.CultureInfo.InvariantCulture), null, "utc");
 
-    private static Task<List<Said>> OfSaw<T>(ShopDb db, IQueryable<T> facts, IReadOnlyCollection<int> ids, Func<T, int> saw, Func<T, HistoryPart[]> parts)
+    private static Task<List<Spoken>> OfSaw<T>(ShopDb db, IQueryable<T> facts, IReadOnlyCollection<int> ids, Func<T, int> saw, Func<T, HistoryPart[]> parts)
         where T : Fact => Both(db, facts, ids, f => (null, saw(f)), parts);
 
     /// <summary>What was not said is left out.</summary>
-    private static Said Trim(Said said) => said with { Parts = [.. said.Parts.Where(p => p.Text is not null || p.Value is not null)] };
+    private static Spoken Trim(Spoken said) => said with { Parts = [.. said.Parts.Where(p => p.Text is not null || p.Value is not null)] };
 
     private static IQueryable<int> Ids<T>(IQueryable<T> facts)
         where T : Fact => facts.IgnoreQueryFilters().Select(f => f.EntryId);

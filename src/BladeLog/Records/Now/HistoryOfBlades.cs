@@ -6,7 +6,7 @@ namespace BladeLog.Records;
 /// <summary>What the facts of a blade's body, its joints and its batches say.</summary>
 internal static class HistoryOfBlades
 {
-    public static Task<List<Said>> Say(ShopDb db, string kind, IReadOnlyCollection<int> ids) => kind switch
+    public static Task<List<Spoken>> Say(ShopDb db, string kind, IReadOnlyCollection<int> ids) => kind switch
     {
         nameof(Sharpening) => Of(db.Sharpenings.Include(f => f.Blade), ids, f => new(
             f.EntryId, f.Blade.Tag, null, Word("grind", f.Kind.ToString()), Flag("set again", f.SetAgain), Length("width", f.WidthM), Length("gullet", f.GulletM), Length("kerf", f.KerfM), Number("price", f.PriceMinor, "minor"))),
@@ -31,17 +31,17 @@ internal static class HistoryOfBlades
         nameof(Retirement) => Of(db.Retirements.Include(f => f.Blade), ids, f => new(
             f.EntryId, f.Blade.Tag, null, Word("reason", f.Reason.ToString()), Flag("cut up", f.CutUp), Word("note", f.Note))),
         // An edit of a thing is an entry without a fact: its kind says it all.
-        _ => Task.FromResult(new List<Said>()),
+        _ => Task.FromResult(new List<Spoken>()),
     };
 
-    private static async Task<List<Said>> Splits(ShopDb db, IReadOnlyCollection<int> ids)
+    private static async Task<List<Spoken>> Splits(ShopDb db, IReadOnlyCollection<int> ids)
     {
         var children = await db.Splits.IgnoreQueryFilters().Where(s => ids.Contains(s.EntryId))
             .Join(db.Blades, s => s.ChildId, b => b.Id, (s, b) => new { s.EntryId, b.Tag }).ToDictionaryAsync(s => s.EntryId, s => s.Tag);
         return await Both(db, db.Splits, ids, f => (f.ParentId, null), f => [Word("cut down to", children[f.EntryId]), Length("width", f.WidthM)]);
     }
 
-    private static async Task<List<Said>> Stock(ShopDb db, IReadOnlyCollection<int> ids)
+    private static async Task<List<Spoken>> Stock(ShopDb db, IReadOnlyCollection<int> ids)
     {
         var specs = await db.StockMoves.IgnoreQueryFilters().Where(s => ids.Contains(s.EntryId))
             .Join(db.Specs, s => s.SpecId, b => b.Id, (s, b) => new { s.EntryId, b.Code }).ToDictionaryAsync(s => s.EntryId, s => s.Code);
