@@ -1,4 +1,8 @@
+using BladeLog.Features.Bench;
 using BladeLog.Features.Blades;
+using BladeLog.Features.Cautions;
+using BladeLog.Features.People;
+using BladeLog.Features.Record;
 using BladeLog.Features.Saws;
 using BladeLog.Features.Start;
 using BladeLog.Features.Workings;
@@ -18,6 +22,10 @@ internal static class Registration
         StartPages.Map(app);
         SawForms.Map(app);
         BladeForms.Map(app);
+        BenchPages.Map(app);
+        RecordPages.Map(app);
+        PeoplePages.Map(app);
+        CautionPages.Map(app);
         WorkingsJson.Map(app.MapGroup("/api/v1"));
     }
 }
