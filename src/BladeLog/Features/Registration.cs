@@ -14,6 +14,7 @@ internal static class Registration
     public static void MapFeatures(this WebApplication app)
     {
         StartPages.Map(app);
+        WorkingsPages.Map(app);
         WorkingsJson.Map(app.MapGroup("/api/v1"));
     }
 }
