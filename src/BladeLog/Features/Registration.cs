@@ -36,6 +36,7 @@ internal static class Registration
         RecordPages.Map(app);
         PeoplePages.Map(app);
         CautionPages.Map(app);
+        WorkingsPages.Map(app);
 
         var api = app.MapGroup("/api/v1").DisableAntiforgery();
         WorkingsJson.Map(api);
