@@ -1,5 +1,4 @@
 using System.Text.RegularExpressions;
-using BladeLog.Records;
 using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Browser.Tests;

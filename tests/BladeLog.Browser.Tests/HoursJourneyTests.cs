@@ -1,4 +1,3 @@
-using BladeLog.Records;
 using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Browser.Tests;
