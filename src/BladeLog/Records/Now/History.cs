@@ -40,7 +40,6 @@ public static class History
             entries = entries.Where(e => of.Contains(e.Id));
         }
 
-<<<<<<< HEAD
         var page = await entries.OrderByDescending(e => e.AtUtc).ThenByDescending(e => e.Id).Skip(skip).Take(take)
             .Select(e => new
             {
@@ -55,33 +54,6 @@ public static class History
                 VoidWho = e.Void.Entry.Person!.Initials,
                 VoidWhy = e.Void.Reason,
             })
-=======
-    /// <summary>The last facts at a saw.</summary>
-    public static async Task<IReadOnlyList<PastFact>> OfSaw(ShopDb db, int sawId, int most)
-    {
-        List<Fact> facts =
-        [
-            .. await Last(db.SawSetups.Where(f => f.SawId == sawId), most),
-            .. await Last(db.Mounts.Include(m => m.Blade).Where(f => f.SawId == sawId), most),
-            .. await Last(db.Dismounts.Include(d => d.Mount.Blade).Where(f => f.Mount.SawId == sawId), most),
-            .. await Last(db.Slacks.Where(f => f.SawId == sawId), most),
-            .. await Last(db.MeterEpochs.Where(f => f.SawId == sawId), most),
-            .. await Last(db.MeterReadings.Where(f => f.SawId == sawId), most),
-            .. await Last(db.Runs.Where(f => f.SawId == sawId && f.ReadingId == null), most),
-            .. await Last(db.CutsDone.Where(f => f.SawId == sawId), most),
-            .. await Last(db.Breaks.Include(b => b.Blade).Where(f => f.SawId == sawId), most),
-        ];
-        return [.. Newest(facts).Take(most)];
-    }
-
-    private static Task<List<T>> Last<T>(IQueryable<T> facts, int most)
-        where T : Fact => Read(facts.OrderByDescending(f => f.Entry.AtUtc).ThenByDescending(f => f.EntryId).Take(most));
-
-    private static Task<List<T>> Read<T>(IQueryable<T> facts)
-        where T : Fact => facts.AsNoTracking().IgnoreQueryFilters()
-            .Include(f => f.Entry.Person)
-            .Include(f => f.Entry.Void!.Entry.Person)
->>>>>>> pages
             .ToListAsync();
         var said = new Dictionary<int, FactWords>();
         foreach (var kind in page.GroupBy(e => e.Kind))
