@@ -1,4 +1,5 @@
 using BladeLog.Features.Cuts;
+using BladeLog.Features.Import;
 using BladeLog.Features.Start;
 using BladeLog.Features.Workings;
 
@@ -16,6 +17,7 @@ internal static class Registration
     {
         StartPages.Map(app);
         CutsPages.Map(app);
+        ImportPages.Map(app);
         WorkingsJson.Map(app.MapGroup("/api/v1"));
     }
 }
