@@ -3,6 +3,7 @@ using BladeLog.Features.Blades;
 using BladeLog.Features.Cautions;
 using BladeLog.Features.Cuts;
 using BladeLog.Features.Floor;
+using BladeLog.Features.Import;
 using BladeLog.Features.More;
 using BladeLog.Features.People;
 using BladeLog.Features.Rack;
@@ -37,6 +38,7 @@ internal static class Registration
         PeoplePages.Map(app);
         CautionPages.Map(app);
         WorkingsPages.Map(app);
+        ImportPages.Map(app);
 
         var api = app.MapGroup("/api/v1").DisableAntiforgery();
         WorkingsJson.Map(api);
