@@ -4,6 +4,7 @@ using BladeLog.Features.Cautions;
 using BladeLog.Features.People;
 using BladeLog.Features.Record;
 using BladeLog.Features.Saws;
+using BladeLog.Features.Setup;
 using BladeLog.Features.Start;
 using BladeLog.Features.Workings;
 
@@ -25,6 +26,7 @@ internal static class Registration
         BenchPages.Map(app);
         RecordPages.Map(app);
         PeoplePages.Map(app);
+        SetupPages.Map(app);
         CautionPages.Map(app);
         WorkingsJson.Map(app.MapGroup("/api/v1"));
     }

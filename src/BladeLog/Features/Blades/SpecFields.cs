@@ -58,7 +58,6 @@ internal static class SpecReading
         var teeth = read.Choice<TipMaterial>(nameof(form.TipMaterial), form.TipMaterial, "Say what the teeth are made of.") ?? default;
         return new Spec
         {
-            Uid = Guid.Empty,
             Code = string.IsNullOrWhiteSpace(form.Code) ? AutoCode(width, thickness, pitch, tooth) : form.Code.Trim(),
             WidthM = width,
             WidthTyped = form.Width?.Trim(),
@@ -69,6 +68,7 @@ internal static class SpecReading
             PitchTyped = form.Pitch?.Trim(),
             ToothForm = tooth,
             TipKind = tip,
+            SetPattern = tip == Handbook.Quantities.TipKind.Set ? SetPattern.Alternate : SetPattern.None,
             TipMaterial = teeth,
             BodySteel = read.Choice<BodySteel>(nameof(form.BodySteel), form.BodySteel, null) ?? UsualBody(teeth),
             BodyHrc = read.Number(nameof(form.BodyHrc), form.BodyHrc, "a hardness such as 46"),
