@@ -9,6 +9,7 @@ using BladeLog.Features.People;
 using BladeLog.Features.Rack;
 using BladeLog.Features.Record;
 using BladeLog.Features.Saws;
+using BladeLog.Features.Setup;
 using BladeLog.Features.Start;
 using BladeLog.Features.Workings;
 
@@ -36,6 +37,7 @@ internal static class Registration
         BenchPages.Map(app);
         RecordPages.Map(app);
         PeoplePages.Map(app);
+        SetupPages.Map(app);
         CautionPages.Map(app);
         WorkingsPages.Map(app);
         ImportPages.Map(app);
