@@ -4,7 +4,7 @@ using BladeLog.Handbook.Quantities;
 using BladeLog.Ui;
 using BladeLog.Ui.Forms;
 using BladeLog.Ui.Pictures.Geometry;
-using static BladeLog.Features.Workings.Shown;
+using static BladeLog.Features.Shown;
 
 namespace BladeLog.Features.Workings;
 
@@ -16,18 +16,18 @@ internal static class BandLifePage
     private const double Least = 1e4;
     private const double Most = 1e8;
 
-    public static WorkingModel Of(WorkingForm form, WorkingCase from)
+    public static WorkingModel Of(AskForm form, WorkingCase from)
     {
         AdviceSettings settings = from.Settings;
         BladeBody? body = from.Blade?.Body;
         var setup = from.Saw?.Setup;
-        double? t = form.Length("thickness", "Thickness", Fields.Thickness, Start.Of(body?.Thickness, 0.64e-3));
+        double? t = form.Length("thickness", "Thickness", Fields.Thickness, Given.Of(body?.Thickness, 0.64e-3));
         IReadOnlyList<double>? wheels = form.Wheels("wheels", "Wheels, over the tyre", setup is null ? [0.356, 0.356] : [.. setup.Wheels.OrderBy(w => w.Position).Select(w => w.DiameterM)], setup is null ? "example" : "as the saw is set up");
-        double? v = form.BandSpeed("speed", "Band speed", Start.Of(setup?.UsualSpeedMps, "usual speed of the saw", 15));
-        double? L = form.Length("loop", "Loop", Fields.Loop, Start.Of(from.Blade?.File.LoopM ?? setup?.LoopM, "of the blade", 2.36));
-        double? tension = form.Stress("tension", $"{Said.Capital(form.Units.PullName)} on the body", Start.Of(from.Tension?.Stress ?? (body is null ? null : settings.Tension(body.Steel)), 100e6));
-        double? hrc = form.Number("hrc", "Hardness of the body", "a hardness", 20, 58, "HRC", Start.Of(body?.Hrc, 46));
-        double? b = form.Length("body", "Width of the body", Fields.BladeWidth, Start.Of(body?.BodyWidth, "width less gullet", null), optional: true);
+        double? v = form.BandSpeed("speed", "Band speed", Given.Of(setup?.UsualSpeedMps, "usual speed of the saw", 15));
+        double? L = form.Length("loop", "Loop", Fields.Loop, Given.Of(from.Blade?.File.LoopM ?? setup?.LoopM, "of the blade", 2.36));
+        double? tension = form.Stress("tension", $"{Said.Capital(form.Units.PullName)} on the body", Given.Of(from.Tension?.Stress ?? (body is null ? null : settings.Tension(body.Steel)), 100e6));
+        double? hrc = form.Number("hrc", "Hardness of the body", "a hardness", 20, 58, "HRC", Given.Of(body?.Hrc, 46));
+        double? b = form.Length("body", "Width of the body", Fields.BladeWidth, Given.Of(body?.BodyWidth, "width less gullet", null), optional: true);
         WeldQuality weld = form.Choose("weld", "Weld", from.Blade?.File.Weld ?? WeldQuality.Good, body is null ? "example" : "as recorded",
             (WeldQuality.Good, "good", "good: dressed and tempered"), (WeldQuality.Doubtful, "doubtful", "doubtful"), (WeldQuality.Best, "best", "best"));
         TensionSystem system = form.Choose("system", "Wheel held by", setup?.TensionSystem ?? TensionSystem.Sprung, setup is null ? "example" : "as the saw is set up",

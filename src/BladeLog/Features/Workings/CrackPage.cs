@@ -5,7 +5,7 @@ using BladeLog.Handbook.Quantities;
 using BladeLog.Ui;
 using BladeLog.Ui.Forms;
 using BladeLog.Ui.Pictures.Geometry;
-using static BladeLog.Features.Workings.Shown;
+using static BladeLog.Features.Shown;
 
 namespace BladeLog.Features.Workings;
 
@@ -14,15 +14,15 @@ internal static class CrackPage
 {
     public const string Path = "/workings/crack";
 
-    public static WorkingModel Of(WorkingForm form, AdviceSettings settings)
+    public static WorkingModel Of(AskForm form, AdviceSettings settings)
     {
-        double? a0 = form.Length("crack", "Crack when it is seen", Fields.CrackLength, Start.Example(1e-3));
-        double? b = form.Length("body", "Width of the body", Fields.BladeWidth, Start.Example(11.2e-3));
-        double? t = form.Length("thickness", "Thickness", Fields.Thickness, Start.Example(0.64e-3));
+        double? a0 = form.Length("crack", "Crack when it is seen", Fields.CrackLength, Given.Example(1e-3));
+        double? b = form.Length("body", "Width of the body", Fields.BladeWidth, Given.Example(11.2e-3));
+        double? t = form.Length("thickness", "Thickness", Fields.Thickness, Given.Example(0.64e-3));
         IReadOnlyList<double>? wheels = form.Wheels("wheels", "Wheels, over the tyre", [0.356, 0.356], "example");
-        double? v = form.BandSpeed("speed", "Band speed", Start.Example(15));
-        double? L = form.Length("loop", "Loop", Fields.Loop, Start.Example(2.36));
-        double? tension = form.Stress("tension", $"{Said.Capital(form.Units.PullName)} on the body", Start.Example(100e6));
+        double? v = form.BandSpeed("speed", "Band speed", Given.Example(15));
+        double? L = form.Length("loop", "Loop", Fields.Loop, Given.Example(2.36));
+        double? tension = form.Stress("tension", $"{Said.Capital(form.Units.PullName)} on the body", Given.Example(100e6));
         CrackSteel steel = form.Choose("steel", "Steel", CrackSteel.Martensitic, "example", (CrackSteel.Martensitic, "hardened", "hardened and tempered"), (CrackSteel.FerriticPearlitic, "soft", "not hardened"));
 
         Shown shown = new(form.Units);

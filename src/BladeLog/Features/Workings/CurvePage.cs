@@ -4,7 +4,7 @@ using BladeLog.Handbook.Quantities;
 using BladeLog.Ui;
 using BladeLog.Ui.Forms;
 using BladeLog.Ui.Pictures.Geometry;
-using static BladeLog.Features.Workings.Shown;
+using static BladeLog.Features.Shown;
 
 namespace BladeLog.Features.Workings;
 
@@ -13,14 +13,14 @@ internal static class CurvePage
 {
     public const string Path = "/workings/curve";
 
-    public static WorkingModel Of(WorkingForm form, WorkingCase from)
+    public static WorkingModel Of(AskForm form, WorkingCase from)
     {
         AdviceSettings settings = from.Settings;
         BladeBody? body = from.Blade?.Body;
-        double? w = form.Length("width", "Width over the teeth, now", Fields.BladeWidth, Start.Of(body?.Width, 12.7e-3));
-        double? t = form.Length("thickness", "Thickness", Fields.Thickness, Start.Of(body?.Thickness, 0.635e-3));
-        double? k = form.Length("kerf", "Kerf", Fields.Kerf, Start.Of(body?.Kerf, 1.1e-3));
-        double? wanted = form.Length("radius", "Radius wanted", Fields.CurveRadius, Start.Of(from.Cut?.RadiusM, "of the cut", null), optional: true);
+        double? w = form.Length("width", "Width over the teeth, now", Fields.BladeWidth, Given.Of(body?.Width, 12.7e-3));
+        double? t = form.Length("thickness", "Thickness", Fields.Thickness, Given.Of(body?.Thickness, 0.635e-3));
+        double? k = form.Length("kerf", "Kerf", Fields.Kerf, Given.Of(body?.Kerf, 1.1e-3));
+        double? wanted = form.Length("radius", "Radius wanted", Fields.CurveRadius, Given.Of(from.Cut?.RadiusM, "of the cut", null), optional: true);
         double a = settings[CutSettings.CurveFactor];
 
         Shown shown = new(form.Units);

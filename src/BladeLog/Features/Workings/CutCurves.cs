@@ -1,7 +1,7 @@
 using BladeLog.Handbook.Cutting;
 using BladeLog.Handbook.Quantities;
 using BladeLog.Ui.Pictures.Geometry;
-using static BladeLog.Features.Workings.Shown;
+using static BladeLog.Features.Shown;
 
 namespace BladeLog.Features.Workings;
 

@@ -2,7 +2,7 @@ using BladeLog.Handbook.Cutting;
 using BladeLog.Handbook.Quantities;
 using BladeLog.Ui;
 using BladeLog.Ui.Forms;
-using static BladeLog.Features.Workings.Shown;
+using static BladeLog.Features.Shown;
 
 namespace BladeLog.Features.Workings;
 

@@ -15,34 +15,34 @@ internal static class CutPage
 {
     public const string Path = "/workings/cut";
 
-    public static WorkingModel Of(WorkingForm form, WorkingCase from)
+    public static WorkingModel Of(AskForm form, WorkingCase from)
     {
         AdviceSettings settings = from.Settings;
         BladeBody? body = from.Blade?.Body;
         SawSetup? setup = from.Saw?.Setup;
-        double? t = form.Length("thickness", "Thickness", Fields.Thickness, Start.Of(body?.Thickness, 0.6e-3));
-        double? k = form.Length("kerf", "Kerf", Fields.Kerf, Start.Of(body?.Kerf, 1.1e-3));
-        double? p = form.Pitch("pitch", "Pitch, the mean", Start.Of(body?.PitchMean, "specification", 8.5e-3));
-        double? g = form.Length("gullet", "Gullet depth", Fields.GulletDepth, Start.Of(body?.Gullet, 3.4e-3));
+        double? t = form.Length("thickness", "Thickness", Fields.Thickness, Given.Of(body?.Thickness, 0.6e-3));
+        double? k = form.Length("kerf", "Kerf", Fields.Kerf, Given.Of(body?.Kerf, 1.1e-3));
+        double? p = form.Pitch("pitch", "Pitch, the mean", Given.Of(body?.PitchMean, "specification", 8.5e-3));
+        double? g = form.Length("gullet", "Gullet depth", Fields.GulletDepth, Given.Of(body?.Gullet, 3.4e-3));
         ToothForm tooth = form.Choose("form", "Tooth form", body?.Form ?? ToothForm.Hook, Mark(body), (ToothForm.Regular, "regular", "regular"), (ToothForm.Skip, "skip", "skip"), (ToothForm.Hook, "hook", "hook"));
-        double? rake = form.Angle("hook", "Hook angle", Start.Of(body?.Rake, double.DegreesToRadians(10)));
+        double? rake = form.Angle("hook", "Hook angle", Given.Of(body?.Rake, double.DegreesToRadians(10)));
         TipKind tip = form.Choose("tip", "Tip", body?.Tip ?? TipKind.Set, Mark(body), (TipKind.Set, "set", "set"), (TipKind.Swaged, "swaged", "swaged"), (TipKind.Tipped, "tipped", "tipped"));
-        double? r = form.Length("edge", "Edge radius", Fields.EdgeRadius, Start.Of(from.Blade?.Edge.RadiusM, "from its path since the last sharpening", 20e-6));
-        double? L = form.Length("loop", "Loop", Fields.Loop, Start.Of(from.Blade?.File.LoopM ?? setup?.LoopM, "of the blade", 3.4));
-        double? v = form.BandSpeed("speed", "Band speed", Start.Of(setup?.UsualSpeedMps, "usual speed of the saw", 16));
-        double? H = form.Length("height", "Height of the wood along the blade", Fields.CutHeight, Start.Of(from.Cut?.HeightM, "of the cut", 0.150));
+        double? r = form.Length("edge", "Edge radius", Fields.EdgeRadius, Given.Of(from.Blade?.Edge.RadiusM, "from its path since the last sharpening", 20e-6));
+        double? L = form.Length("loop", "Loop", Fields.Loop, Given.Of(from.Blade?.File.LoopM ?? setup?.LoopM, "of the blade", 3.4));
+        double? v = form.BandSpeed("speed", "Band speed", Given.Of(setup?.UsualSpeedMps, "usual speed of the saw", 16));
+        double? H = form.Length("height", "Height of the wood along the blade", Fields.CutHeight, Given.Of(from.Cut?.HeightM, "of the cut", 0.150));
         Material? wood = form.Look("wood", "Wood", from.Cut?.Material?.Name ?? "Scots pine", from.Cut is null ? "example" : "of the cut", Find, [.. MaterialTable.All.Where(m => m.Density12 is not null).Select(m => m.Name)]);
-        double? rho = form.Density("density", "Density at 12 % moisture", Start.Of(wood?.Density12, $"of {wood?.Name ?? "the wood"}, {Figures.Mark(wood?.Provenance ?? Provenance.FromMemory)}", null));
-        double? moisture = form.Moisture("moisture", "Moisture", Start.Of(from.Cut?.Moisture, wood?.DefaultMoisture ?? 12));
+        double? rho = form.Density("density", "Density at 12 % moisture", Given.Of(wood?.Density12, $"of {wood?.Name ?? "the wood"}, {Figures.Mark(wood?.Provenance ?? Provenance.FromMemory)}", null));
+        double? moisture = form.Moisture("moisture", "Moisture", Given.Of(from.Cut?.Moisture, wood?.DefaultMoisture ?? 12));
         CutDirection direction = form.Choose("direction", "Direction", from.Cut?.Cut.Direction ?? CutDirection.Rip, from.Cut is null ? "example" : "of the cut", (CutDirection.Rip, "rip", "along the grain"), (CutDirection.Cross, "cross", "across the grain"));
         YesNo frozen = form.Choose("frozen", "Frozen", from.Cut?.Cut.Frozen == true ? YesNo.Yes : YesNo.No, from.Cut is null ? "example" : "of the cut", (YesNo.No, "no", "no"), (YesNo.Yes, "yes", "yes"));
-        double? f = form.Feed("feed", "Feed", form.Example ? Start.Example(2.0 / 60) : Start.None, optional: true);
-        double? fill = form.Number("fill", "Gullet fill allowed", "a gullet fill", 0.05, 1, "", Start.Of(from.Cut is { IsWood: true } && setup is not null ? from.Cut.Fill(setup, settings).Fill : settings.Known(CutSettings.FillDryHand), 0.4));
-        double? power = form.Power("power", "Power left for cutting, at the band", Start.Of(AtBand(setup, settings), "motor less idling and drive", 1200), optional: true);
+        double? f = form.Feed("feed", "Feed", form.Example ? Given.Example(2.0 / 60) : Given.None, optional: true);
+        double? fill = form.Number("fill", "Gullet fill allowed", "a gullet fill", 0.05, 1, "", Given.Of(from.Cut is { IsWood: true } && setup is not null ? from.Cut.Fill(setup, settings).Fill : settings.Known(CutSettings.FillDryHand), 0.4));
+        double? power = form.Power("power", "Power left for cutting, at the band", Given.Of(AtBand(setup, settings), "motor less idling and drive", 1200), optional: true);
         bool feeder = from.Cut is { } cut && setup is not null && cut.WithFeeder(setup);
-        double? push = form.Force("push", feeder ? "Push of the feeder" : "Push of a hand", feeder ? Start.Of(setup!.FeederN, "as the saw is set up", null) : Start.Of(settings.Known(CutSettings.PushGreen), 70), optional: true);
+        double? push = form.Force("push", feeder ? "Push of the feeder" : "Push of a hand", feeder ? Given.Of(setup!.FeederN, "as the saw is set up", null) : Given.Of(settings.Known(CutSettings.PushGreen), 70), optional: true);
         ThrustLimits? stands = from is { Blade: { } blade, Saw: { } saw, Tension: { } tension } && H is { } high ? form.Try(() => from.Advice.Beams.Of(blade.Body, tension, saw.Setup, saw.Setup.UsualSpeedMps, high)) : null;
-        double? thrust = form.Force("thrust", "Push the blade stands", Start.Of(stands?.Allowed.Newtons, "from its section, tension and guides", 120), optional: true);
+        double? thrust = form.Force("thrust", "Push the blade stands", Given.Of(stands?.Allowed.Newtons, "from its section, tension and guides", 120), optional: true);
 
         Shown shown = new(form.Units);
         if (k is { } kerf && t is { } thick && kerf < thick)

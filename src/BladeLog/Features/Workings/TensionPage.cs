@@ -4,7 +4,7 @@ using BladeLog.Handbook.Quantities;
 using BladeLog.Ui;
 using BladeLog.Ui.Forms;
 using BladeLog.Ui.Pictures.Geometry;
-using static BladeLog.Features.Workings.Shown;
+using static BladeLog.Features.Shown;
 
 namespace BladeLog.Features.Workings;
 
@@ -16,13 +16,13 @@ internal static class TensionPage
     /// <summary>Length over which a stretch is read on a shop's gauge.</summary>
     private const double Gauge = 0.127;
 
-    public static WorkingModel Of(WorkingForm form, WorkingCase from)
+    public static WorkingModel Of(AskForm form, WorkingCase from)
     {
         AdviceSettings settings = from.Settings;
         BladeBody? body = from.Blade?.Body;
-        double? t = form.Length("thickness", "Thickness", Fields.Thickness, Start.Of(body?.Thickness, 0.64e-3));
-        double? w = form.Length("width", "Width over the teeth", Fields.BladeWidth, Start.Of(body?.Width, 13e-3));
-        double? g = form.Length("gullet", "Gullet depth", Fields.GulletDepth, Start.Of(body?.Gullet, 1.8e-3));
+        double? t = form.Length("thickness", "Thickness", Fields.Thickness, Given.Of(body?.Thickness, 0.64e-3));
+        double? w = form.Length("width", "Width over the teeth", Fields.BladeWidth, Given.Of(body?.Width, 13e-3));
+        double? g = form.Length("gullet", "Gullet depth", Fields.GulletDepth, Given.Of(body?.Gullet, 1.8e-3));
         double? now = from.Tension?.Stress.Value ?? (body is null ? null : settings.Tension(body.Steel).Value);
         double? given = now is { } pa ? pa * body!.Thickness.Value * body.BodyWidth : null;
         TensionMethod method = form.Choose("from", "Known is", TensionMethod.StrandForce, "as the page begins",
@@ -30,15 +30,15 @@ internal static class TensionPage
             (TensionMethod.Stretch, "stretch", "the stretch of a measured length"), (TensionMethod.Pluck, "note", "the note of a plucked span"));
         double? force = method switch
         {
-            TensionMethod.StrandForce => form.Force("pull", "Pull in one strand", Start.Of(given, $"from the {form.Units.PullName} reckoned with", 717)),
-            TensionMethod.WheelLoad => form.Force("load", "Load on the movable wheel", Start.Of(2 * given, $"from the {form.Units.PullName} reckoned with", 1434)),
+            TensionMethod.StrandForce => form.Force("pull", "Pull in one strand", Given.Of(given, $"from the {form.Units.PullName} reckoned with", 717)),
+            TensionMethod.WheelLoad => form.Force("load", "Load on the movable wheel", Given.Of(2 * given, $"from the {form.Units.PullName} reckoned with", 1434)),
             _ => null,
         };
-        double? stretch = method == TensionMethod.Stretch ? form.Length("stretch", "Stretch", Fields.Deflection, Start.Of(now * Gauge / settings.Steel.YoungsModulus.Pascals, $"from the {form.Units.PullName} reckoned with", 0.0635e-3)) : null;
-        double? gauge = method == TensionMethod.Stretch ? form.Length("gauge", "Measured over", Fields.Board, Start.Example(Gauge)) : null;
-        double? note = method == TensionMethod.Pluck ? form.Number("note", "Note", "a note", 1, 20000, "Hz", Start.Example(90)) : null;
-        double? span = method == TensionMethod.Pluck ? form.Length("span", "Free span between the wheels", Fields.Board, Start.Example(0.6)) : null;
-        double? most = form.Force("most", "Greatest pull of the saw in one strand", Start.Of(from.Saw?.Setup.StrandForceMostN, "as the saw is set up", null), optional: true);
+        double? stretch = method == TensionMethod.Stretch ? form.Length("stretch", "Stretch", Fields.Deflection, Given.Of(now * Gauge / settings.Steel.YoungsModulus.Pascals, $"from the {form.Units.PullName} reckoned with", 0.0635e-3)) : null;
+        double? gauge = method == TensionMethod.Stretch ? form.Length("gauge", "Measured over", Fields.Board, Given.Example(Gauge)) : null;
+        double? note = method == TensionMethod.Pluck ? form.Number("note", "Note", "a note", 1, 20000, "Hz", Given.Example(90)) : null;
+        double? span = method == TensionMethod.Pluck ? form.Length("span", "Free span between the wheels", Fields.Board, Given.Example(0.6)) : null;
+        double? most = form.Force("most", "Greatest pull of the saw in one strand", Given.Of(from.Saw?.Setup.StrandForceMostN, "as the saw is set up", null), optional: true);
 
         Shown shown = new(form.Units);
         string title = $"What {form.Units.PullName} does this give?";

@@ -5,7 +5,7 @@ using BladeLog.Records;
 using BladeLog.Ui;
 using BladeLog.Ui.Forms;
 using BladeLog.Ui.Pictures.Geometry;
-using static BladeLog.Features.Workings.Shown;
+using static BladeLog.Features.Shown;
 
 namespace BladeLog.Features.Workings;
 
@@ -14,22 +14,22 @@ internal static class ThrustLimitsPage
 {
     public const string Path = "/workings/thrust-limits";
 
-    public static WorkingModel Of(WorkingForm form, WorkingCase from)
+    public static WorkingModel Of(AskForm form, WorkingCase from)
     {
         AdviceSettings settings = from.Settings;
         BladeBody? body = from.Blade?.Body;
         SawSetup? setup = from.Saw?.Setup;
         BladeTension? tensioned = from.Tension;
-        double? w = form.Length("width", "Width over the teeth", Fields.BladeWidth, Start.Of(body?.Width, 25e-3));
-        double? t = form.Length("thickness", "Thickness", Fields.Thickness, Start.Of(body?.Thickness, 0.9e-3));
-        double? g = form.Length("gullet", "Gullet depth", Fields.GulletDepth, Start.Of(body?.Gullet, 5e-3));
-        double? tension = form.Stress("tension", $"{Said.Capital(form.Units.PullName)} on the body, running", Start.Of(tensioned?.Stress ?? (body is null ? null : settings.Tension(body.Steel)), 100e6));
-        double? H = form.Length("height", "Height of the wood along the blade", Fields.CutHeight, Start.Of(from.Cut?.HeightM ?? (setup is null ? null : Sharpness.Reference(setup, settings).DepthM), from.Cut is null ? "depth for metres left" : "of the cut", 0.150));
-        double? below = form.Length("below", "Lower guide under the wood", Fields.CutHeight, Start.Of(setup?.LowerGuideM, "as the saw is set up", 0.040));
-        double? above = form.Length("above", "Upper guide over the wood", Fields.CutHeight, Start.Of(setup?.ClearanceM, "as the saw is set up", 0.010));
+        double? w = form.Length("width", "Width over the teeth", Fields.BladeWidth, Given.Of(body?.Width, 25e-3));
+        double? t = form.Length("thickness", "Thickness", Fields.Thickness, Given.Of(body?.Thickness, 0.9e-3));
+        double? g = form.Length("gullet", "Gullet depth", Fields.GulletDepth, Given.Of(body?.Gullet, 5e-3));
+        double? tension = form.Stress("tension", $"{Said.Capital(form.Units.PullName)} on the body, running", Given.Of(tensioned?.Stress ?? (body is null ? null : settings.Tension(body.Steel)), 100e6));
+        double? H = form.Length("height", "Height of the wood along the blade", Fields.CutHeight, Given.Of(from.Cut?.HeightM ?? (setup is null ? null : Sharpness.Reference(setup, settings).DepthM), from.Cut is null ? "depth for metres left" : "of the cut", 0.150));
+        double? below = form.Length("below", "Lower guide under the wood", Fields.CutHeight, Given.Of(setup?.LowerGuideM, "as the saw is set up", 0.040));
+        double? above = form.Length("above", "Upper guide over the wood", Fields.CutHeight, Given.Of(setup?.ClearanceM, "as the saw is set up", 0.010));
         TensionSystem system = form.Choose("system", "Wheel held by", setup?.TensionSystem ?? TensionSystem.Sprung, setup is null ? "example" : "as the saw is set up",
             (TensionSystem.Sprung, "sprung", "spring, weight, air or oil"), (TensionSystem.Locked, "locked", "a locked screw"));
-        double? v = form.BandSpeed("speed", "Band speed", Start.Of(setup?.UsualSpeedMps, "usual speed of the saw", 15));
+        double? v = form.BandSpeed("speed", "Band speed", Given.Of(setup?.UsualSpeedMps, "usual speed of the saw", 15));
         Sure sure = form.Choose("sure", $"The {form.Units.PullName} is", tensioned?.Guessed == true ? Sure.Guessed : Sure.Measured, tensioned is null ? "example" : "as recorded",
             (Sure.Measured, "measured", "measured or set to a target"), (Sure.Guessed, "guessed", "only guessed"));
 

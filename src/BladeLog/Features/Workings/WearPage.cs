@@ -6,7 +6,7 @@ using BladeLog.Records;
 using BladeLog.Ui;
 using BladeLog.Ui.Forms;
 using BladeLog.Ui.Pictures.Geometry;
-using static BladeLog.Features.Workings.Shown;
+using static BladeLog.Features.Shown;
 
 namespace BladeLog.Features.Workings;
 
@@ -15,7 +15,7 @@ internal static class WearPage
 {
     public const string Path = "/workings/wear";
 
-    public static WorkingModel Of(WorkingForm form, WorkingCase from)
+    public static WorkingModel Of(AskForm form, WorkingCase from)
     {
         AdviceSettings settings = from.Settings;
         BladeAdvice? blade = from.Blade;
@@ -23,17 +23,17 @@ internal static class WearPage
         TipMaterial tip = form.Choose("tip", "Tooth", blade?.Body.TipMaterial ?? TipMaterial.HardenedCarbon, blade is null ? "example" : "specification",
             (TipMaterial.PlainSteel, "plain", "plain saw steel"), (TipMaterial.HardenedCarbon, "hardened", "hardened tips"), (TipMaterial.Bimetal, "bimetal", "bi-metal"),
             (TipMaterial.CobaltAlloy, "cobalt", "cobalt alloy tips"), (TipMaterial.Carbide, "carbide", "carbide tips"));
-        double? r0 = form.Length("fresh", "Edge radius after the last grind", Fields.EdgeRadius, Start.Of(blade?.Body.FreshEdge, tip == TipMaterial.Carbide ? 10e-6 : 8e-6));
+        double? r0 = form.Length("fresh", "Edge radius after the last grind", Fields.EdgeRadius, Given.Of(blade?.Body.FreshEdge, tip == TipMaterial.Carbide ? 10e-6 : 8e-6));
         Known rate = settings.Wear(tip);
-        double? wear = form.Number("wear", "Wear", "a wear rate", 0.01, 40, "µm/km", new Start(rate.Value, rate.From));
-        double? path = form.Number("path", "Path since the last grind, per tooth", "a path", 0, 1000, "km", Start.Of(blade?.Edge.PathKm, "from its cuts, wood and dirt counted in", 5));
-        double? dull = form.Length("dull", "Dull at", Fields.EdgeRadius, Start.Of(settings.Known(LifeSettings.Dull, 1e-6), 40e-6));
+        double? wear = form.Number("wear", "Wear", "a wear rate", 0.01, 40, "µm/km", new Given(rate.Value, rate.From));
+        double? path = form.Number("path", "Path since the last grind, per tooth", "a path", 0, 1000, "km", Given.Of(blade?.Edge.PathKm, "from its cuts, wood and dirt counted in", 5));
+        double? dull = form.Length("dull", "Dull at", Fields.EdgeRadius, Given.Of(settings.Known(LifeSettings.Dull, 1e-6), 40e-6));
         (double depth, double referenceFeed) = setup is null ? (0.1, 2.0 / 60) : Sharpness.Reference(setup, settings);
-        double? H = form.Length("height", "Height of the wood along the blade", Fields.CutHeight, Start.Of(from.Cut?.HeightM ?? (setup is null ? null : depth), from.Cut is null ? "depth for metres left" : "of the cut", 0.1));
-        double? f = form.Feed("feed", "Feed", Start.Of(setup is null ? null : referenceFeed, "feed for metres left", 2.0 / 60));
-        double? v = form.BandSpeed("speed", "Band speed", Start.Of(setup?.UsualSpeedMps, "usual speed of the saw", 16));
-        double? L = form.Length("loop", "Loop", Fields.Loop, Start.Of(blade?.File.LoopM ?? setup?.LoopM, "of the blade", 3.4));
-        double? factor = form.Number("factor", "Wear of the wood against a clean medium one, dirt counted in", "a wear factor", 0.1, 100, "", Start.Of(from.Cut is { } c ? c.WoodFactor with { Value = c.WoodFactor.Value * c.DirtFactor.Value } : null, 1));
+        double? H = form.Length("height", "Height of the wood along the blade", Fields.CutHeight, Given.Of(from.Cut?.HeightM ?? (setup is null ? null : depth), from.Cut is null ? "depth for metres left" : "of the cut", 0.1));
+        double? f = form.Feed("feed", "Feed", Given.Of(setup is null ? null : referenceFeed, "feed for metres left", 2.0 / 60));
+        double? v = form.BandSpeed("speed", "Band speed", Given.Of(setup?.UsualSpeedMps, "usual speed of the saw", 16));
+        double? L = form.Length("loop", "Loop", Fields.Loop, Given.Of(blade?.File.LoopM ?? setup?.LoopM, "of the blade", 3.4));
+        double? factor = form.Number("factor", "Wear of the wood against a clean medium one, dirt counted in", "a wear factor", 0.1, 100, "", Given.Of(from.Cut is { } c ? c.WoodFactor with { Value = c.WoodFactor.Value * c.DirtFactor.Value } : null, 1));
 
         Shown shown = new(form.Units);
         List<BecauseLine> lines = [];

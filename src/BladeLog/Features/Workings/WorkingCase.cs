@@ -8,7 +8,7 @@ namespace BladeLog.Features.Workings;
 /// <summary>The blade, saw and cut whose figures a working takes over: from <c>?blade=Q-09&amp;saw=S2&amp;cut=2</c>.</summary>
 internal sealed class WorkingCase
 {
-    private readonly List<WorkingField> _picks = [];
+    private readonly List<AskField> _picks = [];
 
     public BladeAdvice? Blade { get; private init; }
 
@@ -18,7 +18,7 @@ internal sealed class WorkingCase
 
     public required ShopAdvice Advice { get; init; }
 
-    public IReadOnlyList<WorkingField> Picks => _picks;
+    public IReadOnlyList<AskField> Picks => _picks;
 
     public IEnumerable<Problem> Problems => _picks.Where(p => p.Error is not null).Select(p => new Problem(p.Name, p.Error!));
 
@@ -83,5 +83,5 @@ internal sealed class WorkingCase
     }
 
     private void Pick(string name, string label, string typed, string? found, string empty, string unknown, IReadOnlyList<Answer> answers) =>
-        _picks.Add(new WorkingField(name, label, found ?? "", null, typed.Length > 0 && found is null ? $"{unknown} \"{(typed.Length > 40 ? typed[..40] : typed)}\". Choose one of the list." : null, answers, empty));
+        _picks.Add(new AskField(name, label, found ?? "", null, typed.Length > 0 && found is null ? $"{unknown} \"{(typed.Length > 40 ? typed[..40] : typed)}\". Choose one of the list." : null, answers, empty));
 }

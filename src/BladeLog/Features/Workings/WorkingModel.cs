@@ -3,18 +3,6 @@ using BladeLog.Ui.Pictures.Geometry;
 
 namespace BladeLog.Features.Workings;
 
-/// <summary>One field of a working: what it is called in the address, what stands in it and where that comes from.</summary>
-/// <param name="Name">The query parameter.</param>
-/// <param name="Label">In words.</param>
-/// <param name="Value">The text in the field.</param>
-/// <param name="Hint">Where it comes from, or what was understood.</param>
-/// <param name="Error">What is wrong, beside the field.</param>
-/// <param name="Choices">One out of these; null: typed.</param>
-/// <param name="Empty">Words of the empty choice.</param>
-/// <param name="Offers">Offered while typing.</param>
-public sealed record WorkingField(
-    string Name, string Label, string Value, string? Hint, string? Error, IReadOnlyList<Answer>? Choices = null, string? Empty = null, IReadOnlyList<string>? Offers = null);
-
 /// <summary>A working as its page shows it: the answer, how it is got, the curves, and the form that can be shared as an address.</summary>
 public sealed record WorkingModel
 {
@@ -26,10 +14,10 @@ public sealed record WorkingModel
     /// <summary>The answer as the title; the question while something is missing.</summary>
     public required string Title { get; init; }
 
-    public required IReadOnlyList<WorkingField> Fields { get; init; }
+    public required IReadOnlyList<AskField> Fields { get; init; }
 
     /// <summary>Blade, saw and cut to take the figures from.</summary>
-    public required IReadOnlyList<WorkingField> Picks { get; init; }
+    public required IReadOnlyList<AskField> Picks { get; init; }
 
     public required IReadOnlyList<Problem> Problems { get; init; }
 

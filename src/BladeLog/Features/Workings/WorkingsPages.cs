@@ -25,16 +25,16 @@ internal static class WorkingsPages
         Get(app, WearPage.Path, WearPage.Of);
         app.MapGet(CrackPage.Path, async (HttpRequest request, Desk desk) =>
         {
-            WorkingModel model = CrackPage.Of(new WorkingForm(request.Query, await desk.Units(), false), (await desk.Advice()).Settings);
+            WorkingModel model = CrackPage.Of(new AskForm(request.Query, await desk.Units(), false), (await desk.Advice()).Settings);
             return await desk.Page<WorkingPage, WorkingModel>(model, Status(model));
         });
     }
 
-    private static void Get(WebApplication app, string path, Func<WorkingForm, WorkingCase, WorkingModel> answer) =>
+    private static void Get(WebApplication app, string path, Func<AskForm, WorkingCase, WorkingModel> answer) =>
         app.MapGet(path, async (HttpRequest request, Desk desk) =>
         {
             WorkingCase from = WorkingCase.Of(request.Query, await desk.Advice());
-            WorkingModel model = answer(new WorkingForm(request.Query, await desk.Units(), from.Any), from);
+            WorkingModel model = answer(new AskForm(request.Query, await desk.Units(), from.Any), from);
             model = model with { Problems = [.. from.Problems, .. model.Problems] };
             return await desk.Page<WorkingPage, WorkingModel>(model, Status(model));
         });

@@ -4,74 +4,86 @@ using BladeLog.Handbook.Quantities;
 using BladeLog.Ui;
 using BladeLog.Ui.Forms;
 
-namespace BladeLog.Features.Workings;
+namespace BladeLog.Features;
+
+/// <summary>One field of a form that is an address: what it is called there, what stands in it and where that comes from.</summary>
+/// <param name="Name">The query parameter.</param>
+/// <param name="Label">In words.</param>
+/// <param name="Value">The text in the field.</param>
+/// <param name="Hint">Where it comes from, or what was understood.</param>
+/// <param name="Error">What is wrong, beside the field.</param>
+/// <param name="Choices">One out of these; null: typed.</param>
+/// <param name="Empty">Words of the empty choice.</param>
+/// <param name="Offers">Offered while typing.</param>
+public sealed record AskField(
+    string Name, string Label, string Value, string? Hint, string? Error, IReadOnlyList<Answer>? Choices = null, string? Empty = null, IReadOnlyList<string>? Offers = null);
 
 /// <summary>What stands in a field before anybody typed: from the shop, or the example. In SI.</summary>
-internal readonly record struct Start(double? Si, string Mark)
+internal readonly record struct Given(double? Si, string Mark)
 {
-    public static Start None { get; } = new(null, "");
+    public static Given None { get; } = new(null, "");
 
-    public static Start Example(double si) => new(si, "example");
+    public static Given Example(double si) => new(si, "example");
 
     /// <summary>The shop's own figure where there is one, else the example.</summary>
-    public static Start Of(Known? known, double example) => known is { } k ? new(k.Value, k.From) : Example(example);
+    public static Given Of(Known? known, double example) => known is { } k ? new(k.Value, k.From) : Example(example);
 
-    public static Start Of(double? known, string from, double? example) =>
+    public static Given Of(double? known, string from, double? example) =>
         known is { } k ? new(k, from) : example is { } e ? Example(e) : None;
 }
 
 /// <summary>
-/// Reads the query of a working field by field. An empty field takes the shop's figure or the example; a bad one keeps its
+/// Reads a query field by field. An empty field takes the shop's figure or the example; a bad one keeps its
 /// text, gets a sentence, and gives no figure, so that what does not need it can still be answered.
 /// </summary>
-internal sealed class WorkingForm(IQueryCollection query, ShopUnits units, bool fromShop)
+internal sealed class AskForm(IQueryCollection query, ShopUnits units, bool fromShop)
 {
-    private readonly List<WorkingField> _fields = [];
+    private readonly List<AskField> _fields = [];
     private readonly List<Problem> _problems = [];
     private bool _typed;
 
     public ShopUnits Units => units;
 
-    public IReadOnlyList<WorkingField> Fields => _fields;
+    public IReadOnlyList<AskField> Fields => _fields;
 
     public IReadOnlyList<Problem> Problems => _problems;
 
     public bool Example => !_typed && !fromShop;
 
     /// <summary>A length in metres.</summary>
-    public double? Length(string name, string label, TypedField kind, Start start, bool optional = false) =>
+    public double? Length(string name, string label, TypedField kind, Given start, bool optional = false) =>
         Read(name, label, start, optional, t => units.ReadLength(t, kind), l => l.Metres, v => units.Show(new Length(v), kind));
 
-    public double? Stress(string name, string label, Start start, bool optional = false) =>
+    public double? Stress(string name, string label, Given start, bool optional = false) =>
         Read(name, label, start, optional, t => units.ReadStress(t), s => s.Pascals, v => units.Show(new Stress(v)));
 
-    public double? Force(string name, string label, Start start, bool optional = false) =>
+    public double? Force(string name, string label, Given start, bool optional = false) =>
         Read(name, label, start, optional, t => units.ReadForce(t), f => f.Newtons, v => units.Show(new Force(v)));
 
-    public double? BandSpeed(string name, string label, Start start) =>
+    public double? BandSpeed(string name, string label, Given start) =>
         Read(name, label, start, false, t => units.ReadBandSpeed(t), s => s.MetresPerSecond, v => units.ShowBandSpeed(new Speed(v)));
 
-    public double? Feed(string name, string label, Start start, bool optional = false) =>
+    public double? Feed(string name, string label, Given start, bool optional = false) =>
         Read(name, label, start, optional, t => units.ReadFeed(t), s => s.MetresPerSecond, v => units.ShowFeed(new Speed(v)));
 
-    public double? Power(string name, string label, Start start, bool optional = false) =>
+    public double? Power(string name, string label, Given start, bool optional = false) =>
         Read(name, label, start, optional, t => units.ReadPower(t, AtTheBand), p => p.Watts, v => units.Show(new Power(v)));
 
-    public double? Density(string name, string label, Start start, bool optional = false) =>
+    public double? Density(string name, string label, Given start, bool optional = false) =>
         Read(name, label, start, optional, t => units.ReadDensity(t), d => d.KilogramsPerCubicMetre, v => units.Show(new Density(v)));
 
-    public double? Angle(string name, string label, Start start) =>
+    public double? Angle(string name, string label, Given start) =>
         Read(name, label, start, false, t => units.ReadAngle(t, Ui.Fields.Hook), a => a.Radians, v => units.Show(new Angle(v)));
 
     /// <summary>The mean pitch in metres.</summary>
-    public double? Pitch(string name, string label, Start start) =>
+    public double? Pitch(string name, string label, Given start) =>
         Read(name, label, start, false, units.ReadPitch, p => p.Mean.Metres, v => units.Show(ToothPitch.Between(v, v)));
 
-    public double? Moisture(string name, string label, Start start) =>
+    public double? Moisture(string name, string label, Given start) =>
         Read(name, label, start, false, units.ReadMoisture, m => m, units.ShowPercent);
 
     /// <summary>A plain number within bounds, with the words of its unit behind it.</summary>
-    public double? Number(string name, string label, string article, double least, double most, string unit, Start start, bool optional = false)
+    public double? Number(string name, string label, string article, double least, double most, string unit, Given start, bool optional = false)
     {
         Parsed<double> Parse(string text)
         {
@@ -195,7 +207,7 @@ internal sealed class WorkingForm(IQueryCollection query, ShopUnits units, bool 
         }
     }
 
-    private double? Read<T>(string name, string label, Start start, bool optional, Func<string, Parsed<T>> read, Func<T, double> si, Func<double, string> show)
+    private double? Read<T>(string name, string label, Given start, bool optional, Func<string, Parsed<T>> read, Func<T, double> si, Func<double, string> show)
     {
         string typed = Typed(name);
         if (typed.Length > 0)
@@ -213,7 +225,7 @@ internal sealed class WorkingForm(IQueryCollection query, ShopUnits units, bool 
         return value;
     }
 
-    private void Add(WorkingField field)
+    private void Add(AskField field)
     {
         _fields.Add(field);
         if (field.Error is { } error)

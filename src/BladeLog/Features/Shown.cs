@@ -4,7 +4,7 @@ using BladeLog.Ui;
 using BladeLog.Ui.Forms;
 using BladeLog.Ui.Pictures.Geometry;
 
-namespace BladeLog.Features.Workings;
+namespace BladeLog.Features;
 
 /// <summary>SI to the shop's units on axes and in lines.</summary>
 internal sealed class Shown(ShopUnits units)
@@ -39,7 +39,9 @@ internal sealed class Shown(ShopUnits units)
 
     public static string Micrometres(double metres, int decimals = 1) => Figures.With(Figures.Number(metres * 1e6, decimals), "µm");
 
-    public static BecauseLine Line(string what, string value, string formula, string source, Provenance provenance) => new(what, value, formula, source, provenance);
+    /// <summary>One line of the reckoning. Keys that are no publication say nothing beyond their mark.</summary>
+    public static BecauseLine Line(string what, string value, string formula, string source, Provenance provenance) =>
+        new(what, value, formula, source is "derived" or "engineering-default" or "common-practice" or "from-memory" ? null : source, provenance);
 
     /// <summary>Points of a line, evenly spaced on its axis.</summary>
     public static IReadOnlyList<Point> Points(AxisScale x, Func<double, double?> y, int count = 60) =>
