@@ -56,6 +56,12 @@ internal static class FormFlow
     /// <summary>The form's own field for a field of the command; null where the form has none, so that the sentence stands over it.</summary>
     private static string? FieldOf<TForm>(string field)
     {
+        // A row of a list keeps its place: Lines[2].Width.
+        if (field.IndexOf('[') is > 0 and var bracket && typeof(TForm).GetProperty(field[..bracket]) is not null)
+        {
+            return field;
+        }
+
         foreach (var name in Units.Where(u => field.EndsWith(u, StringComparison.Ordinal)).Select(u => field[..^u.Length]).Prepend(field))
         {
             if (typeof(TForm).GetProperty(name) is not null)

@@ -1,9 +1,15 @@
+using BladeLog.Features.Bench;
 using BladeLog.Features.Blades;
+using BladeLog.Features.Cautions;
 using BladeLog.Features.Cuts;
 using BladeLog.Features.Floor;
+using BladeLog.Features.Import;
 using BladeLog.Features.More;
+using BladeLog.Features.People;
 using BladeLog.Features.Rack;
+using BladeLog.Features.Record;
 using BladeLog.Features.Saws;
+using BladeLog.Features.Setup;
 using BladeLog.Features.Start;
 using BladeLog.Features.Workings;
 
@@ -28,6 +34,13 @@ internal static class Registration
         SawPages.Map(app);
         MorePages.Map(app);
         BladeForms.Map(app);
+        BenchPages.Map(app);
+        RecordPages.Map(app);
+        PeoplePages.Map(app);
+        SetupPages.Map(app);
+        CautionPages.Map(app);
+        WorkingsPages.Map(app);
+        ImportPages.Map(app);
 
         var api = app.MapGroup("/api/v1").DisableAntiforgery();
         WorkingsJson.Map(api);

@@ -30,6 +30,7 @@ public sealed class OpenApiTests(EmptyShop shop) : IClassFixture<EmptyShop>
             .SelectMany(e => e.Metadata.GetMetadata<HttpMethodMetadata>()!.HttpMethods.Select(m => (Method: m.ToLowerInvariant(), Path: Plain(e.RoutePattern.RawText!))))
             .ToArray();
         Assert.True(routes.Length >= 11);
+        Assert.All(paths.EnumerateObject(), p => Assert.StartsWith("/api/v1/", p.Name, StringComparison.Ordinal));
         foreach (var (method, path) in routes)
         {
             Assert.True(paths.TryGetProperty(path, out var at) && at.TryGetProperty(method, out _), $"{method} {path} is not described.");

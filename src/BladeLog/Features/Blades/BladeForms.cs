@@ -5,6 +5,10 @@ internal static class BladeForms
 {
     public static void Map(WebApplication app)
     {
+        app.MapGet("/blades/new", NewBlade.Get);
+        app.MapPost("/blades/new", NewBlade.Post);
+        app.MapGet("/blades/{tag}/edit", Change.Get);
+        app.MapPost("/blades/{tag}/edit", Change.Post);
         app.MapGet("/blades/{tag}/sharpen", Sharpen.Get);
         app.MapPost("/blades/{tag}/sharpen", Sharpen.Post);
         app.MapGet("/blades/{tag}/inspect", Inspect.Get);

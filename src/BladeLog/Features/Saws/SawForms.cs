@@ -5,6 +5,10 @@ internal static class SawForms
 {
     public static void Map(WebApplication app)
     {
+        app.MapGet("/saws/new", SetupSaw.GetNew);
+        app.MapPost("/saws/new", SetupSaw.PostNew);
+        app.MapGet("/saws/{code}/edit", SetupSaw.GetEdit);
+        app.MapPost("/saws/{code}/edit", SetupSaw.PostEdit);
         app.MapGet("/saws/{code}/swap", Swap.Get);
         app.MapPost("/saws/{code}/swap", Swap.Post);
         app.MapGet("/saws/{code}/hours", Hours.Get);

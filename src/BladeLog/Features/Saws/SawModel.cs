@@ -9,6 +9,9 @@ public sealed record SawFact(string Name, string Value, string? Remark = null);
 /// <summary>What is on the saw.</summary>
 public sealed record MountedPart(string Tag, ToothSpec Teeth, string State, string Since, string Tension);
 
+/// <summary>The cut that the picture shows, the blade it is made with and the feed.</summary>
+public sealed record CaptionPart(string Figures, string Tag, string Feed);
+
 /// <summary>A wheel with what it does to the mounted blade.</summary>
 public sealed record WheelPart(string Name, string Diameter, string? Bending, string? Fraction);
 
@@ -40,7 +43,8 @@ public sealed record SawModel
 
     public double? Stock { get; init; }
 
-    public required string Caption { get; init; }
+    /// <summary>What guides and thrust are of; null: no cut waits.</summary>
+    public CaptionPart? Caption { get; init; }
 
     public required IReadOnlyList<SawFact> Facts { get; init; }
 

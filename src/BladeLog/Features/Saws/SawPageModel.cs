@@ -35,15 +35,13 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
             Shape = Drawn.Saw(setup),
             Figures = new SawFigures(on?.Body.Thickness.Value * 1e3, Bending(setup.Wheels.Min(w => w.DiameterM))?.Megapascals, span, thrust),
             Stock = next?.Choice.Work.HeightM * 1e3,
-            Caption = next is { } n
-                ? $"To scale, millimetres. Guides and thrust are of cut {n.Cut.Number}, {Said.Wood(n.Cut, advice.Words)}, with {n.Choice.Tag}{(n.Choice.Gate?.AdvisedMps is { } feed ? $" at {advice.Words.Feed(feed).Replace(' ', Figures.Glue)}" : "")}."
-                : "To scale, millimetres. No cut waits for this saw.",
+            Caption = next is { } n ? Caption(n, span, thrust) : null,
             Facts = [.. Facts()],
             Mounted = Mounted(),
             Hours = $"{Hours(saw.RunningMs + saw.NoBladeKnownMs)} run since this record began.",
             Question = saw.NoBladeKnownMs > 0 ? $"{Hours(saw.NoBladeKnownMs)} of them with no blade known. Which blade was on? Enter its swap at the time it happened, and the hours find it." : null,
             Wheels = [.. setup.Wheels.OrderBy(w => w.Position).Select(Wheel)],
-            Speeds = [.. setup.Speeds.OrderBy(s => s.Position).Select(s => new SpeedPart(units.ShowBandSpeed(new Speed(s.SpeedMps)), Figures.Number(BendsPerHour(s.SpeedMps)), s.Usual || setup.Speeds.Count == 1))],
+            Speeds = [.. setup.Speeds.OrderBy(s => s.Position).Select(s => new SpeedPart(units.ShowBandSpeed(new Speed(s.SpeedMps)), Figures.Number(BendsPerHour(s.SpeedMps)), s.Usual && setup.Speeds.Count > 1))],
             Cuts = [.. advice.Plan().Saws.FirstOrDefault(p => p.Saw == saw)?.Cuts.Select(Cut) ?? []],
             Fitting = [.. Fitting()],
             Because = Reckoned.Lines(Because(span, thrust), units),
@@ -81,6 +79,14 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
             _ => $"{name}: {tag} stays on for {cut}",
         };
         return (state, title, saw.Slack ? $"Its {advice.Words.Tension} is off: put it on before it runs." : $"{tag} is on it. {string.Join(" ", on.Advice.Because.Take(1))}".Trim());
+    }
+
+    private CaptionPart Caption(PlannedCut cut, double? span, double? thrust)
+    {
+        string guides = span is { } s ? $"guides {units.Show(Length.FromMillimetres(s))} apart, " : "";
+        string push = thrust is { } t ? $"thrust {units.Show(new Force(Math.Round(t)))}" : "thrust not reckoned";
+        string feed = cut.Choice.Gate?.AdvisedMps is { } mps ? $" at {advice.Words.Feed(mps).Replace(' ', Figures.Glue)}" : "";
+        return new CaptionPart($"Cut {cut.Cut.Number}, {Said.Wood(cut.Cut, advice.Words)}: {guides}{push}", cut.Choice.Tag, feed);
     }
 
     private IEnumerable<SawFact> Facts()

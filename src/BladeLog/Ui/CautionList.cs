@@ -28,7 +28,7 @@ public enum CautionAt
 public sealed record CautionLine(CautionAt At, string Sentence, string Source);
 
 /// <summary>The one list of cautions; pages and forms take theirs from here.</summary>
-public static class Cautions
+public static class CautionList
 {
     /// <summary>Stands over the list and under each part of it that is shown elsewhere.</summary>
     public const string Deference = "Guidance only. Local law, the machine's manual and competent people decide.";
