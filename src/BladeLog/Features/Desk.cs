@@ -51,12 +51,27 @@ internal sealed class Desk(TimeProvider clock, ShopDb db, ShopWriter writer, IHt
     public async Task<Person?> Who()
     {
         var initials = Http.Request.Cookies[WhoCookie];
-        if (string.IsNullOrEmpty(initials))
+        if (_who is not null || string.IsNullOrEmpty(initials))
         {
-            return null;
+            return _who;
         }
 
-        return _who ??= await db.People.AsNoTracking().Include(p => p.Roles).FirstOrDefaultAsync(p => p.Initials == initials && p.Active);
+        return _who = await db.People.AsNoTracking().Include(p => p.Roles).FirstOrDefaultAsync(p => p.Initials == initials && p.Active);
+    }
+
+    /// <summary>The person said on a form itself, kept for this tablet; false where nobody is called so.</summary>
+    public async Task<bool> SayWho(string initials)
+    {
+        var person = await db.People.AsNoTracking().Include(p => p.Roles).FirstOrDefaultAsync(p => p.Initials == initials && p.Active);
+        if (person is null)
+        {
+            return false;
+        }
+
+        _who = person;
+        Http.Response.Cookies.Append(
+            WhoCookie, person.Initials, new CookieOptions { HttpOnly = true, SameSite = SameSiteMode.Strict, MaxAge = TimeSpan.FromHours(12), IsEssential = true });
+        return true;
     }
 
     public async Task<Chrome> Chrome()

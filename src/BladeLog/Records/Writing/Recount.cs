@@ -52,7 +52,7 @@ internal static class Recount
         var runs = await FactReader.Runs(db, sawId, from, until);
         var allFrom = runs.Select(r => r.From).Append(from).Min();
         var allUntil = runs.Select(r => r.Until).Append(until).Max();
-        var spells = (await FactReader.ReadSpells(db, [sawId])).Where(s => s.From < allUntil && s.End > allFrom).ToList();
+        var spells = (await FactReader.ReadSpells(db, [sawId])).Where(s => s.From <= allUntil && s.End >= allFrom).ToList();
 
         // Paths are summed by spell, so the cuts of every spell of the window are needed from its beginning to its end.
         var inWindow = spells.Where(s => s.From <= until && s.End >= from).ToList();

@@ -114,15 +114,17 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
     }
 
     public T Add<T>(T fact, DateTime at)
+        where T : Fact => Add(fact, NewEntry(typeof(T) == typeof(VoidFact) ? "Void" : typeof(T).Name, at));
+
+    public T Add<T>(T fact, Entry entry)
         where T : Fact
     {
-        var kind = typeof(T).Name;
-        if (WhoMay.Of(kind) is { Role: { } role, Enforced: true })
+        if (WhoMay.Of(typeof(T).Name) is { Role: { } role, Enforced: true })
         {
             RefuseUnlessIn(role);
         }
 
-        fact.Entry = NewEntry(kind == nameof(VoidFact) ? "Void" : kind, at);
+        fact.Entry = entry;
         Db.Add(fact);
         return fact;
     }

@@ -109,4 +109,8 @@ public sealed record RecordRetirement(string Tag, RetireReason Reason) : Command
 }
 
 /// <summary>Strikes an entry out, with what stands or falls with it.</summary>
-public sealed record VoidEntry(int EntryId, string Reason) : Command;
+public sealed record VoidEntry(int EntryId, string Reason) : Command
+{
+    /// <summary>With everything the same form entered: a swap's two halves go together.</summary>
+    public bool Together { get; init; }
+}

@@ -77,6 +77,12 @@ internal static class SwapHandler
         }
 
         w.Add(new Dismount { MountId = closing.MountId, Reason = c.Reason }, at);
+        if (c.Reason == OffReason.CrackOrClicking)
+        {
+            // What may be cracked is held as cracked until a named person has looked.
+            w.Add(new Hold { BladeId = closing.BladeId, Kind = HoldKind.Crack, Note = "a crack was seen or clicking heard as it came off" }, at);
+        }
+
         w.Touched.Spell(saw.Id, closing.BladeId, at, null);
     }
 

@@ -25,7 +25,42 @@ internal static class VoidEntryHandler
             return;
         }
 
-        await Strike(w, c, entry);
+        if (c.Together && entry.Kind is not (nameof(AddBlades) or nameof(CutDown)))
+        {
+            await StrikeGroup(w, c, entry);
+        }
+        else
+        {
+            await Strike(w, c, entry);
+        }
+    }
+
+    /// <summary>What others of the group rest on goes last; a reading and a break take their own with them and go first.</summary>
+    private static async Task StrikeGroup(WriteSession w, VoidEntry c, Entry entry)
+    {
+        var group = await w.Db.Entries.AsNoTracking().Where(e => e.Op == entry.Op).OrderByDescending(e => e.Part).ToListAsync();
+        var plain = group.Where(e => e.Kind is not (nameof(AddBlades) or nameof(CutDown) or "Void")).ToList();
+        var reading = plain.Exists(e => e.Kind == nameof(MeterReading));
+        if (!reading && group.Find(e => e.Kind == "Void") is not null)
+        {
+            w.Refuse(nameof(c.EntryId), "This form also struck out what was there before: strike its lines out one by one.");
+            return;
+        }
+
+        var order = plain.OrderBy(e => e.Kind is nameof(MeterReading) or nameof(Break) or nameof(BatchReturn) or nameof(Batch) or nameof(CutDone) or nameof(Split) ? 0 : 1);
+        foreach (var one in order)
+        {
+            await w.Save();
+            if (!w.Stands)
+            {
+                return;
+            }
+
+            if (!await w.Db.Voids.AnyAsync(v => v.VoidedId == one.Id))
+            {
+                await Strike(w, c, one);
+            }
+        }
     }
 
     private static Task Strike(WriteSession w, VoidEntry c, Entry entry) => entry.Kind switch
@@ -41,7 +76,7 @@ internal static class VoidEntryHandler
         nameof(HoldCleared) => VoidBladeWork.HoldCleared(w, entry, c.Reason),
         nameof(Break) => VoidBladeWork.Break(w, entry, c.Reason),
         nameof(Joint) => VoidBladeWork.Joint(w, entry, c.Reason),
-        nameof(Split) or nameof(CutDown) => VoidBladeWork.Split(w, entry, c.Reason),
+        nameof(Split) => VoidBladeWork.Split(w, entry, c.Reason),
         nameof(Batch) => VoidBladeWork.Batch(w, entry, c.Reason),
         nameof(BatchLine) => VoidBladeWork.BatchLine(w, entry, c.Reason),
         nameof(BatchReturn) => VoidBladeWork.BatchReturn(w, entry, c.Reason),

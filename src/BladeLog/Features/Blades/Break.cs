@@ -1,0 +1,58 @@
+using BladeLog.Records;
+using BladeLog.Records.Writing;
+using BladeLog.Ui;
+using Microsoft.AspNetCore.Mvc;
+
+namespace BladeLog.Features.Blades;
+
+public sealed record BreakForm : PostedForm
+{
+    public string? Site { get; init; }
+
+    public string? Earliest { get; init; }
+
+    public string? Latest { get; init; }
+
+    public string? HoursLow { get; init; }
+
+    public string? HoursHigh { get; init; }
+
+    public string? MinutesLost { get; init; }
+
+    public string? Cost { get; init; }
+
+    public string? Note { get; init; }
+}
+
+/// <summary>A break: where, between which hours, and what it cost. Only what is known need be said.</summary>
+internal static class Break
+{
+    public static Task<IResult> Get(Desk desk, string tag) => Show(desk, tag, new BreakForm(), FormState.New);
+
+    public static async Task<IResult> Post([FromForm] BreakForm form, Desk desk, string tag)
+    {
+        if ((await desk.Shop()).Blade(Tags.Read(tag)) is null)
+        {
+            return Results.NotFound();
+        }
+
+        var read = new FormReading(await desk.Units(), desk.Now);
+        var site = read.Choice<BreakSite>(nameof(form.Site), form.Site, "Say where it broke; not known is an answer.");
+        var command = new RecordBreak(tag, site ?? default)
+        {
+            EarliestUtc = read.Time(nameof(form.Earliest), form.Earliest),
+            LatestUtc = read.Time(nameof(form.Latest), form.Latest),
+            HoursLow = read.Duration(nameof(form.HoursLow), form.HoursLow, Fields.RunHours)?.TotalHours,
+            HoursHigh = read.Duration(nameof(form.HoursHigh), form.HoursHigh, Fields.RunHours)?.TotalHours,
+            MinutesLost = read.Duration(nameof(form.MinutesLost), form.MinutesLost, Fields.Minutes)?.TotalMinutes,
+            CostMinor = read.Money(nameof(form.Cost), form.Cost),
+            Note = string.IsNullOrWhiteSpace(form.Note) ? null : form.Note.Trim(),
+        };
+        return read.IsGood
+            ? await desk.Send(command, form, BladeForm.Of(tag), $"Break of {Tags.Read(tag)}", state => Show(desk, tag, form, state))
+            : await Show(desk, tag, form, read.State);
+    }
+
+    private static Task<IResult> Show(Desk desk, string tag, BreakForm form, FormState state) =>
+        BladeForm.Show<BreakPage, BreakForm>(desk, tag, form, state);
+}

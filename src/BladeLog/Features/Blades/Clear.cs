@@ -1,0 +1,43 @@
+using BladeLog.Records;
+using BladeLog.Records.Writing;
+using Microsoft.EntityFrameworkCore;
+using Microsoft.AspNetCore.Mvc;
+
+namespace BladeLog.Features.Blades;
+
+public sealed record ClearForm : PostedForm
+{
+    public string? How { get; init; }
+
+    public string? At { get; init; }
+}
+
+/// <summary>A hold is cleared by a person who may.</summary>
+internal static class Clear
+{
+    public static Task<IResult> Get(Desk desk, string tag) => Show(desk, tag, new ClearForm(), FormState.New);
+
+    public static async Task<IResult> Post([FromForm] ClearForm form, Desk desk, string tag)
+    {
+        if ((await desk.Shop()).Blade(Tags.Read(tag)) is null)
+        {
+            return Results.NotFound();
+        }
+
+        var read = new FormReading(await desk.Units(), desk.Now);
+        read.RefuseUnless(!string.IsNullOrWhiteSpace(form.How), nameof(form.How), "Say how it was cleared: ground out, cut out, no crack found.");
+        var command = new ClearHold(tag, form.How?.Trim() ?? "", read.Time(nameof(form.At), form.At));
+        return read.IsGood
+            ? await desk.Send(command, form, BladeForm.Of(tag), $"Hold of {Tags.Read(tag)} cleared", state => Show(desk, tag, form, state))
+            : await Show(desk, tag, form, read.State);
+    }
+
+    private static Task<IResult> Show(Desk desk, string tag, ClearForm form, FormState state) =>
+        BladeForm.Show<ClearPage, ClearForm>(desk, tag, form, state, async model => model with { Names = await MayClear(desk) });
+
+    private static Task<List<string>> MayClear(Desk desk) =>
+        desk.Db.PersonRoles.AsNoTracking()
+            .Where(r => r.Role == Role.ClearHolds && r.FromUtc <= desk.Now && (r.UntilUtc == null || r.UntilUtc > desk.Now))
+            .Join(desk.Db.People.Where(p => p.Active), r => r.PersonId, p => p.Id, (_, p) => p.Initials)
+            .Distinct().OrderBy(i => i).ToListAsync();
+}

@@ -1,0 +1,74 @@
+using BladeLog.Records;
+using BladeLog.Records.Writing;
+using Microsoft.AspNetCore.Mvc;
+using Microsoft.EntityFrameworkCore;
+
+namespace BladeLog.Features.Record;
+
+public sealed record VoidForm : PostedForm
+{
+    public string? Reason { get; init; }
+
+    /// <summary>Sent by the page that asks why; the undo in the title block has no such field.</summary>
+    public string? Asked { get; init; }
+}
+
+/// <summary>One line of the ledger in words.</summary>
+public sealed record EntryLine(int Id, string When, string Entered, string Who, string What, string? Struck, bool CanVoid);
+
+public sealed record RecordModel(IReadOnlyList<EntryLine> Lines, int Page, bool Older, string? Blade);
+
+public sealed record VoidModel(VoidForm Form, FormState State, EntryLine Line, bool Taken);
+
+/// <summary>Everything that was entered, the newest first; what was struck out stays to be seen.</summary>
+internal static class RecordPages
+{
+    private const int Lines = 50;
+    private const string AtOnce = "undone at once";
+
+    public static void Map(WebApplication app)
+    {
+        app.MapGet("/record", List);
+        app.MapGet("/record/{entry:int}/void", (Desk desk, int entry) => Show(desk, entry, new VoidForm(), FormState.New));
+        app.MapPost("/record/{entry:int}/void", Strike);
+    }
+
+    private static async Task<IResult> List(Desk desk, int? page)
+    {
+        var skip = Math.Max(0, (page ?? 1) - 1) * Lines;
+        var entries = await Entries(desk).Where(e => e.Kind != "Void").OrderByDescending(e => e.Id).Skip(skip).Take(Lines + 1).ToListAsync();
+        return await desk.Page<RecordPage, RecordModel>(new(await EntryWords.Of(desk, entries.Take(Lines).ToList()), Math.Max(1, page ?? 1), entries.Count > Lines, null));
+    }
+
+    private static async Task<IResult> Strike([FromForm] VoidForm form, Desk desk, int entry)
+    {
+        // The undo in the title block sends no reason: it takes back the whole form at once.
+        var atOnce = form.Asked is null;
+        var read = new FormReading(await desk.Units(), desk.Now);
+        read.RefuseUnless(atOnce || !string.IsNullOrWhiteSpace(form.Reason), nameof(form.Reason), "Say why it is struck out.");
+        if (!read.IsGood)
+        {
+            return await Show(desk, entry, form, read.State);
+        }
+
+        var leads = atOnce ? await desk.Db.Entries.AsNoTracking().Where(e => e.Id == entry).Select(e => e.AnswerPath).FirstOrDefaultAsync() ?? "/record" : "/record";
+        return await desk.Send(
+            new VoidEntry(entry, atOnce ? AtOnce : form.Reason!.Trim()) { Together = atOnce }, form, leads, "struck out",
+            state => Show(desk, entry, form, state), canUndo: false);
+    }
+
+    private static async Task<IResult> Show(Desk desk, int entry, VoidForm form, FormState state)
+    {
+        var found = await Entries(desk).Where(e => e.Id == entry).ToListAsync();
+        if (found.Count == 0)
+        {
+            return Results.NotFound();
+        }
+
+        var line = (await EntryWords.Of(desk, found))[0];
+        return await desk.Page<VoidPage, VoidModel>(new(form, state, line, !line.CanVoid), state.Status);
+    }
+
+    private static IQueryable<Entry> Entries(Desk desk) =>
+        desk.Db.Entries.AsNoTracking().Include(e => e.Person).Include(e => e.Void).ThenInclude(v => v!.Entry).ThenInclude(e => e.Person);
+}

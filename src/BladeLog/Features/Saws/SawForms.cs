@@ -1,0 +1,17 @@
+namespace BladeLog.Features.Saws;
+
+/// <summary>Where the saws' entry forms answer.</summary>
+internal static class SawForms
+{
+    public static void Map(WebApplication app)
+    {
+        app.MapGet("/saws/{code}/swap", Swap.Get);
+        app.MapPost("/saws/{code}/swap", Swap.Post);
+        app.MapGet("/saws/{code}/hours", Hours.Get);
+        app.MapPost("/saws/{code}/hours", Hours.Post);
+        app.MapGet("/saws/{code}/clicking", Clicking.Get);
+        app.MapPost("/saws/{code}/clicking", Clicking.Post);
+        app.MapGet("/saws/{code}/slack", Slack.Get);
+        app.MapPost("/saws/{code}/slack", Slack.Post);
+    }
+}
