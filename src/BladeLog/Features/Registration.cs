@@ -27,6 +27,7 @@ internal static class Registration
     {
         StartPages.Map(app);
         CutsPages.Map(app);
+        ImportPages.Map(app);
         SawForms.Map(app);
         FloorPages.Map(app);
         RackPages.Map(app);
@@ -40,7 +41,6 @@ internal static class Registration
         SetupPages.Map(app);
         CautionPages.Map(app);
         WorkingsPages.Map(app);
-        ImportPages.Map(app);
 
         var api = app.MapGroup("/api/v1").DisableAntiforgery();
         WorkingsJson.Map(api);

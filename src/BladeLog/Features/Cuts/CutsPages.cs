@@ -35,10 +35,10 @@ internal static class CutsPages
 
     internal static async Task<QueuedCut?> Find(Desk desk, int number) => (await desk.Shop()).Cuts.FirstOrDefault(c => c.Number == number);
 
-    private static async Task<IResult> Queue(string? view, Desk desk)
+    private static async Task<IResult> Queue(string? view, string? from, Desk desk)
     {
         QueueView looked = view switch { "saws" => QueueView.Saws, "order" => QueueView.Order, _ => QueueView.Queue };
-        return await desk.Page<QueuePage, QueueModel>(QueueModel.Of(looked, await desk.Advice(), await desk.Units()));
+        return await desk.Page<QueuePage, QueueModel>(QueueModel.Of(looked, await desk.Advice(), await desk.Units(), int.TryParse(from, out int n) ? n : 0));
     }
 
     private static async Task<IResult> Choices(int number, [AsParameters] OtherQuery query, Desk desk)
@@ -71,11 +71,11 @@ internal static class CutsPages
         Command command = form.To == "off"
             ? new DropCut(number, int.TryParse(form.Version, out int version) ? version : 0)
             : new ReorderCuts(numbers);
-        WriteResult result = await desk.Write(command, form.Op, form.To == "off" ? "/cuts?view=order" : $"/cuts?view=order#cut-{number}");
+        WriteResult result = await desk.Write(command, form.Op, form.To == "off" ? "/cuts?view=order" : $"/cuts?view=order&from={to / QueueModel.PageSize * QueueModel.PageSize}#cut-{number}");
         return result is WriteResult.Done done
             ? desk.Saved(done, form.To == "off" ? $"cut {number} off the list" : $"cut {number} moved", canUndo: false)
             : await desk.Page<QueuePage, QueueModel>(
-                QueueModel.Of(QueueView.Order, await desk.Advice(), await desk.Units(), Unwritten.Of(result, await desk.Units(), _ => null)),
+                QueueModel.Of(QueueView.Order, await desk.Advice(), await desk.Units(), problems: Unwritten.Of(result, await desk.Units(), _ => null)),
                 StatusCodes.Status422UnprocessableEntity);
     }
 }

@@ -17,12 +17,23 @@ public enum QueueView
 /// <summary>The cuts that wait, each with its answer.</summary>
 public sealed record QueueModel(QueueView View, IReadOnlyList<CutAnswer> Answers, ShopAdvice Advice, ShopUnits Units, IReadOnlyList<Problem> Problems)
 {
+    /// <summary>So many on one page: each is answered in full.</summary>
+    public const int PageSize = 60;
+
+    /// <summary>Cuts that wait, on all pages.</summary>
+    public int Count { get; init; }
+
+    /// <summary>Cuts on the pages before this one.</summary>
+    public int From { get; init; }
+
     public DayPlan Plan => Advice.Plan();
 
-    internal static QueueModel Of(QueueView view, ShopAdvice advice, ShopUnits units, IReadOnlyList<Problem>? problems = null)
+    internal static QueueModel Of(QueueView view, ShopAdvice advice, ShopUnits units, int from = 0, IReadOnlyList<Problem>? problems = null)
     {
         ArgumentNullException.ThrowIfNull(advice);
-        return new QueueModel(view, [.. Waiting(advice.Now).Select(advice.For)], advice, units, problems ?? []);
+        QueuedCut[] waiting = [.. Waiting(advice.Now)];
+        int first = Math.Clamp(from, 0, Math.Max(0, (waiting.Length - 1) / PageSize * PageSize));
+        return new QueueModel(view, [.. waiting.Skip(first).Take(PageSize).Select(advice.For)], advice, units, problems ?? []) { Count = waiting.Length, From = first };
     }
 
     internal static IEnumerable<QueuedCut> Waiting(ShopNow shop)
