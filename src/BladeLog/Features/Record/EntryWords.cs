@@ -81,7 +81,7 @@ internal static class EntryWords
         await Each<MeterEpoch>(m => $"Meter of {saws[m.SawId]}: {m.Reason switch { EpochReason.First => "first reading", EpochReason.NewMeter => "a new one", EpochReason.RolledOver => "rolled over", _ => "turned back" }}");
         await Each<MeterReading>(m => $"Meter of {saws[m.SawId]} read: {H(m.ReadingMs)}");
         await Each<Run>(r => $"{saws[r.SawId]} ran {H(r.RunningMs)} (grade {r.Grade})");
-        await Each<CutDone>(c => $"Cut on {saws[c.SawId]}: {c.SpeciesTyped} {Mm(c.HeightM)}, {c.Pieces.ToString(cultureless)} pieces");
+        await Each<CutDone>(c => $"Cut on {saws[c.SawId]}: {c.SpeciesTyped} {Mm(c.HeightM)}, {Said.Count(c.Pieces, "piece", "pieces")}");
         await Each<Sharpening>(s => $"{tags[s.BladeId]} sharpened{(s.WidthM is null ? "" : $", {Mm(s.WidthM)} wide after")}");
         await Each<Joint>(j => $"{tags[j.BladeId]} joined, loop {units.Show(new Length(j.LoopM), Fields.Loop)}");
         await Each<Split>(s => $"{tags[s.ParentId]} cut down to {tags[s.ChildId]}");
