@@ -50,6 +50,7 @@ public sealed class CutJourneyTests(Workbench bench) : IClassFixture<Workbench>
             Assert.Equal(2, tablet.Taps);
             await tablet.Tap(tablet.Choice("Still sharp"));
             await tablet.Tap(tablet.Button("Put Q-13 on"));
+            await tablet.IsAt("/saws/S2");
             await tablet.Open("/");
             await Expect(tablet.Tile("S2").Locator(".on")).ToContainTextAsync("Q-13");
         }, script);

@@ -15,8 +15,7 @@ internal static class Look
     /// <summary>What a reader without eyes or with weak ones would meet, by the rules of axe.</summary>
     public static async Task<IReadOnlyList<string>> Scanned(Tablet tablet)
     {
-        var result = await tablet.Page.RunAxe();
-        return Lines(result);
+        return Lines(await tablet.Page.RunAxe(new AxeRunOptions { ResultTypes = [ResultType.Violations] }));
     }
 
     /// <summary>Ink against paper: 7 to 1 for plain text, 4.5 to 1 for large.</summary>

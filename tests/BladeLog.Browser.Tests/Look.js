@@ -33,7 +33,7 @@
     if (b.width <= 1 || b.height <= 1) continue;
     targets.push([t, b]);
     if (b.width < 63.5 || b.height < 63.5) say('small', `${name(t)} is ${size(b)}`);
-    else if (t.matches(often) && (b.width < 111.5 || b.height < 111.5)) say('small for a frequent one', `${name(t)} is ${size(b)}`);
+    else if (t.matches(often) && t.getAttribute('href') !== location.pathname && (b.width < 111.5 || b.height < 111.5)) say('small for a frequent one', `${name(t)} is ${size(b)}`);
   }
   const boxes = targets.filter(([e]) => !e.closest('.block'));
   for (let i = 0; i < boxes.length; i++) for (let j = i + 1; j < boxes.length; j++) {
@@ -79,7 +79,7 @@
 
   // Words stay in their boxes.
   for (const e of document.querySelectorAll('.btn,.tile,.pick,.opt>span,.opt em,h1,h2,h3,.next,.fig p,.big,.state,.t,.note,.key,dt,dd,li,label,legend,.block a,.block button')) {
-    if (!shown(e) || e.matches('.vh') || e.closest('.scroll,.vh') || getComputedStyle(e).display === 'inline') continue;
+    if (!shown(e) || e.matches('.vh') || e.closest('.scroll,.vh') || getComputedStyle(e).display === 'inline' || getComputedStyle(e).textOverflow === 'ellipsis') continue;
     if (e.scrollWidth > e.clientWidth + 1 && e.clientWidth > 0) say('spills', `${name(e)} needs ${e.scrollWidth} of ${e.clientWidth}`);
   }
 

@@ -1,9 +1,25 @@
 namespace BladeLog.Browser.Tests;
 
 /// <summary>The measure itself: it must see what it is there to see, and be content with a sound page.</summary>
-public sealed class LookTests(Workbench bench) : IClassFixture<Workbench>
+public sealed class LookTests(Workbench bench) : IClassFixture<Workbench>, IAsyncLifetime
 {
-    private const string Sheet = "*{margin:0;box-sizing:border-box}body{font:20px/1.4 sans-serif}a,button{display:inline-block;width:120px;height:120px;margin:8px}";
+    private const string Sheet = "*{margin:0;box-sizing:border-box}body{font:20px/1.4 sans-serif}a,button{font-size:20px;display:inline-block;width:120px;height:120px;margin:8px}";
+
+    private ServedShop? _shop;
+
+    public Task InitializeAsync()
+    {
+        _shop = Chromium.Path is null ? null : ServedShop.Unmade();
+        return Task.CompletedTask;
+    }
+
+    public async Task DisposeAsync()
+    {
+        if (_shop is not null)
+        {
+            await _shop.DisposeAsync();
+        }
+    }
 
     [BrowserTheory]
     [InlineData("sideways", "<div style='width:900px;height:9px'></div>")]
@@ -34,13 +50,12 @@ public sealed class LookTests(Workbench bench) : IClassFixture<Workbench>
     [BrowserFact]
     public async Task A_page_that_complains_fails_its_test()
     {
-        await using var shop = ServedShop.Unmade();
-        var complaint = await Assert.ThrowsAnyAsync<Exception>(() => bench.At(shop, Screen.Standing, async tablet =>
+        var complaint = await Assert.ThrowsAnyAsync<Exception>(() => bench.At(_shop!, Screen.Standing, async tablet =>
         {
             await tablet.Open("/start");
             // The page's own policy forbids a style attribute.
             await tablet.Page.EvaluateAsync("document.body.insertAdjacentHTML('beforeend', '<p style=\"color:red\">x</p>')");
-            await tablet.Open("/no-such-page");
+            await tablet.Open("/trouble/404");
         }));
         Assert.Contains("Content Security Policy", complaint.Message, StringComparison.Ordinal);
         Assert.Contains("404", complaint.Message, StringComparison.Ordinal);
@@ -48,9 +63,8 @@ public sealed class LookTests(Workbench bench) : IClassFixture<Workbench>
 
     private async Task<IReadOnlyList<string>> Measured(string body)
     {
-        await using var shop = ServedShop.Unmade();
         IReadOnlyList<string> found = [];
-        await bench.At(shop, Screen.Standing, async tablet =>
+        await bench.At(_shop!, Screen.Standing, async tablet =>
         {
             await tablet.Page.SetContentAsync($"<!doctype html><meta name=viewport content='width=device-width,initial-scale=1'><style>{Sheet}</style>{body}");
             found = await Look.Measured(tablet);

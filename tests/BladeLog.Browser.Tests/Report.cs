@@ -2,18 +2,20 @@ using System.Text;
 
 namespace BladeLog.Browser.Tests;
 
-/// <summary>All findings of a walk in one message; the same finding on pages of one kind stands once.</summary>
+/// <summary>All findings of a walk in one message; what is found on many pages stands once, with where.</summary>
 internal sealed class Report
 {
-    private readonly Dictionary<(string Kind, string Finding), List<string>> _found = [];
+    private const int Named = 6;
 
-    public void Add(string kind, string path, IEnumerable<string> findings)
+    private readonly SortedDictionary<string, List<string>> _found = new(StringComparer.Ordinal);
+
+    public void Add(string path, IEnumerable<string> findings)
     {
         foreach (var finding in findings)
         {
-            if (!_found.TryGetValue((kind, finding), out var paths))
+            if (!_found.TryGetValue(finding, out var paths))
             {
-                _found[(kind, finding)] = paths = [];
+                _found[finding] = paths = [];
             }
 
             paths.Add(path);
@@ -22,14 +24,11 @@ internal sealed class Report
 
     public void MustBeEmpty()
     {
-        var text = new StringBuilder().AppendLine();
-        foreach (var page in _found.GroupBy(f => f.Key.Kind))
+        var text = new StringBuilder();
+        foreach (var (finding, paths) in _found)
         {
-            text.AppendLine(page.Key);
-            foreach (var (key, paths) in page)
-            {
-                text.Append("  ").Append(key.Finding).Append("  [").AppendJoin(", ", paths).AppendLine("]");
-            }
+            text.AppendLine().Append(finding).Append("  [").AppendJoin(", ", paths.Take(Named));
+            text.Append(paths.Count > Named ? $" and {paths.Count - Named} more]" : "]");
         }
 
         Assert.True(_found.Count == 0, text.ToString());

@@ -15,8 +15,8 @@ public sealed class StartTests(Workbench bench) : IClassFixture<Workbench>
             var report = new Report();
             await tablet.Open("/");
             await tablet.IsAt("/start");
-            report.Add("/start", "/start", await Look.Measured(tablet));
-            report.Add("/start", "/start", await Look.Scanned(tablet));
+            report.Add("/start", await Look.Measured(tablet));
+            report.Add("/start", await Look.Scanned(tablet));
             report.MustBeEmpty();
         });
     }

@@ -41,6 +41,39 @@ public sealed class StatesTests(Workbench bench) : IClassFixture<Workbench>
         });
     }
 
+    [BrowserTheory]
+    [ClassData(typeof(Tablets))]
+    public async Task A_floor_in_trouble_says_so_without_colour(string screen)
+    {
+        await using var shop = await ServedShop.Sample();
+        await bench.At(shop, Screen.Of(screen), async tablet =>
+        {
+            await tablet.Open("/saws/S3/clicking");
+            await tablet.Tap(tablet.Button("It clicks: stop and hold Q-17"));
+            await Expect(tablet.Title).ToContainTextAsync("Stop Wren");
+            await tablet.Open("/saws/S4/slack");
+            await tablet.Tap(tablet.Button("Off: slack for the night"));
+            await Expect(tablet.Foot.GetByRole(AriaRole.Button)).ToContainTextAsync("Finch");
+            await tablet.Open("/saws/S5/swap");
+            await tablet.Tap(tablet.Choice("Other work"));
+            await tablet.Tap(tablet.Button("Only take Q-32 off"));
+            await tablet.IsAt("/saws/S5");
+
+            await tablet.Open("/");
+            foreach (var (saw, word) in new[] { ("S1", "runs"), ("S3", "hold"), ("S4", "slack"), ("S5", "empty") })
+            {
+                await Expect(tablet.Tile(saw).Locator(".state")).ToHaveTextAsync(word);
+            }
+
+            Assert.Equal(4, (await tablet.Page.EvaluateAsync<Seen[]>(ReadStates)).Where(s => s.Word is "runs" or "hold" or "slack" or "empty").Select(s => s.Shape).Distinct().Count());
+            await Expect(tablet.Tile("S3")).ToContainTextAsync("Do not run");
+            await Expect(tablet.OnTile("S3", "Clear it")).ToBeVisibleAsync();
+            var report = new Report();
+            report.Add("the floor in trouble", await Look.Measured(tablet));
+            report.MustBeEmpty();
+        });
+    }
+
     private sealed record Seen
     {
         public string Kind { get; init; } = "";

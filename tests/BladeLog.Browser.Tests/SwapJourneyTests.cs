@@ -113,7 +113,7 @@ public sealed class SwapJourneyTests(Workbench bench) : IClassFixture<Workbench>
             await Expect(tablet.Page.GetByRole(AriaRole.Alert)).ToContainTextAsync("Say how Q-17 comes off.");
             Assert.Empty(await MountsToday(shop));
             var report = new Report();
-            report.Add("/saws/{code}/swap", "refused", await Look.Measured(tablet));
+            report.Add("the refused swap", await Look.Measured(tablet));
             report.MustBeEmpty();
 
             await tablet.Tap(tablet.Choice("Still sharp"));

@@ -65,6 +65,11 @@ public sealed class Tablet
         await Task.WhenAll(Page.Touchscreen.TapAsync(x, y), Page.Touchscreen.TapAsync(x, y));
     }
 
+    public Task Fill(string label, string text) => Page.GetByLabel(label, new() { Exact = true }).FillAsync(text);
+
+    /// <summary>A box to tick; the whole line is the target.</summary>
+    public ILocator Box(string name) => Page.Locator("label.tick", new() { HasText = name });
+
     public ILocator Tile(string saw) => Page.Locator($"#saw-{saw}");
 
     public ILocator OnTile(string saw, string name) => Tile(saw).GetByRole(AriaRole.Link, new() { Name = name, Exact = true });
