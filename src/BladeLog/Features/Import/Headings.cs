@@ -24,6 +24,7 @@ internal static partial class Headings
 
         List<Found> found = [];
         List<string> ignored = [];
+        Wrong? twice = null;
         for (int i = 0; i < headings.Length; i++)
         {
             if (headings[i].Length == 0)
@@ -38,7 +39,7 @@ internal static partial class Headings
             }
             else if (found.FirstOrDefault(f => f.Column == column) is { } first)
             {
-                return (found, ignored, new Wrong(1, headings[i], null, $"The headings \"{first.Heading}\" and \"{headings[i]}\" both mean {column.Name.ToLowerInvariant()}. Leave one out."));
+                twice ??= new Wrong(1, headings[i], null, $"The headings \"{first.Heading}\" and \"{headings[i]}\" both mean {column.Name.ToLowerInvariant()}. Leave one out.");
             }
             else
             {
@@ -46,7 +47,7 @@ internal static partial class Headings
             }
         }
 
-        return (found, ignored, null);
+        return (found, ignored, twice);
     }
 
     /// <summary>"Width (mm)", "width_mm", "Width, mm", "width in mm": the name and the unit.</summary>
