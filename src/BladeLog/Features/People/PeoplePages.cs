@@ -73,8 +73,9 @@ internal static class PeoplePages
     private static async Task<IResult> Add([FromForm] PersonForm form, Desk desk) => await desk.Send(
         new AddPerson(form.Initials ?? "", form.Name ?? "", Roles(form)), form, "/people", $"{form.Initials} added", state => Show(desk, form, state, isNew: true), canUndo: false);
 
-    private static async Task<IResult> Edit([FromForm] PersonForm form, Desk desk, string initials)
+    private static async Task<IResult> Edit([FromForm] PersonForm? form, Desk desk, string initials)
     {
+        form ??= new();
         if (await Find(desk, initials) is not { } person)
         {
             return Results.NotFound();
