@@ -21,8 +21,10 @@ class Blade:
         self.chosen = self.fixed | self.at_mount
 
     def _at_the_end(self, spells):
-        gone = self.tag in BROKE or self.tag in OPEN_BATCH_TAGS or self.tag in ON_SAW_NOW.values()
-        return set() if gone else {spells[-1].off + 8}
+        if self.tag in BROKE or self.tag in OPEN_BATCH_TAGS:
+            return set()
+        on_saw = self.tag in ON_SAW_NOW.values()
+        return {spells[-1].parts[-1].end + 4 if on_saw else spells[-1].off + 8}
 
     def late(self, chosen=None):
         """How many looks came after more running than the rule allows."""

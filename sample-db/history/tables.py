@@ -136,7 +136,7 @@ OPEN_BATCH_TAGS = ("Q-07", "Q-10", "Q-33", "Q-34", "Q-35")
 SPECIES = [
     ("European oak", "european_oak", "wood", "A3"), ("European larch", "european_larch", "wood", "A2"),
     ("Scots pine", "scots_pine", "wood", "A1"), ("sugar maple", "sugar_maple", "wood", "A3"),
-    ("Douglas-fir (coast)", "douglas_fir", "wood", "A2"), ("Norway spruce", "norway_spruce", "wood", "A1"),
+    ("Douglas-fir (coast)", "douglas_fir_coast", "wood", "A2"), ("Norway spruce", "norway_spruce", "wood", "A1"),
     ("European ash", "european_ash", "wood", "A3"), ("black walnut", "black_walnut", "wood", "A2"),
     ("black cherry", "black_cherry", "wood", "A2"), ("yellow-poplar", "yellow_poplar", "wood", "A1"),
     ("Indian rosewood", "indian_rosewood", "wood", "A4"), ("birch plywood", "birch_plywood", "panel", "P"),

@@ -122,16 +122,17 @@ public sealed class AdviceSettings
     });
 
     /// <summary>How a class of wood wears an edge, against a clean medium one.</summary>
-    public Known WoodFactor(string woodClass) => Known(woodClass switch
+    public Known WoodFactor(string woodClass) => woodClass switch
     {
-        "A1" => LifeSettings.ClassA1,
-        "A2" => LifeSettings.ClassA2,
-        "A3" => LifeSettings.ClassA3,
-        "A4" => LifeSettings.ClassA4,
-        "A5" => LifeSettings.ClassA5,
-        "P" => LifeSettings.ClassP,
-        _ => throw new ArgumentOutOfRangeException(nameof(woodClass), woodClass, "The wear class must be A1 to A5 or P."),
-    });
+        "A1" => Known(LifeSettings.ClassA1),
+        "A2" => Known(LifeSettings.ClassA2),
+        "A3" => Known(LifeSettings.ClassA3),
+        "A4" => Known(LifeSettings.ClassA4),
+        "A5" => Known(LifeSettings.ClassA5),
+        "P" => Known(LifeSettings.ClassP),
+        "none" => new Known(1, Provenance.EngineeringDefault, "not wood"),
+        _ => throw new ArgumentOutOfRangeException(nameof(woodClass), woodClass, "The wear class must be A1 to A5, P or none."),
+    };
 
     public Known DirtFactor(Dirt dirt) => dirt switch
     {

@@ -38,7 +38,12 @@ public sealed record BladeAdvice
 
     public required BladeState State { get; init; }
 
-    public required bool InspectionOverdue { get; init; }
+    /// <summary>By its hours, or because it was mounted since its last look and each mount asks for one.</summary>
+    public bool InspectionOverdue => OverdueByHours || OverdueByMount;
+
+    public required bool OverdueByHours { get; init; }
+
+    public required bool OverdueByMount { get; init; }
 
     /// <summary>Past the watch mark or of unknown history: looked at before each mount.</summary>
     public required bool InspectEachMount { get; init; }
@@ -62,7 +67,8 @@ public sealed record BladeAdvice
         }
 
         bool watched = life.Reckoned.Blade >= settings.WatchMark || life.UnknownHistory;
-        bool overdue = Overdue(file, watched);
+        bool byHours = file.Blade.InspectEveryH is { } every && file.MsSinceInspection > every * 3_600_000;
+        bool byMount = (watched || file.Blade.InspectEachMount) && MissedALook(file);
         BladeAdvice advice = new()
         {
             File = file,
@@ -75,9 +81,10 @@ public sealed record BladeAdvice
                 : file.Break is not null ? BladeState.Broken
                 : file.Hold is not null ? BladeState.Hold
                 : edge.Due ? BladeState.Sharpen
-                : watched || overdue ? BladeState.Look
+                : watched || byHours || byMount ? BladeState.Look
                 : BladeState.Ready,
-            InspectionOverdue = overdue,
+            OverdueByHours = byHours,
+            OverdueByMount = byMount,
             InspectEachMount = watched || file.Blade.InspectEachMount,
             PastRetireMark = life.Reckoned.Blade >= settings[LifeSettings.RetireMark],
             Advice = new Advised("", []),
@@ -85,11 +92,11 @@ public sealed record BladeAdvice
         return advice with { Advice = LifeWords.Advise(advice, settings, words) };
     }
 
-    /// <summary>By hours since the last look, or by a mount since it where each mount asks for one.</summary>
-    private static bool Overdue(BladeFile file, bool watched)
-    {
-        bool byHours = file.Blade.InspectEveryH is { } every && file.MsSinceInspection > every * 3_600_000;
-        bool byMount = (file.Blade.InspectEachMount || watched) && file.MountedSinceInspection;
-        return byHours || byMount;
-    }
+    /// <summary>
+    /// Off the saw: mounted since its last look, so it wants one before it goes on again. On the saw the look came before
+    /// the mount; there only a blade that was never looked at has missed one.
+    /// </summary>
+    private static bool MissedALook(BladeFile file) => file.Place == Place.OnSaw
+        ? file.LastInspectedUtc is null && file.MountedSinceInspection
+        : file.MountedSinceInspection;
 }

@@ -85,7 +85,7 @@ internal sealed class Desk(TimeProvider clock, ShopDb db, ShopWriter writer, IHt
         where TView : View<TModel> => Html.View<TView, TModel>(model, await Chrome(), status);
 
     /// <summary>Records a form's command. A form without an op, or with one that is no GUID, gets a new one: it cannot be sent twice then.</summary>
-    public async Task<WriteResult> Write(Command command, string? op, string answerPath, string? typedAt = null) =>
+    public async Task<WriteResult> Write(Command command, string? op, string? answerPath, string? typedAt = null) =>
         await writer.Write(
             command,
             new Sent(Guid.TryParse(op, out var id) ? id : Guid.NewGuid(), Now, (await Who())?.Id, null, typedAt, answerPath),

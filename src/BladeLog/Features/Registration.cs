@@ -1,7 +1,12 @@
 using BladeLog.Features.Bench;
 using BladeLog.Features.Blades;
 using BladeLog.Features.Cautions;
+using BladeLog.Features.Cuts;
+using BladeLog.Features.Floor;
+using BladeLog.Features.Import;
+using BladeLog.Features.More;
 using BladeLog.Features.People;
+using BladeLog.Features.Rack;
 using BladeLog.Features.Record;
 using BladeLog.Features.Saws;
 using BladeLog.Features.Setup;
@@ -21,13 +26,26 @@ internal static class Registration
     public static void MapFeatures(this WebApplication app)
     {
         StartPages.Map(app);
+        CutsPages.Map(app);
+        ImportPages.Map(app);
         SawForms.Map(app);
+        FloorPages.Map(app);
+        RackPages.Map(app);
+        BladePages.Map(app);
+        SawPages.Map(app);
+        MorePages.Map(app);
         BladeForms.Map(app);
         BenchPages.Map(app);
         RecordPages.Map(app);
         PeoplePages.Map(app);
         SetupPages.Map(app);
         CautionPages.Map(app);
-        WorkingsJson.Map(app.MapGroup("/api/v1"));
+        WorkingsPages.Map(app);
+
+        var api = app.MapGroup("/api/v1").DisableAntiforgery();
+        WorkingsJson.Map(api);
+        BladesJson.Map(api);
+        SawsJson.Map(api);
+        CutsJson.Map(api);
     }
 }

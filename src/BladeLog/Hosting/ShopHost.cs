@@ -61,12 +61,17 @@ internal static class ShopHost
         services.AddAntiforgery(options => options.HeaderName = "X-CSRF");
         services.AddHttpContextAccessor();
         services.AddFeatures();
-        services.AddOpenApi("v1", options => options.AddDocumentTransformer((document, _, _) =>
+        services.AddOpenApi("v1", options =>
         {
-            document.Info.Title = "BladeLog";
-            document.Info.Description = "Blades, saws, cuts and the workings behind the advice. Units stand in the names.";
-            return Task.CompletedTask;
-        }));
+            // Pages and their forms are for people; the description is of what other programs may call.
+            options.ShouldInclude = call => call.RelativePath?.StartsWith("api/v1/", StringComparison.Ordinal) == true;
+            options.AddDocumentTransformer((document, _, _) =>
+            {
+                document.Info.Title = "BladeLog";
+                document.Info.Description = "Blades, saws, cuts and the workings behind the advice. Units stand in the names.";
+                return Task.CompletedTask;
+            });
+        });
         services.ConfigureHttpJsonOptions(json =>
         {
             json.SerializerOptions.Converters.Add(new FiniteNumbers());

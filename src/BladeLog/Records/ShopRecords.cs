@@ -1,3 +1,4 @@
+using BladeLog.Records.Writing;
 using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Records;
@@ -10,7 +11,7 @@ public static class ShopRecords
         services.AddSingleton(file);
         services.AddPooledDbContextFactory<ShopDb>(file.Configure);
         services.AddScoped(s => s.GetRequiredService<IDbContextFactory<ShopDb>>().CreateDbContext());
-        services.AddSingleton<Writing.ShopWriter>();
+        services.AddSingleton<ShopWriter>();
         return services;
     }
 }

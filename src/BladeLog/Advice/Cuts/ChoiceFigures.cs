@@ -26,7 +26,7 @@ public static class ChoiceFigures
             rows.AddRange(OfJob(c, job, settings));
         }
 
-        return rows;
+        return [.. rows.Where(r => double.IsFinite(r.Value))];
     }
 
     private static IEnumerable<Figure> OfBlade(Choice c)
@@ -64,7 +64,7 @@ public static class ChoiceFigures
         yield return new("gullet area", Gullet.AreaOf(cut).SquareMillimetres, "mm²", "shape times pitch times gullet depth", "gullet-capacity-note", Provenance.Published);
         if (gate.Thrust is { } thrust)
         {
-            yield return new("guide span", (c.Saw.Setup.LowerGuideM + c.Work.HeightM + c.Saw.Setup.ClearanceM) * 1e3, "mm", "lower guide under the table, height of the cut, clearance of the upper guide", "derived", Provenance.Yours);
+            yield return new("guide span", Math.Max(c.Saw.Setup.LowerGuideM + c.Work.HeightM + c.Saw.Setup.ClearanceM, c.Saw.Setup.GuideSpanLeastM ?? 0) * 1e3, "mm", "lower guide under the table, height of the cut, clearance of the upper guide", "derived", Provenance.Yours);
             yield return new("thrust that slackens the front edge", thrust.FrontEdge.Newtons, "N", "tension times body section over the greatest moment between the guides", "derived", Provenance.Derived);
             yield return new("thrust that twists the blade over", thrust.Buckling.Newtons, "N", "stability of the tensioned blade between its guides", "derived", Provenance.Derived);
         }

@@ -145,7 +145,7 @@ internal sealed class CutDesk(Shop shop, AdviceSettings settings, DamageTable da
 
         if (c.Blade.InspectionOverdue)
         {
-            yield return new CutReason(ReasonKind.Inspection, CutWords.Inspect());
+            yield return new CutReason(ReasonKind.Inspection, CutWords.Inspect(c.Blade.OverdueByHours));
         }
 
         if (c.Blade.Limits.WeldLimitReached)

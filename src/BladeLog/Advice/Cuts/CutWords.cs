@@ -56,6 +56,8 @@ public static class CutWords
         return $"no classes on {saw.Saw.Name}";
     }
 
+    public static string KerfTooNarrow() => "its kerf is entered narrower than its body: measure both";
+
     public static string Unsuitable() => "the wheels are too small for its body: hours or less";
 
     public static string Teeth(double teeth, double least) => $"{Wording.Number(teeth, 1)} teeth in the cut ({Wording.Number(least, 0)} needed)";
@@ -103,7 +105,8 @@ public static class CutWords
 
     public static string LifeUsed() => "past its retire mark: rough work only";
 
-    public static string Inspect() => "inspection overdue";
+    /// <summary>Overdue by its hours, or to be looked at before the next mount.</summary>
+    public static string Inspect(bool byHours) => byHours ? "inspection overdue" : "inspect it before it goes on";
 
     public static string LastWeld() => "has had its last weld";
 

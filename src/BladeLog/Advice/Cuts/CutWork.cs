@@ -69,7 +69,7 @@ public sealed record CutWork
                 : material is { Kind: not Handbook.Tables.MaterialKind.Wood } panel
                     ? new Known(panel.DefaultMoisture, Provenance.EngineeringDefault, "default, not yours")
                     : settings.Known(CutSettings.Moisture),
-            WoodFactor = material is { Density12: not null } wood ? settings.WoodFactor(wood.WearClass) : new Known(1, Provenance.Derived, "not wood"),
+            WoodFactor = settings.WoodFactor(material?.WearClass ?? "none"),
             DirtFactor = settings.DirtFactor(cut.Dirt),
             EdgeLimit = settings.Known(rough ? LifeSettings.Dull : LifeSettings.DullFine, 1e-6),
             FinishBite = cut.Finish switch

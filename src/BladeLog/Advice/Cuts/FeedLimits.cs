@@ -14,9 +14,9 @@ internal static class FeedLimits
         bool feeder = work.WithFeeder(setup);
         List<FeedLimit> limits = [ChipRoom(cut, work, setup, settings), Motor(cut, setup, low, settings)];
         limits.Add(feeder
-            ? ByThrust(FeedLimitKind.Feeder, cut, setup.FeederN!.Value, setup.FeederN.Value / low, "push of the feeder", Provenance.Yours, "derived")
-            : ByThrust(FeedLimitKind.Push, cut, settings[CutSettings.PushGreen], settings[CutSettings.PushAmber] / low, "push of a hand", settings.ProvenanceOf(CutSettings.PushAmber), "hse-l23"));
-        limits.Add(ByThrust(FeedLimitKind.Beam, cut, thrust.Allowed.Newtons, thrust.Stop.Newtons / low, "push the blade stands", Provenance.Derived, "derived"));
+            ? ByThrust(FeedLimitKind.Feeder, cut, setup.FeederN!.Value, setup.FeederN.Value / low, "push of the feeder", Provenance.Yours, Provenance.Yours, "derived")
+            : ByThrust(FeedLimitKind.Push, cut, settings[CutSettings.PushGreen], settings[CutSettings.PushAmber] / low, "push of a hand", settings.ProvenanceOf(CutSettings.PushGreen), settings.ProvenanceOf(CutSettings.PushAmber), "hse-l23"));
+        limits.Add(ByThrust(FeedLimitKind.Beam, cut, thrust.Allowed.Newtons, thrust.Stop.Newtons / low, "push the blade stands", Provenance.Derived, Provenance.Derived, "derived"));
         limits.Add(Practical(work, setup, feeder, settings));
         if (work.FinishBite is { } bite)
         {
@@ -50,14 +50,14 @@ internal static class FeedLimits
             Feed("motor at its most", amber, $"{Wording.Number(most, 0)} W at the blade, at the low end of the force band", "derived", settings.ProvenanceOf(CutSettings.LowEnd)));
     }
 
-    private static FeedLimit ByThrust(FeedLimitKind kind, CutCase cut, double green, double amber, string what, Provenance provenance, string source)
+    private static FeedLimit ByThrust(FeedLimitKind kind, CutCase cut, double green, double amber, string what, Provenance ofGreen, Provenance ofAmber, string source)
     {
         double easy = CuttingForce.FeedAtThrust(cut, new Force(green))?.MetresPerSecond ?? double.PositiveInfinity;
         double most = CuttingForce.FeedAtThrust(cut, new Force(amber))?.MetresPerSecond ?? double.PositiveInfinity;
         return new FeedLimit(
             kind, easy, most,
-            Feed(what, easy, $"{Wording.Number(green, 0)} N of thrust, solved for the feed", source, provenance),
-            Feed(what, most, $"{Wording.Number(amber, 0)} N of thrust, at the low end of the force band", source, provenance));
+            Feed(what, easy, $"{Wording.Number(green, 0)} N of thrust, solved for the feed", source, ofGreen),
+            Feed(what, most, $"{Wording.Number(amber, 0)} N of thrust, at the low end of the force band", source, ofAmber));
     }
 
     private static FeedLimit Practical(CutWork work, SawSetup setup, bool feeder, AdviceSettings settings)

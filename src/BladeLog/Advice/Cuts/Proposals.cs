@@ -72,11 +72,11 @@ internal sealed class Proposals(CutDesk desk, AdviceSettings settings, Wording w
 
         // The thinnest body on the saw: new kinds are bought for the wheels they run on.
         BladeFile like = carried.MinBy(f => f.ThicknessM)!;
-        double kerfOver = (like.Spec.KerfM ?? 1.8 * like.ThicknessM) - like.ThicknessM;
+        double kerf = BladeBody.Of(like, settings).Kerf.Value;
         double width = Math.Min(like.Spec.WidthM, saw.Setup.WidthMostM);
-        if (work.RadiusM is { } radius && kerfOver > 0)
+        if (work.RadiusM is { } radius && kerf > like.ThicknessM)
         {
-            Length widest = CurveRadius.WidestBlade(new Length(radius), new Length(like.ThicknessM + kerfOver), new Length(like.ThicknessM), settings[CutSettings.CurveFactor]);
+            Length widest = CurveRadius.WidestBlade(new Length(radius), new Length(kerf), new Length(like.ThicknessM), settings[CutSettings.CurveFactor]);
             width = Math.Min(width, widest.Metres);
         }
 

@@ -6,6 +6,9 @@ public enum ReasonKind
     Material,
     Hold,
     Away,
+
+    /// <summary>Figures of the blade that cannot be.</summary>
+    Figures,
     WorkKind,
     TooHigh,
     TooLong,

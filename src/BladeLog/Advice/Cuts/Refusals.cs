@@ -9,14 +9,15 @@ namespace BladeLog.Advice.Cuts;
 internal static class Refusals
 {
     internal static CutReason? First(CutWork work, BladeAdvice blade, SawNow saw, Life.Damage rate, AdviceSettings settings, Wording words) =>
-        OfWork(work, words) ?? OfBlade(blade, words) ?? OfSaw(work, saw, rate.Result.Verdict, words) ?? OfTeeth(work, blade, settings, words);
+        OfWork(work) ?? OfBlade(blade, words) ?? OfSaw(work, saw, rate.Result.Verdict, words) ?? OfTeeth(work, blade, settings, words);
 
-    private static CutReason? OfWork(CutWork work, Wording words) =>
+    private static CutReason? OfWork(CutWork work) =>
         work.IsWood ? null : new CutReason(ReasonKind.Material, CutWords.NotWood(work));
 
     private static CutReason? OfBlade(BladeAdvice blade, Wording words) =>
         blade.File.Hold is { } hold ? new CutReason(ReasonKind.Hold, Life.LifeWords.Hold(hold, words))
         : blade.File.Place == Place.AtSharpener ? new CutReason(ReasonKind.Away, Life.LifeWords.Away(blade.File.Away))
+        : blade.Body.Kerf.Value < blade.Body.Thickness.Value ? new CutReason(ReasonKind.Figures, CutWords.KerfTooNarrow())
         : null;
 
     private static CutReason? OfSaw(CutWork work, SawNow saw, LifeVerdict verdict, Wording words)

@@ -28,6 +28,9 @@ internal sealed class WhatIfs(CutDesk desk, BeamTable beams, AdviceSettings sett
     /// <summary>A thrust reserve that makes it idle to talk of guides, width and tension.</summary>
     private const double Ample = 4;
 
+    /// <summary>A gain worth a sentence.</summary>
+    private const double Telling = 1.05;
+
     internal IReadOnlyList<WhatIf> Of(Choice c, IReadOnlyList<Choice> others, bool all)
     {
         if (c.Case is null || c.Gate is not { Thrust: { } thrust } gate)
@@ -61,7 +64,13 @@ internal sealed class WhatIfs(CutDesk desk, BeamTable beams, AdviceSettings sett
             return null;
         }
 
+        // While no chip forms the pitch cancels, and fewer teeth free nothing.
         double before = Motor(gate), after = Motor(other);
+        if (after < Telling * before)
+        {
+            return null;
+        }
+
         Choice? have = others.Where(o => o.Saw == c.Saw && o.Blade.Body.PitchMean >= 1.6 * body.PitchMean && o.Reason.Kind is not (ReasonKind.Hold or ReasonKind.Teeth or ReasonKind.Radius))
             .MinBy(o => Math.Abs(o.Blade.Body.PitchMean - (2 * body.PitchMean)));
         return new WhatIf(WhatIfKind.HalfTheTeeth, WhatIfWords.HalfTheTeeth(c, before, after, have, words), before, after);

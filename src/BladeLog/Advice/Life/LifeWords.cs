@@ -110,7 +110,9 @@ public static class LifeWords
 
         if (blade.InspectionOverdue)
         {
-            yield return $"{Wording.Hours(blade.File.MsSinceInspection / 3_600_000.0)} run since it was last inspected.";
+            yield return blade.OverdueByHours
+                ? $"{Wording.Hours(blade.File.MsSinceInspection / 3_600_000.0)} run since it was last inspected."
+                : "It was mounted since it was last inspected.";
         }
 
         if (blade.Limits.WeldLimitReached)
@@ -121,6 +123,21 @@ public static class LifeWords
         if (!blade.Grind.Pays && blade.Grind.Refusal != GrindRefusal.NeverWorth)
         {
             yield return NoGrind(blade, settings, words);
+        }
+
+        if (blade.Limits.GovernedBy == LimitKind.New)
+        {
+            yield return "New: nothing of it is used yet.";
+        }
+
+        if (life is { Verdict: LifeVerdict.Unsuitable or LifeVerdict.Marginal, ThicknessToWheel: { } ratio })
+        {
+            yield return Ladder(life.Verdict.Value);
+            yield return ThicknessToWheel(ratio);
+        }
+        else if (life.Verdict == LifeVerdict.NotLimiting)
+        {
+            yield return Ladder(LifeVerdict.NotLimiting);
         }
 
         if (blade.Limits.Shares.Count > 0 && blade.Limits.GovernedBy is LimitKind.Fatigue or LimitKind.Width or LimitKind.Sharpenings or LimitKind.Edge)

@@ -53,15 +53,14 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
     /// <summary>One window height for all saws, so that they share one scale.</summary>
     public double Height => SawShape.CommonHeight(Tiles.Select(t => t.Shape));
 
-    public static FloorModel Of(ShopAdvice advice, ShopUnits units, IReadOnlySet<int> slack)
+    public static FloorModel Of(ShopAdvice advice, ShopUnits units, IReadOnlyDictionary<int, string>? initials = null)
     {
         ArgumentNullException.ThrowIfNull(advice);
         ArgumentNullException.ThrowIfNull(units);
-        ArgumentNullException.ThrowIfNull(slack);
-        return new FloorModel([.. advice.Now.Saws.Where(s => s.Saw.Active).Select(s => Tile(s, advice, units, slack.Contains(s.Saw.Id)))]);
+        return new FloorModel([.. advice.Now.Saws.Where(s => s.Saw.Active).Select(s => Tile(s, advice, units, initials ?? new Dictionary<int, string>()))]);
     }
 
-    private static SawTile Tile(SawNow saw, ShopAdvice advice, ShopUnits units, bool slack)
+    private static SawTile Tile(SawNow saw, ShopAdvice advice, ShopUnits units, IReadOnlyDictionary<int, string> initials)
     {
         PlannedCut? next = advice.NextCut(saw);
         SawTile bare = new()
@@ -71,7 +70,7 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
             Under = Said.Wheels(saw.Setup, units),
             Shape = Drawn.Saw(saw.Setup),
             State = "empty",
-            Next = next is null ? null : Next(next, slack, advice.Words),
+            Next = next is null ? null : Next(next, saw.Slack, advice.Words),
         };
         if (advice.Now.Blades.FirstOrDefault(b => b.Blade.Id == saw.MountedBladeId) is not { } file)
         {
@@ -82,13 +81,13 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
         SawTile on = bare with { Tag = file.Blade.Tag, Teeth = Drawn.Teeth(blade.Body, file.Spec) };
         if (file.Hold is { } hold)
         {
-            return on with { State = "hold", Big = Heard(hold, advice, units), Small = hold.Kind == HoldKind.Clicking ? "A crack may be starting. A named person clears it after a look." : "A named person clears it after a look." };
+            return on with { State = "hold", Big = Heard(hold, advice, units, initials), Small = hold.Kind == HoldKind.Clicking ? "A crack may be starting. A named person clears it after a look." : "A named person clears it after a look." };
         }
 
         (BigFigure? limit, string? words) = Limit(blade, advice, units);
         return on with
         {
-            State = slack ? "slack" : blade.State switch
+            State = saw.Slack ? "slack" : blade.State switch
             {
                 BladeState.Sharpen => "sharpen",
                 BladeState.Look => "look",
@@ -100,11 +99,11 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
         };
     }
 
-    private static string Heard(Hold hold, ShopAdvice advice, ShopUnits units)
+    private static string Heard(Hold hold, ShopAdvice advice, ShopUnits units, IReadOnlyDictionary<int, string> initials)
     {
         string what = hold.Kind == HoldKind.Clicking ? "Clicking heard" : Said.Capital(LifeWords.Hold(hold, advice.Words)["on hold: ".Length..]);
         string when = hold.Entry is { } entry ? " " + Said.When(entry.AtUtc, advice.Now.AsOf, units) : "";
-        string who = hold.Entry?.Person is { } person ? " by " + person.Initials : "";
+        string who = hold.Entry?.PersonId is { } id && initials.TryGetValue(id, out string? name) ? " by " + name : "";
         return $"Do not run. {what}{when}{who}.";
     }
 
@@ -121,9 +120,7 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
 
     private static BigFigure? Edge(BladeAdvice blade, PlannedCut? next, ShopUnits units)
     {
-        MetresLeft? left = next is { Choice: { Mounted: true, Gate.AdvisedMps: { } feed } c }
-            ? blade.Edge.LeftAt(c.Work.HeightM, feed, blade.File.LoopM ?? c.Saw.Setup.LoopM, c.SpeedMps, c.Work.WoodFactor.Value, c.Work.DirtFactor.Value, c.Work.Cut.Number)
-            : blade.Edge.Left;
+        MetresLeft? left = (next is { Choice.Mounted: true } ? next.Choice.MetresLeft : null) ?? blade.Edge.Left;
         if (left is null)
         {
             return null;

@@ -2,6 +2,7 @@ using BladeLog.Hosting;
 using BladeLog.Records;
 using BladeLog.Ui;
 using BladeLog.Ui.Forms;
+using Microsoft.AspNetCore.Diagnostics;
 using Microsoft.AspNetCore.Mvc;
 
 namespace BladeLog.Features.Start;
@@ -90,6 +91,11 @@ internal static class StartPages
     private static IResult Trouble(ShopGate gate, HttpContext context)
     {
         var sentence = gate.Trouble ?? "Something went wrong here and nothing was saved. Go back and try again; what you typed is still in the form.";
+        if (context.Features.Get<IExceptionHandlerPathFeature>()?.Path is { } asked && IsJson(asked))
+        {
+            return Results.Problem(title: "Something went wrong here and nothing was saved.", detail: $"Reference {context.TraceIdentifier}", statusCode: 500);
+        }
+
         return Html.View<TroublePage, TroubleModel>(new("That did not work", sentence, context.TraceIdentifier), Chrome.Bare, gate.Trouble is null ? 500 : 503);
     }
 
@@ -103,8 +109,15 @@ internal static class StartPages
             405 => ("Nothing answers there", "This address takes a form, not a visit. Start from the Floor."),
             _ => ("That did not work", "Nothing was saved. Go back and try again."),
         };
+        if (context.Features.Get<IStatusCodeReExecuteFeature>()?.OriginalPath is { } asked && IsJson(asked))
+        {
+            return Results.Problem(title: status == 415 ? "Send JSON, with the content type application/json." : $"{title}.", statusCode: status);
+        }
+
         return Html.View<TroublePage, TroubleModel>(new(title, sentence, context.TraceIdentifier), Chrome.Bare, status);
     }
+
+    private static bool IsJson(string path) => path.StartsWith("/api/", StringComparison.OrdinalIgnoreCase);
 
     private static IResult Page(ShopGate gate, StartForm form, IReadOnlyList<Problem> problems, int status = 200) =>
         Html.View<StartPage, StartModel>(

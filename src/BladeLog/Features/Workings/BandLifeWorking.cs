@@ -70,12 +70,6 @@ internal sealed record BandLifeOut(
 
 internal static class BandLifeWorking
 {
-    private static readonly string[] Always =
-    [
-        "derived", "mote-1965", "astm-e140", "dowling-book", "roessle-fatemi-2000", "noll-lipson-1946", "dowling-2009", "haibach", "miner-1945",
-        "engineering-default",
-    ];
-
     public static BandLifeOut? Answer(BandLifeIn body, BodyReader reader)
     {
         for (var i = 0; i < body.Wheels.Count; i++)
@@ -121,7 +115,7 @@ internal static class BandLifeWorking
             Site(life.Weld),
             new BladeOut(life.MedianBends, life.MedianHours, life.TenthPercentileBends),
             life.Verdict,
-            [.. Always, .. body.Width is null ? (string[])[] : ["ashwell-1950"], .. body.CutValley is null ? (string[])[] : ["astm-e1049"]],
+            [.. AnswerSources.BandLife, .. body.Width is null ? (string[])[] : ["ashwell-1950"], .. body.CutValley is null ? (string[])[] : ["astm-e1049"]],
             Cautions(life));
     }
 

@@ -109,12 +109,6 @@ internal sealed record CutOut(
 
 internal static class CutWorking
 {
-    private static readonly string[] Sources =
-    [
-        "derived", "gullet-capacity-note", "orlowski-2013", "loehnertz-cooz", "woodson-1979", "son-2005", "blackman-2012", "radius-tables",
-        "engineering-default",
-    ];
-
     public static CutOut? Answer(CutIn body, BodyReader reader)
     {
         if (body.Gullet >= body.Width)
@@ -185,7 +179,7 @@ internal static class CutWorking
                 CurveRadius.Hard(width, cut.Kerf, cut.Thickness).Millimetres),
             CuttingForce.ShearFactor(cut).Megapascals,
             CuttingForce.ReferenceThickness(cut.Rake).Micrometres,
-            Sources,
+            AnswerSources.Cut,
             [.. CutChecks.Cautions(cut, feed), "Forces and power hold within -30 to +40 per cent until the shop's own ammeter readings have taught the factor."]);
     }
 }

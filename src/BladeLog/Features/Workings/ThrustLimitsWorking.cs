@@ -60,12 +60,6 @@ internal sealed record ThrustLimitsOut(
 
 internal static class ThrustLimitsWorking
 {
-    private static readonly string[] Sources =
-    [
-        "derived", "pahlitzsch-puttkammer-1974", "timoshenko-gere", "timoshenko-goodier", "lengoc-1990", "lehmann-1993", "wickert-mote",
-        "engineering-default",
-    ];
-
     public static ThrustLimitsOut? Answer(ThrustLimitsIn body, BodyReader reader)
     {
         var centre = body.CutCentre ?? body.GuideSpan / 2;
@@ -118,7 +112,7 @@ internal static class ThrustLimitsWorking
             TipStiffness.AtPoint(band, limits.Allowed).NewtonsPerMillimetre,
             BandFrequency.Lateral(band).Hertz,
             BandFrequency.Torsional(band).Hertz,
-            Sources,
+            AnswerSources.Thrust,
             ["Tension is the worst-known figure here: a fifth less tension is about a fifth less thrust."]);
     }
 }

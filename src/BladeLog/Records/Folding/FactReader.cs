@@ -12,30 +12,45 @@ public static class FactReader
         return await rows.Select(s => new SetupFrom(s.EntryId, s.SawId, s.Entry.AtUtc, s.LoopM)).ToListAsync();
     }
 
-    /// <summary>All spells, or those of some saws or blades.</summary>
-    public static async Task<List<Spell>> ReadSpells(ShopDb db, IReadOnlyCollection<int>? saws = null, IReadOnlyCollection<int>? blades = null)
+    /// <summary>All spells, or those of a saw and of a blade; of these, only the ones that touch a window where one is given.</summary>
+    /// <remarks>
+    /// Written in SQL: the joins of two filtered facts make SQLite build a table of every dismount for each question,
+    /// tens of milliseconds at 20,000 mounts; asked mount by mount it is a few.
+    /// </remarks>
+    public static async Task<List<Spell>> ReadSpells(ShopDb db, int? saw = null, int? blade = null, DateTime? from = null, DateTime? until = null)
     {
-        var mounts = db.Mounts.AsNoTracking();
-        if (saws is not null || blades is not null)
+        if (saw is null && blade is null)
         {
-            var ofSaws = saws ?? [];
-            var ofBlades = blades ?? [];
-            mounts = mounts.Where(m => ofSaws.Contains(m.SawId) || ofBlades.Contains(m.BladeId));
+            return await AllSpells(db);
         }
 
-        var rows = await mounts
-            .Select(m => new { m.EntryId, m.SawId, m.BladeId, m.Entry.AtUtc })
-            .ToListAsync();
-        var dismounts = db.Dismounts.AsNoTracking();
-        if (saws is not null || blades is not null)
-        {
-            var ofSaws = saws ?? [];
-            var ofBlades = blades ?? [];
-            dismounts = dismounts.Where(d => ofSaws.Contains(d.Mount.SawId) || ofBlades.Contains(d.Mount.BladeId));
-        }
+        var latest = RecordRules.Store(until ?? DateTime.MaxValue);
+        var earliest = RecordRules.Store(from ?? DateTime.MinValue);
+        var rows = await db.Database.SqlQuery<SpellFound>($"""
+            select m.entry_id as MountId, m.saw_id as SawId, m.blade_id as BladeId, e.at_utc as "From", d.entry_id as DismountId, x.at_utc as "Until"
+            from mount m
+            join entry e on e.id = m.entry_id
+            left join dismount d on d.mount_id = m.entry_id and not exists (select 1 from void where voided_id = d.entry_id)
+            left join entry x on x.id = d.entry_id
+            where (m.saw_id = {saw ?? 0} or m.blade_id = {blade ?? 0})
+              and e.at_utc <= {latest}
+              and (x.at_utc is null or x.at_utc >= {earliest})
+              and not exists (select 1 from void where voided_id = m.entry_id)
+            """).ToListAsync();
+        return
+        [
+            .. rows.Select(m => new Spell(m.MountId, m.SawId, m.BladeId, Utc(m.From), m.Until is { } at ? Utc(at) : null, m.DismountId))
+                .OrderBy(s => s.From).ThenBy(s => s.MountId),
+        ];
+    }
 
-        var off = await dismounts.Select(d => new { d.EntryId, d.MountId, d.Entry.AtUtc }).ToListAsync();
-        return Spells.Fold(rows.Select(m => (m.EntryId, m.SawId, m.BladeId, m.AtUtc)), off.Select(d => (d.EntryId, d.MountId, d.AtUtc)));
+    private static DateTime Utc(DateTime time) => DateTime.SpecifyKind(time, DateTimeKind.Utc);
+
+    private static async Task<List<Spell>> AllSpells(ShopDb db)
+    {
+        var mounts = await db.Mounts.AsNoTracking().Select(m => new { m.EntryId, m.SawId, m.BladeId, m.Entry.AtUtc }).ToListAsync();
+        var dismounts = await db.Dismounts.AsNoTracking().Select(d => new { d.EntryId, d.MountId, d.Entry.AtUtc }).ToListAsync();
+        return Spells.Fold(mounts.Select(m => (m.EntryId, m.SawId, m.BladeId, m.AtUtc)), dismounts.Select(d => (d.EntryId, d.MountId, d.AtUtc)));
     }
 
     /// <summary>Runs of a saw whose window meets the given one; without a window, all.</summary>
@@ -80,5 +95,20 @@ public static class FactReader
         var things = db.Blades.AsNoTracking();
         things = blades is null ? things : things.Where(b => blades.Contains(b.Id));
         return await things.Select(b => new BladeStart(b.Id, b.Spec.WidthM, b.ParentId == null ? b.Spec.NewLoopM : null, b.ParentId != null)).ToListAsync();
+    }
+
+    private sealed class SpellFound
+    {
+        public int MountId { get; set; }
+
+        public int SawId { get; set; }
+
+        public int BladeId { get; set; }
+
+        public DateTime From { get; set; }
+
+        public int? DismountId { get; set; }
+
+        public DateTime? Until { get; set; }
     }
 }

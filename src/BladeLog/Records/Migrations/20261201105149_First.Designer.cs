@@ -1304,7 +1304,7 @@ namespace BladeLog.Records.Migrations
 
                     b.HasIndex("ReadingId");
 
-                    b.HasIndex("SawId", "FromUtc", "UntilUtc");
+                    b.HasIndex("SawId", "UntilUtc", "FromUtc");
 
                     b.ToTable("run", t =>
                         {

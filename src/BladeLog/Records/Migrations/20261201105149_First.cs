@@ -1698,9 +1698,9 @@ namespace BladeLog.Records.Migrations
                 column: "reading_id");
 
             migrationBuilder.CreateIndex(
-                name: "IX_run_saw_id_from_utc_until_utc",
+                name: "IX_run_saw_id_until_utc_from_utc",
                 table: "run",
-                columns: new[] { "saw_id", "from_utc", "until_utc" });
+                columns: new[] { "saw_id", "until_utc", "from_utc" });
 
             migrationBuilder.CreateIndex(
                 name: "IX_run_share_mount_id",

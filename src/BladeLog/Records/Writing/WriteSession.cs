@@ -1,6 +1,5 @@
 using System.Globalization;
 using BladeLog.Handbook.Units;
-using BladeLog.Records.Folding;
 using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Records.Writing;
@@ -114,15 +113,17 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
     }
 
     public T Add<T>(T fact, DateTime at)
+        where T : Fact => Add(fact, NewEntry(typeof(T) == typeof(VoidFact) ? "Void" : typeof(T).Name, at));
+
+    public T Add<T>(T fact, Entry entry)
         where T : Fact
     {
-        var kind = typeof(T).Name;
-        if (WhoMay.Of(kind) is { Role: { } role, Enforced: true })
+        if (WhoMay.Of(typeof(T).Name) is { Role: { } role, Enforced: true })
         {
             RefuseUnlessIn(role);
         }
 
-        fact.Entry = NewEntry(kind == nameof(VoidFact) ? "Void" : kind, at);
+        fact.Entry = entry;
         Db.Add(fact);
         return fact;
     }
@@ -153,9 +154,6 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
 
         return blade;
     }
-
-    public async Task<SawFold> Fold(int sawId) =>
-        new(sawId, await FactReader.ReadSpells(Db, [sawId]), [], await FactReader.Setups(Db, sawId));
 
     public Task<BladeNow> NowOf(Blade blade) => Db.BladesNow.AsNoTracking().SingleAsync(b => b.BladeId == blade.Id);
 

@@ -1,4 +1,5 @@
 using System.Text.RegularExpressions;
+using BladeLog.Features;
 using BladeLog.Tests.House;
 using static BladeLog.Tests.Features.Workings.Bodies;
 
@@ -30,6 +31,13 @@ public sealed partial class SourcesOfWorkingsTests(EmptyShop shop) : IClassFixtu
         Assert.NotEmpty(keys);
         Assert.Equal(keys.Distinct(), keys);
         Assert.Empty(keys.Except(Listed()));
+    }
+
+    [Fact]
+    public void Every_source_of_a_blade_and_of_a_choice_stands_in_it_too()
+    {
+        Assert.Empty(AnswerSources.Blade.Concat(AnswerSources.Choice).Except(Listed()));
+        Assert.Equal(AnswerSources.Choice.Distinct(), AnswerSources.Choice);
     }
 
     private static HashSet<string> Listed() =>

@@ -17,7 +17,7 @@ public sealed record ImportRows(string Kind, string Sha256) : Command
 {
     /// <summary>Stands for by the file's own hash.</summary>
     [JsonIgnore]
-    public required IReadOnlyList<ImportRow> Rows { get; init; }
+    public IReadOnlyList<ImportRow> Rows { get; init; } = [];
 }
 
 public sealed record ImportRow(int Line, Command Command);

@@ -23,7 +23,7 @@ internal static class CutDownHandler
         var known = await w.Db.Splits.Where(s => s.ParentId == parent.Id)
             .Join(w.Db.Blades, s => s.ChildId, b => b.Id, (_, b) => b.Tag).FirstOrDefaultAsync();
         w.RefuseUnless(known is null, nameof(c.ParentTag), $"{parent.Tag} was cut down to {known} already.");
-        var later = (await FactReader.ReadSpells(w.Db, blades: [parent.Id])).Cast<Spell?>().FirstOrDefault(s => s!.Value.End > at);
+        var later = (await FactReader.ReadSpells(w.Db, blade: parent.Id)).Cast<Spell?>().FirstOrDefault(s => s!.Value.End > at);
         if (later is { } on)
         {
             w.Refuse(nameof(c.ParentTag), $"{await SpellRules.Words(w, on)}: take it off first.");
@@ -34,7 +34,7 @@ internal static class CutDownHandler
             return;
         }
 
-        w.NewEntry(nameof(CutDown), at);
+        var entry = w.NewEntry(nameof(Split), at);
         w.AnswerPath = $"/b/{tag}";
         var child = new Blade
         {
@@ -49,7 +49,7 @@ internal static class CutDownHandler
         };
         w.Db.Blades.Add(child);
         await w.Save();
-        w.Add(new Split { ParentId = parent.Id, ChildId = child.Id, WidthM = c.WidthM ?? now.WidthM }, at);
+        w.Add(new Split { ParentId = parent.Id, ChildId = child.Id, WidthM = c.WidthM ?? now.WidthM }, entry);
         w.Add(new Joint { BladeId = child.Id, LoopM = c.LoopM, LoopTyped = c.LoopTyped, Quality = c.Quality, Method = c.Method }, at);
         w.Touched.Blades.Add(parent.Id);
         w.Touched.Blades.Add(child.Id);

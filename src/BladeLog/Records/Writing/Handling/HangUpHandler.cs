@@ -14,7 +14,7 @@ internal static class HangUpHandler
             return;
         }
 
-        var spells = await FactReader.ReadSpells(w.Db, blades: [blade.Id]);
+        var spells = await FactReader.ReadSpells(w.Db, blade: blade.Id);
         if (spells.Cast<Spell?>().FirstOrDefault(s => s!.Value.From < at && at < s.Value.End) is { } on)
         {
             w.Refuse(nameof(c.Tag), $"{await SpellRules.Words(w, on)}: take it off first.");

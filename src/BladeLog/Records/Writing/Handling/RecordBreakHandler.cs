@@ -16,7 +16,7 @@ internal static class RecordBreakHandler
             return;
         }
 
-        var spells = await FactReader.ReadSpells(w.Db, blades: [blade.Id]);
+        var spells = await FactReader.ReadSpells(w.Db, blade: blade.Id);
         var spell = spells.Cast<Spell?>().LastOrDefault(s => s!.Value.From <= latest && s.Value.End >= earliest);
         w.Add(
             new Break

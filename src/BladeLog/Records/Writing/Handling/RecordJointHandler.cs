@@ -25,7 +25,7 @@ internal static class RecordJointHandler
     /// <summary>A loop is opened and closed off the saw.</summary>
     public static async Task RefuseOnSaw(WriteSession w, Blade blade, DateTime at, string field)
     {
-        var spells = await FactReader.ReadSpells(w.Db, blades: [blade.Id]);
+        var spells = await FactReader.ReadSpells(w.Db, blade: blade.Id);
         if (spells.Cast<Spell?>().FirstOrDefault(s => s!.Value.From < at && at < s.Value.End) is { } on)
         {
             w.Refuse(field, $"{await SpellRules.Words(w, on)}: take it off first.");

@@ -16,7 +16,7 @@ internal static class RecordRetirementHandler
 
         var known = await w.Db.Retirements.AsNoTracking().Include(r => r.Entry).FirstOrDefaultAsync(r => r.BladeId == blade.Id);
         w.RefuseUnless(known is null, nameof(c.Tag), $"{blade.Tag} was retired on {w.Say(known?.Entry.AtUtc ?? at)} (entry {known?.EntryId}).");
-        var open = (await FactReader.ReadSpells(w.Db, blades: [blade.Id])).Cast<Spell?>().FirstOrDefault(s => s!.Value.Until is null);
+        var open = (await FactReader.ReadSpells(w.Db, blade: blade.Id)).Cast<Spell?>().FirstOrDefault(s => s!.Value.Until is null);
         if (open is { } on && w.Stands)
         {
             if (!c.TakeOff)

@@ -41,7 +41,7 @@ internal static class SendBatchHandler
 
     private static async Task CheckCanGo(WriteSession w, Blade blade, DateTime at)
     {
-        var spell = (await FactReader.ReadSpells(w.Db, blades: [blade.Id])).Cast<Spell?>().FirstOrDefault(s => s!.Value.End > at);
+        var spell = (await FactReader.ReadSpells(w.Db, blade: blade.Id)).Cast<Spell?>().FirstOrDefault(s => s!.Value.End > at);
         if (spell is { } on)
         {
             w.Refuse("Tags", $"{await SpellRules.Words(w, on)}: take it off first.");

@@ -9,7 +9,7 @@ internal static class SpellRules
     /// <summary>Refuses a spell that would share time with another on its saw or of its blade. Some may be left out, where they go in the same group.</summary>
     public static async Task RefuseOverlaps(WriteSession w, string field, Saw saw, Blade blade, DateTime from, DateTime? until, IReadOnlyCollection<int> without)
     {
-        var spells = await FactReader.ReadSpells(w.Db, [saw.Id], [blade.Id]);
+        var spells = await FactReader.ReadSpells(w.Db, saw.Id, blade.Id, from, until);
         var end = until ?? DateTime.MaxValue;
         foreach (var spell in spells.Where(s => !without.Contains(s.MountId) && s.From < end && s.End > from))
         {

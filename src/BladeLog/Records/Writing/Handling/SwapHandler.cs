@@ -19,7 +19,7 @@ internal static class SwapHandler
             return;
         }
 
-        var spells = await FactReader.ReadSpells(w.Db, [saw.Id]);
+        var spells = await FactReader.ReadSpells(w.Db, saw.Id, from: at, until: at);
         var off = spells.Cast<Spell?>().FirstOrDefault(s => s!.Value.Until is null && s.Value.From <= at);
         if (off is { } closing)
         {

@@ -67,7 +67,7 @@ internal static class VoidBladeWork
     /// <summary>A cutting down goes with its joint, as long as nothing has happened to the child.</summary>
     public static async Task Split(WriteSession w, Entry entry, string reason)
     {
-        var split = await w.Db.Splits.AsNoTracking().Include(s => s.Entry).SingleAsync(s => s.EntryId == entry.Id || s.Entry.Op == entry.Op);
+        var split = await w.Db.Splits.AsNoTracking().Include(s => s.Entry).SingleAsync(s => s.EntryId == entry.Id);
         var later = (await BladeEvents.Read(w.Db, [split.ChildId]))
             .Where(e => e.BladeId == split.ChildId && e.Id != split.EntryId)
             .ToList();

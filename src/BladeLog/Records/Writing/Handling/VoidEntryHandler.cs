@@ -76,7 +76,7 @@ internal static class VoidEntryHandler
         nameof(HoldCleared) => VoidBladeWork.HoldCleared(w, entry, c.Reason),
         nameof(Break) => VoidBladeWork.Break(w, entry, c.Reason),
         nameof(Joint) => VoidBladeWork.Joint(w, entry, c.Reason),
-        nameof(Split) or nameof(CutDown) => VoidBladeWork.Split(w, entry, c.Reason),
+        nameof(Split) => VoidBladeWork.Split(w, entry, c.Reason),
         nameof(Batch) => VoidBladeWork.Batch(w, entry, c.Reason),
         nameof(BatchLine) => VoidBladeWork.BatchLine(w, entry, c.Reason),
         nameof(BatchReturn) => VoidBladeWork.BatchReturn(w, entry, c.Reason),

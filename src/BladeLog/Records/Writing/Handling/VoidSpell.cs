@@ -36,7 +36,7 @@ internal static class VoidSpell
         var dismount = await w.Db.Dismounts.AsNoTracking().Include(d => d.Entry).SingleAsync(d => d.EntryId == entry.Id);
         var mount = await w.Db.Mounts.AsNoTracking().Include(m => m.Entry).SingleAsync(m => m.EntryId == dismount.MountId);
         var at = dismount.Entry.AtUtc;
-        var later = (await FactReader.ReadSpells(w.Db, [mount.SawId], [mount.BladeId])).Where(s => s.MountId != mount.EntryId && s.End > at).ToList();
+        var later = (await FactReader.ReadSpells(w.Db, mount.SawId, mount.BladeId, at)).Where(s => s.MountId != mount.EntryId && s.End > at).ToList();
         foreach (var spell in later)
         {
             w.Refuse("EntryId", $"Void first: entry {spell.MountId}, {await SpellRules.Words(w, spell)}.");

@@ -1,0 +1,243 @@
+using BladeLog.Advice;
+using BladeLog.Handbook.Quantities;
+using BladeLog.Records;
+using BladeLog.Records.Writing;
+using BladeLog.Ui;
+using Microsoft.AspNetCore.Mvc;
+using MaterialTable = BladeLog.Handbook.Tables.MaterialTable;
+using Problem = BladeLog.Ui.Forms.Problem;
+
+namespace BladeLog.Features.Cuts;
+
+/// <summary>A cut for the list, as typed.</summary>
+public sealed record CutForm
+{
+    public string? Op { get; init; }
+
+    public string? Version { get; init; }
+
+    /// <summary>A name tapped from those offered; it stands for the species.</summary>
+    public string? Pick { get; init; }
+
+    public string? Job { get; init; }
+
+    public string? Species { get; init; }
+
+    public string? Height { get; init; }
+
+    public string? Length { get; init; }
+
+    public string? Pieces { get; init; }
+
+    public string? Kind { get; init; }
+
+    public string? Finish { get; init; }
+
+    public string? Radius { get; init; }
+
+    public string? Bevel { get; init; }
+
+    public string? Moisture { get; init; }
+
+    public string? Frozen { get; init; }
+
+    public string? Dirt { get; init; }
+
+    public string? Direction { get; init; }
+
+    public string? ClassWork { get; init; }
+
+    public string? Nail { get; init; }
+
+    public string? Timber { get; init; }
+
+    public string? Due { get; init; }
+
+    internal static CutForm New() => new()
+    {
+        Op = Guid.NewGuid().ToString(),
+        Pieces = "1",
+        Dirt = nameof(Records.Dirt.Clean),
+        Direction = nameof(CutDirection.Rip),
+    };
+
+    internal static CutForm Of(QueuedCut cut, ShopUnits units) => new()
+    {
+        Op = Guid.NewGuid().ToString(),
+        Version = units.Show(cut.Version),
+        Job = cut.Job,
+        Species = cut.SpeciesTyped,
+        Height = CutSays.Bare(units.Show(new Length(cut.HeightM), Fields.CutHeight)),
+        Length = CutSays.Bare(units.Show(new Length(cut.LengthM), Fields.Board)),
+        Pieces = units.Show(cut.Pieces),
+        Kind = cut.Kind.ToString(),
+        Finish = cut.Finish.ToString(),
+        Radius = cut.RadiusM is { } r ? CutSays.Bare(units.Show(new Length(r), Fields.CurveRadius)) : null,
+        Bevel = cut.BevelRad > 0 ? units.Show(new Angle(cut.BevelRad)) : null,
+        Moisture = cut.MoisturePct is { } m ? CutSays.Bare(units.ShowPercent(m)) : null,
+        Frozen = cut.Frozen ? "true" : null,
+        Dirt = cut.Dirt.ToString(),
+        Direction = cut.Direction.ToString(),
+        ClassWork = cut.ClassWork ? "true" : null,
+        Nail = cut.NailChance > 0 ? CutSays.Bare(units.ShowPercent(cut.NailChance * 100)) : null,
+        Timber = cut.TimberMinorPerM3 is { } t ? units.ShowMoney(t) : null,
+        Due = cut.Due is { } due ? units.Show(due) : null,
+    };
+
+    /// <summary>The cut it says, or null with the sentences in the reader.</summary>
+    internal QueuedCut? Read(FormReader read)
+    {
+        string job = (Job ?? "").Trim();
+        if (job.Length is 0 or > 80)
+        {
+            read.Refuse(nameof(Job), "Say in a few words what it is for, such as drawer fronts.");
+        }
+
+        Wood? wood = Wood.Read(Species, read, nameof(Species));
+        double? height = read.NeedLength(Height, nameof(Height), Fields.CutHeight), length = read.NeedLength(Length, nameof(Length), Fields.Board);
+        int? pieces = read.NeedPieces(Pieces, nameof(Pieces));
+        CutKind? kind = read.OneOf<CutKind>(Kind, nameof(Kind), "Choose what kind of work it is.");
+        Finish? finish = read.OneOf<Finish>(Finish, nameof(Finish), "Choose how fine the cut must be.");
+        Dirt? dirt = read.OneOf<Dirt>(Dirt, nameof(Dirt), "Choose how clean the wood is.");
+        CutDirection? direction = read.OneOf<CutDirection>(Direction, nameof(Direction), "Choose along or across the grain.");
+        double? radius = read.Length(Radius, nameof(Radius), Fields.CurveRadius), moisture = read.Moisture(Moisture, nameof(Moisture)), nail = read.Percent(Nail, nameof(Nail));
+        Angle? bevel = read.Bevel(Bevel, nameof(Bevel));
+        long? timber = read.Money(Timber, nameof(Timber));
+        DateOnly? due = read.Date(Due, nameof(Due));
+        if (read.Problems.Count > 0)
+        {
+            return null;
+        }
+
+        return new QueuedCut
+        {
+            Job = job,
+            Material = wood!.Kind,
+            SpeciesKey = wood.Key,
+            SpeciesTyped = wood.Typed,
+            TakenAs = wood.TakenAs,
+            HeightM = height!.Value,
+            HeightTyped = Height!.Trim(),
+            LengthM = length!.Value,
+            LengthTyped = Length!.Trim(),
+            Pieces = pieces!.Value,
+            Kind = kind!.Value,
+            Finish = finish!.Value,
+            RadiusM = radius,
+            RadiusTyped = radius is null ? null : Radius!.Trim(),
+            BevelRad = bevel?.Radians ?? 0,
+            MoisturePct = moisture,
+            Frozen = Frozen == "true",
+            Dirt = dirt!.Value,
+            Direction = direction!.Value,
+            ClassWork = ClassWork == "true",
+            NailChance = (nail ?? 0) / 100,
+            TimberMinorPerM3 = timber,
+            Due = due,
+        };
+    }
+}
+
+/// <summary>A word typed for a wood, and what the handbook takes it for.</summary>
+internal sealed record Wood(string Key, string Typed, string? TakenAs, MaterialKind Kind, string WearClass)
+{
+    private const int LongestName = 60;
+
+    public static Wood? Read(string? text, FormReader read, string field)
+    {
+        string typed = (text ?? "").Trim();
+        if (typed.Length is 0 or > LongestName)
+        {
+            read.Refuse(field, "Say which wood or panel it is, such as European oak or birch plywood.");
+            return null;
+        }
+
+        if (MaterialTable.Find(typed, out string? takenAs) is not { } found)
+        {
+            IReadOnlyList<string> near = MaterialTable.NearestNames(typed);
+            read.Refuse(field, near.Count > 0
+                ? $"\"{typed}\" is not a wood known here. The nearest names are {string.Join(", ", near)}: tap one, or write another."
+                : $"\"{typed}\" is not a wood known here. Write its usual name, such as European oak.");
+            return null;
+        }
+
+        MaterialKind kind = found.Kind switch
+        {
+            Handbook.Tables.MaterialKind.Wood => MaterialKind.Wood,
+            Handbook.Tables.MaterialKind.Panel => MaterialKind.Panel,
+            _ => MaterialKind.Other,
+        };
+        return new Wood(found.Key, typed, takenAs, kind, found.WearClass);
+    }
+
+    /// <summary>Names to tap where the word is not known; none where it is.</summary>
+    public static IReadOnlyList<string> Offers(string? text)
+    {
+        string typed = (text ?? "").Trim();
+        return typed.Length is 0 or > LongestName || MaterialTable.Find(typed, out _) is not null ? [] : MaterialTable.NearestNames(typed);
+    }
+
+    public static IReadOnlyList<string> Names { get; } = [.. MaterialTable.All.Select(m => m.Name)];
+}
+
+public sealed record CutFormModel(int? Number, CutForm Form, IReadOnlyList<Problem> Problems, ShopUnits Units, string MoistureDefault)
+{
+    public string Action => Number is { } n ? $"/cuts/{Units.Show(n)}/edit" : "/cuts/new";
+
+    /// <summary>Names to tap in place of an unknown one.</summary>
+    public IReadOnlyList<string> Offers => Wood.Offers(Form.Species);
+
+    public string? Error(string field) => Problems.FirstOrDefault(p => p.Field == field)?.Sentence;
+}
+
+internal static class CutForms
+{
+    public static void Map(WebApplication app)
+    {
+        app.MapGet("/cuts/new", async (Desk desk) => await Page(desk, null, CutForm.New(), []));
+        app.MapPost("/cuts/new", Add);
+        app.MapGet("/cuts/{number:int}/edit", Edit);
+        app.MapPost("/cuts/{number:int}/edit", Save);
+    }
+
+    private static async Task<IResult> Add([FromForm] CutForm form, Desk desk)
+    {
+        form = Picked(form);
+        FormReader read = new(await desk.Units(), desk.Now);
+        if (form.Read(read) is not { } cut)
+        {
+            return await Page(desk, null, form, read.Problems);
+        }
+
+        WriteResult result = await desk.Write(new QueueCut(cut), form.Op, null);
+        return result is WriteResult.Done done ? desk.Saved(done, $"{cut.Job} on the list", canUndo: false) : await Page(desk, null, form, Unwritten.Of(result, read.Units, f => f));
+    }
+
+    private static async Task<IResult> Edit(int number, Desk desk) =>
+        await CutsPages.Find(desk, number) is { } cut ? await Page(desk, number, CutForm.Of(cut, await desk.Units()), []) : Results.NotFound();
+
+    private static async Task<IResult> Save(int number, [FromForm] CutForm form, Desk desk)
+    {
+        form = Picked(form);
+        FormReader read = new(await desk.Units(), desk.Now);
+        if (form.Read(read) is not { } cut)
+        {
+            return await Page(desk, number, form, read.Problems);
+        }
+
+        int version = int.TryParse(form.Version, out int v) ? v : 0;
+        WriteResult result = await desk.Write(new EditCut(number, version, cut), form.Op, null);
+        return result is WriteResult.Done done ? desk.Saved(done, $"cut {number} edited", canUndo: false) : await Page(desk, number, form, Unwritten.Of(result, read.Units, f => f));
+    }
+
+    private static CutForm Picked(CutForm form) => string.IsNullOrWhiteSpace(form.Pick) ? form : form with { Species = form.Pick, Pick = null };
+
+    private static async Task<IResult> Page(Desk desk, int? number, CutForm form, IReadOnlyList<Problem> problems)
+    {
+        AdviceSettings settings = (await desk.Advice()).Settings;
+        string moisture = $"{Figures.Number(settings[CutSettings.Moisture])} % where nothing is typed: {settings.Known(CutSettings.Moisture).From}";
+        return await desk.Page<CutFormPage, CutFormModel>(
+            new(number, form, problems, await desk.Units(), moisture),
+            problems.Count > 0 ? StatusCodes.Status422UnprocessableEntity : StatusCodes.Status200OK);
+    }
+}

@@ -1,0 +1,29 @@
+using BladeLog.Records;
+
+namespace BladeLog.Features.Saws;
+
+/// <summary>The page of one saw.</summary>
+internal static class SawPages
+{
+    private const int Shown = 10;
+    private const int Most = 300;
+
+    public static void Map(WebApplication app) => app.MapGet("/saws/{code}", Get);
+
+    private static async Task<IResult> Get(Desk desk, string code, string? all)
+    {
+        ShopNow shop = await desk.Shop();
+        if (shop.Saw(code) is not { } saw)
+        {
+            string sought = Tags.Read(code);
+            return await desk.Page<NoSawPage, NoSawModel>(
+                new NoSawModel(sought.Length > 20 ? sought[..20] + "…" : sought, [.. shop.Saws.Select(s => (s.Saw.Code, s.Saw.Name))]),
+                StatusCodes.Status404NotFound);
+        }
+
+        IReadOnlyList<PastFact> past = await Past.OfSaw(desk.Db, saw.Saw.Id, all is null ? Shown + 1 : Most);
+        bool more = all is null && past.Count > Shown;
+        SawPageModel page = new(saw, await desk.Advice(), await desk.Units());
+        return await desk.Page<SawPage, SawModel>(page.Model(more ? [.. past.Take(Shown)] : past, more));
+    }
+}

@@ -1,0 +1,62 @@
+using BladeLog.Handbook.Quantities;
+using BladeLog.Handbook.Units;
+using BladeLog.Ui;
+using BladeLog.Ui.Forms;
+using BladeLog.Ui.Pictures.Geometry;
+
+namespace BladeLog.Features;
+
+/// <summary>SI to the shop's units on axes and in lines.</summary>
+internal sealed class Shown(ShopUnits units)
+{
+    private bool Inch => units.Units == UnitSystem.Inch;
+
+    public ShopUnits Units => units;
+
+    public string SmallUnit => Inch ? "in" : "mm";
+
+    public double Small(double metres) => Inch ? metres / Exact.Inch : metres * 1e3;
+
+    public string StressUnit => Inch ? "psi" : "MPa";
+
+    public double Stress(double pascals) => Inch ? pascals / Exact.Psi : pascals * 1e-6;
+
+    public string ForceUnit => Inch ? "lbf" : "N";
+
+    public double Force(double newtons) => Inch ? newtons / Exact.PoundForce : newtons;
+
+    public string FeedUnit => Inch ? "ft/min" : "m/min";
+
+    public double Feed(double metresPerSecond) => metresPerSecond * 60 / (Inch ? Exact.Foot : 1);
+
+    public string StressText(double pascals) => Figures.With(Figures.Number(Stress(pascals), 0), StressUnit);
+
+    public string ForceText(double newtons) => Figures.With(Figures.Number(Force(newtons), Math.Abs(Force(newtons)) < 9.95 ? 1 : 0), ForceUnit);
+
+    public string FeedText(double metresPerSecond) => double.IsFinite(metresPerSecond) ? Figures.With(Figures.Feed(Feed(metresPerSecond)), FeedUnit) : "no limit";
+
+    public string SmallText(double metres, int decimals = 1) => Figures.With(Figures.Number(Small(metres), Inch ? decimals + 1 : decimals), SmallUnit);
+
+    public static string Micrometres(double metres, int decimals = 1) => Figures.With(Figures.Number(metres * 1e6, decimals), "µm");
+
+    /// <summary>One line of the reckoning. Keys that are no publication say nothing beyond their mark.</summary>
+    public static BecauseLine Line(string what, string value, string formula, string source, Provenance provenance) =>
+        new(what, value, formula, source is "derived" or "engineering-default" or "common-practice" or "from-memory" ? null : source, provenance);
+
+    /// <summary>Points of a line, evenly spaced on its axis.</summary>
+    public static IReadOnlyList<Point> Points(AxisScale x, Func<double, double?> y, int count = 60) =>
+        [.. Enumerable.Range(0, count + 1).Select(i => x.Value(100.0 * i / count)).Select(v => new Point(v, Finite(() => y(v))))];
+
+    // Where the handbook refuses a case the line has a gap.
+    private static double Finite(Func<double?> y)
+    {
+        try
+        {
+            return y() ?? double.NaN;
+        }
+        catch (ArgumentOutOfRangeException)
+        {
+            return double.NaN;
+        }
+    }
+}
