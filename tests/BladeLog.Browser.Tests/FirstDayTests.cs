@@ -23,7 +23,7 @@ public sealed class FirstDayTests(Workbench bench) : IClassFixture<Workbench>
             await QueueCut(tablet);
             await Answer(tablet);
         }, script);
-        Assert.Equal(TimeSpan.FromMinutes(90), TimeSpan.FromMilliseconds(await shop.Ask(db => db.RunShares.SumAsync(r => r.RunningMs))));
+        Assert.Equal(TimeSpan.FromMinutes(90), TimeSpan.FromMilliseconds(await shop.Ask(db => db.RunShares.SumAsync(r => r.Ms))));
     }
 
     private static async Task Begin(Tablet tablet)

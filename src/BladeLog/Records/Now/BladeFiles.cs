@@ -48,7 +48,7 @@ internal sealed class BladeFiles
             KerfM = sharpenings.LastOrDefault(s => s.KerfM is not null)?.KerfM,
             EdgeAfterM = last?.EdgeAfterM,
             Weld = joint?.Quality ?? WeldQuality.Good,
-            Welds = 1 + line.Sum(a => _rows.Joints[a.Blade.Id].Count(j => j.Entry.AtUtc <= a.Until)),
+            Welds = Welds(line),
             Sharpenings = sharpenings.Count + line.Sum(a => _rows.PriorUses.GetValueOrDefault(a.Blade.Id)?.Sharpenings ?? 0),
             LastSharpenedUtc = last?.Entry.AtUtc,
             Exposures = Exposures(blade, line, joint),
@@ -68,6 +68,14 @@ internal sealed class BladeFiles
             MountedSinceInspection = own.Exists(s => inspection is null || s.From >= inspection.Entry.AtUtc),
             MountedSinceUtc = open?.From,
         };
+    }
+
+    /// <summary>A loop comes with its first weld; one made up from coil here has its first joint before it ever ran.</summary>
+    private int Welds(List<(Blade Blade, DateTime Until, bool Ancestor)> line)
+    {
+        var joints = line.SelectMany(a => _rows.Joints[a.Blade.Id].Where(j => j.Entry.AtUtc <= a.Until)).ToList();
+        var ran = line.SelectMany(SpellsOf).Select(s => s.From).DefaultIfEmpty(DateTime.MaxValue).Min();
+        return joints.Exists(j => j.Entry.AtUtc <= ran) ? joints.Count : joints.Count + 1;
     }
 
     private List<SpellRow> Inside(Func<Blade, DateTime?> time) =>
