@@ -40,8 +40,9 @@ internal static class ComeBack
 {
     public static Task<IResult> Get(Desk desk, string number) => Show(desk, number, new ComeBackForm(), FormState.New);
 
-    public static async Task<IResult> Post([FromForm] ComeBackForm form, Desk desk, string number)
+    public static async Task<IResult> Post([FromForm] ComeBackForm? form, Desk desk, string number)
     {
+        form ??= new();
         var read = new FormReading(await desk.Units(), desk.Now);
         var lines = new List<BackLine>();
         var sent = form.Lines ?? [];

@@ -37,8 +37,9 @@ internal static class SendOut
         return await Show(desk, new SendOutForm { Number = Next(last?.Number), Service = last?.Service }, FormState.New);
     }
 
-    public static async Task<IResult> Post([FromForm] SendOutForm form, Desk desk)
+    public static async Task<IResult> Post([FromForm] SendOutForm? form, Desk desk)
     {
+        form ??= new();
         var units = await desk.Units();
         var read = new FormReading(units, desk.Now);
         List<string> tags = [.. form.Pick ?? [], .. (form.Tags ?? "").Split([' ', ',', ';', '\n', '\r'], StringSplitOptions.RemoveEmptyEntries).Select(Records.Tags.Read)];

@@ -29,8 +29,9 @@ internal static class Break
 {
     public static Task<IResult> Get(Desk desk, string tag) => Show(desk, tag, new BreakForm(), FormState.New);
 
-    public static async Task<IResult> Post([FromForm] BreakForm form, Desk desk, string tag)
+    public static async Task<IResult> Post([FromForm] BreakForm? form, Desk desk, string tag)
     {
+        form ??= new();
         if ((await desk.Shop()).Blade(Tags.Read(tag)) is null)
         {
             return Results.NotFound();

@@ -35,8 +35,9 @@ internal static class Change
         ? await Show(desk, tag, FormOf(file, await desk.Units()), FormState.New)
         : Results.NotFound();
 
-    public static async Task<IResult> Post([FromForm] ChangeForm form, Desk desk, string tag)
+    public static async Task<IResult> Post([FromForm] ChangeForm? form, Desk desk, string tag)
     {
+        form ??= new();
         if ((await desk.Shop()).Blade(Tags.Read(tag)) is not { } file)
         {
             return Results.NotFound();

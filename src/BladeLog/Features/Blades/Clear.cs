@@ -17,8 +17,9 @@ internal static class Clear
 {
     public static Task<IResult> Get(Desk desk, string tag) => Show(desk, tag, new ClearForm(), FormState.New);
 
-    public static async Task<IResult> Post([FromForm] ClearForm form, Desk desk, string tag)
+    public static async Task<IResult> Post([FromForm] ClearForm? form, Desk desk, string tag)
     {
+        form ??= new();
         if ((await desk.Shop()).Blade(Tags.Read(tag)) is null)
         {
             return Results.NotFound();

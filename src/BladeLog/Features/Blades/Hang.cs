@@ -18,8 +18,9 @@ internal static class Hang
 {
     public static Task<IResult> Get(Desk desk, string tag) => Show(desk, tag, new HangForm(), FormState.New);
 
-    public static async Task<IResult> Post([FromForm] HangForm form, Desk desk, string tag)
+    public static async Task<IResult> Post([FromForm] HangForm? form, Desk desk, string tag)
     {
+        form ??= new();
         if ((await desk.Shop()).Blade(Tags.Read(tag)) is null)
         {
             return Results.NotFound();

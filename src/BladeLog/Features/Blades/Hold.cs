@@ -23,8 +23,9 @@ internal static class Hold
 {
     public static Task<IResult> Get(Desk desk, string tag) => Show(desk, tag, new HoldForm(), FormState.New);
 
-    public static async Task<IResult> Post([FromForm] HoldForm form, Desk desk, string tag)
+    public static async Task<IResult> Post([FromForm] HoldForm? form, Desk desk, string tag)
     {
+        form ??= new();
         if ((await desk.Shop()).Blade(Tags.Read(tag)) is null)
         {
             return Results.NotFound();

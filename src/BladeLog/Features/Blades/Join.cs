@@ -24,8 +24,9 @@ internal static class Join
 {
     public static Task<IResult> Get(Desk desk, string tag) => Show(desk, tag, new JoinForm(), FormState.New);
 
-    public static async Task<IResult> Post([FromForm] JoinForm form, Desk desk, string tag)
+    public static async Task<IResult> Post([FromForm] JoinForm? form, Desk desk, string tag)
     {
+        form ??= new();
         if ((await desk.Shop()).Blade(Tags.Read(tag)) is null)
         {
             return Results.NotFound();

@@ -1,5 +1,7 @@
+using System.Globalization;
 using System.Security.Cryptography;
 using System.Text;
+using BladeLog.Handbook.Units;
 using BladeLog.Records;
 using BladeLog.Records.Writing;
 using BladeLog.Ui;
@@ -39,8 +41,9 @@ internal static class NewBlade
 {
     public static Task<IResult> Get(Desk desk, string? spec) => Show(desk, new NewBladeForm { Spec = spec }, FormState.New);
 
-    public static async Task<IResult> Post([FromForm] NewBladeForm form, Desk desk)
+    public static async Task<IResult> Post([FromForm] NewBladeForm? form, Desk desk)
     {
+        form ??= new();
         var units = await desk.Units();
         var read = new FormReading(units, desk.Now);
         form = FormFromPrint(form, read, units) with { Op = FormFlow.Op(form.Op) };
@@ -137,13 +140,20 @@ internal static class NewBlade
             return form;
         }
 
+        // The figures go on as exact as they were printed, so that 3 TPI stays 3 TPI.
+        string Exactly(double metres) => units.Units == UnitSystem.Inch
+            ? string.Create(CultureInfo.InvariantCulture, $"{metres / Exact.Inch:0.######} in")
+            : string.Create(CultureInfo.InvariantCulture, $"{metres * 1e3:0.######} mm");
+        string Teeth(ToothPitch pitch) => pitch.IsVariable
+            ? string.Create(CultureInfo.InvariantCulture, $"{Exact.Inch / pitch.Coarse.Metres:0.######}-{Exact.Inch / pitch.Fine.Metres:0.######} TPI")
+            : string.Create(CultureInfo.InvariantCulture, $"{Exact.Inch / pitch.Coarse.Metres:0.############} TPI");
         string? Or(string? typed, string? printed) => string.IsNullOrWhiteSpace(typed) ? printed : typed;
         return form with
         {
-            Width = Or(form.Width, print.Value.Width is { } w ? units.Show(w, Fields.BladeWidth) : null),
-            Thickness = Or(form.Thickness, print.Value.Thickness is { } t ? units.Show(t, Fields.Thickness) : null),
-            Pitch = Or(form.Pitch, print.Value.Pitch is { } p ? units.Show(p) : null),
-            NewLoop = Or(form.NewLoop, print.Value.Loop is { } l ? units.Show(l, Fields.Loop) : null),
+            Width = Or(form.Width, print.Value.Width is { } w ? Exactly(w.Metres) : null),
+            Thickness = Or(form.Thickness, print.Value.Thickness is { } t ? Exactly(t.Metres) : null),
+            Pitch = Or(form.Pitch, print.Value.Pitch is { } p ? Teeth(p) : null),
+            NewLoop = Or(form.NewLoop, print.Value.Loop is { } l ? Exactly(l.Metres) : null),
         };
     }
 

@@ -20,8 +20,9 @@ internal static class Pull
 {
     public static Task<IResult> Get(Desk desk, string tag) => Show(desk, tag, new PullForm(), FormState.New);
 
-    public static async Task<IResult> Post([FromForm] PullForm form, Desk desk, string tag)
+    public static async Task<IResult> Post([FromForm] PullForm? form, Desk desk, string tag)
     {
+        form ??= new();
         if ((await desk.Shop()).Blade(Tags.Read(tag)) is null)
         {
             return Results.NotFound();

@@ -22,8 +22,9 @@ internal static class Retire
 {
     public static Task<IResult> Get(Desk desk, string tag) => Show(desk, tag, new RetireForm(), FormState.New);
 
-    public static async Task<IResult> Post([FromForm] RetireForm form, Desk desk, string tag)
+    public static async Task<IResult> Post([FromForm] RetireForm? form, Desk desk, string tag)
     {
+        form ??= new();
         if ((await desk.Shop()).Blade(Tags.Read(tag)) is null)
         {
             return Results.NotFound();

@@ -31,8 +31,9 @@ internal static class Sharpen
 {
     public static Task<IResult> Get(Desk desk, string tag) => Show(desk, tag, new SharpenForm(), FormState.New);
 
-    public static async Task<IResult> Post([FromForm] SharpenForm form, Desk desk, string tag)
+    public static async Task<IResult> Post([FromForm] SharpenForm? form, Desk desk, string tag)
     {
+        form ??= new();
         if ((await desk.Shop()).Blade(Tags.Read(tag)) is null)
         {
             return Results.NotFound();

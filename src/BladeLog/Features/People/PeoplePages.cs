@@ -49,9 +49,9 @@ internal static class PeoplePages
 
     private static async Task<IResult> Who(Desk desk, HttpContext http) => await WhoPage(desk, Local(http.Request.Headers.Referer), FormState.New);
 
-    private static async Task<IResult> SayWho([FromForm] WhoForm form, Desk desk) => await desk.SayWho(form.Who ?? "")
-        ? Results.Redirect(Local(form.Back))
-        : await WhoPage(desk, Local(form.Back), FormState.New with { Problems = [new("Who", "Tap your initials.")], Status = StatusCodes.Status422UnprocessableEntity });
+    private static async Task<IResult> SayWho([FromForm] WhoForm? form, Desk desk) => await desk.SayWho(form?.Who ?? "")
+        ? Results.Redirect(Local(form?.Back))
+        : await WhoPage(desk, Local(form?.Back), FormState.New with { Problems = [new("Who", "Tap your initials.")], Status = StatusCodes.Status422UnprocessableEntity });
 
     private static async Task<IResult> WhoPage(Desk desk, string back, FormState state) => await desk.Page<WhoPage, WhoModel>(
         new(await desk.Db.People.AsNoTracking().Where(p => p.Active).OrderBy(p => p.Initials).ToListAsync(), (await desk.Who())?.Initials, back, state), state.Status);
@@ -70,11 +70,16 @@ internal static class PeoplePages
         ? await Show(desk, FormOf(person), FormState.New, isNew: false)
         : Results.NotFound();
 
-    private static async Task<IResult> Add([FromForm] PersonForm form, Desk desk) => await desk.Send(
-        new AddPerson(form.Initials ?? "", form.Name ?? "", Roles(form)), form, "/people", $"{form.Initials} added", state => Show(desk, form, state, isNew: true), canUndo: false);
-
-    private static async Task<IResult> Edit([FromForm] PersonForm form, Desk desk, string initials)
+    private static async Task<IResult> Add([FromForm] PersonForm? form, Desk desk)
     {
+        form ??= new();
+        return await desk.Send(
+            new AddPerson(form.Initials ?? "", form.Name ?? "", Roles(form)), form, "/people", $"{form.Initials} added", state => Show(desk, form, state, isNew: true), canUndo: false);
+    }
+
+    private static async Task<IResult> Edit([FromForm] PersonForm? form, Desk desk, string initials)
+    {
+        form ??= new();
         if (await Find(desk, initials) is not { } person)
         {
             return Results.NotFound();

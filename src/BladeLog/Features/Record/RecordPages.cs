@@ -40,8 +40,9 @@ internal static class RecordPages
         return await desk.Page<RecordPage, RecordModel>(new(await EntryWords.Of(desk, entries.Take(Lines).ToList()), Math.Max(1, page ?? 1), entries.Count > Lines, null));
     }
 
-    private static async Task<IResult> Strike([FromForm] VoidForm form, Desk desk, int entry)
+    private static async Task<IResult> Strike([FromForm] VoidForm? form, Desk desk, int entry)
     {
+        form ??= new();
         // The undo in the title block sends no reason: it takes back the whole form at once.
         var atOnce = form.Asked is null;
         var read = new FormReading(await desk.Units(), desk.Now);

@@ -11,8 +11,9 @@ internal static class Clicking
 {
     public static Task<IResult> Get(Desk desk, string code) => SawForm.Show<ClickingPage, ClickingForm>(desk, code, new ClickingForm(), FormState.New);
 
-    public static async Task<IResult> Post([FromForm] ClickingForm form, Desk desk, string code)
+    public static async Task<IResult> Post([FromForm] ClickingForm? form, Desk desk, string code)
     {
+        form ??= new();
         var shop = await desk.Shop();
         if (shop.Saw(code) is not { } saw)
         {

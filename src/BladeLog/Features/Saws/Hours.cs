@@ -45,8 +45,9 @@ internal static class Hours
         return await Show(desk, code, new HoursForm { Kind = metered ? "meter" : "typed" }, FormState.New);
     }
 
-    public static async Task<IResult> Post([FromForm] HoursForm form, Desk desk, string code)
+    public static async Task<IResult> Post([FromForm] HoursForm? form, Desk desk, string code)
     {
+        form ??= new();
         if ((await desk.Shop()).Saw(code) is not { } saw)
         {
             return Results.NotFound();

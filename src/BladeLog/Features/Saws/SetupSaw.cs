@@ -13,8 +13,9 @@ internal static class SetupSaw
 {
     public static Task<IResult> GetNew(Desk desk) => Show(desk, null, new SetupForm { Active = "true" }, FormState.New);
 
-    public static async Task<IResult> PostNew([FromForm] SetupForm form, Desk desk)
+    public static async Task<IResult> PostNew([FromForm] SetupForm? form, Desk desk)
     {
+        form ??= new();
         var read = new FormReading(await desk.Units(), desk.Now);
         var setup = SetupReading.Read(form, read);
         return read.IsGood
@@ -28,8 +29,9 @@ internal static class SetupSaw
         ? await Show(desk, saw, SetupReading.FormOf(saw, await desk.Units()), FormState.New)
         : Results.NotFound();
 
-    public static async Task<IResult> PostEdit([FromForm] SetupForm form, Desk desk, string code)
+    public static async Task<IResult> PostEdit([FromForm] SetupForm? form, Desk desk, string code)
     {
+        form ??= new();
         if ((await desk.Shop()).Saw(code) is not { } saw)
         {
             return Results.NotFound();

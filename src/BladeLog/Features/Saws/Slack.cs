@@ -15,8 +15,9 @@ internal static class Slack
 {
     public static Task<IResult> Get(Desk desk, string code) => Show(desk, code, new SlackForm(), FormState.New);
 
-    public static async Task<IResult> Post([FromForm] SlackForm form, Desk desk, string code)
+    public static async Task<IResult> Post([FromForm] SlackForm? form, Desk desk, string code)
     {
+        form ??= new();
         if ((await desk.Shop()).Saw(code) is not { } saw)
         {
             return Results.NotFound();

@@ -17,8 +17,9 @@ internal static class Swap
             ? await Show(desk, saw, new SwapForm { OnTag = on, Found = found }, OnState(await desk.Shop(), on))
             : Results.NotFound();
 
-    public static async Task<IResult> Post([FromForm] SwapForm form, Desk desk, string code)
+    public static async Task<IResult> Post([FromForm] SwapForm? form, Desk desk, string code)
     {
+        form ??= new();
         var shop = await desk.Shop();
         if (shop.Saw(code) is not { } saw)
         {

@@ -53,8 +53,9 @@ internal static class SetupPages
 
     private static async Task<IResult> Get(Desk desk) => await Show(desk, FormOf((await desk.Shop()).Shop, await desk.Units()), FormState.New);
 
-    private static async Task<IResult> Post([FromForm] ShopForm form, Desk desk)
+    private static async Task<IResult> Post([FromForm] ShopForm? form, Desk desk)
     {
+        form ??= new();
         var now = (await desk.Shop()).Shop;
         var read = new FormReading(await desk.Units(), desk.Now);
         var digits = read.Count(nameof(form.CurrencyDigits), form.CurrencyDigits) ?? now.CurrencyDigits;
@@ -87,8 +88,9 @@ internal static class SetupPages
         ? await ShowSetting(desk, definition, null, FormState.New)
         : Results.NotFound();
 
-    private static async Task<IResult> PostSetting([FromForm] SettingForm form, Desk desk, string key)
+    private static async Task<IResult> PostSetting([FromForm] SettingForm? form, Desk desk, string key)
     {
+        form ??= new();
         if (SettingList.Find(key) is not { } definition)
         {
             return Results.NotFound();

@@ -80,6 +80,7 @@ public sealed class SwapTests
         Assert.Equal(before, await app.EntryCount());
 
         // The page shows what stands now, and can be sent.
+        app.Clock.Advance(TimeSpan.FromMinutes(1));
         (await app.SendForm(answer.Page, "/saws/S2/swap")).LeadsTo("/saws/S2");
         Assert.Equal("Q-13", await app.TagOn("S2"));
     }
