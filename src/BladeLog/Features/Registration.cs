@@ -1,3 +1,5 @@
+using BladeLog.Features.Blades;
+using BladeLog.Features.Saws;
 using BladeLog.Features.Start;
 using BladeLog.Features.Workings;
 
@@ -14,6 +16,8 @@ internal static class Registration
     public static void MapFeatures(this WebApplication app)
     {
         StartPages.Map(app);
+        WhatIfBlade.Map(app);
+        WhatIfSaw.Map(app);
         WorkingsPages.Map(app);
         WorkingsJson.Map(app.MapGroup("/api/v1"));
     }
