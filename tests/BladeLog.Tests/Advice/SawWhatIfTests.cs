@@ -18,7 +18,9 @@ public sealed class SawWhatIfTests(DemoShopFixture shop) : IClassFixture<DemoSho
         {
             SawNow saw = shop.Saw(code);
             double feed = 2.0 / 60;
-            CutWork work = Work("European oak");
+            Takes takes = saw.Setup.Takes;
+            CutKind kind = takes.HasFlag(Takes.Resaw) ? CutKind.Resaw : takes.HasFlag(Takes.Beam) ? CutKind.Beam : takes.HasFlag(Takes.Board) ? CutKind.Board : CutKind.Log;
+            CutWork work = Work("European oak", kind);
             foreach (BladeDepth d in new SawWhatIf(saw, work, feed, false, AdviceSettings.Handbook).Of(All(saw)))
             {
                 // The advice on a cut is another road to the same limits.
@@ -138,7 +140,7 @@ public sealed class SawWhatIfTests(DemoShopFixture shop) : IClassFixture<DemoSho
         return tried.Gate?.Green.GreenMps ?? double.NaN;
     }
 
-    private CutWork Work(string wood)
+    private CutWork Work(string wood, CutKind kind = CutKind.Resaw)
     {
         QueuedCut cut = new()
         {
@@ -149,7 +151,7 @@ public sealed class SawWhatIfTests(DemoShopFixture shop) : IClassFixture<DemoSho
             HeightM = 0.1,
             LengthM = 0.5,
             MoisturePct = 10,
-            Kind = CutKind.Resaw,
+            Kind = kind,
             Finish = Finish.Rough,
             Direction = CutDirection.Rip,
         };

@@ -15,7 +15,7 @@ public sealed class AxisScaleTests
                 Assert.NotEmpty(ticks);
                 Assert.All(ticks, t => Assert.InRange(t.Percent, -1e-6, 100 + 1e-6));
                 Assert.All(ticks.Zip(ticks.Skip(1)), pair => Assert.True(pair.First.Percent < pair.Second.Percent));
-                Assert.All(ticks, t => Assert.True(IsRound(t.Value, ticks), $"{t.Value} of {scale}"));
+                Assert.All(ticks, t => Assert.True(IsRound(t.Value, ticks, scale), $"{t.Value} of {scale}"));
                 Assert.All(ticks, t => Assert.Equal(t.Value, double.Parse(t.Text, System.Globalization.CultureInfo.InvariantCulture), 1e-9 * Math.Max(1, Math.Abs(t.Value))));
             }
         }
@@ -134,8 +134,14 @@ public sealed class AxisScaleTests
     }
 
     /// <summary>A multiple of 1, 2 or 5 times a power of ten no larger than the step, or such a number itself on a long logarithmic axis.</summary>
-    private static bool IsRound(double value, IReadOnlyList<Tick> ticks)
+    private static bool IsRound(double value, IReadOnlyList<Tick> ticks, AxisScale scale)
     {
+        if (scale.Logarithmic && scale.To / scale.From > 16)
+        {
+            double mantissa = value / Math.Pow(10, Math.Floor(Math.Log10(value) + 1e-9));
+            return new[] { 1.0, 2, 3, 5 }.Any(m => Math.Abs(mantissa - m) < 1e-6);
+        }
+
         double step = ticks.Count > 1 ? ticks.Zip(ticks.Skip(1)).Min(p => p.Second.Value - p.First.Value) : Math.Pow(10, Math.Floor(Math.Log10(Math.Max(value, 1e-12))) - 2);
         foreach (double m in (double[])[1, 2, 3, 5])
         {
