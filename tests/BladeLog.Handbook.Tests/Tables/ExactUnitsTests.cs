@@ -1,9 +1,9 @@
 using BladeLog.Handbook.Units;
 
-namespace BladeLog.Handbook.Tests.Units;
+namespace BladeLog.Handbook.Tests.Tables;
 
 /// <summary>Conversions that are exact by definition, against the printed factors.</summary>
-public sealed class ExactTests
+public sealed class ExactUnitsTests
 {
     [Fact]
     public void Inch_pound_and_gravity_are_exact_by_definition()
