@@ -157,6 +157,17 @@ internal sealed class AskForm(IQueryCollection query, ShopUnits units, bool from
         return value;
     }
 
+    /// <summary>One of the shop's own things by its short name; empty where none is chosen.</summary>
+    public string Pick(string name, string label, string start, string mark, string? empty, IReadOnlyList<Answer> answers)
+    {
+        string typed = Typed(name);
+        string? found = typed.Length == 0 ? null : answers.FirstOrDefault(a => string.Equals(a.Value, typed, StringComparison.OrdinalIgnoreCase))?.Value;
+        _typed |= found is not null;
+        string? error = typed.Length > 0 && found is null ? $"\"{typed}\" is none of these. Choose one." : null;
+        Add(new(name, label, found ?? start, typed.Length == 0 ? mark : null, error, answers, empty));
+        return error is null ? found ?? start : "";
+    }
+
     /// <summary>A word as typed, looked up by the caller.</summary>
     public T? Look<T>(string name, string label, string start, string mark, Func<string, (T? Found, string? Understood, string? Error)> find, IReadOnlyList<string>? offers = null)
         where T : class

@@ -40,6 +40,8 @@ internal static class Registration
         PeoplePages.Map(app);
         SetupPages.Map(app);
         CautionPages.Map(app);
+        WhatIfBlade.Map(app);
+        WhatIfSaw.Map(app);
         WorkingsPages.Map(app);
 
         var api = app.MapGroup("/api/v1").DisableAntiforgery();
