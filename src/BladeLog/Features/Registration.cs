@@ -1,5 +1,6 @@
 using BladeLog.Features.Bench;
 using BladeLog.Features.Blades;
+using BladeLog.Features.Breaks;
 using BladeLog.Features.Cautions;
 using BladeLog.Features.Cuts;
 using BladeLog.Features.Floor;
@@ -9,6 +10,7 @@ using BladeLog.Features.Rack;
 using BladeLog.Features.Record;
 using BladeLog.Features.Saws;
 using BladeLog.Features.Start;
+using BladeLog.Features.Stock;
 using BladeLog.Features.Workings;
 
 namespace BladeLog.Features;
@@ -37,6 +39,8 @@ internal static class Registration
         PeoplePages.Map(app);
         CautionPages.Map(app);
         WorkingsPages.Map(app);
+        BreakPages.Map(app);
+        StockPages.Map(app);
 
         var api = app.MapGroup("/api/v1").DisableAntiforgery();
         WorkingsJson.Map(api);
