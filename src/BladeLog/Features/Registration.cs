@@ -1,5 +1,6 @@
 using BladeLog.Features.Bench;
 using BladeLog.Features.Blades;
+using BladeLog.Features.Breaks;
 using BladeLog.Features.Cautions;
 using BladeLog.Features.Cuts;
 using BladeLog.Features.Floor;
@@ -11,6 +12,7 @@ using BladeLog.Features.Record;
 using BladeLog.Features.Saws;
 using BladeLog.Features.Setup;
 using BladeLog.Features.Start;
+using BladeLog.Features.Stock;
 using BladeLog.Features.Workings;
 
 namespace BladeLog.Features;
@@ -43,6 +45,8 @@ internal static class Registration
         WhatIfBlade.Map(app);
         WhatIfSaw.Map(app);
         WorkingsPages.Map(app);
+        BreakPages.Map(app);
+        StockPages.Map(app);
 
         var api = app.MapGroup("/api/v1").DisableAntiforgery();
         WorkingsJson.Map(api);

@@ -96,6 +96,16 @@ internal static class Said
         return TimeZoneInfo.ConvertTimeFromUtc(DateTime.SpecifyKind(utc, DateTimeKind.Utc), units.Zone);
     }
 
+    /// <summary>"leads 0.8° left: set the fence"; null where nothing was found since it was last sharpened.</summary>
+    public static string? Leads(BladeFile blade, int sawId, ShopUnits units)
+    {
+        ArgumentNullException.ThrowIfNull(blade);
+        ArgumentNullException.ThrowIfNull(units);
+        return !blade.LeadsRad.TryGetValue(sawId, out double rad) ? null
+            : Math.Abs(rad) < 0.0008 ? "runs true: set the fence parallel"
+            : $"leads {units.Show(new Angle(Math.Abs(rad)))} {(rad > 0 ? "left" : "right")}: set the fence";
+    }
+
     public static string Capital(string words) => words.Length == 0 ? words : char.ToUpperInvariant(words[0]) + words[1..];
 
     private static bool Whole(double teeth) => Math.Abs((teeth * 2) - Math.Round(teeth * 2)) < 0.02;

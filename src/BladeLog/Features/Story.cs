@@ -35,7 +35,7 @@ internal static class Story
         BatchLine l => $"Sent to {l.Batch.Service}, batch {l.Batch.Number}",
         BatchReturn r => $"Back from {r.Line.Batch.Service}, batch {r.Line.Batch.Number}: {Outcome(r.Outcome)}{Width(r.WidthM, units)}",
         TensionReading t => $"{Said.Capital(words.Tension)} measured: {units.Show(new Stress(t.TensionPa))} on the body{(saws.TryGetValue(t.SawId, out string? saw) ? ", on " + saw : "")}",
-        Drift d => $"Leads {units.Show(new Angle(d.AngleRad))}{(saws.TryGetValue(d.SawId, out string? on) ? " on " + on : "")}",
+        Drift d => $"Leads {units.Show(new Angle(Math.Abs(d.AngleRad)))}{(d.AngleRad > 0 ? " left" : d.AngleRad < 0 ? " right" : "")}{(saws.TryGetValue(d.SawId, out string? on) ? " on " + on : "")}",
         Hold h => $"Put on hold: {HoldWhat(h, words)}{(h.Note is { } note ? ", " + note.TrimEnd('.') : "")}",
         HoldCleared c => $"Hold cleared: {c.How.TrimEnd('.')}",
         Inspection i => $"Inspected: {Finding(i, words)}{(i.Note is { } note ? ", " + note.TrimEnd('.') : "")}",
@@ -97,6 +97,7 @@ internal static class Story
     private static string Site(BreakSite site) => site switch
     {
         BreakSite.Gullet => " at a gullet",
+        BreakSite.GulletAngled => " from a gullet, at an angle",
         BreakSite.Weld => " at its weld",
         BreakSite.BackEdge => " from the back edge",
         BreakSite.Body => " in the body",

@@ -25,6 +25,8 @@ internal static class BladeForms
         app.MapPost("/blades/{tag}/join", Join.Post);
         app.MapGet("/blades/{tag}/tension", Pull.Get);
         app.MapPost("/blades/{tag}/tension", Pull.Post);
+        app.MapGet("/blades/{tag}/drift", Lead.Get);
+        app.MapPost("/blades/{tag}/drift", Lead.Post);
         app.MapGet("/blades/{tag}/hang", Hang.Get);
         app.MapPost("/blades/{tag}/hang", Hang.Post);
     }

@@ -95,6 +95,7 @@ internal static class BladePageModel
 
             yield return new("It broke", At(blade, "break"), Alarm: true);
             yield return new("Welded", At(blade, "join"));
+            yield return new("Leads", At(blade, "drift"));
         }
 
         yield return new("Edit", At(blade, "edit"));

@@ -36,6 +36,11 @@ internal static class WhyThis
             rows.Add(Total(best, next, other, advice, units));
         }
 
+        if (best.Work.RadiusM is null && Said.Leads(best.Blade.File, best.Saw.Saw.Id, units) is { } leads)
+        {
+            rows.Add($"{best.Tag} {leads}.");
+        }
+
         rows.Add(Teeth(best));
         rows.Add(Edge(best, units));
         if (best is { UsualRadiusM: { } turns, Work.RadiusM: { } asked } && !best.Relief)

@@ -177,6 +177,7 @@ public sealed record RackModel
     private static string BrokeAt(BreakSite site) => site switch
     {
         BreakSite.Gullet => "broke at a gullet",
+        BreakSite.GulletAngled => "broke from a gullet, at an angle",
         BreakSite.Weld => "broke at its weld",
         BreakSite.BackEdge => "broke from the back edge",
         BreakSite.Body => "broke in the body",

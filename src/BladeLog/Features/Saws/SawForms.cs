@@ -13,6 +13,8 @@ internal static class SawForms
         app.MapPost("/saws/{code}/swap", Swap.Post);
         app.MapGet("/saws/{code}/hours", Hours.Get);
         app.MapPost("/saws/{code}/hours", Hours.Post);
+        app.MapGet("/saws/{code}/timer", Timer.Get);
+        app.MapPost("/saws/{code}/timer", Timer.Post);
         app.MapGet("/saws/{code}/clicking", Clicking.Get);
         app.MapPost("/saws/{code}/clicking", Clicking.Post);
         app.MapGet("/saws/{code}/slack", Slack.Get);

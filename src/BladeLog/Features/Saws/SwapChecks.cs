@@ -19,7 +19,13 @@ internal static class SwapChecks
         ArgumentNullException.ThrowIfNull(blade);
         ArgumentNullException.ThrowIfNull(units);
         BladeAdvice here = advice.On(blade, saw);
-        return [Size(saw, blade, units), Bending(here), Condition(here, saw, advice, units), Pull(here, units)];
+        List<CheckLine> lines = [Size(saw, blade, units), Bending(here), Condition(here, saw, advice, units), Pull(here, units)];
+        if (Said.Leads(blade, saw.Saw.Id, units) is { } leads)
+        {
+            lines.Add(new("care", Said.Capital(leads)));
+        }
+
+        return lines;
     }
 
     /// <summary>What the advice has against it beside what the records see themselves: the bending.</summary>

@@ -69,7 +69,12 @@ public sealed class Inspection : Fact
 public enum BreakSite
 {
     Unknown,
+
+    /// <summary>Straight across from a gullet.</summary>
     Gullet,
+
+    /// <summary>From a gullet, then on at an angle.</summary>
+    GulletAngled,
     Weld,
     BackEdge,
     Body,

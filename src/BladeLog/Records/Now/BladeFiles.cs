@@ -56,6 +56,7 @@ internal sealed class BladeFiles
             WholeLife = Sum(line.SelectMany(a => SpellsOf(a)).SelectMany(s => _rows.Paths[s.MountId].Select(Line))),
             TensionThisSpellPa = open is { } o ? MeasuredIn(o) : null,
             LastTensionPa = LastTensions(blade, own),
+            LeadsRad = _rows.Drifts[blade.Id].Where(d => last is null || d.At > last.Entry.AtUtc).GroupBy(d => d.SawId).ToDictionary(g => g.Key, g => g.Last().AngleRad),
             Hold = _rows.Holds.GetValueOrDefault(blade.Id),
             PriorUse = line.Select(a => _rows.PriorUses.GetValueOrDefault(a.Blade.Id)).FirstOrDefault(p => p is not null),
             Away = _rows.Away.GetValueOrDefault(blade.Id),
@@ -116,7 +117,7 @@ internal sealed class BladeFiles
                 {
                     var setup = _rows.Setups[e.SetupId];
                     var loop = _rows.Loops.At(a.Blade.Id, spell.From) ?? setup.LoopM;
-                    found.Add(new ExposureLine(setup, e.SpeedMps, e.RunningMs, tension, loop, spell.InsideOut, onThisWeld, a.Ancestor));
+                    found.Add(new ExposureLine(setup, e.SpeedMps, e.RunningMs, tension, loop, spell.InsideOut, onThisWeld, a.Ancestor) { FromUtc = spell.From });
                 }
             }
         }

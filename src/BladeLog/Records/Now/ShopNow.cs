@@ -30,6 +30,9 @@ public sealed record SawNow(Saw Saw, SawSetup Setup, int? MountedBladeId, DateTi
 /// </summary>
 public sealed record ExposureLine(SawSetup Setup, double SpeedMps, long RunningMs, double? TensionPa, double LoopM, bool InsideOut, bool OnThisWeld, bool OfAncestor)
 {
+    /// <summary>When the spell began.</summary>
+    public DateTime FromUtc { get; init; }
+
     public double Hours => RunningMs / 3_600_000.0;
 }
 
@@ -87,6 +90,9 @@ public sealed record BladeFile
 
     /// <summary>Last measured tension of this blade on each saw.</summary>
     public IReadOnlyDictionary<int, double> LastTensionPa { get; init; } = new Dictionary<int, double>();
+
+    /// <summary>The last angle it was found to lead at on each saw since it was last sharpened.</summary>
+    public IReadOnlyDictionary<int, double> LeadsRad { get; init; } = new Dictionary<int, double>();
 
     public Hold? Hold { get; init; }
 

@@ -34,6 +34,8 @@ internal sealed class ShopRows
 
     public required ILookup<int, TensionRow> Tensions { get; init; }
 
+    public required ILookup<int, DriftRow> Drifts { get; init; }
+
     public required IReadOnlyDictionary<int, Hold> Holds { get; init; }
 
     public required IReadOnlyDictionary<int, PriorUse> PriorUses { get; init; }
@@ -76,6 +78,8 @@ internal sealed class ShopRows
             SplitsByChild = await db.Splits.AsNoTracking().Include(s => s.Entry).ToDictionaryAsync(s => s.ChildId),
             Tensions = (await db.TensionReadings.AsNoTracking().Select(t => new TensionRow(t.BladeId, t.SawId, t.Entry.AtUtc, t.EntryId, t.TensionPa)).ToListAsync())
                 .OrderBy(t => t.At).ThenBy(t => t.Id).ToLookup(t => t.BladeId),
+            Drifts = (await db.Drifts.AsNoTracking().Select(d => new DriftRow(d.BladeId, d.SawId, d.Entry.AtUtc, d.EntryId, d.AngleRad)).ToListAsync())
+                .OrderBy(d => d.At).ThenBy(d => d.Id).ToLookup(d => d.BladeId),
             Holds = await db.Holds.AsNoTracking().Include(h => h.Entry).Where(h => db.BladesNow.Any(b => b.HoldId == h.EntryId)).ToDictionaryAsync(h => h.BladeId),
             PriorUses = Last(await db.PriorUses.AsNoTracking().Include(p => p.Entry).ToListAsync(), p => p.BladeId),
             Away = await ReadAway(db),
@@ -180,5 +184,7 @@ internal readonly record struct SpellRow(int MountId, int SawId, int BladeId, Da
 }
 
 internal readonly record struct TensionRow(int BladeId, int SawId, DateTime At, int Id, double TensionPa);
+
+internal readonly record struct DriftRow(int BladeId, int SawId, DateTime At, int Id, double AngleRad);
 
 internal readonly record struct ShareRow(int MountId, DateTime From, DateTime Until, long Ms);

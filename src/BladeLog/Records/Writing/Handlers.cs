@@ -30,6 +30,7 @@ internal static class Handlers
         ClearHold c => HoldHandler.Handle(w, c),
         RecordInspection c => RecordInspectionHandler.Handle(w, c),
         RecordBreak c => RecordBreakHandler.Handle(w, c),
+        CompleteBreak c => RecordBreakHandler.Handle(w, c),
         RecordRetirement c => RecordRetirementHandler.Handle(w, c),
         RecordJoint c => RecordJointHandler.Handle(w, c),
         CutDown c => CutDownHandler.Handle(w, c),

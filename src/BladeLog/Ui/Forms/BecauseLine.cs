@@ -1,3 +1,4 @@
+using Microsoft.AspNetCore.Components;
 using BladeLog.Handbook.Quantities;
 
 namespace BladeLog.Ui.Forms;
@@ -14,7 +15,11 @@ public sealed record BecauseLine(string What, string Value, string? Formula, str
 /// <param name="Value">What the form sends.</param>
 /// <param name="Label">The answer in words.</param>
 /// <param name="Remark">A short second line.</param>
-public sealed record Answer(string Value, string Label, string? Remark = null);
+public sealed record Answer(string Value, string Label, string? Remark = null)
+{
+    /// <summary>A drawing of the answer, above its words.</summary>
+    public RenderFragment? Picture { get; init; }
+}
 
 /// <summary>Something wrong with what was entered.</summary>
 /// <param name="Field">The name of the field, or null when it concerns the whole form.</param>

@@ -96,6 +96,20 @@ public sealed record RecordBreak(string Tag, BreakSite Site) : Command
     public string? Note { get; init; }
 }
 
+/// <summary>What was learned of a break later: the entry is struck out and entered again with it, at its own time.</summary>
+public sealed record CompleteBreak(int EntryId, BreakSite Site) : Command
+{
+    public double? HoursLow { get; init; }
+
+    public double? HoursHigh { get; init; }
+
+    public double? MinutesLost { get; init; }
+
+    public long? CostMinor { get; init; }
+
+    public string? Note { get; init; }
+}
+
 public sealed record RecordRetirement(string Tag, RetireReason Reason) : Command
 {
     public bool CutUp { get; init; }

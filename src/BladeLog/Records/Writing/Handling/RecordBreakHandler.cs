@@ -1,4 +1,5 @@
 using BladeLog.Records.Folding;
+using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Records.Writing;
 
@@ -43,6 +44,36 @@ internal static class RecordBreakHandler
         }
 
         w.Touched.Blades.Add(blade.Id);
+        w.AnswerPath = "/breaks";
+    }
+
+    public static async Task Handle(WriteSession w, CompleteBreak c)
+    {
+        w.RefuseUnless(c.HoursLow is null || c.HoursHigh is null || c.HoursLow <= c.HoursHigh, nameof(c.HoursHigh), "The upper hours must not be below the lower ones.");
+        var known = await w.Db.Breaks.AsNoTracking().SingleOrDefaultAsync(b => b.EntryId == c.EntryId);
+        w.RefuseUnless(known is not null, nameof(c.EntryId), $"There is no break with the entry {c.EntryId}; it may have been completed already.");
+        if (known is null || !w.Stands)
+        {
+            return;
+        }
+
+        w.Void(known.EntryId, "Completed later.");
+        w.Add(
+            new Break
+            {
+                BladeId = known.BladeId,
+                SawId = known.SawId,
+                Site = c.Site,
+                EarliestUtc = known.EarliestUtc,
+                LatestUtc = known.LatestUtc,
+                HoursLow = c.HoursLow,
+                HoursHigh = c.HoursHigh,
+                MinutesLost = c.MinutesLost,
+                CostMinor = c.CostMinor,
+                Note = string.IsNullOrWhiteSpace(c.Note) ? null : c.Note.Trim(),
+            },
+            known.LatestUtc);
+        w.Touched.Blades.Add(known.BladeId);
         w.AnswerPath = "/breaks";
     }
 }
