@@ -21,8 +21,9 @@ internal static class Lead
 {
     public static Task<IResult> Get(Desk desk, string tag) => Show(desk, tag, new LeadForm(), FormState.New);
 
-    public static async Task<IResult> Post([FromForm] LeadForm form, Desk desk, string tag)
+    public static async Task<IResult> Post([FromForm] LeadForm? form, Desk desk, string tag)
     {
+        form ??= new();
         var shop = await desk.Shop();
         if (shop.Blade(Tags.Read(tag)) is not { } blade)
         {

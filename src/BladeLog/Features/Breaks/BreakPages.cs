@@ -25,8 +25,9 @@ internal static class BreakPages
 
     private static async Task<IResult> GetOne(Desk desk, int entry) => await Show(desk, entry, null, FormState.New);
 
-    private static async Task<IResult> Post([FromForm] CompleteForm form, Desk desk, int entry)
+    private static async Task<IResult> Post([FromForm] CompleteForm? form, Desk desk, int entry)
     {
+        form ??= new();
         var read = new FormReading(await desk.Units(), desk.Now);
         var command = new CompleteBreak(entry, read.Choice<BreakSite>(nameof(form.Site), form.Site, "Say how it broke; not known is an answer.") ?? default)
         {

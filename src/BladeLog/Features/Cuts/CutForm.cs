@@ -200,8 +200,9 @@ internal static class CutForms
         app.MapPost("/cuts/{number:int}/edit", Save);
     }
 
-    private static async Task<IResult> Add([FromForm] CutForm form, Desk desk)
+    private static async Task<IResult> Add([FromForm] CutForm? form, Desk desk)
     {
+        form ??= new();
         form = Picked(form);
         FormReader read = new(await desk.Units(), desk.Now);
         if (form.Read(read) is not { } cut)
@@ -216,8 +217,9 @@ internal static class CutForms
     private static async Task<IResult> Edit(int number, Desk desk) =>
         await CutsPages.Find(desk, number) is { } cut ? await Page(desk, number, CutForm.Of(cut, await desk.Units()), []) : Results.NotFound();
 
-    private static async Task<IResult> Save(int number, [FromForm] CutForm form, Desk desk)
+    private static async Task<IResult> Save(int number, [FromForm] CutForm? form, Desk desk)
     {
+        form ??= new();
         form = Picked(form);
         FormReader read = new(await desk.Units(), desk.Now);
         if (form.Read(read) is not { } cut)

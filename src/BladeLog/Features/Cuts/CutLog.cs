@@ -38,8 +38,8 @@ internal static class CutLog
         return await Page(desk, cut, null, form, [], blade ?? choice?.Tag);
     }
 
-    private static async Task<IResult> SaveDone(int number, [FromForm] LogForm form, Desk desk) =>
-        await CutsPages.Find(desk, number) is { } cut ? await Save(desk, cut, null, form) : Results.NotFound();
+    private static async Task<IResult> SaveDone(int number, [FromForm] LogForm? form, Desk desk) =>
+        await CutsPages.Find(desk, number) is { } cut ? await Save(desk, cut, null, form ?? new()) : Results.NotFound();
 
     private static async Task<IResult> AtSaw(string code, Desk desk)
     {
@@ -55,8 +55,8 @@ internal static class CutLog
         return await Page(desk, null, saw, form, []);
     }
 
-    private static async Task<IResult> SaveAtSaw(string code, [FromForm] LogForm form, Desk desk) =>
-        (await desk.Shop()).Saw(code) is { } saw ? await Save(desk, null, saw, form with { Saw = saw.Saw.Code }) : Results.NotFound();
+    private static async Task<IResult> SaveAtSaw(string code, [FromForm] LogForm? form, Desk desk) =>
+        (await desk.Shop()).Saw(code) is { } saw ? await Save(desk, null, saw, (form ?? new()) with { Saw = saw.Saw.Code }) : Results.NotFound();
 
     private static async Task<IResult> Save(Desk desk, QueuedCut? cut, SawNow? saw, LogForm form)
     {

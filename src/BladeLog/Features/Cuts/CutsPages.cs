@@ -53,8 +53,9 @@ internal static class CutsPages
         return await desk.Page<ChoicesPage, ChoicesModel>(model, model.Other?.Problems.Count > 0 ? StatusCodes.Status422UnprocessableEntity : StatusCodes.Status200OK);
     }
 
-    private static async Task<IResult> Move(int number, [FromForm] MoveForm form, Desk desk)
+    private static async Task<IResult> Move(int number, [FromForm] MoveForm? form, Desk desk)
     {
+        form ??= new();
         List<int> numbers = [.. QueueModel.Waiting(await desk.Shop()).Select(c => c.Number)];
         int at = numbers.IndexOf(number), to = form.To == "up" ? at - 1 : at + 1;
         if (at < 0 || form.To is not ("up" or "down" or "off") || (form.To != "off" && (to < 0 || to >= numbers.Count)))

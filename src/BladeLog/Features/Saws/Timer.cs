@@ -36,8 +36,9 @@ internal static class Timer
             : Results.Redirect($"/saws/{saw.Saw.Code}/timer?started={Written(desk.Now)}");
     }
 
-    public static async Task<IResult> Post([FromForm] TimerForm form, Desk desk, string code)
+    public static async Task<IResult> Post([FromForm] TimerForm? form, Desk desk, string code)
     {
+        form ??= new();
         if ((await desk.Shop()).Saw(code) is not { } saw)
         {
             return Results.NotFound();

@@ -37,8 +37,9 @@ internal static class StartPages
 
     private static IResult Get(ShopGate gate) => gate.IsOpen ? Results.Redirect("/") : Page(gate, new StartForm(), []);
 
-    private static async Task<IResult> Post([FromForm] StartForm form, ShopGate gate, TimeProvider clock)
+    private static async Task<IResult> Post([FromForm] StartForm? form, ShopGate gate, TimeProvider clock)
     {
+        form ??= new();
         if (gate.IsOpen)
         {
             return Results.Redirect("/");

@@ -23,8 +23,9 @@ internal static class StockPages
     private static Task<IResult> Get(Desk desk, EndpointDataSource endpoints, string? lead, string? least) =>
         Show(desk, endpoints, new StockForm(), FormState.New, lead, least);
 
-    private static async Task<IResult> Post([FromForm] StockForm form, Desk desk, EndpointDataSource endpoints)
+    private static async Task<IResult> Post([FromForm] StockForm? form, Desk desk, EndpointDataSource endpoints)
     {
+        form ??= new();
         var read = new FormReading(await desk.Units(), desk.Now);
         read.RefuseUnless(!string.IsNullOrWhiteSpace(form.Spec), nameof(form.Spec), "Say of which kind.");
         read.RefuseUnless(form.Way is "came" or "went", nameof(form.Way), "Say whether they came or went.");
