@@ -1,6 +1,5 @@
 using BladeLog.Records;
 using BladeLog.Records.Writing;
-using BladeLog.Ui;
 using Microsoft.AspNetCore.Mvc;
 
 namespace BladeLog.Features.Blades;
