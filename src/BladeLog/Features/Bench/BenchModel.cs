@@ -12,17 +12,21 @@ public sealed record BenchRow(string Tag, ToothSpec Teeth, string Why, string Wh
 /// <summary>A batch that is out.</summary>
 public sealed record BatchRow(string Number, string Service, string Sent, string Promised, bool Late, IReadOnlyList<string> Tags);
 
-public sealed record BenchModel(IReadOnlyList<BenchRow> Sharpen, IReadOnlyList<BenchRow> Look, IReadOnlyList<BenchRow> Held, IReadOnlyList<BatchRow> Out)
+public sealed record BenchModel(IReadOnlyList<BenchRow> Sharpen, IReadOnlyList<BenchRow> Look, IReadOnlyList<BenchRow> Held, IReadOnlyList<BenchRow> Broken, IReadOnlyList<BatchRow> Out)
 {
     public static BenchModel Of(ShopAdvice advice, IReadOnlySet<int> offAsDull, ShopUnits units)
     {
         ArgumentNullException.ThrowIfNull(advice);
         ArgumentNullException.ThrowIfNull(offAsDull);
-        List<BenchRow> sharpen = [], look = [], held = [];
+        List<BenchRow> sharpen = [], look = [], held = [], broken = [];
         foreach (BladeFile file in advice.Now.Blades.Where(b => b.Place is not (Place.Gone or Place.AtSharpener)).OrderBy(b => b.Blade.Tag, StringComparer.Ordinal))
         {
             BladeAdvice blade = advice.Of(file);
-            if (file.Hold is { } hold)
+            if (blade.State == BladeState.Broken)
+            {
+                broken.Add(Row(blade, advice, "It broke: weld it, or retire it and cut it up.", "join", "Weld"));
+            }
+            else if (file.Hold is { } hold)
             {
                 held.Add(Row(blade, advice, Said.Capital(LifeWords.Hold(hold, advice.Words)) + ".", "clear", "Clear"));
             }
@@ -37,7 +41,7 @@ public sealed record BenchModel(IReadOnlyList<BenchRow> Sharpen, IReadOnlyList<B
             }
         }
 
-        return new BenchModel(sharpen, look, held, Batches(advice.Now, units));
+        return new BenchModel(sharpen, look, held, broken, Batches(advice.Now, units));
     }
 
     /// <summary>Batches with blades still away.</summary>
