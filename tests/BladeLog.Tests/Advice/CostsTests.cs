@@ -140,7 +140,7 @@ public sealed class CostsTests(SampleShopApp sample) : IClassFixture<SampleShopA
     {
         await using ShopDb db = sample.App.NewContext();
         ShopNow shop = await ShopNowReader.Read(db, ShopApp.Today.UtcDateTime);
-        var off = await db.Dismounts.ToDictionaryAsync(d => d.MountId, d => d.Entry.AtUtc);
+        var off = await db.Dismounts.Select(d => new { d.MountId, d.Entry.AtUtc }).ToDictionaryAsync(d => d.MountId, d => d.AtUtc);
         var on = await db.Mounts.Select(m => new { m.EntryId, m.SawId, m.BladeId, m.Entry.AtUtc }).ToListAsync();
         return Costs.OfBlades(
             shop.Blades,

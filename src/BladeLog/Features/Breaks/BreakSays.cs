@@ -20,7 +20,7 @@ internal sealed class BreakSays(ShopAdvice advice, ShopUnits units, DateTime now
     {
         BreakRow[] rows = [.. broken.Select(Row)];
         return new BreaksModel(
-            rows.Length == 0 ? "Breaks: none" : $"Breaks: {rows.Length}{(Clusters.Count == 0 ? "" : $", {Clusters.Sum(c => c.Broken.Count)} of them no chance")}",
+            rows.Length == 0 ? "Breaks: none" : $"Breaks: {rows.Length}{(Clusters.Count == 0 ? "" : $", {Clusters.Sum(c => c.Broken.Count)} of them in a cluster")}",
             rows,
             [.. Clusters.Select(Cluster)],
             [.. rows.Where(r => r.ToComplete)],
@@ -69,11 +69,11 @@ internal sealed class BreakSays(ShopAdvice advice, ShopUnits units, DateTime now
         string saw = advice.Now.Saws.First(s => s.Saw.Id == c.SawId).Saw.Name;
         string under = Figures.With(Figures.Hours(c.UnderHours), "h");
         string chance = c.Chance <= 1.5 / (BreakClusters.Shuffles + 1)
-            ? $"not one of {Figures.Number(BreakClusters.Shuffles)} re-shuffles shows such a row"
-            : $"re-shuffled breaks show such a row in {Figures.Chance(c.Chance)} shops";
+            ? $"not one of {Figures.Number(BreakClusters.Shuffles)} re-shuffles shows such a group"
+            : $"such a group turns up in {Figures.Chance(c.Chance)} re-shuffles";
         return new ClusterPart(
             $"{c.Broken.Count} of {c.BreaksOnSaw} breaks on {saw} under {under}: thickness to wheel 1/{c.OneOver}",
-            $"{c.Broken.Count} of {Said.Count(c.Blades, "blade", "blades")} that ran so broke; their hours would have brought {Wording.Number(c.Expected, 1)} in this shop as a whole. By chance: {chance}.",
+            $"{c.Broken.Count} of {Said.Count(c.Blades, "blade", "blades")} that ran so broke; their hours would have brought {Wording.Number(c.Expected, 1)} in this shop as a whole. If chance dealt the breaks: {chance}.",
             string.Join(", ", c.Broken.Select(b => b.Tag)));
     }
 

@@ -104,7 +104,8 @@ internal static class StockPages
         Add(s.Ready, "ready");
         Add(s.Spare, s.Spare == 1 ? "new spare" : "new spares");
         Add(s.ToSharpen, "to sharpen");
-        Add(s.Away, "at the sharpener");
+        DateTime? back = s.Blades.Select(b => b.File.Away?.PromisedUtc).Min();
+        Add(s.Away, back is { } promised ? $"at the sharpener, promised {Day(promised, now, units)}" : "at the sharpener");
         Add(s.OnHold, "on hold");
         BladeFile drawn = s.Blades.Count > 0 ? s.Blades[0].File with { WidthM = s.Spec.WidthM, GulletM = null } : new BladeFile { Blade = new Blade { Tag = s.Spec.Code, Spec = s.Spec }, Spec = s.Spec, Place = Place.Rack, WidthM = s.Spec.WidthM };
         string when = s.OrderInDays is 0 ? "now" : s.OrderInDays is { } days ? "by " + Day(now.AddDays(days), now, units) : "";
@@ -118,7 +119,7 @@ internal static class StockPages
             AtHand = s.AtHand,
             Least = s.Least,
             Use = s.HoursPerWeek > 0
-                ? $"{Figures.With(Figures.Hours(s.HoursPerWeek), "h")} a week, {Wording.Number(s.GoneInLeadTime, 2)} of them gone in the lead time"
+                ? $"{Figures.With(Figures.Hours(s.HoursPerWeek), "h")} a week; {(s.GoneInLeadTime < 0.05 ? "none is" : $"about {Wording.Number(s.GoneInLeadTime, 1)} are")} expected to be gone before an order is here"
                 : "did not run lately",
             Order = s.OrderInDays is null ? null : $"Order {s.Order} of {s.Spec.Code} {when}",
             Now = s.OrderInDays is 0,
