@@ -5,9 +5,11 @@ using BladeLog.Features.Cuts;
 using BladeLog.Features.Floor;
 using BladeLog.Features.More;
 using BladeLog.Features.People;
+using BladeLog.Features.Prints;
 using BladeLog.Features.Rack;
 using BladeLog.Features.Record;
 using BladeLog.Features.Saws;
+using BladeLog.Features.Shift;
 using BladeLog.Features.Start;
 using BladeLog.Features.Workings;
 
@@ -33,6 +35,12 @@ internal static class Registration
         MorePages.Map(app);
         BladeForms.Map(app);
         BenchPages.Map(app);
+        Docket.Map(app);
+        LabelPages.Map(app);
+        RackCardPages.Map(app);
+        AuditPages.Map(app);
+        HandOverPages.Map(app);
+        TrainingPages.Map(app);
         RecordPages.Map(app);
         PeoplePages.Map(app);
         CautionPages.Map(app);
