@@ -11,7 +11,7 @@ from pathlib import Path
 
 sys.dont_write_bytecode = True     # nothing but the CSV files is left behind
 
-from history import check, cuts, facts, inspections, plan, tables
+from history import check, cuts, facts, inspections, plan, shift, tables
 from history.book import Book, figure, write_csv, write_lines
 
 FOLDER = Path(__file__).resolve().parent
@@ -48,6 +48,8 @@ def write_facts(folder, batches, sharpenings, spells_by_saw, spells_by_tag, runs
     chosen = inspections.choose(spells_by_tag, sharpenings, cracks, rng)
     facts.inspections(book, chosen, cracks, rng)
     facts.tension_checks(book, spells_by_saw, mount_rows, rng)
+    shift.trainings(book)
+    shift.handovers(book)
     book.write(folder)
 
 

@@ -8,7 +8,7 @@ REF_LETTERS = {
     "mounts": "m", "runs": "r", "meter_epochs": "e", "meter_readings": "g", "cuts": "c", "sharpenings": "s",
     "batches": "b", "batch_lines": "l", "returns": "u", "joints": "j", "splits": "p", "prior_use": "o",
     "holds": "h", "holds_cleared": "k", "inspections": "i", "tension_readings": "t", "breaks": "x",
-    "retirements": "z", "retags": "a", "voids": "v", "hangs": "w",
+    "retirements": "z", "retags": "a", "voids": "v", "hangs": "w", "trainings": "q", "handovers": "n",
 }
 
 

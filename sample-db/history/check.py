@@ -51,6 +51,7 @@ def check(folder):
     check_loops(files)
     check_away_and_held(files, spells)
     check_inspections(files, spells, shares)
+    check_trainings(files)
     check_counts(files, two)
     check_past(files)
     print(f"sample-db: {len(spells)} spells, {len(files.runs)} runs ({two} over two spells), "
@@ -226,10 +227,19 @@ def check_inspections(files, spells, shares):
     require(late == 38, f"{late} inspections were late, not 38")
 
 
+def check_trainings(files):
+    """Six people on five saws; a later training of the same person, saw and task stands for the earlier one."""
+    last = {(t["person"], t["saw"], t["task"]): t for t in files.trainings}
+    people = {t["person"] for t in files.trainings}
+    require(len(people) == 6 and {t["saw"] for t in files.trainings if t["saw"]} == set(SAWS), "not 6 people on 5 saws")
+    require(sum(t["refresher_day"] != "" and int(t["refresher_day"]) <= 0 for t in last.values()) == 2, "not 2 expired trainings")
+    require(all(t["by"] != t["person"] for t in files.trainings), "somebody signed for their own training")
+
+
 def check_counts(files, two):
     counts = {"sharpenings": 113, "inspections": 655, "tension_readings": 212, "breaks": 9, "retirements": 2, "holds": 2,
               "holds_cleared": 1, "joints": 4, "splits": 1, "batches": 14, "specs": 22, "blades": 41, "queue": 15,
-              "saws": 5, "retags": 1, "hangs": sum(1 for b in BLADES.values() if b["hook"]), "prior_use": 1, "meter_epochs": 4}
+              "saws": 5, "retags": 1, "handovers": 11, "hangs": sum(1 for b in BLADES.values() if b["hook"]), "prior_use": 1, "meter_epochs": 4}
     for name, count in counts.items():
         require(len(getattr(files, name)) == count, f"{len(getattr(files, name))} {name}, not {count}")
     require(abs(len(files.mounts) - 540) <= 10, f"{len(files.mounts)} mounts")
@@ -240,7 +250,7 @@ def check_counts(files, two):
 
 def check_past(files):
     names = ("mounts", "cuts", "sharpenings", "batches", "returns", "joints", "splits", "holds", "holds_cleared", "inspections", "hangs",
-             "tension_readings", "breaks", "retirements", "retags", "voids", "meter_readings", "meter_epochs", "prior_use")
+             "tension_readings", "breaks", "retirements", "retags", "voids", "trainings", "handovers", "meter_readings", "meter_epochs", "prior_use")
     for name in names:
         for r in files._read(name):
             for prefix in ("", "off_", "entered_"):

@@ -83,6 +83,14 @@ public sealed class ShopDb(DbContextOptions<ShopDb> options) : DbContext(options
 
     public DbSet<Retirement> Retirements => Set<Retirement>();
 
+    public DbSet<HandOver> HandOvers => Set<HandOver>();
+
+    public DbSet<HandOverRead> HandOversRead => Set<HandOverRead>();
+
+    public DbSet<Trained> Trainings => Set<Trained>();
+
+    public DbSet<LabelPrinted> LabelsPrinted => Set<LabelPrinted>();
+
     public DbSet<OnSaw> OnSaws => Set<OnSaw>();
 
     public DbSet<BladeNow> BladesNow => Set<BladeNow>();

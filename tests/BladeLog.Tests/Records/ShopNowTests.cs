@@ -142,6 +142,9 @@ public class ShopNowTests
         await shop.Do(new SlackTension("S1", true));
         await shop.Do(new ReadMeter("S1", 0, "0"));
         await shop.Do(RunningTests.Cut(1));
+        await shop.Do(new ReadHandOver(await shop.Do(new SaveHandOver("Q-3 hangs on H-1."), await shop.Person("OT"))), await shop.Person("JP"));
+        await shop.Do(new RecordTraining("JP", TrainedTask.Sharpen, "OT"));
+        await shop.Do(new RecordLabels(["Q-3"]));
         var rows = await shop.Ask(db => History.All(db, 500));
         var facts = typeof(Fact).Assembly.GetTypes().Where(t => t.IsSubclassOf(typeof(Fact)) && t != typeof(VoidFact)).Select(t => t.Name).ToList();
         Assert.All(facts, kind => Assert.Contains(rows, r => r.Kind == kind));

@@ -17,7 +17,7 @@ internal static class MorePages
         new("Cautions", "What may go wrong, and where that is written", "/cautions"),
         new("Labels", "To print and stick on the blades", "/labels"),
         new("Rack card", "The rack on paper, for when the tablet is dead", "/rackcard"),
-        new("Handover", "What the next shift must know", "/handover"),
+        new("Hand-over", "What the next shift must know", "/handover"),
         new("Training", "Who may use which saw", "/training"),
         new("Audit", "The record on paper", "/audit"),
         new("Bring in a list", "Blades, saws and hours from a table", "/import"),

@@ -67,7 +67,7 @@ internal static class PeoplePages
         new(await desk.Db.People.AsNoTracking().Include(p => p.Roles).OrderByDescending(p => p.Active).ThenBy(p => p.Initials).ToListAsync()));
 
     private static async Task<IResult> Open(Desk desk, string initials) => await Find(desk, initials) is { } person
-        ? await Show(desk, FormOf(person), FormState.New, isNew: false)
+        ? await Show(desk, FormOf(person, desk.Now), FormState.New, isNew: false)
         : Results.NotFound();
 
     private static async Task<IResult> Add([FromForm] PersonForm? form, Desk desk)
@@ -94,9 +94,9 @@ internal static class PeoplePages
     private static Task<Person?> Find(Desk desk, string initials) =>
         desk.Db.People.AsNoTracking().Include(p => p.Roles).FirstOrDefaultAsync(p => p.Initials == initials);
 
-    private static PersonForm FormOf(Person person)
+    private static PersonForm FormOf(Person person, DateTime now)
     {
-        string? Has(Role role) => person.Roles.Any(r => r.Role == role && r.UntilUtc is null) ? "true" : null;
+        string? Has(Role role) => person.Roles.Any(r => r.Role == role && (r.UntilUtc is null || r.UntilUtc > now)) ? "true" : null;
         return new PersonForm
         {
             Initials = person.Initials,

@@ -93,6 +93,14 @@ public static class Facts
             t.HasCheckConstraint("ck_break_hours", "hours_low is null or hours_high is null or hours_low <= hours_high");
         });
         Refers(Fact<Retirement>(model), r => r.Blade, r => r.BladeId);
+
+        Fact<HandOver>(model).ToTable(t => t.HasCheckConstraint("ck_hand_over_text", "length(text) between 1 and 4000"));
+        Refers(Fact<HandOverRead>(model), r => r.HandOver, r => r.HandOverId);
+        var trained = Fact<Trained>(model);
+        Refers(trained, t => t.Person, t => t.PersonId);
+        Refers(trained, t => t.Saw, t => t.SawId);
+        Refers(trained, t => t.By, t => t.ById);
+        Refers(Fact<LabelPrinted>(model), l => l.Blade, l => l.BladeId);
     }
 
     private static void Ledger(ModelBuilder model)

@@ -8,6 +8,11 @@ public static class WhoMay
         [nameof(HoldCleared)] = new(Role.ClearHolds, Enforced: true),
         [nameof(Sharpening)] = new(Role.Sharpen, Enforced: false),
         [nameof(Joint)] = new(Role.Weld, Enforced: false),
+        [nameof(HandOver)] = new(null, Enforced: false),
+        [nameof(HandOverRead)] = new(null, Enforced: false),
+        // Training to clear holds gives the right to it, so its handler asks for that right.
+        [nameof(Trained)] = new(null, Enforced: false),
+        [nameof(LabelPrinted)] = new(null, Enforced: false),
     };
 
     /// <summary>The role a kind of fact is meant for, and whether it is asked for already.</summary>

@@ -61,7 +61,7 @@ internal static class FirstTriggers
         Refuse(migration, "tag_used", "UPDATE", "a tag is never used again");
     }
 
-    private static void Refuse(MigrationBuilder migration, string table, string what, string why) =>
+    internal static void Refuse(MigrationBuilder migration, string table, string what, string why) =>
         migration.Sql($"""
             CREATE TRIGGER {table}_no_{what.ToLowerInvariant()} BEFORE {what} ON "{table}"
             BEGIN SELECT RAISE(ABORT, '{why}'); END;

@@ -563,6 +563,42 @@ namespace BladeLog.Records.Migrations
                         });
                 });
 
+            modelBuilder.Entity("BladeLog.Records.HandOver", b =>
+                {
+                    b.Property<int>("EntryId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("entry_id");
+
+                    b.Property<string>("Text")
+                        .IsRequired()
+                        .HasColumnType("TEXT")
+                        .HasColumnName("text");
+
+                    b.HasKey("EntryId");
+
+                    b.ToTable("hand_over", t =>
+                        {
+                            t.HasCheckConstraint("ck_hand_over_text", "length(text) between 1 and 4000");
+                        });
+                });
+
+            modelBuilder.Entity("BladeLog.Records.HandOverRead", b =>
+                {
+                    b.Property<int>("EntryId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("entry_id");
+
+                    b.Property<int>("HandOverId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("hand_over_id");
+
+                    b.HasKey("EntryId");
+
+                    b.HasIndex("HandOverId");
+
+                    b.ToTable("hand_over_read");
+                });
+
             modelBuilder.Entity("BladeLog.Records.Hang", b =>
                 {
                     b.Property<int>("EntryId")
@@ -764,6 +800,28 @@ namespace BladeLog.Records.Migrations
                         });
                 });
 
+            modelBuilder.Entity("BladeLog.Records.LabelPrinted", b =>
+                {
+                    b.Property<int>("EntryId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("entry_id");
+
+                    b.Property<int>("BladeId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("blade_id");
+
+                    b.Property<string>("Tag")
+                        .IsRequired()
+                        .HasColumnType("TEXT")
+                        .HasColumnName("tag");
+
+                    b.HasKey("EntryId");
+
+                    b.HasIndex("BladeId");
+
+                    b.ToTable("label_printed");
+                });
+
             modelBuilder.Entity("BladeLog.Records.MeterEpoch", b =>
                 {
                     b.Property<int>("EntryId")
@@ -960,6 +1018,10 @@ namespace BladeLog.Records.Migrations
                         .IsRequired()
                         .HasColumnType("TEXT")
                         .HasColumnName("role");
+
+                    b.Property<int?>("TrainedId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("trained_id");
 
                     b.Property<DateTime?>("UntilUtc")
                         .HasColumnType("TEXT")
@@ -1757,6 +1819,10 @@ namespace BladeLog.Records.Migrations
                         .HasColumnType("INTEGER")
                         .HasColumnName("is_sample");
 
+                    b.Property<string>("LanName")
+                        .HasColumnType("TEXT")
+                        .HasColumnName("lan_name");
+
                     b.Property<string>("Lengths")
                         .IsRequired()
                         .HasColumnType("TEXT")
@@ -2187,6 +2253,44 @@ namespace BladeLog.Records.Migrations
                         });
                 });
 
+            modelBuilder.Entity("BladeLog.Records.Trained", b =>
+                {
+                    b.Property<int>("EntryId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("entry_id");
+
+                    b.Property<int>("ById")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("by_id");
+
+                    b.Property<int>("PersonId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("person_id");
+
+                    b.Property<DateTime?>("RefresherUtc")
+                        .HasColumnType("TEXT")
+                        .HasColumnName("refresher_utc");
+
+                    b.Property<int?>("SawId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("saw_id");
+
+                    b.Property<string>("Task")
+                        .IsRequired()
+                        .HasColumnType("TEXT")
+                        .HasColumnName("task");
+
+                    b.HasKey("EntryId");
+
+                    b.HasIndex("ById");
+
+                    b.HasIndex("PersonId");
+
+                    b.HasIndex("SawId");
+
+                    b.ToTable("trained");
+                });
+
             modelBuilder.Entity("BladeLog.Records.VoidFact", b =>
                 {
                     b.Property<int>("EntryId")
@@ -2475,6 +2579,36 @@ namespace BladeLog.Records.Migrations
                         .IsRequired();
                 });
 
+            modelBuilder.Entity("BladeLog.Records.HandOver", b =>
+                {
+                    b.HasOne("BladeLog.Records.Entry", "Entry")
+                        .WithOne()
+                        .HasForeignKey("BladeLog.Records.HandOver", "EntryId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.Navigation("Entry");
+                });
+
+            modelBuilder.Entity("BladeLog.Records.HandOverRead", b =>
+                {
+                    b.HasOne("BladeLog.Records.Entry", "Entry")
+                        .WithOne()
+                        .HasForeignKey("BladeLog.Records.HandOverRead", "EntryId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.HasOne("BladeLog.Records.HandOver", "HandOver")
+                        .WithMany()
+                        .HasForeignKey("HandOverId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.Navigation("Entry");
+
+                    b.Navigation("HandOver");
+                });
+
             modelBuilder.Entity("BladeLog.Records.Hang", b =>
                 {
                     b.HasOne("BladeLog.Records.Blade", null)
@@ -2571,6 +2705,25 @@ namespace BladeLog.Records.Migrations
                     b.HasOne("BladeLog.Records.Entry", "Entry")
                         .WithOne()
                         .HasForeignKey("BladeLog.Records.Joint", "EntryId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.Navigation("Blade");
+
+                    b.Navigation("Entry");
+                });
+
+            modelBuilder.Entity("BladeLog.Records.LabelPrinted", b =>
+                {
+                    b.HasOne("BladeLog.Records.Blade", "Blade")
+                        .WithMany()
+                        .HasForeignKey("BladeId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.HasOne("BladeLog.Records.Entry", "Entry")
+                        .WithOne()
+                        .HasForeignKey("BladeLog.Records.LabelPrinted", "EntryId")
                         .OnDelete(DeleteBehavior.Restrict)
                         .IsRequired();
 
@@ -2939,6 +3092,40 @@ namespace BladeLog.Records.Migrations
                         .WithMany()
                         .HasForeignKey("PersonId")
                         .OnDelete(DeleteBehavior.Restrict);
+                });
+
+            modelBuilder.Entity("BladeLog.Records.Trained", b =>
+                {
+                    b.HasOne("BladeLog.Records.Person", "By")
+                        .WithMany()
+                        .HasForeignKey("ById")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.HasOne("BladeLog.Records.Entry", "Entry")
+                        .WithOne()
+                        .HasForeignKey("BladeLog.Records.Trained", "EntryId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.HasOne("BladeLog.Records.Person", "Person")
+                        .WithMany()
+                        .HasForeignKey("PersonId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.HasOne("BladeLog.Records.Saw", "Saw")
+                        .WithMany()
+                        .HasForeignKey("SawId")
+                        .OnDelete(DeleteBehavior.Restrict);
+
+                    b.Navigation("By");
+
+                    b.Navigation("Entry");
+
+                    b.Navigation("Person");
+
+                    b.Navigation("Saw");
                 });
 
             modelBuilder.Entity("BladeLog.Records.VoidFact", b =>

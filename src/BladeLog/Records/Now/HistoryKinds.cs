@@ -21,7 +21,8 @@ internal static class HistoryKinds
         .Concat(Ids(db.HoldsCleared.Where(f => f.Hold.BladeId == id)))
         .Concat(Ids(db.Inspections.Where(f => f.BladeId == id)))
         .Concat(Ids(db.Breaks.Where(f => f.BladeId == id)))
-        .Concat(Ids(db.Retirements.Where(f => f.BladeId == id)));
+        .Concat(Ids(db.Retirements.Where(f => f.BladeId == id)))
+        .Concat(Ids(db.LabelsPrinted.Where(f => f.BladeId == id)));
 
     public static IQueryable<int> EntriesOfSaw(ShopDb db, int id) => Ids(db.SawSetups.Where(f => f.SawId == id))
         .Concat(Ids(db.Mounts.Where(f => f.SawId == id)))
@@ -33,6 +34,7 @@ internal static class HistoryKinds
         .Concat(Ids(db.CutsDone.Where(f => f.SawId == id)))
         .Concat(Ids(db.TensionReadings.Where(f => f.SawId == id)))
         .Concat(Ids(db.Drifts.Where(f => f.SawId == id)))
+        .Concat(Ids(db.Trainings.Where(f => f.SawId == id)))
         .Concat(Ids(db.Breaks.Where(f => f.SawId == id)));
 
     public static Task<List<FactWords>> Say(ShopDb db, string kind, IReadOnlyCollection<int> ids) => kind switch

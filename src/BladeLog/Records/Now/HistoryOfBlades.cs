@@ -30,9 +30,16 @@ internal static class HistoryOfBlades
             f.EntryId, f.Blade.Tag, null, Word("found", f.Found.ToString()), Length("crack", f.CrackLengthM), Word("place", f.Place?.ToString()), Word("note", f.Note))),
         nameof(Retirement) => Of(db.Retirements.Include(f => f.Blade), ids, f => new(
             f.EntryId, f.Blade.Tag, null, Word("reason", f.Reason.ToString()), Flag("cut up", f.CutUp), Word("note", f.Note))),
+        nameof(LabelPrinted) => Of(db.LabelsPrinted.Include(f => f.Blade), ids, f => new(f.EntryId, f.Blade.Tag, null, Word("label", f.Tag))),
+        nameof(HandOver) => Of(db.HandOvers, ids, f => new(f.EntryId, null, null, Word("note", f.Text))),
+        nameof(HandOverRead) => Of(db.HandOversRead.Include(f => f.HandOver.Entry), ids, f => new(f.EntryId, null, null, Time("note of", f.HandOver.Entry.AtUtc))),
+        nameof(Trained) => Of(db.Trainings.Include(f => f.Person).Include(f => f.By).Include(f => f.Saw), ids, f => new(
+            f.EntryId, null, f.Saw?.Code, Word("person", f.Person.Initials), Word("task", f.Task.ToString()), Word("trained by", f.By.Initials), Due(f.RefresherUtc))),
         // An edit of a thing is an entry without a fact: its kind says it all.
         _ => Task.FromResult(new List<FactWords>()),
     };
+
+    private static HistoryPart Due(DateTime? refresher) => refresher is { } due ? Time("refresher due", due) : Word("refresher due", null);
 
     private static async Task<List<FactWords>> Splits(ShopDb db, IReadOnlyCollection<int> ids)
     {

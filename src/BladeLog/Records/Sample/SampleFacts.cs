@@ -23,6 +23,7 @@ internal sealed partial class SampleFacts(string folder, SampleThings things, Sa
         Each("cuts", Cut);
         Each("tension_readings", Tension);
         BladeFacts();
+        ShiftFacts();
         Each("voids", Void);
     }
 

@@ -50,6 +50,9 @@ public sealed class Shop : Thing
     /// <summary>Timber value where a cut does not say, minor units per m³.</summary>
     public long TimberMinorPerM3 { get; set; }
 
+    /// <summary>What the shop's network calls the machine this runs on, with its port where it has one; printed in the square code of a label.</summary>
+    public string? LanName { get; set; }
+
     public bool IsSample { get; set; }
 }
 
@@ -92,6 +95,9 @@ public sealed class PersonRole
     public DateTime FromUtc { get; set; }
 
     public DateTime? UntilUtc { get; set; }
+
+    /// <summary>The training that gave it; null where it was given in person.</summary>
+    public int? TrainedId { get; set; }
 }
 
 /// <summary>What a thing was before an edit.</summary>

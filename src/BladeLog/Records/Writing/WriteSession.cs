@@ -181,7 +181,7 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
 
     private Shop? Shop => _shop ??= Db.Shops.AsNoTracking().FirstOrDefault();
 
-    private void RefuseUnlessIn(Role role)
+    public void RefuseUnlessIn(Role role)
     {
         var able = Db.PersonRoles.AsNoTracking()
             .Where(r => r.Role == role && r.FromUtc <= Now && (r.UntilUtc == null || r.UntilUtc > Now))

@@ -41,12 +41,12 @@ internal static class PersonHandler
         Edits.Bump(w, person);
 
         // A right taken away keeps the time it was held.
-        foreach (var role in person.Roles.Where(r => r.UntilUtc is null && !c.Roles.Contains(r.Role)))
+        foreach (var role in person.Roles.Where(r => (r.UntilUtc is null || r.UntilUtc > w.Now) && !c.Roles.Contains(r.Role)))
         {
             role.UntilUtc = w.Now;
         }
 
-        var held = person.Roles.Where(r => r.UntilUtc is null).Select(r => r.Role).ToHashSet();
+        var held = person.Roles.Where(r => r.UntilUtc is null || r.UntilUtc > w.Now).Select(r => r.Role).ToHashSet();
         person.Roles.AddRange(c.Roles.Distinct().Where(r => !held.Contains(r)).Select(r => new PersonRole { Role = r, FromUtc = w.Now }));
     }
 

@@ -1,0 +1,117 @@
+using BladeLog.Advice;
+using BladeLog.Advice.Life;
+using BladeLog.Records;
+using BladeLog.Records.Writing;
+using Microsoft.AspNetCore.Mvc;
+using Microsoft.EntityFrameworkCore;
+
+namespace BladeLog.Features.Shift;
+
+public sealed record HandOverForm : PostedForm
+{
+    public string? Text { get; init; }
+}
+
+/// <summary>A note of a shift before.</summary>
+public sealed record ShiftNote(int EntryId, string When, string Who, IReadOnlyList<string> Lines, IReadOnlyList<string> ReadBy, bool MayTick);
+
+public sealed record HandOverModel(HandOverForm Form, FormState State, IReadOnlyList<ShiftNote> Notes, IReadOnlyList<string> People, string? Who);
+
+/// <summary>What the next shift must know: drafted from what stands, changed by hand, ticked by who has read it.</summary>
+internal static class HandOverPages
+{
+    private const int Shown = 12;
+
+    public static void Map(WebApplication app)
+    {
+        app.MapGet("/handover", (Desk desk) => Show(desk, new HandOverForm(), FormState.New));
+        app.MapPost("/handover", Save);
+        app.MapPost("/handover/{entry:int}/read", Read);
+    }
+
+    private static async Task<IResult> Save([FromForm] HandOverForm form, Desk desk) => await desk.Send(
+        new SaveHandOver(form.Text ?? ""), form, "/handover", "Hand-over note", state => Show(desk, form, state));
+
+    private static async Task<IResult> Read([FromForm] HandOverForm form, Desk desk, int entry) => await desk.Send(
+        new ReadHandOver(entry), form, "/handover", "Note read", state => Show(desk, new HandOverForm { Who = form.Who }, state));
+
+    private static async Task<IResult> Show(Desk desk, HandOverForm form, FormState state)
+    {
+        var db = desk.Db;
+        var units = await desk.Units();
+        var who = await desk.Who();
+        var notes = await db.HandOvers.AsNoTracking().Include(h => h.Entry.Person).OrderByDescending(h => h.Entry.AtUtc).ThenByDescending(h => h.EntryId).Take(Shown).ToListAsync();
+        var ids = notes.Select(n => n.EntryId).ToList();
+        var reads = (await db.HandOversRead.AsNoTracking().Include(r => r.Entry.Person).Where(r => ids.Contains(r.HandOverId)).OrderBy(r => r.EntryId).ToListAsync()).ToLookup(r => r.HandOverId);
+        var rows = notes.ConvertAll(n => new ShiftNote(
+            n.EntryId,
+            Said.When(n.Entry.AtUtc, desk.Now, units),
+            n.Entry.Person?.Initials ?? "somebody",
+            n.Text.Split('\n', StringSplitOptions.RemoveEmptyEntries),
+            [.. reads[n.EntryId].Select(r => r.Entry.Person?.Initials ?? "somebody")],
+            who is null || (n.Entry.PersonId != who.Id && !reads[n.EntryId].Any(r => r.Entry.PersonId == who.Id))));
+        var people = await db.People.AsNoTracking().Where(p => p.Active).OrderBy(p => p.Initials).Select(p => p.Initials).ToListAsync();
+        var draft = form.Text ?? string.Join('\n', Draft(await desk.Advice(), await OffAsDull(db)));
+        return await desk.Page<HandOverPage, HandOverModel>(
+            new(form with { Text = draft }, state, rows, people, who?.Initials), state.Status);
+    }
+
+    /// <summary>One line for each thing the next shift would ask; nothing to tell is told too.</summary>
+    internal static IReadOnlyList<string> Draft(ShopAdvice advice, IReadOnlySet<int> offAsDull)
+    {
+        var here = advice.Now.Blades.Where(b => b.Place is not (Place.Gone or Place.AtSharpener)).OrderBy(b => b.Blade.Tag, NaturalOrder.Instance).Select(advice.Of).ToList();
+        List<string> lines = [.. here.Where(b => b.File.Hold is not null).Select(b => $"Hold: {b.File.Blade.Tag}, {Hold(b.File.Hold!, advice.Words)}{Where(b.File, advice.Now)}.")];
+        void Say(string what, IEnumerable<string> things)
+        {
+            string[] all = [.. things];
+            if (all.Length > 0)
+            {
+                lines.Add($"{what}: {string.Join(", ", all)}.");
+            }
+        }
+
+        var free = here.Where(b => b.File.Hold is null).ToList();
+        bool Dull(BladeAdvice b) => b.State == BladeState.Sharpen || offAsDull.Contains(b.File.Blade.Id);
+        Say("To sharpen", free.Where(b => Dull(b) && b.Grind.Pays).Select(b => b.File.Blade.Tag + Where(b.File, advice.Now)));
+        Say("Dull, no further grind", free.Where(b => Dull(b) && !b.Grind.Pays).Select(b => b.File.Blade.Tag + Where(b.File, advice.Now)));
+        Say("To look at", free.Where(b => !Dull(b) && (b.InspectionOverdue || b.State == BladeState.Look)).Select(b => b.File.Blade.Tag + Where(b.File, advice.Now)));
+        Say(advice.Words.Tension == "strain" ? "Strain off" : "Tension off", advice.Now.Saws.Where(s => s.Slack).Select(s => s.Saw.Name));
+        Say("No blade on", advice.Now.Saws.Where(s => s.Saw.Active && s.MountedBladeId is null).Select(s => s.Saw.Name));
+        Say("Stock low", advice.Now.Saws.Where(s => s.Saw.Active).Select(s => Low(s, advice)).OfType<string>());
+        Say("At the sharpener", advice.Now.Blades.Where(b => b.Away is not null).GroupBy(b => b.Away!.BatchNumber).OrderBy(g => g.Key, NaturalOrder.Instance)
+            .Select(g => $"{g.Key} ({string.Join(' ', g.Select(b => b.Blade.Tag).Order(NaturalOrder.Instance))}){(g.First().Away!.PromisedUtc < advice.Now.AsOf ? ", late" : "")}"));
+        return lines.Count > 0 ? lines : ["Nothing on hold, nothing dull, nothing to look at."];
+    }
+
+    /// <summary>A saw with at most one sharp spare on the rack.</summary>
+    private static string? Low(SawNow saw, ShopAdvice advice)
+    {
+        string[] spare = [.. advice.Now.Blades.Where(b => b.Place == Place.Rack && ShopAdvice.Fits(b, saw) && advice.Of(b).State == BladeState.Ready).Select(b => b.Blade.Tag)];
+        return spare.Length switch
+        {
+            0 => $"{saw.Saw.Name} has no sharp spare",
+            1 => $"{saw.Saw.Name} has one sharp spare ({spare[0]})",
+            _ => null,
+        };
+    }
+
+    private static string Hold(Hold hold, Wording words)
+    {
+        var said = LifeWords.Hold(hold, words);
+        return said.StartsWith("on hold: ", StringComparison.Ordinal) ? said["on hold: ".Length..] : "no reason told";
+    }
+
+    private static string Where(BladeFile file, ShopNow now) => file.Place switch
+    {
+        Place.OnSaw => $" on {now.Saws.First(s => s.Saw.Id == file.SawId).Saw.Name}",
+        Place.Bench => " on the bench",
+        _ => file.Hook is { } hook ? $" on {hook}" : "",
+    };
+
+    /// <summary>Came off as dull, and neither ground nor put on again since.</summary>
+    private static async Task<IReadOnlySet<int>> OffAsDull(ShopDb db) => (await db.Dismounts.AsNoTracking()
+        .Where(d => d.Reason == OffReason.Dull
+            && !db.Sharpenings.Any(s => s.BladeId == d.Mount.BladeId && s.Entry.AtUtc >= d.Entry.AtUtc)
+            && !db.Mounts.Any(m => m.BladeId == d.Mount.BladeId && m.Entry.AtUtc >= d.Entry.AtUtc))
+        .Select(d => d.Mount.BladeId).ToListAsync()).ToHashSet();
+}
