@@ -20,7 +20,7 @@ public sealed class ServedShop : WebApplicationFactory<Program>
     {
         _dir = dir;
         Clock = new FakeTimeProvider(Today);
-        UseKestrel(0);
+        UseKestrel();
         StartServer();
         Address = ClientOptions.BaseAddress;
     }
@@ -55,6 +55,7 @@ public sealed class ServedShop : WebApplicationFactory<Program>
     protected override void ConfigureWebHost(IWebHostBuilder builder)
     {
         builder.UseSetting("data", _dir);
+        builder.UseSetting("urls", "http://127.0.0.1:0");
         builder.ConfigureLogging(log => log.SetMinimumLevel(LogLevel.Error));
         builder.ConfigureTestServices(services => services.AddSingleton<TimeProvider>(Clock));
     }

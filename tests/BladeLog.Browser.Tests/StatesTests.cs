@@ -53,7 +53,7 @@ public sealed class StatesTests(Workbench bench) : IClassFixture<Workbench>
             await Expect(tablet.Title).ToContainTextAsync("Stop Wren");
             await tablet.Open("/saws/S4/slack");
             await tablet.Tap(tablet.Button("Off: slack for the night"));
-            await Expect(tablet.Foot.GetByRole(AriaRole.Button)).ToContainTextAsync("Finch");
+            await Expect(tablet.Foot.GetByRole(AriaRole.Button)).ToContainTextAsync("Tension off");
             await tablet.Open("/saws/S5/swap");
             await tablet.Tap(tablet.Choice("Other work"));
             await tablet.Tap(tablet.Button("Only take Q-32 off"));
