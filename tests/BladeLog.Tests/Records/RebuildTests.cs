@@ -20,9 +20,19 @@ public class RebuildTests
             var two = new Blade { Tag = "Q-2", Spec = spec };
             var setup = new SawSetup
             {
-                Entry = At(-24), Saw = saw, LoopM = 4, LoopLeastM = 3.98, LoopMostM = 4.02, WidthLeastM = 0.006, WidthMostM = 0.05,
-                LowerGuideM = 0.05, ClearanceM = 0.01, CutHeightMostM = 0.4, MotorW = 3000,
-                Wheels = { new SetupWheel { DiameterM = 0.6, Driven = true } }, Speeds = { new SetupSpeed { SpeedMps = 20, Usual = true } },
+                Entry = At(-24),
+                Saw = saw,
+                LoopM = 4,
+                LoopLeastM = 3.98,
+                LoopMostM = 4.02,
+                WidthLeastM = 0.006,
+                WidthMostM = 0.05,
+                LowerGuideM = 0.05,
+                ClearanceM = 0.01,
+                CutHeightMostM = 0.4,
+                MotorW = 3000,
+                Wheels = { new SetupWheel { DiameterM = 0.6, Driven = true } },
+                Speeds = { new SetupSpeed { SpeedMps = 20, Usual = true } },
             };
             var on = new Mount { Entry = At(0), Saw = saw, Blade = one };
             db.AddRange(
@@ -32,8 +42,16 @@ public class RebuildTests
                 new Run { Entry = At(8), Saw = saw, FromUtc = Day, UntilUtc = Day.AddHours(8), RunningMs = 1001, SpeedMps = 20, Grade = HoursGrade.A },
                 new CutDone
                 {
-                    Entry = At(1), Saw = saw, SpeciesKey = "oak", SpeciesTyped = "oak", WoodClass = "A3", HeightM = 0.1, LengthM = 2,
-                    Pieces = 5, FeedMps = 0.05, SpeedMps = 20,
+                    Entry = At(1),
+                    Saw = saw,
+                    SpeciesKey = "oak",
+                    SpeciesTyped = "oak",
+                    WoodClass = "A3",
+                    HeightM = 0.1,
+                    LengthM = 2,
+                    Pieces = 5,
+                    FeedMps = 0.05,
+                    SpeedMps = 20,
                 });
             await db.SaveChangesAsync();
             await Kept.Rebuild(db);
@@ -56,6 +74,10 @@ public class RebuildTests
 
     private static Entry At(double hours) => new()
     {
-        Op = Guid.NewGuid(), Part = _op++, Kind = "Test", AtUtc = Day.AddHours(hours), EnteredUtc = Day.AddHours(9),
+        Op = Guid.NewGuid(),
+        Part = _op++,
+        Kind = "Test",
+        AtUtc = Day.AddHours(hours),
+        EnteredUtc = Day.AddHours(9),
     };
 }

@@ -175,7 +175,13 @@ public class RunningTests
 
     internal static RecordCut Cut(double hours) => new("S1")
     {
-        At = TempShop.Day.AddHours(hours), SpeciesKey = "oak", SpeciesTyped = "oak", WoodClass = "A3", HeightM = 0.1, LengthM = 12, FeedMps = 0.01,
+        At = TempShop.Day.AddHours(hours),
+        SpeciesKey = "oak",
+        SpeciesTyped = "oak",
+        WoodClass = "A3",
+        HeightM = 0.1,
+        LengthM = 12,
+        FeedMps = 0.01,
     };
 
     internal static RecordHours Typed(double from, double until, double running) =>

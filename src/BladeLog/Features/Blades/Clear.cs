@@ -1,7 +1,7 @@
 using BladeLog.Records;
 using BladeLog.Records.Writing;
-using Microsoft.EntityFrameworkCore;
 using Microsoft.AspNetCore.Mvc;
+using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Features.Blades;
 

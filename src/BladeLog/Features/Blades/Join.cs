@@ -1,6 +1,6 @@
+using BladeLog.Handbook.Quantities;
 using BladeLog.Records;
 using BladeLog.Records.Writing;
-using BladeLog.Handbook.Quantities;
 using BladeLog.Ui;
 using Microsoft.AspNetCore.Mvc;
 

@@ -43,7 +43,7 @@ public static class Facts
         var run = Fact<Run>(model);
         Refers(run, r => r.Saw, r => r.SawId);
         Refers<Run, MeterReading>(run, null, r => r.ReadingId);
-        
+
         // By its end first: what is entered is mostly recent, so few runs end after a window begins.
         run.HasIndex(r => new { r.SawId, r.UntilUtc, r.FromUtc });
         run.ToTable(t => t.HasCheckConstraint("ck_run_window", "from_utc < until_utc"));

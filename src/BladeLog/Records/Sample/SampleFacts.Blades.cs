@@ -81,7 +81,9 @@ internal sealed partial class SampleFacts
 
     private void Split(SampleRow row) => Add(row, new Split
     {
-        ParentId = Blade(row, "parent"), ChildId = Blade(row, "child"), WidthM = row.OptionalMetres("width_mm"),
+        ParentId = Blade(row, "parent"),
+        ChildId = Blade(row, "child"),
+        WidthM = row.OptionalMetres("width_mm"),
     });
 
     private void Join(SampleRow row) => Add(row, new Joint
@@ -132,7 +134,10 @@ internal sealed partial class SampleFacts
 
     private void Retire(SampleRow row) => Add(row, new Retirement
     {
-        BladeId = Blade(row), Reason = row.Case<RetireReason>("reason"), CutUp = row.Yes("cut_up"), Note = row.Optional("note"),
+        BladeId = Blade(row),
+        Reason = row.Case<RetireReason>("reason"),
+        CutUp = row.Yes("cut_up"),
+        Note = row.Optional("note"),
     });
 
     private void Retag(SampleRow row) => Add(row, new Retag { BladeId = Blade(row), OldTag = row.Text("tag_on_label"), NewTag = row.Text("tag") });

@@ -84,7 +84,10 @@ internal sealed partial class SampleFacts(string folder, SampleThings things, Sa
         var driven = row.Whole("driven_wheel");
         setup.Wheels.AddRange(wheels.Select((mm, i) => new SetupWheel
         {
-            Position = i + 1, DiameterM = mm / 1000, DiameterTyped = Figure(mm, "mm"), Driven = i + 1 == driven,
+            Position = i + 1,
+            DiameterM = mm / 1000,
+            DiameterTyped = Figure(mm, "mm"),
+            Driven = i + 1 == driven,
         }));
         setup.Speeds.AddRange(speeds.Select((v, i) => new SetupSpeed { Position = i + 1, SpeedMps = v, SpeedTyped = Figure(v, "m/s"), Usual = i == 0 }));
         _setups[row.Text("saw")] = setup;
