@@ -98,6 +98,12 @@ internal static class BladePageModel
             yield return new("Leads", At(blade, "drift"));
         }
 
+        yield return new("What if", At(blade, "what-if"));
+        if (blade.State != BladeState.Hold)
+        {
+            yield return new("Workings", $"/workings/band-life?blade={tag}{(blade.Record.On is { } asked ? $"&saw={asked.Saw.Code}" : "")}");
+        }
+
         yield return new("Edit", At(blade, "edit"));
     }
 

@@ -221,6 +221,7 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
             yield return new(Said.Capital($"{advice.Words.Tension} {(saw.Slack ? "on" : "off")}"), At("slack"));
         }
 
+        yield return new("What if", At("what-if"));
         yield return new("Edit", At("edit"));
     }
 
