@@ -1,5 +1,5 @@
-using Microsoft.AspNetCore.Components;
 using BladeLog.Handbook.Quantities;
+using Microsoft.AspNetCore.Components;
 
 namespace BladeLog.Ui.Forms;
 
