@@ -45,7 +45,7 @@ internal sealed record AuditFacts
             Saws = await db.Saws.AsNoTracking().OrderBy(s => s.Code).ToListAsync(),
             Looks = await All(db.Inspections),
             Holds = await All(db.Holds),
-            Cleared = await All(db.HoldsCleared.Include(c => c.Hold)),
+            Cleared = await All(db.HoldsCleared.Include(c => c.Hold.Entry)),
             Breaks = await All(db.Breaks),
             Retirements = await All(db.Retirements),
             Trainings = await All(db.Trainings.Include(t => t.Person).Include(t => t.By)),

@@ -29,16 +29,21 @@ internal static class LabelPages
         app.MapPost("/labels/name", Name);
     }
 
-    private static async Task<IResult> Stuck([FromForm] LabelForm form, Desk desk)
+    private static async Task<IResult> Stuck([FromForm] LabelForm? form, Desk desk)
     {
+        form ??= new();
         var tags = Split([form.Tags ?? ""]);
         return await desk.Send(
             new RecordLabels(tags), form, "/labels", Said.Count(tags.Count, "label", "labels"), state => Show(desk, null, tags, new LanForm(), state));
     }
 
-    private static async Task<IResult> Name([FromForm] LanForm form, Desk desk) => await desk.Send(
-        new SaveLanName(form.LanName, int.TryParse(form.Version, out var version) ? version : null), form, "/labels", "Name on the network",
-        state => Show(desk, null, [], form, state), canUndo: false);
+    private static async Task<IResult> Name([FromForm] LanForm? form, Desk desk)
+    {
+        form ??= new();
+        return await desk.Send(
+            new SaveLanName(form.LanName, int.TryParse(form.Version, out var version) ? version : null), form, "/labels", "Name on the network",
+            state => Show(desk, null, [], form, state), canUndo: false);
+    }
 
     private static List<string> Split(string[]? tags) =>
         [.. (tags ?? []).SelectMany(t => t.Split(Between, StringSplitOptions.RemoveEmptyEntries)).Select(Tags.Read).Distinct(StringComparer.OrdinalIgnoreCase)];
@@ -49,7 +54,7 @@ internal static class LabelPages
         var units = await desk.Units();
         var shop = advice.Now.Shop;
         var labelled = (await desk.Db.LabelsPrinted.AsNoTracking().Select(l => new { l.BladeId, l.Tag }).ToListAsync()).ToHashSet();
-        var here = advice.Now.Blades.Where(b => b.Place != Place.Gone).OrderBy(b => b.Blade.Tag, NaturalOrder.Instance).ToList();
+        var here = advice.Now.Blades.Where(b => b.Place != Place.Gone && b.Break is null && b.Retirement is null).OrderBy(b => b.Blade.Tag, NaturalOrder.Instance).ToList();
         var isNew = here.Where(b => b.Hours == 0 && b.MountedSinceUtc is null && b.LastSawId is null && b.PriorUse is null).ToList();
         var without = here.Where(b => !labelled.Contains(new { BladeId = b.Blade.Id, b.Blade.Tag })).ToList();
         IReadOnlyList<BladeFile> chosen = tags.Count > 0 ? [.. tags.Select(advice.Now.Blade).OfType<BladeFile>()]

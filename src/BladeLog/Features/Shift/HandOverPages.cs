@@ -29,11 +29,19 @@ internal static class HandOverPages
         app.MapPost("/handover/{entry:int}/read", Read);
     }
 
-    private static async Task<IResult> Save([FromForm] HandOverForm form, Desk desk) => await desk.Send(
-        new SaveHandOver(form.Text ?? ""), form, "/handover", "Hand-over note", state => Show(desk, form, state));
+    private static async Task<IResult> Save([FromForm] HandOverForm? form, Desk desk)
+    {
+        form ??= new();
+        return await desk.Send(
+            new SaveHandOver(form.Text ?? ""), form, "/handover", "Hand-over note", state => Show(desk, form, state));
+    }
 
-    private static async Task<IResult> Read([FromForm] HandOverForm form, Desk desk, int entry) => await desk.Send(
-        new ReadHandOver(entry), form, "/handover", "Note read", state => Show(desk, new HandOverForm { Who = form.Who }, state));
+    private static async Task<IResult> Read([FromForm] HandOverForm? form, Desk desk, int entry)
+    {
+        form ??= new();
+        return await desk.Send(
+            new ReadHandOver(entry), form, "/handover", "Note read", state => Show(desk, new HandOverForm { Who = form.Who }, state));
+    }
 
     private static async Task<IResult> Show(Desk desk, HandOverForm form, FormState state)
     {
@@ -59,7 +67,8 @@ internal static class HandOverPages
     /// <summary>One line for each thing the next shift would ask; nothing to tell is told too.</summary>
     internal static IReadOnlyList<string> Draft(ShopAdvice advice, IReadOnlySet<int> offAsDull)
     {
-        var here = advice.Now.Blades.Where(b => b.Place is not (Place.Gone or Place.AtSharpener)).OrderBy(b => b.Blade.Tag, NaturalOrder.Instance).Select(advice.Of).ToList();
+        var here = advice.Now.Blades.Where(b => b.Place is not (Place.Gone or Place.AtSharpener)).OrderBy(b => b.Blade.Tag, NaturalOrder.Instance).Select(advice.Of)
+            .Where(b => b.State is not (BladeState.Broken or BladeState.Retired)).ToList();
         List<string> lines = [.. here.Where(b => b.File.Hold is not null).Select(b => $"Hold: {b.File.Blade.Tag}, {Hold(b.File.Hold!, advice.Words)}{Where(b.File, advice.Now)}.")];
         void Say(string what, IEnumerable<string> things)
         {

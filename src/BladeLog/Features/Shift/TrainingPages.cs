@@ -40,8 +40,9 @@ internal static class TrainingPages
         app.MapPost("/training", Post);
     }
 
-    private static async Task<IResult> Post([FromForm] TrainingForm form, Desk desk)
+    private static async Task<IResult> Post([FromForm] TrainingForm? form, Desk desk)
     {
+        form ??= new();
         var units = await desk.Units();
         var read = new FormReading(units, desk.Now);
         var task = read.Choice<TrainedTask>(nameof(form.Task), form.Task, "Say what the person was trained at.");
