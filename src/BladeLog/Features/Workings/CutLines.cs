@@ -84,6 +84,13 @@ internal static class CutLines
         Length bite = Kinematics.BitePerTooth(at, cut.Pitch, cut.BandSpeed);
         yield return Line("Over its own edge a tooth bites", Micrometres(Bite.OverEdge(cut, bite).Metres), $"bite times kerf over the edge's width: {Words(Bite.RegimeOf(cut, at))}", "derived", Provenance.Derived);
         yield return Line("Gullet fill", Figures.Number(Gullet.Fill(bite, cut.CutHeight, Gullet.AreaOf(cut)), 2), "bite times height over gullet area", "gullet-capacity-note", Provenance.Published);
+        Length marks = SurfaceMarks.Spacing(bite, cut.Tip == TipKind.Set ? SetPattern.Alternate : SetPattern.None);
+        yield return Line(
+            "Marks on the face",
+            shown.Units.Show(marks, Fields.Kerf),
+            $"every {(cut.Tip == TipKind.Set ? "second tooth of alternate set" : "tooth")} reaches a face: {(SurfaceMarks.Seen(marks) ? "seen as ripples" : "too close to be seen")}",
+            "derived",
+            Provenance.Derived);
         yield return Line("Force on a tooth", shown.ForceText(CuttingForce.PerTooth(cut, bite).Newtons), "resistance times chip section and what the edge adds", "derived", Provenance.Derived);
         yield return Line("Cutting force", shown.ForceText(CuttingForce.Main(cut, at).Newtons), "force on a tooth times teeth in the cut", "derived", Provenance.Derived);
         yield return Line("Push on the blade", shown.ForceText(CuttingForce.Thrust(cut, at).Newtons), "the same for the force against the feed", "engineering-default", Provenance.EngineeringDefault);
