@@ -120,7 +120,7 @@ public sealed class PrintPageTests(SampleApp sample) : IClassFixture<SampleApp>
     public async Task The_audit_of_a_year_leaves_the_older_breaks_out_and_refuses_days_the_wrong_way_round()
     {
         var page = await sample.Page("/audit");
-        
+
         // breaks.csv: days -263, -218 and -204 lie within the year.
         Assert.Equal("3", page.QuerySelectorAll(".tally tr").First(r => r.TextContent.StartsWith("Breaks", StringComparison.Ordinal)).QuerySelector(".n")!.TextContent);
         using var wrong = await sample.App.Client.GetAsync("/audit?from=2026-05-01&to=2026-04-01");
