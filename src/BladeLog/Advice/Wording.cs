@@ -16,14 +16,14 @@ public sealed record Wording(LengthUnit Lengths = LengthUnit.Millimetre, Spellin
 
     /// <summary>A length with its unit; thin ones with a decimal.</summary>
     public string Length(double metres) => Lengths == LengthUnit.Inch
-        ? Number(metres / 0.0254, Math.Abs(metres) < 0.254 ? 2 : 1) + " in"
+        ? Number(metres / Handbook.Units.Exact.Inch, Math.Abs(metres) < 0.254 ? 2 : 1) + " in"
         : Number(metres * 1e3, Math.Abs(metres) < 0.00995 ? 1 : 0) + " mm";
 
     /// <summary>A length for a second figure in one sentence: no unit again.</summary>
     public string BareLength(double metres) => Length(metres)[..^3];
 
     /// <summary>A width as a calliper reads it.</summary>
-    public string Width(double metres) => Lengths == LengthUnit.Inch ? Number(metres / 0.0254, 3) + " in" : Number(metres * 1e3, 1) + " mm";
+    public string Width(double metres) => Lengths == LengthUnit.Inch ? Number(metres / Handbook.Units.Exact.Inch, 3) + " in" : Number(metres * 1e3, 1) + " mm";
 
     /// <summary>An edge radius.</summary>
     public static string Edge(double metres) => Number(metres * 1e6, 0) + " µm";

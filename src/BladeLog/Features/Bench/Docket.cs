@@ -72,7 +72,7 @@ internal static class Docket
                 TipKind.Swaged => $"swaged: kerf {units.Show(new Length(body.Kerf.Value), Fields.Kerf)}{Default(body.Kerf)}",
                 _ => $"{units.Show(new Length((body.Kerf.Value - body.Thickness.Value) / 2), Fields.Kerf)} each side{Default(body.Kerf)}",
             },
-            $"{Teeth(body.TipMaterial)} teeth, {Body(body.Steel)}",
+            Said.Capital($"{Teeth(body.TipMaterial)} teeth, {Body(body.Steel)}"),
             seen,
             file.Spec.SharpeningPriceMinor is { } price ? units.ShowMoney(price) : null);
     }

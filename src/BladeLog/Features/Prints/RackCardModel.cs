@@ -134,11 +134,11 @@ internal static class RackCard
         if (body.Width.Value <= CurveWidthM && body.Kerf.Value > body.Thickness.Value)
         {
             var hard = CurveRadius.Hard(new Length(body.Width.Value), new Length(body.Kerf.Value), new Length(body.Thickness.Value)).Metres;
-            return $"curves from R{Figures.Glue}{Bare(hard * advice.Settings[Advice.CutSettings.CurveFactor], units)}, stock from {Bare(LeastTeeth * body.PitchCoarse, units)}";
+            return $"curves from R{Figures.Glue}{Bare(hard * advice.Settings[Advice.CutSettings.CurveFactor], units)}{Unit(units)}";
         }
 
         var most = Math.Min(MostTeeth * body.PitchMean, saw?.Setup.CutHeightMostM ?? double.MaxValue);
-        return $"straight cuts, {Bare(LeastTeeth * body.PitchCoarse, units)} to {Bare(most, units)} high";
+        return $"straight, {Bare(LeastTeeth * body.PitchCoarse, units)} to {Bare(most, units)}{Unit(units)}";
     }
 
     private static string Tension(BladeAdvice blade, SawNow saw, ShopAdvice advice, ShopUnits units)
@@ -147,10 +147,12 @@ internal static class RackCard
         return $"{units.Show(new Stress(known.Value))} on the body{(known.IsDefault ? " (default, not yours)" : "")}";
     }
 
-    /// <summary>A length to the whole millimetre, without its unit: the card's title says which.</summary>
+    /// <summary>A length to the whole millimetre, without its unit.</summary>
     private static string Bare(double metres, ShopUnits units) => units.Units == UnitSystem.Inch
-        ? Figures.With(Figures.Number(metres / 0.0254, metres < 0.0254 ? 2 : 1), "in")
+        ? Figures.With(Figures.Number(metres / Handbook.Units.Exact.Inch, metres < Handbook.Units.Exact.Inch ? 2 : 1), "in")
         : Figures.Number(metres * 1e3);
+
+    private static string Unit(ShopUnits units) => units.Units == UnitSystem.Inch ? "" : Figures.Glue + "mm";
 
     private static string Joined(string[] tags) => tags.Length == 1 ? tags[0] : $"{string.Join(", ", tags[..^1])} and {tags[^1]}";
 }

@@ -27,6 +27,7 @@ internal static class EntryWords
         [nameof(ReorderCuts)] = "The list of cuts was put in another order",
         [nameof(ImportRows)] = "A file was brought in",
         [nameof(CutDown)] = "A blade was cut down",
+        [nameof(SaveLanName)] = "The shop's name on the network was changed",
     };
 
     public static async Task<IReadOnlyList<EntryLine>> Of(Desk desk, IReadOnlyList<Entry> entries)
@@ -52,6 +53,7 @@ internal static class EntryWords
         var words = new Dictionary<int, string>();
         var saws = await db.Saws.AsNoTracking().ToDictionaryAsync(s => s.Id, s => s.Name);
         var tags = await db.Blades.AsNoTracking().ToDictionaryAsync(b => b.Id, b => b.Tag);
+        var people = await db.People.AsNoTracking().ToDictionaryAsync(p => p.Id, p => p.Initials);
         var cultureless = System.Globalization.CultureInfo.InvariantCulture;
 
         async Task Each<T>(Func<T, string> say)
@@ -99,6 +101,10 @@ internal static class EntryWords
         await Each<Inspection>(i => $"{tags[i.BladeId]} looked at: {i.Found switch { Found.NothingSeen => "nothing seen", Found.Crack => "crack", Found.Worn => "worn", _ => "see the note" }}{(i.Note is null ? "" : $", {i.Note}")}");
         await Each<Records.Break>(b => $"{tags[b.BladeId]} broke");
         await Each<Retirement>(r => $"{tags[r.BladeId]} retired{(r.CutUp ? ", cut up" : "")}");
+        await Each<HandOver>(h => $"Hand-over note: {(h.Text.Length > 80 ? h.Text[..80] + "…" : h.Text)}");
+        await Each<HandOverRead>(_ => "A hand-over note was read");
+        await Each<Trained>(t => $"{people.GetValueOrDefault(t.PersonId, "Somebody")} trained: {TaskWords.Of(t.Task)}{(t.SawId is { } on ? $", {saws[on]}" : "")}");
+        await Each<LabelPrinted>(l => $"Label {l.Tag} printed");
         await Each<SawSetup>(s => $"Setup of {saws[s.SawId]}");
         return words;
     }

@@ -71,7 +71,7 @@ public sealed class PrintPageTests(SampleApp sample) : IClassFixture<SampleApp>
         Assert.Contains("5080 mm × 18.2 mm × 0.8 mm", q10, StringComparison.Ordinal);
         Assert.Contains("3 TPI hook, hook 10°", q10, StringComparison.Ordinal);
         Assert.Contains("0.28 mm each side", q10, StringComparison.Ordinal);
-        Assert.Contains("hardened carbon steel teeth, flexible back", q10, StringComparison.Ordinal);
+        Assert.Contains("Hardened carbon steel teeth, flexible back", q10, StringComparison.Ordinal);
 
         // 45.00 + 9.00 + 3 x 8.50 by the sample's price list.
         var all = SampleApp.Text(page.QuerySelector(".docket"));
@@ -113,7 +113,7 @@ public sealed class PrintPageTests(SampleApp sample) : IClassFixture<SampleApp>
         Assert.Equal("38", Sum("Looks that came late"));
         Assert.Equal(("2", "1", "9"), (Sum("Holds"), Sum("Holds cleared"), Sum("Breaks")));
         var blades = page.QuerySelectorAll(".audit h2").First(h => h.TextContent == "By blade");
-        Assert.Equal(38, page.QuerySelectorAll("tr.missing").Count(r => r.CompareDocumentPosition(blades).HasFlag(DocumentPositions.Preceding)));
+        Assert.Equal(38, page.QuerySelectorAll("tr.late").Count(r => r.CompareDocumentPosition(blades).HasFlag(DocumentPositions.Preceding)));
     }
 
     [Fact]
