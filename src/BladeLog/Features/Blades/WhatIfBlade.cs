@@ -151,6 +151,11 @@ internal static class WhatIfBlade
     {
         BladeStand then = compared.Then;
         string bending = shown.StressText(then.Bending.Pascals);
+        if (compared.Today is { } today && shown.StressText(today.Bending.Pascals) == bending && Life(today) == Life(then))
+        {
+            return $"What would you change on {model.Tag}?";
+        }
+
         return compared.Today is null ? $"{model.Tag} then bends at {bending}"
             : model.Held is not null || !compared.Today.Life.HoursShown || !then.Life.HoursShown || Life(compared.Today) == Life(then) ? $"{model.Tag} then bends at {bending} instead of {shown.StressText(compared.Today.Bending.Pascals)}"
             : $"{Said.Capital(Life(then))} instead of {Life(compared.Today)}";
