@@ -99,6 +99,11 @@ internal static class BladePageModel
         }
 
         yield return new("What if", At(blade, "what-if"));
+        if (blade.State != BladeState.Retired && file.Place is Place.Rack or Place.Bench)
+        {
+            yield return new("Where it hangs", At(blade, "hang"));
+        }
+
         if (blade.State != BladeState.Hold)
         {
             yield return new("Workings", $"/workings/band-life?blade={tag}{(blade.Record.On is { } asked ? $"&saw={asked.Saw.Code}" : "")}");
