@@ -101,7 +101,7 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
 
     private static string Heard(Hold hold, ShopAdvice advice, ShopUnits units, IReadOnlyDictionary<int, string> initials)
     {
-        string what = hold.Kind == HoldKind.Clicking ? "Clicking heard" : Said.Capital(LifeWords.Hold(hold, advice.Words)["on hold: ".Length..]);
+        string what = Said.Capital(LifeWords.HoldReason(hold, advice.Words) ?? "put on hold");
         string when = hold.Entry is { } entry ? " " + Said.When(entry.AtUtc, advice.Now.AsOf, units) : "";
         string who = hold.Entry?.PersonId is { } id && initials.TryGetValue(id, out string? name) ? " by " + name : "";
         return $"Do not run. {what}{when}{who}.";

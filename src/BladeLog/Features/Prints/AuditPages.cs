@@ -1,5 +1,3 @@
-using BladeLog.Advice;
-
 namespace BladeLog.Features.Prints;
 
 internal static class AuditPages
@@ -19,7 +17,7 @@ internal static class AuditPages
             (first, last) = (today.AddYears(-1).AddDays(1), today);
         }
 
-        var audit = new Audit(await AuditFacts.Read(desk.Db), Start(first), Start(last.AddDays(1)), desk.Now, units, Wording.Of((await desk.Shop()).Shop));
+        var audit = new Audit(await AuditFacts.Read(desk.Db), Start(first), Start(last.AddDays(1)), desk.Now, units, await Story.Of(desk));
         var state = read.IsGood ? FormState.New : read.State;
         return await desk.Page<AuditPage, AuditModel>(audit.Model(form, state), state.Status);
 
