@@ -9,7 +9,8 @@ namespace BladeLog.Features;
 /// <param name="What">What is worked out there: "Life of Q-08 on Osprey".</param>
 /// <param name="Gives">The figures of this page that stand there.</param>
 /// <param name="Href">Its address.</param>
-public sealed record Worked(string What, string Gives, string Href);
+/// <param name="Verb">What the row does.</param>
+public sealed record Worked(string What, string Gives, string Href, string Verb = "worked out");
 
 /// <summary>The workings that answer for the figures of a page. Null where nothing is told of a blade: then nothing leads there.</summary>
 internal static class WorkedOut
@@ -46,7 +47,7 @@ internal static class WorkedOut
     {
         ArgumentNullException.ThrowIfNull(blade);
         SawNow? on = saw ?? blade.Record.On;
-        return new($"Edge of {blade.File.Blade.Tag}{In(cut)}", "rounding now, metres left", At("wear", blade, on, cut));
+        return new($"Edge of {blade.File.Blade.Tag}{In(cut)}", "rounding now, length of cut left", At("wear", blade, on, cut));
     }
 
     public static Worked Grinding(BladeAdvice blade)

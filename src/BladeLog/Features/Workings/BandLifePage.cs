@@ -150,7 +150,7 @@ internal static class BandLifePage
                 new CurveLine("half of such blades broken", Points(x, v => At(v).MedianHours)),
                 new CurveLine("1 in 10 broken, by scatter alone", Points(x, v => At(v) is var r ? r.TenthPercentileBends / r.BendsPerHour : null)),
             ],
-            new CurveHere(now, life.MedianHours, $"{Figures.Number(now, wheelDrawn ? 0 : 2)} {shown.SmallUnit}: {(life.Verdict is LifeVerdict.Marginal or LifeVerdict.Finite ? Figures.Hours(life.MedianHours) + " h" : Title(life).Split(':')[0])}"))
+            new CurveHere(now, life.MedianHours, $"{Figures.Number(now, wheelDrawn ? 0 : 2)} {shown.SmallUnit}: {(life.Verdict is LifeVerdict.Marginal or LifeVerdict.Finite ? Figures.Hours(life.MedianHours) + " h" : Title(life).Split(':')[0].ToLowerInvariant())}"))
         {
             Lesson = wheelDrawn
                 ? "The axis of hours begins where a blade is unsuitable and ends where flexing no longer ends it. All wheels changed alike, loop and speed kept."

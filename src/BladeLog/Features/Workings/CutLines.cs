@@ -53,7 +53,7 @@ internal static class CutLines
 
         if (limits.Held.MostMps is { } guided)
         {
-            yield return Line("Practical feed", shown.FeedText(guided), limits.Held.PowerFed ? "greatest feed of the feeder" : "what hands can guide", "common-practice", Provenance.CommonPractice);
+            yield return Line("Practical feed", shown.FeedText(guided), limits.Held.PowerFed ? "greatest feed of the feeder" : "what hands can guide", "common-practice", limits.Held.PowerFed ? Provenance.Yours : Provenance.CommonPractice);
         }
 
         if (limits.Finish is { } fine)

@@ -26,7 +26,7 @@ internal static class ForceFactorPage
             ? form.Try(() => new Box(CuttingForce.CuttingPower(cut with { Model = settings.Force with { FitFactor = 1 } }, new Speed(f)).Watts))?.Watts
             : null;
         double? model = form.Power("power", "Power at the band by the handbook alone", Given.Of(reckoned, "of the cut at that feed, force factor 1", 618));
-        double? amps = form.Number("amps", "Ammeter, while it cuts", "a current", 0.1, 2000, "A", Given.Example(2.2));
+        double? amps = form.Number("amps", "Ammeter, while it cuts", "a current", 0.1, 2000, "A", from.Any ? Given.None : Given.Example(2.2), optional: true);
         double? volts = form.Number("volts", "Voltage", "a voltage", 50, 1000, "V", Given.Example(400));
         Phases phases = form.Choose("phases", "Supply", Phases.Three, "example", (Phases.Three, "three", "three phases"), (Phases.One, "one", "one phase"));
         double? cos = form.Number("cos", "Power factor under load", "a power factor", 0.2, 1, "", new Given(0.8, "default, not yours: see the motor's plate"));
@@ -35,7 +35,7 @@ internal static class ForceFactorPage
         IReadOnlyList<double>? earlier = form.Factors("earlier", "Factors of earlier readings", "may stay empty; with a semicolon between two");
 
         Shown shown = new(form.Units);
-        string title = "What does your ammeter say of the force?";
+        string title = amps is null ? "What does your ammeter show in this cut?" : "What does your ammeter say of the force?";
         List<BecauseLine> lines = [];
         List<CurveFigure> curves = [];
         List<Worked> leads = [];
@@ -65,13 +65,13 @@ internal static class ForceFactorPage
             (double bandLow, double bandHigh) = ForceUncertainty.BandFor(readings.Length);
             lines.Add(Line("Band of force and power", $"×{Two(bandLow)} to ×{Two(bandHigh)}", "0.70 to 1.40 until there are five readings, then 0.87 to 1.15", "engineering-default", Provenance.EngineeringDefault));
             curves.Add(Curve(readings));
-            leads.Add(new Worked("Set your own force factor", $"{CutSettings.Fit.Words}: {Two(settings[CutSettings.Fit])} now, {Two(fit.Median)} by these readings", $"/setup/{CutSettings.Fit.Key}"));
+            leads.Add(new Worked("Set your own force factor", $"{CutSettings.Fit.Words}: {Two(settings[CutSettings.Fit])} now, {Two(fit.Median)} by these readings", $"/setup/{CutSettings.Fit.Key}", "set"));
             if (readings.Length >= 5)
             {
-                leads.Add(new Worked("Set the low end of the force band", $"{Two(settings[CutSettings.LowEnd])} now, 0.87 after five readings", $"/setup/{CutSettings.LowEnd.Key}"));
+                leads.Add(new Worked("Set the low end of the force band", $"{Two(settings[CutSettings.LowEnd])} now, 0.87 after five readings", $"/setup/{CutSettings.LowEnd.Key}", "set"));
             }
 
-            leads.Add(new Worked("Next reading", "keeps the factors so far", $"{Path}?earlier={Uri.EscapeDataString(string.Join("; ", readings.Select(Two)))}"));
+            leads.Add(new Worked("Next reading", "keeps the factors so far", $"{Path}?earlier={Uri.EscapeDataString(string.Join("; ", readings.Select(Two)))}", "begin"));
         }
 
         return WorkingModel.Of(Path, "Your own force factor", title, form, from) with
