@@ -37,6 +37,10 @@ internal static class BladePageModel
             Runs = parts.Runs(),
             Paths = parts.Paths(),
             Because = Reckoned.Lines(BladeFigures.Of(blade, advice.Settings), units),
+            WorkedLife = WorkedOut.Rows(WorkedOut.Life(blade)),
+            WorkedEdge = WorkedOut.Rows(WorkedOut.Edge(blade)),
+            WorkedLimits = WorkedOut.Rows(WorkedOut.Grinding(blade)),
+            Worked = WorkedOut.Rows(WorkedOut.Tension(blade, null, advice.Words), WorkedOut.Push(blade, null)),
             Actions = [.. Actions(blade, advice)],
             Last = blade.State == BladeState.Retired ? null : new BladeAction($"Retire {file.Blade.Tag}", At(blade, "retire")),
             Cautions = [.. Cautions(blade)],
@@ -95,11 +99,6 @@ internal static class BladePageModel
         }
 
         yield return new("What if", At(blade, "what-if"));
-        if (blade.State != BladeState.Hold)
-        {
-            yield return new("Workings", $"/workings/band-life?blade={tag}{(blade.Record.On is { } asked ? $"&saw={asked.Saw.Code}" : "")}");
-        }
-
         yield return new("Edit", At(blade, "edit"));
     }
 
