@@ -27,7 +27,7 @@ internal static class BladePageModel
             Kerf = blade.Body.Kerf.Value * 1e3,
             Depth = blade.Body.Gullet.Value * 1e3,
             Tip = blade.Body.Tip,
-            Facts = parts.Facts(),
+            Facts = [.. parts.Facts(), .. CrackFacts.Of(file, past, advice.Words)],
             Life = parts.Life(),
             EdgeTitle = edgeTitle,
             EdgeWords = edgeWords,
@@ -71,6 +71,10 @@ internal static class BladePageModel
         else if (blade.State == BladeState.Broken)
         {
             yield return new("Weld it", At(blade, "join"), Main: true);
+        }
+        else if (file.Retirement is { } end && on is null && advice.Now.AsOf - end.Entry.EnteredUtc < TimeSpan.FromHours(24))
+        {
+            yield return new("Not retired after all", $"/record/{end.EntryId}/void");
         }
         else if (blade.State != BladeState.Retired && on is null && file.Place != Place.AtSharpener
             && (blade.Record.On is { } saw && ShopAdvice.Fits(file, saw) ? saw : advice.Fitting(file).FirstOrDefault()) is { } fits)

@@ -32,6 +32,9 @@ public sealed record HoursForm : PostedForm
     public string? Source { get; init; }
 
     public string? Speed { get; init; }
+
+    /// <summary>Of the hours since the last reading, so long at the other speed.</summary>
+    public string? OtherSpeed { get; init; }
 }
 
 /// <summary>Running hours: read off the meter, else typed. They feed the clock of flexing.</summary>
@@ -79,6 +82,8 @@ internal static class Hours
         var start = read.Duration(nameof(form.NewMeterStart), form.NewMeterStart, Fields.HourMeter);
         var put = read.Time(nameof(form.NewMeterAt), form.NewMeterAt);
         var top = read.Duration(nameof(form.RollsOverAt), form.RollsOverAt, Fields.HourMeter);
+        var other = saw.Setup.Speeds.FirstOrDefault(s => s.SpeedMps != speed);
+        var atOther = speed is null || saw.Setup.Speeds.Count != 2 ? null : read.Duration(nameof(form.OtherSpeed), form.OtherSpeed, Fields.RunHours);
         return new ReadMeter(saw.Saw.Code, Ms(reading) ?? 0, form.Reading?.Trim() ?? "")
         {
             At = read.Time(nameof(form.At), form.At),
@@ -87,6 +92,8 @@ internal static class Hours
             NewMeterAt = answer == MeterAnswer.NewMeter ? put : null,
             RollsOverAtMs = answer == MeterAnswer.RolledOver ? Ms(top) : null,
             SpeedMps = speed,
+            OtherSpeedMs = Ms(atOther) ?? 0,
+            OtherSpeedMps = atOther is null ? null : other?.SpeedMps,
         };
     }
 
