@@ -66,6 +66,19 @@
   }
   addEventListener('pagehide', () => { if (sent) sessionStorage.setItem('sent', sent); });
 
+  // Keys beside a number: the figure of last time, and steps up and down from it. What is typed otherwise stays as it is.
+  document.documentElement.classList.add('scripted');
+  document.addEventListener('click', event => {
+    const key = event.target.closest('.steps button');
+    if (!key) return;
+    const keys = key.closest('.steps'), field = document.getElementById(keys.dataset.steps);
+    const from = field.value.trim() || keys.querySelector('[data-set]')?.dataset.set || '0';
+    const now = Number(from.replace(',', '.')), places = t => (t.split('.')[1] ?? '').length;
+    if (key.dataset.set !== undefined) field.value = key.dataset.set;
+    else if (Number.isFinite(now)) field.value = Math.max(0, now + Number(key.dataset.add)).toFixed(Math.max(places(key.dataset.add), places(from.replace(',', '.'))));
+    field.dispatchEvent(new Event('input', { bubbles: true }));
+  });
+
   // What was saved is read aloud once, from the one place that no answer replaces.
   const told = document.getElementById('told');
   const lastSaved = () => {
