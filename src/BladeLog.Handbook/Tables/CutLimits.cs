@@ -38,6 +38,12 @@ public static class CutLimits
     /// <summary>Push by hand, amber, N.</summary>
     public static Limit PushAmber { get; } = new(100, "guideline push to keep a load moving, men", Provenance.Published, "hse-l23");
 
+    /// <summary>Push to start a load moving or to stop it, green, N.</summary>
+    public static Limit PushToStartGreen { get; } = new(150, "guideline push to start or stop a load, women", Provenance.Published, "hse-l23");
+
+    /// <summary>Push to start a load moving or to stop it, amber, N.</summary>
+    public static Limit PushToStartAmber { get; } = new(200, "guideline push to start or stop a load, men", Provenance.Published, "hse-l23");
+
     /// <summary>Push with fingers within 150 mm of the blade: amber above, N.</summary>
     public static Limit PushPrecision { get; } = new(50, "fingers near the blade", Provenance.EngineeringDefault, "engineering-default");
 

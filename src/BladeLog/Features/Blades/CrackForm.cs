@@ -14,8 +14,8 @@ public abstract record CrackForm : PostedForm
 
     public string? At { get; init; }
 
-    /// <summary>Folded away until something stands in it that must be seen.</summary>
-    public bool Opens(FormState state) => state.Has(nameof(CrackLength), nameof(At)) || Place is not null || CrackLength is { Length: > 0 };
+    /// <summary>Something stands in the fields of the crack, right or wrong: they must be seen.</summary>
+    public bool TellsOfCrack(FormState state) => state.Has(nameof(CrackLength), nameof(Place)) || Place is not null || CrackLength is { Length: > 0 };
 
     internal CrackSaid Read(FormReading read) => new(
         read.Length(nameof(CrackLength), CrackLength, Fields.CrackLength),

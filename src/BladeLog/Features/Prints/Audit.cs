@@ -37,6 +37,9 @@ internal sealed class Audit(AuditFacts facts, DateTime from, DateTime to, DateTi
             Blades = [.. facts.Blades.OrderBy(b => b.Tag, NaturalOrder.Instance).Select(OfBlade).Where(p => p.Rows.Count > 0)],
             Trainings = [.. facts.Trainings.Where(In).Select(t => Row(t, About.Shop))],
             Gaps = gaps,
+            AllGaps = _gaps.Sum(g => g.Gaps.Count(x => x.DueUtc < now)),
+            FirstRecord = facts.FirstUtc is { } first ? Said.Day(first, units) : null,
+            Whole = facts.FirstUtc is not { } begun || (from <= begun && to > now),
             When = Printing.When(now, units),
         };
     }

@@ -29,6 +29,15 @@ internal sealed record AuditFacts
 
     public required IReadOnlyList<(int SawId, DateTime UntilUtc, long Ms)> SawRuns { get; init; }
 
+    /// <summary>When the record begins: the first mount, look, run or training told of.</summary>
+    public DateTime? FirstUtc => new[]
+    {
+        Mounts.Select(m => m.AtUtc).Append(DateTime.MaxValue).Min(),
+        Looks.Select(l => l.Entry.AtUtc).Append(DateTime.MaxValue).Min(),
+        SawRuns.Select(r => r.UntilUtc).Append(DateTime.MaxValue).Min(),
+        Trainings.Select(t => t.Entry.AtUtc).Append(DateTime.MaxValue).Min(),
+    }.Min() is var first && first < DateTime.MaxValue ? first : null;
+
     /// <summary>Of inspections, holds, their clearing, breaks and trainings.</summary>
     public required IReadOnlyList<DateTime> StruckOut { get; init; }
 

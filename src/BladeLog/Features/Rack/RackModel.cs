@@ -7,7 +7,7 @@ using BladeLog.Ui.Pictures.Geometry;
 namespace BladeLog.Features.Rack;
 
 /// <summary>One blade as a row of the rack.</summary>
-public sealed record RackRow(string Tag, string Section, ToothSpec Teeth, string State, string? Word, string Note, SmallBand Band);
+public sealed record RackRow(string Tag, string Section, ToothSpec Teeth, string State, string? Word, string Note, SmallBand Band, Worked? Worked);
 
 /// <summary>The blades of one place, in the order a person walks.</summary>
 public sealed record RackGroup(string Name, string Remark, IReadOnlyList<RackRow> Rows, bool Folded = false);
@@ -151,7 +151,8 @@ public sealed record RackModel
             _ => ("ready", null),
         };
         string teeth = Said.Teeth(file.Spec), first = on is not null ? on.Saw.Name + ", " : file.Place == Place.Rack && file.Hook is { } hook ? hook + ", " : "";
-        return new RackRow(file.Blade.Tag, Said.Section(file, units), Drawn.Teeth(blade.Body, file.Spec), state, word, $"{first}{teeth}, {Remark(file, blade, advice, units)}", SmallBand.Of(blade, advice.Settings));
+        SmallBand band = SmallBand.Of(blade, advice.Settings);
+        return new RackRow(file.Blade.Tag, Said.Section(file, units), Drawn.Teeth(blade.Body, file.Spec), state, word, $"{first}{teeth}, {Remark(file, blade, advice, units)}", band, WorkedOut.Band(blade, band));
     }
 
     private static string Remark(BladeFile file, BladeAdvice blade, ShopAdvice advice, ShopUnits units) => blade.State switch
