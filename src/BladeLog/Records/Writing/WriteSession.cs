@@ -12,6 +12,8 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
 
     private readonly List<Problem> _refusals = [];
     private readonly List<Problem> _asks = [];
+    private readonly List<Entry> _entries = [];
+    private readonly List<Fact> _facts = [];
     private Shop? _shop;
     private int _part;
     private int _before;
@@ -65,6 +67,18 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
         await Db.SaveChangesAsync();
     }
 
+    /// <summary>Chains what was saved to the line before it. A large file's first entries are no longer held by then.</summary>
+    public async Task Seal()
+    {
+        foreach (var entry in _entries.Where(e => Db.Entry(e).State == EntityState.Detached))
+        {
+            Db.Entry(entry).State = EntityState.Unchanged;
+        }
+
+        Chain.Seal(Db, _entries, _facts, await Chain.Before(Db, _entries.Min(e => e.Id)));
+        await Db.SaveChangesAsync();
+    }
+
     public void Refuse(string field, string sentence) => _refusals.Add(new Problem(_fieldPrefix + field, sentence));
 
     public void RefuseUnless(bool holds, string field, string sentence)
@@ -109,6 +123,7 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
         }
 
         Db.Entries.Add(entry);
+        _entries.Add(entry);
         return entry;
     }
 
@@ -125,6 +140,7 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
 
         fact.Entry = entry;
         Db.Add(fact);
+        _facts.Add(fact);
         return fact;
     }
 
@@ -179,7 +195,7 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
         ? string.Create(CultureInfo.InvariantCulture, $"{metres / Exact.Inch:#,0.###} in")
         : string.Create(CultureInfo.InvariantCulture, $"{metres * 1000:#,0.##} mm");
 
-    private Shop? Shop => _shop ??= Db.Shops.AsNoTracking().FirstOrDefault();
+    private Shop? Shop => _shop ??= Db.Shops.AsNoTracking().OrderBy(s => s.Id).FirstOrDefault();
 
     public void RefuseUnlessIn(Role role)
     {
