@@ -163,7 +163,13 @@ public sealed class WorkedOutTests(SampleApp sample) : IClassFixture<SampleApp>
         {
             IDocument working = await sample.Page(row.QuerySelector("td a")!.GetAttribute("href")!);
             Assert.Equal(Text(row.Children[3]).Split(" of ")[1], Line(working, "Median life"));
-            Assert.Equal(Text(row.Children[4]), Line(working, "Life used so far"));
+            Assert.StartsWith(Line(working, "Bending stress"), Text(row.Children[5]), StringComparison.Ordinal);
+            if (!Text(row.Children[4]).Contains("band", StringComparison.Ordinal))
+            {
+                // Where its hours are known only within a range the list tells that range.
+                Assert.Equal(Text(row.Children[4]), Line(working, "Life used so far"));
+            }
+
             IDocument one = await sample.Page(row.QuerySelector("th a")!.GetAttribute("href")!);
             Assert.Equal(Because(one, "Bends an hour"), Line(await sample.Page(Link(one, "band-life")), "Bends an hour"));
             told++;
