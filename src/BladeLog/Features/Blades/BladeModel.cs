@@ -92,8 +92,8 @@ public sealed record BladeModel
 
     public IReadOnlyList<StoryLine> Story { get; init; } = [];
 
-    /// <summary>Entries not shown; 0: all are.</summary>
-    public int Older { get; init; }
+    /// <summary>There are entries not shown.</summary>
+    public bool More { get; init; }
 }
 
 /// <summary>No blade of this tag.</summary>

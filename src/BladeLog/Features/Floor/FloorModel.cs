@@ -87,6 +87,11 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
             return on with { State = "hold", Big = Heard(hold, advice, units, initials), Small = hold.Kind == HoldKind.Clicking ? "A crack may be starting. A named person clears it after a look." : "A named person clears it after a look." };
         }
 
+        if (blade.State is BladeState.Retired or BladeState.Broken)
+        {
+            return on with { State = "hold", Big = Ended(file, advice, units), Small = "Take it off now, or strike that entry out if it is wrong." };
+        }
+
         (BigFigure? limit, string? words) = Limit(blade, advice, units);
         return on with
         {
@@ -104,11 +109,16 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
 
     private static string Heard(Hold hold, ShopAdvice advice, ShopUnits units, IReadOnlyDictionary<int, string> initials)
     {
-        string what = hold.Kind == HoldKind.Clicking ? "Clicking heard" : Said.Capital(LifeWords.Hold(hold, advice.Words)["on hold: ".Length..]);
+        string what = Said.Capital(LifeWords.HoldReason(hold, advice.Words) ?? "put on hold");
         string when = hold.Entry is { } entry ? " " + Said.When(entry.AtUtc, advice.Now.AsOf, units) : "";
         string who = hold.Entry?.PersonId is { } id && initials.TryGetValue(id, out string? name) ? " by " + name : "";
         return $"Do not run. {what}{when}{who}.";
     }
+
+    /// <summary>A blade that was retired or broke does not belong on a saw: somebody helpful put it back.</summary>
+    private static string Ended(BladeFile file, ShopAdvice advice, ShopUnits units) => file.Retirement is { } end
+        ? $"Do not run. {file.Blade.Tag} was retired {Said.When(end.Entry.AtUtc, advice.Now.AsOf, units)}."
+        : $"Do not run. {file.Blade.Tag} is written as broken.";
 
     private static string Ready(SawNow saw, ShopAdvice advice)
     {

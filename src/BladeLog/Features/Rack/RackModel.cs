@@ -157,9 +157,9 @@ public sealed record RackModel
 
     private static string Remark(BladeFile file, BladeAdvice blade, ShopAdvice advice, ShopUnits units) => blade.State switch
     {
-        BladeState.Retired => RetiredBecause(file.Retirement!.Reason),
-        BladeState.Broken => BrokeAt(file.Break!.Site),
-        BladeState.Hold => LifeWords.Hold(file.Hold!, advice.Words) is var said && said.StartsWith("on hold: ", StringComparison.Ordinal) ? said["on hold: ".Length..] : said,
+        BladeState.Retired => StoryWords.Retired(file.Retirement!.Reason),
+        BladeState.Broken => StoryWords.Broke(file.Break!.Site),
+        BladeState.Hold => LifeWords.HoldReason(file.Hold!, advice.Words) ?? "on hold",
         _ when blade.Record.UnknownHistory => "history unknown: inspect",
         _ when file.Place == Place.AtSharpener && !blade.Grind.Pays => "no further grind",
         _ when file.Place == Place.AtSharpener => Run(file),
@@ -174,33 +174,4 @@ public sealed record RackModel
     };
 
     private static string Run(BladeFile file) => Figures.With(Figures.Hours(file.Hours), "h");
-
-    private static string BrokeAt(BreakSite site) => site switch
-    {
-        BreakSite.Gullet => "broke at a gullet",
-        BreakSite.GulletAngled => "broke from a gullet, at an angle",
-        BreakSite.Weld => "broke at its weld",
-        BreakSite.BackEdge => "broke from the back edge",
-        BreakSite.Body => "broke in the body",
-        BreakSite.TeethStripped => "teeth stripped",
-        _ => "broke, place unknown",
-    };
-
-    private static string RetiredBecause(RetireReason reason) => reason switch
-    {
-        RetireReason.FatigueMark => "past its retire mark",
-        RetireReason.Crack => "cracked",
-        RetireReason.Broke => "broke",
-        RetireReason.WidthLimit => "under its least width",
-        RetireReason.TooManyJoints => "too many welds",
-        RetireReason.TeethStripped => "teeth stripped",
-        RetireReason.BodyDamage => "body damaged",
-        RetireReason.UnknownHistory => "history unknown",
-        RetireReason.Uneconomic => "not worth its grind",
-        RetireReason.Lost => "lost",
-        RetireReason.Sold => "sold",
-        RetireReason.Rejected => "rejected",
-        RetireReason.CutDown => "cut down to a shorter loop",
-        _ => "another reason",
-    };
 }

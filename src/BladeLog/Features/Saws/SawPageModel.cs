@@ -17,9 +17,8 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
     private readonly BladeAdvice? on = advice.Now.Blades.FirstOrDefault(b => b.Blade.Id == saw.MountedBladeId) is { } file ? advice.On(file, saw) : null;
     private readonly PlannedCut? next = advice.NextCut(saw);
 
-    public SawModel Model(IReadOnlyList<PastFact> past, bool more)
+    public SawModel Model(PastPage past, Story story, bool first)
     {
-        Dictionary<int, string> saws = advice.Now.Saws.ToDictionary(s => s.Saw.Id, s => s.Saw.Name);
         (string state, string title, string lede) = Answer();
         double? span = next is { Choice: { Tension: { } tension } c }
             ? advice.Beams.Band(c.Blade.Body, tension.Stress.Value, setup, c.SpeedMps, c.Work.HeightM).GuideSpan.Millimetres
@@ -47,8 +46,8 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
             Because = Reckoned.Lines(Because(span, thrust), units),
             Worked = Worked(),
             Actions = [.. Actions()],
-            Story = [.. past.Select(p => Story.Line(p, advice.Now.AsOf, units, advice.Words, saws))],
-            More = more,
+            Story = [.. past.Lines.Select(p => story.Line(p, About.Saw))],
+            More = first && past.More,
         };
     }
 
