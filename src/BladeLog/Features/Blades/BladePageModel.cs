@@ -8,7 +8,7 @@ namespace BladeLog.Features.Blades;
 /// <summary>Puts the page of one blade together.</summary>
 internal static class BladePageModel
 {
-    public static BladeModel Of(BladeFile file, ShopAdvice advice, ShopUnits units, PastPage past, Story story)
+    public static BladeModel Of(BladeFile file, ShopAdvice advice, ShopUnits units, PastPage past, IReadOnlyList<Fact> cracks, Story story)
     {
         BladeAdvice blade = advice.Of(file);
         BladeParts parts = new(blade, advice, units);
@@ -27,7 +27,7 @@ internal static class BladePageModel
             Kerf = blade.Body.Kerf.Value * 1e3,
             Depth = blade.Body.Gullet.Value * 1e3,
             Tip = blade.Body.Tip,
-            Facts = [.. parts.Facts(), .. CrackFacts.Of(file, past, advice.Words)],
+            Facts = [.. parts.Facts(), .. CrackFacts.Of(file, cracks, advice.Words)],
             Life = parts.Life(),
             EdgeTitle = edgeTitle,
             EdgeWords = edgeWords,

@@ -19,6 +19,6 @@ internal static class BladePages
         }
 
         PastPage past = await Past.OfBlade(desk.Db, blade.Blade.Id, all is null ? Shown : int.MaxValue);
-        return await desk.Page<BladePage, BladeModel>(BladePageModel.Of(blade, await desk.Advice(), await desk.Units(), past, await Story.Of(desk)));
+        return await desk.Page<BladePage, BladeModel>(BladePageModel.Of(blade, await desk.Advice(), await desk.Units(), past, await CrackFacts.Read(desk.Db, blade.Blade.Id), await Story.Of(desk)));
     }
 }

@@ -38,7 +38,7 @@ internal sealed class Audit(AuditFacts facts, DateTime from, DateTime to, DateTi
             Trainings = [.. facts.Trainings.Where(In).Select(t => Row(t, About.Shop))],
             Gaps = gaps,
             AllGaps = _gaps.Sum(g => g.Gaps.Count(x => x.DueUtc < now)),
-            FirstRecord = facts.FirstUtc is { } first ? Printing.Day(first, units) : null,
+            FirstRecord = facts.FirstUtc is { } first ? Said.Day(first, units) : null,
             Whole = facts.FirstUtc is not { } begun || (from <= begun && to > now),
             When = Printing.When(now, units),
         };
