@@ -216,6 +216,17 @@ public sealed class WorkedOutTests(SampleApp sample) : IClassFixture<SampleApp>
         Assert.DoesNotContain("Q-14", page.Body.TextContent, StringComparison.Ordinal);
     }
 
+    [Theory]
+    [InlineData("/blades/Q-32/what-if?thickness=0.9+mm", "75 h")] // Demo story 10.
+    [InlineData("/blades/Q-32/what-if?hrc=50&weld=best", null)]
+    public async Task The_life_of_a_change_stands_on_its_working(string address, string? expected)
+    {
+        IDocument page = await sample.Page(address);
+        string then = Text(page.QuerySelectorAll(".table-facts tbody tr").First(r => Text(r.QuerySelector("th")) == "Half of such blades broken").Children[2]);
+        Assert.Equal(expected ?? then, then);
+        Assert.Equal(then, Line(await sample.Page(Link(page, "band-life")), "Median life"));
+    }
+
     [Fact]
     public async Task No_life_is_led_to_from_a_held_blade()
     {
