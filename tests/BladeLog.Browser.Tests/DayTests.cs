@@ -209,7 +209,11 @@ public sealed class DayTests(Workbench bench) : IClassFixture<Workbench>
         public async Task Hours()
         {
             await At(2, 15, 20);
-            await Within(1, "start", "/saws/S4/timer", () => tablet.Tap(tablet.Button("Start")));
+            await Within(1, "start", "/saws/S4/timer", async () =>
+            {
+                await tablet.Tap(tablet.Button("Start"));
+                await Expect(tablet.Button("Stop and record")).ToBeVisibleAsync();
+            });
             var running = tablet.Page.Url;
             await At(2, 15, 50);
             await tablet.Page.GotoAsync(running);
