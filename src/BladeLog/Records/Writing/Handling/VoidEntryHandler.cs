@@ -87,6 +87,7 @@ internal static class VoidEntryHandler
         nameof(Inspection) => VoidBladeWork.Plain<Inspection>(w, entry, c.Reason, f => f.BladeId),
         nameof(TensionReading) => VoidBladeWork.Plain<TensionReading>(w, entry, c.Reason, f => f.BladeId),
         nameof(Drift) => VoidBladeWork.Plain<Drift>(w, entry, c.Reason, f => f.BladeId),
+        nameof(KerfReading) => VoidBladeWork.Plain<KerfReading>(w, entry, c.Reason, f => f.BladeId),
         nameof(Trained) => TrainingHandler.Void(w, entry, c.Reason),
         nameof(HandOver) => HandOverHandler.Void(w, entry, c.Reason),
         nameof(StockMove) or nameof(Slack) or nameof(HandOverRead) or nameof(LabelPrinted) => VoidBladeWork.Free(w, entry, c.Reason),
