@@ -2,6 +2,7 @@ using BladeLog.Advice;
 using BladeLog.Handbook.Quantities;
 using BladeLog.Records;
 using BladeLog.Ui;
+using TensionMethod = BladeLog.Handbook.Band.TensionMethod;
 
 namespace BladeLog.Features;
 
@@ -34,7 +35,7 @@ internal static class Story
         Retag r => $"Tag {r.OldTag} put right to {r.NewTag}",
         BatchLine l => $"Sent to {l.Batch.Service}, batch {l.Batch.Number}",
         BatchReturn r => $"Back from {r.Line.Batch.Service}, batch {r.Line.Batch.Number}: {Outcome(r.Outcome)}{Width(r.WidthM, units)}",
-        TensionReading t => $"{Said.Capital(words.Tension)} measured: {units.Show(new Stress(t.TensionPa))} on the body{(saws.TryGetValue(t.SawId, out string? saw) ? ", on " + saw : "")}",
+        TensionReading t => $"{Said.Capital(words.Tension)} measured: {units.Show(new Stress(t.TensionPa))} on the body, give or take {Uncertain(t.How)} %{(saws.TryGetValue(t.SawId, out string? saw) ? ", on " + saw : "")}",
         Drift d => $"Leads {units.Show(new Angle(Math.Abs(d.AngleRad)))}{(d.AngleRad > 0 ? " left" : d.AngleRad < 0 ? " right" : "")}{(saws.TryGetValue(d.SawId, out string? on) ? " on " + on : "")}",
         KerfReading k => $"Measured: {(k.KerfM is null ? "" : "kerf ")}{Said.Kerf(k, units)}{(k.Note is { } note ? ", " + note.TrimEnd('.') : "")}",
         Hold h => $"Put on hold: {HoldWhat(h, words)}{(h.Note is { } note ? ", " + note.TrimEnd('.') : "")}",
@@ -49,6 +50,9 @@ internal static class Story
         CutDone c => $"Cut {c.SpeciesTyped} {words.Length(c.HeightM)}, {Said.Count(c.Pieces, "piece", "pieces")} of {words.Distance(c.LengthM)}{(c.Nail ? ", a nail was hit" : "")}",
         _ => fact.Entry.Kind,
     };
+
+    private static string Uncertain(string how) =>
+        Figures.Number(100 * BladeLog.Handbook.Band.Tension.Uncertainty(how == "pluck" ? TensionMethod.Pluck : TensionMethod.StrandForce));
 
     private static string Tension(double? pa, ShopUnits units) => pa is { } p ? $", {units.Show(new Stress(p))} on the body" : "";
 
