@@ -90,6 +90,8 @@ internal static class Said
         };
     }
 
+    public static string Day(DateTime utc, ShopUnits units) => Local(utc, units).ToString("d MMM yyyy", System.Globalization.CultureInfo.InvariantCulture);
+
     public static DateTime Local(DateTime utc, ShopUnits units)
     {
         ArgumentNullException.ThrowIfNull(units);

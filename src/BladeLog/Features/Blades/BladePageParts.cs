@@ -192,7 +192,7 @@ internal sealed class BladeParts(BladeAdvice blade, ShopAdvice advice, ShopUnits
 
     private static string Km(long mm) => mm == 0 ? "none" : Figures.With(Figures.Number(mm * 1e-6, mm < 9_950_000 ? 2 : 1), "km");
 
-    private static string Millions(double bends) => bends >= 1e6 ? Figures.With(Figures.Number(bends / 1e6, bends < 1e7 ? 2 : 1), "million") : Figures.Number(bends);
+    public static string Millions(double bends) => bends >= 1e6 ? Figures.With(Figures.Number(bends / 1e6, bends < 1e7 ? 2 : 1), "million") : Figures.Number(bends);
 
     private static string WoodWords(string woodClass) => woodClass switch
     {

@@ -1,4 +1,3 @@
-using BladeLog.Advice;
 using BladeLog.Handbook.Band;
 using BladeLog.Records;
 using BladeLog.Records.Writing;
