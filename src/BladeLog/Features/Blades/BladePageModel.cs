@@ -31,6 +31,7 @@ internal static class BladePageModel
             Life = parts.Life(),
             EdgeTitle = edgeTitle,
             EdgeWords = edgeWords,
+            KerfSays = KerfWords.Of(file, advice.Settings, advice.Words),
             Bite = parts.Bite(),
             GovernsTitle = governs,
             Limits = limits,
@@ -100,6 +101,8 @@ internal static class BladePageModel
             yield return new("It broke", At(blade, "break"), Alarm: true);
             yield return new("Welded", At(blade, "join"));
             yield return new("Leads", At(blade, "drift"));
+            yield return new("Kerf and set", At(blade, "kerf"));
+            yield return new(Said.Capital(advice.Words.Tension), At(blade, "tension"));
         }
 
         yield return new("What if", At(blade, "what-if"));
@@ -108,7 +111,13 @@ internal static class BladePageModel
             yield return new("Where it hangs", At(blade, "hang"));
         }
 
+        if (blade.State is not (BladeState.Broken or BladeState.Retired))
+        {
+            yield return new("Label", $"/labels?tags={Uri.EscapeDataString(tag)}");
+        }
+
         yield return new("Edit", At(blade, "edit"));
+        yield return new("Its kind", $"{SpecEdit.Of(file.Spec.Code)}?blade={Uri.EscapeDataString(tag)}");
     }
 
     private static IEnumerable<BladeCaution> Cautions(BladeAdvice blade)

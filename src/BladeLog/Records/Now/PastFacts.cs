@@ -26,6 +26,7 @@ internal static class PastFacts
         nameof(BatchReturn) => Of(db.BatchReturns.Include(f => f.Line.Batch), ids),
         nameof(TensionReading) => Of(db.TensionReadings, ids),
         nameof(Drift) => Of(db.Drifts, ids),
+        nameof(KerfReading) => Of(db.KerfReadings, ids),
         nameof(StockMove) => Of(db.StockMoves, ids),
         nameof(Hold) => Of(db.Holds, ids),
         nameof(HoldCleared) => Of(db.HoldsCleared.Include(f => f.Hold), ids),
