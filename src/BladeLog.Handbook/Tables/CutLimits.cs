@@ -2,19 +2,6 @@ using BladeLog.Handbook.Quantities;
 
 namespace BladeLog.Handbook.Tables;
 
-/// <summary>How smooth the sawn face must be.</summary>
-public enum Finish
-{
-    /// <summary>Bite up to 0.03 mm.</summary>
-    Fine,
-
-    /// <summary>Bite up to 0.10 mm.</summary>
-    Medium,
-
-    /// <summary>No limit on the bite.</summary>
-    Rough,
-}
-
 /// <summary>A limit and where it comes from.</summary>
 /// <param name="Value">The figure, in the unit its holder names.</param>
 /// <param name="Because">In words.</param>

@@ -59,7 +59,7 @@ internal static class HandOverPages
             [.. reads[n.EntryId].Select(r => r.Entry.Person?.Initials ?? "somebody")],
             who is null || (n.Entry.PersonId != who.Id && !reads[n.EntryId].Any(r => r.Entry.PersonId == who.Id))));
         var people = await db.People.AsNoTracking().Where(p => p.Active).OrderBy(p => p.Initials).Select(p => p.Initials).ToListAsync();
-        var draft = form.Text ?? string.Join('\n', Draft(await desk.Advice(), await OffAsDull(db)));
+        var draft = form.Text ?? string.Join('\n', Draft(await desk.Advice(), await DullBlades.OffAsDull(db)));
         return await desk.Page<HandOverPage, HandOverModel>(
             new(form with { Text = draft }, state, rows, people, who?.Initials), state.Status);
     }
@@ -110,11 +110,4 @@ internal static class HandOverPages
         Place.Bench => " on the bench",
         _ => file.Hook is { } hook ? $" on {hook}" : "",
     };
-
-    /// <summary>Came off as dull, and neither ground nor put on again since.</summary>
-    private static async Task<IReadOnlySet<int>> OffAsDull(ShopDb db) => (await db.Dismounts.AsNoTracking()
-        .Where(d => d.Reason == OffReason.Dull
-            && !db.Sharpenings.Any(s => s.BladeId == d.Mount.BladeId && s.Entry.AtUtc >= d.Entry.AtUtc)
-            && !db.Mounts.Any(m => m.BladeId == d.Mount.BladeId && m.Entry.AtUtc >= d.Entry.AtUtc))
-        .Select(d => d.Mount.BladeId).ToListAsync()).ToHashSet();
 }
