@@ -3,7 +3,7 @@ namespace BladeLog.Browser.Tests;
 /// <summary>The measure itself: it must see what it is there to see, and be content with a sound page.</summary>
 public sealed class LookTests(Workbench bench) : IClassFixture<Workbench>, IAsyncLifetime
 {
-    private const string Sheet = "*{margin:0;box-sizing:border-box}body{font:20px/1.4 sans-serif}a,button{font-size:20px;display:inline-block;width:120px;height:120px;margin:8px}";
+    private const string Sheet = "*{margin:0;box-sizing:border-box}body{font:20px/1.4 sans-serif}a,button{font-size:24px;display:inline-block;width:120px;height:120px;margin:8px}";
 
     private ServedShop? _shop;
 

@@ -35,9 +35,9 @@ public abstract class PagesTests(Workbench bench, Screen screen, int ofEach) : I
     }
 }
 
-public sealed class PagesOnALyingTabletTests(Workbench bench) : PagesTests(bench, Screen.Lying, 4);
+public sealed class PagesOnALyingTabletTests(Workbench bench) : PagesTests(bench, Screen.Lying, 3);
 
-public sealed class PagesOnAStandingTabletTests(Workbench bench) : PagesTests(bench, Screen.Standing, 4);
+public sealed class PagesOnAStandingTabletTests(Workbench bench) : PagesTests(bench, Screen.Standing, 3);
 
 public sealed class PagesOnAPhoneTests(Workbench bench) : PagesTests(bench, Screen.Phone, 2);
 

@@ -17,6 +17,9 @@ public sealed class ShopFile(string dir) : IDisposable
     public const int ApplicationId = 0x424C6F67;
 
     private readonly Pragmas _pragmas = new();
+    /// <summary>Copies of a kind that are kept.</summary>
+    private const int CopiesKept = 5;
+
     private FileStream? _lock;
     private bool _marked;
 
@@ -134,11 +137,30 @@ public sealed class ShopFile(string dir) : IDisposable
             return null;
         }
 
-        var copy = await CopyTo(System.IO.Path.Combine(CopiesDir, $"before-upgrade-{now.ToString("yyyyMMdd-HHmmss", CultureInfo.InvariantCulture)}.db"));
+        var copy = await CopyTo(Copy("upgrade", now));
         ClearStaleLock(db);
         await db.Database.MigrateAsync();
         await MarkSchema(db);
         return copy;
+    }
+
+    /// <summary>A copy beside the file before much is written at once; the newest few of a kind are kept.</summary>
+    public async Task<string> CopyBefore(string what, DateTime now)
+    {
+        Directory.CreateDirectory(CopiesDir);
+        var old = new DirectoryInfo(CopiesDir).GetFiles($"before-{what}-*.db").OrderByDescending(f => f.Name, StringComparer.Ordinal).Skip(CopiesKept - 1);
+        foreach (var file in old)
+        {
+            file.Delete();
+        }
+
+        var target = Copy(what, now);
+        for (var again = 2; File.Exists(target); again++)
+        {
+            target = Copy(what, now, $"-{again.ToString(CultureInfo.InvariantCulture)}");
+        }
+
+        return await CopyTo(target);
     }
 
     /// <summary>A compact copy in one file, taken while the shop works on.</summary>
@@ -252,4 +274,7 @@ public sealed class ShopFile(string dir) : IDisposable
         return Convert.ToInt64(command.ExecuteScalar(), CultureInfo.InvariantCulture);
     }
 #pragma warning restore CA2100
+
+    private string Copy(string what, DateTime now, string more = "") =>
+        System.IO.Path.Combine(CopiesDir, $"before-{what}-{now.ToString("yyyyMMdd-HHmmss", CultureInfo.InvariantCulture)}{more}.db");
 }

@@ -49,6 +49,7 @@ public sealed class ResentFormsTests
         Form("/saws/{code}/edit", "/saws/S3/edit", ("Motor", "2 kW"), ("Do", "change")),
         Form("/saws/new", "/saws/new", ("Code", "S9"), ("Name", "New saw"), ("Wheel1", "400"), ("Wheel2", "400"), ("Loop", "3400"), ("WidthLeast", "6"), ("WidthMost", "25"), ("Speed1", "15"), ("Board", "true"), ("CutHeight", "200"), ("Motor", "2 kW")),
         Form("/saws/{code}/clicking", "/saws/S2/clicking"),
+        Form("/blades/{tag}/two", "/blades/Q-13/two", ("OtherTag", "Q-13X"), ("From", "1 day ago")),
         Form("/blades/{tag}/break", "/blades/Q-11/break", ("Site", "Weld")),
         Form("/blades/{tag}/join", "/blades/Q-11/join", ("Loop", "5000"), ("Quality", "Good")),
         Form("/blades/{tag}/retire", "/blades/Q-11/retire", ("Reason", "TooManyJoints")),

@@ -17,6 +17,9 @@ public sealed record ComeBackLine
 
     public string? Price { get; init; }
 
+    /// <summary>Over the set or tips, where the service set them another way.</summary>
+    public string? Kerf { get; init; }
+
     public string? Retire { get; init; }
 }
 
@@ -68,6 +71,7 @@ internal static class ComeBack
             lines.Add(new BackLine(sent[i].Tag ?? "", outcome)
             {
                 WidthM = read.Length($"Lines[{i}].Width", sent[i].Width, Fields.BladeWidth),
+                KerfM = read.Length($"Lines[{i}].Kerf", sent[i].Kerf, Fields.Kerf),
                 PriceMinor = read.Money($"Lines[{i}].Price", sent[i].Price),
                 Kind = GrindKind.FullProfile,
                 Retire = sent[i].Retire is not null,

@@ -103,6 +103,11 @@ internal static class BladePageModel
         }
 
         yield return new("What if", At(blade, "what-if"));
+        if (blade.State != BladeState.Retired && file.Place is Place.Rack or Place.Bench)
+        {
+            yield return new("Where it hangs", At(blade, "hang"));
+        }
+
         yield return new("Edit", At(blade, "edit"));
     }
 

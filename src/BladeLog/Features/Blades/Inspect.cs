@@ -7,12 +7,15 @@ namespace BladeLog.Features.Blades;
 public sealed record InspectForm : CrackForm
 {
     public string? Found { get; init; }
+
+    /// <summary>Asked because a nail, a stone or grit was hit.</summary>
+    public string? Nail { get; init; }
 }
 
 /// <summary>A look at gullets, weld and back edge; a crack found is a hold.</summary>
 internal static class Inspect
 {
-    public static Task<IResult> Get(Desk desk, string tag) => Show(desk, tag, new InspectForm(), FormState.New);
+    public static Task<IResult> Get(Desk desk, string tag, string? nail) => Show(desk, tag, new InspectForm { Nail = nail }, FormState.New);
 
     public static async Task<IResult> Post([FromForm] InspectForm? form, Desk desk, string tag)
     {

@@ -56,16 +56,32 @@ public sealed record RackModel
         (BladeFile File, BladeAdvice Advice)[] shown = [.. all.Where(b => sought.Length > 0
             ? b.File.Blade.Tag.Contains(sought, StringComparison.OrdinalIgnoreCase)
             : chosen.Is(b.File, b.Advice))];
+        string[] words = query?.Split(' ', StringSplitOptions.RemoveEmptyEntries | StringSplitOptions.TrimEntries) ?? [];
+        bool bySight = shown.Length == 0 && words.Length > 1;
+        if (bySight)
+        {
+            // The label is off: what can be seen of the blade finds it.
+            shown = [.. all.Where(b => b.File.Place != Place.Gone && BySight(b.File, advice.Now, units) is var seen && words.All(w => seen.Contains(w, StringComparison.OrdinalIgnoreCase)))];
+            sought = query!.Trim();
+        }
+
         return new RackModel
         {
-            Title = sought.Length > 0 ? Found(shown.Length, sought) : free == 1 ? "1 blade is sharp and free" : $"{(free == 0 ? "No" : free)} blades are sharp and free",
+            Title = bySight ? $"{Said.Count(shown.Length, "blade", "blades")} like {sought}" : sought.Length > 0 ? Found(shown.Length, sought) : free == 1 ? "1 blade is sharp and free" : $"{(free == 0 ? "No" : free)} blades are sharp and free",
             Filters = [.. Kinds.Select(k => new RackFilter(k.Key, k.Name, all.Count(b => k.Is(b.File, b.Advice)))).Where(f => f.Count > 0 || f.Key == "all")],
             Show = sought.Length > 0 ? "" : chosen.Key,
             Query = sought.Length > 0 ? sought : null,
-            Nearest = sought.Length > 0 && shown.Length == 0 ? NearestTags.To(sought, advice.Now) : [],
+            Nearest = sought.Length > 0 && shown.Length == 0 && !bySight ? NearestTags.To(sought, advice.Now) : [],
             Groups = Grouped(shown, advice, units, folded: chosen.Key != "gone" && sought.Length == 0),
             NoBlades = all.Length == 0,
         };
+    }
+
+    /// <summary>Saw, width, thickness, teeth and hook: what is known without a label.</summary>
+    private static string BySight(BladeFile file, ShopNow shop, ShopUnits units)
+    {
+        var saw = shop.Saws.FirstOrDefault(s => s.Saw.Id == (file.SawId ?? file.LastSawId));
+        return $"{saw?.Saw.Code} {saw?.Saw.Name} {Said.Section(file, units)} {Said.Width(file.WidthM, units)} {Said.Teeth(file.Spec)} {file.Hook} {file.Spec.Code}".Replace(Figures.Glue, ' ');
     }
 
     private static string Found(int count, string sought) => count switch

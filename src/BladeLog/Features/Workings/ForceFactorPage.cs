@@ -25,7 +25,7 @@ internal static class ForceFactorPage
         double? reckoned = from.Choice?.Case is { } cut && feed is { } f
             ? form.Try(() => new Box(CuttingForce.CuttingPower(cut with { Model = settings.Force with { FitFactor = 1 } }, new Speed(f)).Watts))?.Watts
             : null;
-        double? model = form.Power("power", "Power at the band by the handbook alone", Given.Of(reckoned, "of the cut at that feed, force factor 1", 618));
+        double? model = form.Power("power", "Power at the band by the handbook alone", Given.Of(reckoned, "of the cut at that feed, force factor 1", 620));
         double? amps = form.Number("amps", "Ammeter, while it cuts", "a current", 0.1, 2000, "A", from.Any ? Given.None : Given.Example(2.2), optional: true);
         double? volts = form.Number("volts", "Voltage", "a voltage", 50, 1000, "V", Given.Example(400));
         Phases phases = form.Choose("phases", "Supply", Phases.Three, "example", (Phases.Three, "three", "three phases"), (Phases.One, "one", "one phase"));

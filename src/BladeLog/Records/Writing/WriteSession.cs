@@ -31,6 +31,9 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
 
     public string OneMoreTap { get; private set; } = "Record it";
 
+    /// <summary>Something was entered again for another blade.</summary>
+    public bool Moved { get; set; }
+
     public WriteResult.Clash? ClashWith { get; set; }
 
     public IReadOnlyList<Problem> Refusals => _refusals;

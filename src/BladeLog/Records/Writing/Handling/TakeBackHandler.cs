@@ -57,7 +57,7 @@ internal static class TakeBackHandler
 
         if (c.Outcome == ReturnOutcome.Sharpened && !c.Retire && !c.NarrowMeant && (c.LeastWidthM ?? blade.Spec.LeastWidthM) is { } least && c.WidthM < least)
         {
-            w.Ask($"{field}WidthM", $"{blade.Tag} came back {w.Say(c.WidthM.Value)} wide; its least width is {w.Say(least)}. Retire it with this, or record it as it is: it is not recommended any more.", "It is that narrow: record it");
+            w.Ask($"{field}WidthM", $"{blade.Tag} came back {w.Say(c.WidthM.Value)} wide; its least width is {w.Say(least)}. Retire it with this, or record it as it is: it may use up this edge and is ground no more.", "It is that narrow: record it");
         }
 
         w.Add(new BatchReturn { LineId = line.EntryId, Outcome = c.Outcome, WidthM = c.WidthM }, at);
