@@ -14,6 +14,9 @@ public sealed record LifePart(string Title, string? Under, IReadOnlyList<string>
     public (double Low, double High, double OneInTen)? Range { get; init; }
 }
 
+/// <summary>How a crack grew between two looks.</summary>
+public sealed record CrackPart(string Title, string Words);
+
 /// <summary>A limit of a blade and how much of it is used.</summary>
 public sealed record LimitPart(string Name, string Words, double Share);
 
@@ -57,6 +60,9 @@ public sealed record BladeModel
 
     /// <summary>Null: held, so no life is told at all.</summary>
     public LifePart? Life { get; init; }
+
+    /// <summary>A crack measured at two looks; null: there are not two.</summary>
+    public CrackPart? Crack { get; init; }
 
     public required string EdgeTitle { get; init; }
 

@@ -10,7 +10,7 @@ internal static class BladePageModel
 {
     private const int Shown = 8;
 
-    public static BladeModel Of(BladeFile file, ShopAdvice advice, ShopUnits units, IReadOnlyList<PastFact> past, bool all)
+    public static BladeModel Of(BladeFile file, ShopAdvice advice, ShopUnits units, IReadOnlyList<PastFact> past, bool all, CrackTwice? crack = null)
     {
         BladeAdvice blade = advice.Of(file);
         BladeParts parts = new(blade, advice, units);
@@ -33,6 +33,7 @@ internal static class BladePageModel
             Tip = blade.Body.Tip,
             Facts = parts.Facts(),
             Life = parts.Life(),
+            Crack = crack is null ? null : parts.Crack(crack),
             EdgeTitle = edgeTitle,
             EdgeWords = edgeWords,
             Bite = parts.Bite(),
@@ -109,6 +110,14 @@ internal static class BladePageModel
 
     private static IEnumerable<BladeCaution> Cautions(BladeAdvice blade)
     {
+        if (blade.State is not (BladeState.Broken or BladeState.Retired))
+        {
+            foreach (var means in MarkWords.Means(blade))
+            {
+                yield return new(means, "Seen at a look; it stands until another look there. Common practice.");
+            }
+        }
+
         if (blade.State == BladeState.Hold)
         {
             yield return new("On hold: do not run it. Any crack that can be seen means hold, on every saw here, whatever its length and whatever the hours say.", "The tenth of the width that US law allows is for wide band head saws only: 29 CFR 1910.265(e)(2)(i).", Stop: true);

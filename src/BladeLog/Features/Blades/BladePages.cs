@@ -17,6 +17,6 @@ internal static class BladePages
         }
 
         IReadOnlyList<PastFact> past = await Past.OfBlade(desk.Db, blade.Blade.Id);
-        return await desk.Page<BladePage, BladeModel>(BladePageModel.Of(blade, await desk.Advice(), await desk.Units(), past, all is not null));
+        return await desk.Page<BladePage, BladeModel>(BladePageModel.Of(blade, await desk.Advice(), await desk.Units(), past, all is not null, await CrackTwice.Read(desk.Db, blade.Blade.Id)));
     }
 }

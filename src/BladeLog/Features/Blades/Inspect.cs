@@ -9,6 +9,15 @@ public sealed record InspectForm : PostedForm
 {
     public string? Found { get; init; }
 
+    /// <summary>whole, or part with the ticks below.</summary>
+    public string? LookedAt { get; init; }
+
+    public string[]? Parts { get; init; }
+
+    public string[]? Marks { get; init; }
+
+    public string? TeethMissing { get; init; }
+
     public string? CrackLength { get; init; }
 
     public string? Place { get; init; }
@@ -33,8 +42,16 @@ internal static class Inspect
 
         var read = new FormReading(await desk.Units(), desk.Now);
         var found = read.Choice<Found>(nameof(form.Found), form.Found, "Say what was found.");
+        var parts = Flags<LookedAt>(form.Parts);
+        read.RefuseUnless(form.LookedAt is "whole" or "part", nameof(form.LookedAt), "Say whether the whole loop was looked at.");
+        read.RefuseUnless(form.LookedAt != "part" || parts != 0, nameof(form.LookedAt), "Tick what was looked at.");
+        var missing = read.Count(nameof(form.TeethMissing), form.TeethMissing, Fields.TeethMissing);
+        var marks = Flags<BladeMarks>(form.Marks) | (missing > 0 ? BladeMarks.TeethMissing : BladeMarks.None);
         var command = new RecordInspection(tag, found ?? default)
         {
+            LookedAt = form.LookedAt == "whole" ? Records.LookedAt.WholeLoop : parts,
+            Marks = marks,
+            TeethMissing = (int?)missing,
             CrackLengthM = read.Length(nameof(form.CrackLength), form.CrackLength, Fields.CrackLength),
             CrackTyped = form.CrackLength?.Trim(),
             Place = read.Choice<CrackPlace>(nameof(form.Place), form.Place, null),
@@ -45,6 +62,9 @@ internal static class Inspect
             ? await desk.Send(command, form, BladeForm.Of(tag), $"Look at {Tags.Read(tag)}", state => Show(desk, tag, form, state))
             : await Show(desk, tag, form, read.State);
     }
+
+    private static T Flags<T>(string[]? names)
+        where T : struct, Enum => Enum.TryParse<T>(string.Join(',', (names ?? []).Where(Enum.GetNames<T>().Contains)), out var flags) ? flags : default;
 
     private static Task<IResult> Show(Desk desk, string tag, InspectForm form, FormState state) =>
         BladeForm.Show<InspectPage, InspectForm>(desk, tag, form, state);

@@ -80,6 +80,8 @@ internal static class EntryWords
         await Each<Mount>(m => $"{tags[m.BladeId]} on {saws[m.SawId]}{(m.InsideOut ? ", inside out" : "")}{(m.Although is { } a ? $", although: {a}" : "")}");
         await Each<Dismount>(d => $"{(mounts.TryGetValue(d.EntryId, out var m) ? $"{tags[m.BladeId]} off {saws[m.SawId]}" : "A blade off")}: {Off(d.Reason)}");
         await Each<Slack>(s => $"{Said.Capital(units.PullName)} {(s.LetOff ? "off" : "on")} on {saws[s.SawId]}");
+        await Each<StartCheck>(c => $"{saws[c.SawId]} looked at before starting: {CheckWords.Says(c, units)}");
+        await Each<TimerStarted>(t => $"Timer of {saws[t.SawId]} started");
         await Each<MeterEpoch>(m => $"Meter of {saws[m.SawId]}: {m.Reason switch { EpochReason.First => "first reading", EpochReason.NewMeter => "a new one", EpochReason.RolledOver => "rolled over", _ => "turned back" }}");
         await Each<MeterReading>(m => $"Meter of {saws[m.SawId]} read: {H(m.ReadingMs)}");
         await Each<Run>(r => $"{saws[r.SawId]} ran {H(r.RunningMs)} (grade {r.Grade})");
@@ -98,7 +100,7 @@ internal static class EntryWords
         await Each<StockMove>(s => $"Stock {(s.Count > 0 ? "+" : "")}{s.Count.ToString(cultureless)}: {s.Reason}");
         await Each<Records.Hold>(h => $"{tags[h.BladeId]} on hold: {h.Kind.ToString().ToLowerInvariant()}{(h.Note is null ? "" : $", {h.Note}")}");
         await Each<HoldCleared>(h => $"A hold cleared: {h.How}");
-        await Each<Inspection>(i => $"{tags[i.BladeId]} looked at: {i.Found switch { Found.NothingSeen => "nothing seen", Found.Crack => "crack", Found.Worn => "worn", _ => "see the note" }}{(i.Note is null ? "" : $", {i.Note}")}");
+        await Each<Inspection>(i => $"{tags[i.BladeId]} looked at: {i.Found switch { Found.NothingSeen => "nothing seen", Found.Crack => "crack", Found.Worn => "worn", _ => "see the note" }}{InspectionWords.Beside(i)}{(i.Note is null ? "" : $", {i.Note}")}");
         await Each<Records.Break>(b => $"{tags[b.BladeId]} broke");
         await Each<Retirement>(r => $"{tags[r.BladeId]} retired{(r.CutUp ? ", cut up" : "")}");
         await Each<HandOver>(h => $"Hand-over note: {(h.Text.Length > 80 ? h.Text[..80] + "…" : h.Text)}");

@@ -27,7 +27,8 @@ internal static class SawPages
         bool more = all is null && past.Count > Shown;
         var cuts = await desk.Db.CutsDone.AsNoTracking().Where(c => c.SawId == saw.Saw.Id).Select(c => new { c.LengthM, c.Pieces, c.FeedMps }).ToListAsync();
         IdleShare idle = IdleShare.Of(saw.RunningMs, cuts.Select(c => (c.LengthM, c.Pieces, c.FeedMps)));
-        SawPageModel page = new(saw, await desk.Advice(), await desk.Units(), idle);
+        string? checker = saw.LastCheck?.Entry.PersonId is { } id ? await desk.Db.People.Where(p => p.Id == id).Select(p => p.Initials).FirstOrDefaultAsync() : null;
+        SawPageModel page = new(saw, await desk.Advice(), await desk.Units(), idle, checker);
         return await desk.Page<SawPage, SawModel>(page.Model(more ? [.. past.Take(Shown)] : past, more));
     }
 }

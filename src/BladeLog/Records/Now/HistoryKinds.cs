@@ -28,6 +28,8 @@ internal static class HistoryKinds
         .Concat(Ids(db.Mounts.Where(f => f.SawId == id)))
         .Concat(Ids(db.Dismounts.Where(f => f.Mount.SawId == id)))
         .Concat(Ids(db.Slacks.Where(f => f.SawId == id)))
+        .Concat(Ids(db.StartChecks.Where(f => f.SawId == id)))
+        .Concat(Ids(db.TimersStarted.Where(f => f.SawId == id)))
         .Concat(Ids(db.MeterEpochs.Where(f => f.SawId == id)))
         .Concat(Ids(db.MeterReadings.Where(f => f.SawId == id)))
         .Concat(Ids(db.Runs.Where(f => f.SawId == id)))
@@ -45,6 +47,9 @@ internal static class HistoryKinds
         nameof(Dismount) => Of(db.Dismounts.Include(f => f.Mount.Saw).Include(f => f.Mount.Blade), ids, f =>
             new(f.EntryId, f.Mount.Blade.Tag, f.Mount.Saw.Code, Word("reason", f.Reason.ToString()))),
         nameof(Slack) => Of(db.Slacks.Include(f => f.Saw), ids, f => new(f.EntryId, null, f.Saw.Code, Word("tension", f.LetOff ? "let off" : "put on"))),
+        nameof(StartCheck) => Of(db.StartChecks.Include(f => f.Saw), ids, f => new(
+            f.EntryId, null, f.Saw.Code, Right("guards", f.GuardsRight), Right("tension", f.TensionRight), Right("under the table", f.UnderTableRight), Right("quiet", f.QuietRight), Right("brake", f.BrakeRight), Word("note", f.Note))),
+        nameof(TimerStarted) => Of(db.TimersStarted.Include(f => f.Saw), ids, f => new(f.EntryId, null, f.Saw.Code, Number("speed", f.SpeedMps, "m/s"))),
         nameof(MeterEpoch) => OfSaw(db, db.MeterEpochs, ids, f => f.SawId, f => [Word("reason", f.Reason.ToString()), Number("started at", f.StartReadingMs, "ms")]),
         nameof(MeterReading) => OfSaw(db, db.MeterReadings, ids, f => f.SawId, f => [Number("reading", f.ReadingMs, "ms"), Word("typed", f.ReadingTyped)]),
         nameof(Run) => Of(db.Runs.Include(f => f.Saw), ids, f =>
@@ -84,6 +89,8 @@ internal static class HistoryKinds
     internal static HistoryPart Word(string word, string? text) => new(word, text);
 
     internal static HistoryPart Flag(string word, bool holds) => new(word, holds ? "yes" : null);
+
+    internal static HistoryPart Right(string word, bool? right) => new(word, right is { } is_ ? is_ ? "right" : "not right" : null);
 
     internal static HistoryPart Number(string word, double? value, string? unit) => new(word, null, value, unit);
 

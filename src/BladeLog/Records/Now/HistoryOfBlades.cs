@@ -27,7 +27,8 @@ internal static class HistoryOfBlades
             f.EntryId, f.Blade.Tag, null, Word("kind", f.Kind.ToString()), Length("crack", f.CrackLengthM), Word("place", f.Place?.ToString()), Word("note", f.Note))),
         nameof(HoldCleared) => Of(db.HoldsCleared.Include(f => f.Hold.Blade), ids, f => new(f.EntryId, f.Hold.Blade.Tag, null, Word("how", f.How))),
         nameof(Inspection) => Of(db.Inspections.Include(f => f.Blade), ids, f => new(
-            f.EntryId, f.Blade.Tag, null, Word("found", f.Found.ToString()), Length("crack", f.CrackLengthM), Word("place", f.Place?.ToString()), Word("note", f.Note))),
+            f.EntryId, f.Blade.Tag, null, Word("found", f.Found.ToString()), Word("looked at", f.LookedAt?.ToString()), Word("seen", f.Marks is null or BladeMarks.None ? null : f.Marks.ToString()),
+            Number("teeth missing", f.TeethMissing, null), Length("crack", f.CrackLengthM), Word("place", f.Place?.ToString()), Word("note", f.Note))),
         nameof(Retirement) => Of(db.Retirements.Include(f => f.Blade), ids, f => new(
             f.EntryId, f.Blade.Tag, null, Word("reason", f.Reason.ToString()), Flag("cut up", f.CutUp), Word("note", f.Note))),
         nameof(LabelPrinted) => Of(db.LabelsPrinted.Include(f => f.Blade), ids, f => new(f.EntryId, f.Blade.Tag, null, Word("label", f.Tag))),

@@ -53,6 +53,8 @@ public static class Past
             .. await Last(db.Mounts.Include(m => m.Blade).Where(f => f.SawId == sawId), most),
             .. await Last(db.Dismounts.Include(d => d.Mount.Blade).Where(f => f.Mount.SawId == sawId), most),
             .. await Last(db.Slacks.Where(f => f.SawId == sawId), most),
+            .. await Last(db.StartChecks.Where(f => f.SawId == sawId), most),
+            .. await Last(db.TimersStarted.Where(f => f.SawId == sawId && !db.Runs.Any(r => r.TimerId == f.EntryId)), most),
             .. await Last(db.MeterEpochs.Where(f => f.SawId == sawId), most),
             .. await Last(db.MeterReadings.Where(f => f.SawId == sawId), most),
             .. await Last(db.Runs.Where(f => f.SawId == sawId && f.ReadingId == null), most),

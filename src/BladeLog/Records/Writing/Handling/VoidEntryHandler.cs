@@ -47,7 +47,7 @@ internal static class VoidEntryHandler
             return;
         }
 
-        var order = plain.OrderBy(e => e.Kind is nameof(MeterReading) or nameof(Break) or nameof(BatchReturn) or nameof(Batch) or nameof(CutDone) or nameof(Split) ? 0 : 1);
+        var order = plain.OrderBy(e => e.Kind is nameof(MeterReading) or nameof(Break) or nameof(BatchReturn) or nameof(Batch) or nameof(CutDone) or nameof(Split) or nameof(StartCheck) ? 0 : 1);
         foreach (var one in order)
         {
             await w.Save();
@@ -87,6 +87,8 @@ internal static class VoidEntryHandler
         nameof(Inspection) => VoidBladeWork.Plain<Inspection>(w, entry, c.Reason, f => f.BladeId),
         nameof(TensionReading) => VoidBladeWork.Plain<TensionReading>(w, entry, c.Reason, f => f.BladeId),
         nameof(Drift) => VoidBladeWork.Plain<Drift>(w, entry, c.Reason, f => f.BladeId),
+        nameof(StartCheck) => CheckSawHandler.Void(w, entry, c.Reason),
+        nameof(TimerStarted) => TimerHandler.Void(w, entry, c.Reason),
         nameof(Trained) => TrainingHandler.Void(w, entry, c.Reason),
         nameof(HandOver) => HandOverHandler.Void(w, entry, c.Reason),
         nameof(StockMove) or nameof(Slack) or nameof(HandOverRead) or nameof(LabelPrinted) => VoidBladeWork.Free(w, entry, c.Reason),
