@@ -6,8 +6,24 @@ namespace BladeLog.Features;
 /// <summary>What a start-of-shift check found, in the words every page uses.</summary>
 internal static class CheckWords
 {
+    /// <summary>Letters that fit a tile beside "Not right".</summary>
+    private const int OneLine = 14;
+
     /// <summary>What stays to be put right on the saw until the next check; empty: nothing that was looked at.</summary>
     public static string ToPutRight(StartCheck? check) => check is null ? "" : string.Join(", ", OnTheSaw(check));
+
+    /// <summary>The same on a tile of the Floor, in one line; null: nothing that was looked at.</summary>
+    public static string? OnTile(StartCheck? check)
+    {
+        if (check?.SawNotRight != true)
+        {
+            return null;
+        }
+
+        string[] found = [.. new[] { check.GuardsRight ? null : "guards", check.UnderTableRight ? null : "under table", check.BrakeRight ? null : "brake" }.OfType<string>()];
+        string all = string.Join(", ", found);
+        return $"Not right: {(all.Length <= OneLine ? all : $"{found.Length} things")}";
+    }
 
     /// <summary>Everything found not right, tension and clicking too.</summary>
     public static IReadOnlyList<string> NotRight(StartCheck check, ShopUnits units)

@@ -112,7 +112,8 @@ internal static class BladePageModel
     {
         if (blade.State is not (BladeState.Broken or BladeState.Retired))
         {
-            foreach (var means in MarkWords.Means(blade))
+            string means = string.Join(" ", MarkWords.Means(blade));
+            if (means.Length > 0)
             {
                 yield return new(means, "Seen at a look; it stands until another look there. Common practice.");
             }

@@ -79,7 +79,7 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
             Under = Said.Wheels(saw.Setup, units),
             Shape = Drawn.Saw(saw.Setup),
             State = "empty",
-            NotRight = CheckWords.ToPutRight(saw.LastCheck) is { Length: > 0 } wrong ? $"Not right: {wrong}" : null,
+            NotRight = CheckWords.OnTile(saw.LastCheck),
             Timer = saw.Timer is { } timer ? new($"Stop {Said.Clock(advice.Now.AsOf - timer.Entry.AtUtc)}", timer.EntryId) : null,
             Next = next is null ? null : Next(next, saw.Slack, advice.Words),
         };

@@ -1,6 +1,7 @@
 using BladeLog.Records;
 using BladeLog.Records.Writing;
 using Microsoft.AspNetCore.Mvc;
+using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Features.Saws;
 
@@ -49,6 +50,7 @@ internal static class Check
         var under = Row(nameof(form.UnderTable), form.UnderTable, "Guard under the table and mouthpiece: right or not right?");
         var quiet = on ? Row(nameof(form.Quiet), form.Quiet, "Turn it by hand: does nothing click?") : null;
         var brake = Row(nameof(form.Brake), form.Brake, "Brake or run-down: right or not right?");
+        read.RefuseUnless(form.Who is { Length: > 0 } || await desk.Who() is not null || !await desk.Db.People.AnyAsync(p => p.Active), nameof(form.Who), "Say who looked: tap your initials.");
         var command = new CheckSaw(saw.Saw.Code, guards == true, tension, under == true, quiet, brake == true)
         {
             Note = string.IsNullOrWhiteSpace(form.Note) ? null : form.Note.Trim(),

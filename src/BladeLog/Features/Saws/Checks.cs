@@ -1,3 +1,4 @@
+using BladeLog.Records;
 using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Features.Saws;
@@ -23,13 +24,14 @@ internal static class Checks
         var ops = saws.Select(s => s.LastCheck?.Entry.Op).OfType<Guid>().ToList();
         var tensions = (await desk.Db.Slacks.AsNoTracking().Where(s => ops.Contains(s.Entry.Op)).Select(s => new { s.SawId, s.LetOff }).ToListAsync()).ToDictionary(s => s.SawId, s => s.LetOff);
         List<CheckRow> rows = [];
+        string Last(StartCheck? check) => check is null ? "Never looked at" : $"Last looked at {Said.When(check.Entry.AtUtc, desk.Now, units)}";
         foreach (var saw in saws)
         {
             var check = saw.LastCheck;
             var still = CheckWords.ToPutRight(check);
             if (check is null || Said.Local(check.Entry.AtUtc, units).Date != today)
             {
-                rows.Add(new CheckRow(saw.Saw.Code, saw.Saw.Name, null, still.Length > 0 ? $"Not checked today. Last time not right: {still}" : "Not checked today", still.Length > 0));
+                rows.Add(new CheckRow(saw.Saw.Code, saw.Saw.Name, null, Last(check) + (still.Length > 0 ? $", not right: {still}" : ""), still.Length > 0));
                 continue;
             }
 

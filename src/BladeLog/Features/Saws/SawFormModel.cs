@@ -1,5 +1,6 @@
 using BladeLog.Records;
 using BladeLog.Ui;
+using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Features.Saws;
 
@@ -15,6 +16,11 @@ public sealed record SawFormModel<TForm>(TForm Form, FormState State, SawNow Saw
 
     /// <summary>What this form says of how the saw stood before: the last reading, the last speed.</summary>
     public string? Hint { get; init; }
+
+    /// <summary>Who is at this tablet; null: nobody has said.</summary>
+    public string? Who { get; init; }
+
+    public IReadOnlyList<string> People { get; init; } = [];
 }
 
 internal static class SawForm
@@ -26,7 +32,12 @@ internal static class SawForm
         var shop = await desk.Shop();
         return shop.Saw(code) is { } saw
             ? await desk.Page<TView, SawFormModel<TForm>>(
-                new(form, state, saw, shop.Blades.FirstOrDefault(b => b.Blade.Id == saw.MountedBladeId), await desk.Units(), desk.Now) { Hint = hint },
+                new(form, state, saw, shop.Blades.FirstOrDefault(b => b.Blade.Id == saw.MountedBladeId), await desk.Units(), desk.Now) 
+                {
+                    Hint = hint,
+                    Who = (await desk.Who())?.Initials,
+                    People = await desk.Db.People.AsNoTracking().Where(p => p.Active).OrderBy(p => p.Initials).Select(p => p.Initials).ToListAsync(),
+                },
                 state.Status)
             : Results.NotFound();
     }
