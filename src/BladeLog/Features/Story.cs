@@ -38,6 +38,7 @@ internal static class Story
         BatchReturn r => $"Back from {r.Line.Batch.Service}, batch {r.Line.Batch.Number}: {Outcome(r.Outcome)}{Width(r.WidthM, units)}",
         TensionReading t => $"{Said.Capital(words.Tension)} measured: {units.Show(new Stress(t.TensionPa))} on the body{(saws.TryGetValue(t.SawId, out string? saw) ? ", on " + saw : "")}",
         Drift d => $"Leads {units.Show(new Angle(Math.Abs(d.AngleRad)))}{(d.AngleRad > 0 ? " left" : d.AngleRad < 0 ? " right" : "")}{(saws.TryGetValue(d.SawId, out string? on) ? " on " + on : "")}",
+        KerfReading k => $"Measured: {(k.KerfM is null ? "" : "kerf ")}{Said.Kerf(k, units)}{(k.Note is { } note ? ", " + note.TrimEnd('.') : "")}",
         Hold h => $"Put on hold: {HoldWhat(h, words)}{(h.Note is { } note ? ", " + note.TrimEnd('.') : "")}",
         HoldCleared c => $"Hold cleared: {c.How.TrimEnd('.')}",
         Inspection i => $"Inspected: {Finding(i, words)}{InspectionWords.Beside(i)}{(i.Note is { } note ? ", " + note.TrimEnd('.') : "")}",

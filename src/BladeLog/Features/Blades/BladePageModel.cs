@@ -36,6 +36,7 @@ internal static class BladePageModel
             Crack = crack is null ? null : parts.Crack(crack),
             EdgeTitle = edgeTitle,
             EdgeWords = edgeWords,
+            KerfSays = KerfWords.Of(file, advice.Settings, advice.Words),
             Bite = parts.Bite(),
             GovernsTitle = governs,
             Limits = limits,
@@ -97,12 +98,19 @@ internal static class BladePageModel
             yield return new("It broke", At(blade, "break"), Alarm: true);
             yield return new("Welded", At(blade, "join"));
             yield return new("Leads", At(blade, "drift"));
+            yield return new("Kerf and set", At(blade, "kerf"));
+            yield return new(Said.Capital(advice.Words.Tension), At(blade, "tension"));
         }
 
         yield return new("What if", At(blade, "what-if"));
         if (blade.State != BladeState.Hold)
         {
             yield return new("Workings", $"/workings/band-life?blade={tag}{(blade.Record.On is { } asked ? $"&saw={asked.Saw.Code}" : "")}");
+        }
+
+        if (blade.State is not (BladeState.Broken or BladeState.Retired))
+        {
+            yield return new("Label", $"/labels?tags={Uri.EscapeDataString(tag)}");
         }
 
         yield return new("Edit", At(blade, "edit"));

@@ -97,6 +97,7 @@ internal static class EntryWords
         await Each<BatchReturn>(r => $"A blade came back: {r.Outcome switch { ReturnOutcome.Sharpened => "sharpened", ReturnOutcome.Rejected => "rejected", ReturnOutcome.Lost => "lost", _ => "unsharpened" }}");
         await Each<TensionReading>(t => $"{Said.Capital(units.PullName)} of {tags[t.BladeId]} on {saws[t.SawId]}: {units.Show(new Stress(t.TensionPa))}, {t.How}");
         await Each<Drift>(d => $"Lead of {tags[d.BladeId]} on {saws[d.SawId]}: {units.Show(new Angle(d.AngleRad))}");
+        await Each<KerfReading>(k => $"{(k.KerfM is null ? "Teeth" : "Kerf")} of {tags[k.BladeId]}: {Said.Kerf(k, units)}{(k.Note is null ? "" : $", {k.Note}")}");
         await Each<StockMove>(s => $"Stock {(s.Count > 0 ? "+" : "")}{s.Count.ToString(cultureless)}: {s.Reason}");
         await Each<Records.Hold>(h => $"{tags[h.BladeId]} on hold: {h.Kind.ToString().ToLowerInvariant()}{(h.Note is null ? "" : $", {h.Note}")}");
         await Each<HoldCleared>(h => $"A hold cleared: {h.How}");

@@ -17,6 +17,7 @@ internal static class HistoryKinds
         .Concat(Ids(db.BatchReturns.Where(f => f.Line.BladeId == id)))
         .Concat(Ids(db.TensionReadings.Where(f => f.BladeId == id)))
         .Concat(Ids(db.Drifts.Where(f => f.BladeId == id)))
+        .Concat(Ids(db.KerfReadings.Where(f => f.BladeId == id)))
         .Concat(Ids(db.Holds.Where(f => f.BladeId == id)))
         .Concat(Ids(db.HoldsCleared.Where(f => f.Hold.BladeId == id)))
         .Concat(Ids(db.Inspections.Where(f => f.BladeId == id)))
@@ -36,6 +37,7 @@ internal static class HistoryKinds
         .Concat(Ids(db.CutsDone.Where(f => f.SawId == id)))
         .Concat(Ids(db.TensionReadings.Where(f => f.SawId == id)))
         .Concat(Ids(db.Drifts.Where(f => f.SawId == id)))
+        .Concat(Ids(db.KerfReadings.Where(f => f.SawId == id)))
         .Concat(Ids(db.Trainings.Where(f => f.SawId == id)))
         .Concat(Ids(db.Breaks.Where(f => f.SawId == id)));
 

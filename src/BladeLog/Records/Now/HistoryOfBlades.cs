@@ -22,6 +22,8 @@ internal static class HistoryOfBlades
             f.EntryId, f.Blade.Tag, null, Word("batch", f.Batch.Number), Word("service", f.Batch.Service))),
         nameof(BatchReturn) => Of(db.BatchReturns.Include(f => f.Line.Blade).Include(f => f.Line.Batch), ids, f => new(
             f.EntryId, f.Line.Blade.Tag, null, Word("batch", f.Line.Batch.Number), Word("outcome", f.Outcome.ToString()), Length("width", f.WidthM))),
+        nameof(KerfReading) => Of(db.KerfReadings.Include(f => f.Blade).Include(f => f.Saw), ids, f => new(
+            f.EntryId, f.Blade.Tag, f.Saw?.Code, Length("kerf", f.KerfM), Length("set left", f.SetLeftM), Length("set right", f.SetRightM), Length("set, both sides", f.SetBothM), Word("how", f.How.ToString()), Word("note", f.Note))),
         nameof(StockMove) => Stock(db, ids),
         nameof(Hold) => Of(db.Holds.Include(f => f.Blade), ids, f => new(
             f.EntryId, f.Blade.Tag, null, Word("kind", f.Kind.ToString()), Length("crack", f.CrackLengthM), Word("place", f.Place?.ToString()), Word("note", f.Note))),

@@ -35,6 +35,7 @@ public static class Past
             .. await Read(db.BatchReturns.Include(r => r.Line.Batch).Where(f => f.Line.BladeId == bladeId)),
             .. await Read(db.TensionReadings.Where(f => f.BladeId == bladeId)),
             .. await Read(db.Drifts.Where(f => f.BladeId == bladeId)),
+            .. await Read(db.KerfReadings.Where(f => f.BladeId == bladeId)),
             .. await Read(db.Holds.Where(f => f.BladeId == bladeId)),
             .. await Read(db.HoldsCleared.Where(f => f.Hold.BladeId == bladeId)),
             .. await Read(db.Inspections.Where(f => f.BladeId == bladeId)),

@@ -36,6 +36,8 @@ internal sealed class ShopRows
 
     public required ILookup<int, DriftRow> Drifts { get; init; }
 
+    public required ILookup<int, KerfReading> Kerfs { get; init; }
+
     public required IReadOnlyDictionary<int, Hold> Holds { get; init; }
 
     public required IReadOnlyDictionary<int, PriorUse> PriorUses { get; init; }
@@ -89,6 +91,8 @@ internal sealed class ShopRows
                 .OrderBy(t => t.At).ThenBy(t => t.Id).ToLookup(t => t.BladeId),
             Drifts = (await db.Drifts.AsNoTracking().Select(d => new DriftRow(d.BladeId, d.SawId, d.Entry.AtUtc, d.EntryId, d.AngleRad)).ToListAsync())
                 .OrderBy(d => d.At).ThenBy(d => d.Id).ToLookup(d => d.BladeId),
+            Kerfs = (await db.KerfReadings.AsNoTracking().Include(k => k.Entry).ToListAsync())
+                .OrderBy(k => k.Entry.AtUtc).ThenBy(k => k.EntryId).ToLookup(k => k.BladeId),
             Holds = await db.Holds.AsNoTracking().Include(h => h.Entry).Where(h => db.BladesNow.Any(b => b.HoldId == h.EntryId)).ToDictionaryAsync(h => h.BladeId),
             PriorUses = Last(await db.PriorUses.AsNoTracking().Include(p => p.Entry).ToListAsync(), p => p.BladeId),
             Away = await ReadAway(db),

@@ -89,6 +89,7 @@ internal static class VoidEntryHandler
         nameof(Drift) => VoidBladeWork.Plain<Drift>(w, entry, c.Reason, f => f.BladeId),
         nameof(StartCheck) => CheckSawHandler.Void(w, entry, c.Reason),
         nameof(TimerStarted) => TimerHandler.Void(w, entry, c.Reason),
+        nameof(KerfReading) => VoidBladeWork.Plain<KerfReading>(w, entry, c.Reason, f => f.BladeId),
         nameof(Trained) => TrainingHandler.Void(w, entry, c.Reason),
         nameof(HandOver) => HandOverHandler.Void(w, entry, c.Reason),
         nameof(StockMove) or nameof(Slack) or nameof(HandOverRead) or nameof(LabelPrinted) => VoidBladeWork.Free(w, entry, c.Reason),
