@@ -63,11 +63,14 @@ public static class BreakClusters
             double before = blade.File.Exposures.Where(e => e.OfAncestor).Sum(e => e.Hours);
             double wheel = own.Last(e => e.Setup.SawId == saw).Setup.Wheels.Min(w => w.DiameterM);
             watched.Add(new WatchedBlade(
-                blade.File.Blade.Tag, saw, blade.Body.Thickness.Value / wheel, before, before + own.Sum(e => e.Hours), blade.File.Break is not null));
+                blade.File.Blade.Tag, saw, blade.Body.Thickness.Value / wheel, before, before + own.Sum(e => e.Hours), Failed(blade.File)));
         }
 
         return watched;
     }
+
+    /// <summary>It broke, or a look found its crack first: both are failures. A blade scrapped for anything else only stopped being watched.</summary>
+    public static bool Failed(BladeFile file) => file.Break is not null || file.Retirement?.Reason is RetireReason.Crack or RetireReason.Broke;
 
     /// <summary>The clusters, the least likely by chance first.</summary>
     public static IReadOnlyList<BreakCluster> Find(IReadOnlyList<WatchedBlade> blades, int shuffles = Shuffles, int seed = 1)

@@ -1,4 +1,3 @@
-using BladeLog.Advice;
 using BladeLog.Records;
 using BladeLog.Records.Folding;
 using BladeLog.Records.Writing;
@@ -115,29 +114,6 @@ public class CheckAndTimerTests
         Assert.Equal(BladeMarks.None, await Marks(shop));
     }
 
-    /// <summary>By hand: two wheels, 20 m/s and a loop of 4 m are 36,000 bends an hour; half of the two hours lies after the first look.</summary>
-    [Fact]
-    public async Task A_crack_measured_twice_grew_over_the_bends_between_the_looks()
-    {
-        using var shop = await Mounted();
-        await shop.Do(new RecordInspection("Q-1", Found.Crack) { CrackLengthM = 0.0012, Place = CrackPlace.Gullet, At = Day.AddHours(2) });
-        await shop.Do(new RecordHours("S1", Day.AddHours(1), Day.AddHours(3), 2 * Hour, RunSource.Typed));
-        await shop.Do(new RecordInspection("Q-1", Found.Crack) { CrackLengthM = 0.0026, Place = CrackPlace.Gullet, At = Day.AddHours(4) });
-        var grown = CrackGrown.Of((await Twice(shop))!, 4);
-        Assert.Equal((0.0014, 1.0, 36_000.0), (Math.Round(grown.GrewM, 9), grown.Hours, grown.Bends));
-        Assert.Equal(0.0014 / 36_000, grown.PerBendM!.Value, 1e-12);
-    }
-
-    [Fact]
-    public async Task A_crack_ground_out_between_is_another_crack()
-    {
-        using var shop = await Mounted();
-        await shop.Do(new RecordInspection("Q-1", Found.Crack) { CrackLengthM = 0.0012, At = Day.AddHours(2) });
-        await shop.Do(new ClearHold("Q-1", "ground out", Day.AddHours(3)), await shop.Person("OT"));
-        await shop.Do(new RecordInspection("Q-1", Found.Crack) { CrackLengthM = 0.0026, At = Day.AddHours(4) });
-        Assert.Null(await Twice(shop));
-    }
-
     private static async Task<TempShop> Mounted()
     {
         var shop = await WithSaws();
@@ -156,7 +132,4 @@ public class CheckAndTimerTests
     private static Task<int?> Running(TempShop shop) => shop.Ask(async db => (await ShopNowReader.Read(db, shop.Now)).Saw("S2")!.Timer?.EntryId);
 
     private static Task<BladeMarks> Marks(TempShop shop) => shop.Ask(async db => (await ShopNowReader.Read(db, shop.Now)).Blade("Q-2")!.Marks);
-
-    private static Task<CrackTwice?> Twice(TempShop shop) => shop.Ask(async db =>
-        await CrackTwice.Read(db, await db.Blades.Where(b => b.Tag == "Q-1").Select(b => b.Id).SingleAsync()));
 }

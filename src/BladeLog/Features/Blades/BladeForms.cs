@@ -29,6 +29,8 @@ internal static class BladeForms
         app.MapPost("/blades/{tag}/drift", Lead.Post);
         app.MapGet("/blades/{tag}/kerf", Kerf.Get);
         app.MapPost("/blades/{tag}/kerf", Kerf.Post);
+        app.MapGet("/blades/{tag}/two", TwoBlades.Get);
+        app.MapPost("/blades/{tag}/two", TwoBlades.Post);
         app.MapGet("/blades/{tag}/hang", Hang.Get);
         app.MapPost("/blades/{tag}/hang", Hang.Post);
     }

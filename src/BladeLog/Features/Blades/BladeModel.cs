@@ -14,9 +14,6 @@ public sealed record LifePart(string Title, string? Under, IReadOnlyList<string>
     public (double Low, double High, double OneInTen)? Range { get; init; }
 }
 
-/// <summary>How a crack grew between two looks.</summary>
-public sealed record CrackPart(string Title, string Words);
-
 /// <summary>A limit of a blade and how much of it is used.</summary>
 public sealed record LimitPart(string Name, string Words, double Share);
 
@@ -61,8 +58,14 @@ public sealed record BladeModel
     /// <summary>Null: held, so no life is told at all.</summary>
     public LifePart? Life { get; init; }
 
-    /// <summary>A crack measured at two looks; null: there are not two.</summary>
-    public CrackPart? Crack { get; init; }
+    /// <summary>Where its life, its edge, its width and the rest are worked out.</summary>
+    public IReadOnlyList<Worked> WorkedLife { get; init; } = [];
+
+    public IReadOnlyList<Worked> WorkedEdge { get; init; } = [];
+
+    public IReadOnlyList<Worked> WorkedLimits { get; init; } = [];
+
+    public IReadOnlyList<Worked> Worked { get; init; } = [];
 
     public required string EdgeTitle { get; init; }
 
@@ -92,8 +95,8 @@ public sealed record BladeModel
 
     public IReadOnlyList<StoryLine> Story { get; init; } = [];
 
-    /// <summary>Entries not shown; 0: all are.</summary>
-    public int Older { get; init; }
+    /// <summary>There are entries not shown.</summary>
+    public bool More { get; init; }
 }
 
 /// <summary>No blade of this tag.</summary>

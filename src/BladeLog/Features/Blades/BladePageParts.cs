@@ -101,21 +101,6 @@ internal sealed class BladeParts(BladeAdvice blade, ShopAdvice advice, ShopUnits
         };
     }
 
-    public CrackPart Crack(CrackTwice twice)
-    {
-        CrackGrown grown = CrackGrown.Of(twice, file.LoopM);
-        string Look(CrackMeasured m) => $"{advice.Words.Length(m.LengthM)} at the look of {Said.When(m.AtUtc, advice.Now.AsOf, units)}";
-        string ran = grown.Bends > 0
-            ? $"{Millions(grown.Bends)} bends ({Figures.With(Figures.Number(grown.Hours, 1), "h")}) lie between"
-            : "no running is written between";
-        string words = grown.GrewM > 0
-            ? grown.PerBendM is { } each ? $" It grew {Wording.Number(each * 1e9, 0)}{Figures.Glue}µm for each 1,000 bends." : " How fast it grew cannot be told."
-            : " It did not measure longer: another crack, or measured otherwise. That is no proof that it stands still.";
-        return new CrackPart(
-            grown.GrewM > 0 ? $"The crack grew {advice.Words.Length(grown.GrewM)} between two looks" : "The crack was measured twice",
-            $"{Look(twice.Before)}, {Look(twice.After)}; {ran}.{words} No life is told for a cracked blade.");
-    }
-
     public (string Title, string Words) Edge()
     {
         Sharpness edge = blade.Edge;
@@ -207,7 +192,7 @@ internal sealed class BladeParts(BladeAdvice blade, ShopAdvice advice, ShopUnits
 
     private static string Km(long mm) => mm == 0 ? "none" : Figures.With(Figures.Number(mm * 1e-6, mm < 9_950_000 ? 2 : 1), "km");
 
-    private static string Millions(double bends) => bends >= 1e6 ? Figures.With(Figures.Number(bends / 1e6, bends < 1e7 ? 2 : 1), "million") : Figures.Number(bends);
+    public static string Millions(double bends) => bends >= 1e6 ? Figures.With(Figures.Number(bends / 1e6, bends < 1e7 ? 2 : 1), "million") : Figures.Number(bends);
 
     private static string WoodWords(string woodClass) => woodClass switch
     {

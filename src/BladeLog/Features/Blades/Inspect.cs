@@ -5,7 +5,7 @@ using Microsoft.AspNetCore.Mvc;
 
 namespace BladeLog.Features.Blades;
 
-public sealed record InspectForm : PostedForm
+public sealed record InspectForm : CrackForm
 {
     public string? Found { get; init; }
 
@@ -18,19 +18,14 @@ public sealed record InspectForm : PostedForm
 
     public string? TeethMissing { get; init; }
 
-    public string? CrackLength { get; init; }
-
-    public string? Place { get; init; }
-
-    public string? Note { get; init; }
-
-    public string? At { get; init; }
+    /// <summary>Asked because a nail, a stone or grit was hit.</summary>
+    public string? Nail { get; init; }
 }
 
 /// <summary>A look at gullets, weld and back edge; a crack found is a hold.</summary>
 internal static class Inspect
 {
-    public static Task<IResult> Get(Desk desk, string tag) => Show(desk, tag, new InspectForm(), FormState.New);
+    public static Task<IResult> Get(Desk desk, string tag, string? nail) => Show(desk, tag, new InspectForm { Nail = nail }, FormState.New);
 
     public static async Task<IResult> Post([FromForm] InspectForm? form, Desk desk, string tag)
     {
@@ -42,21 +37,21 @@ internal static class Inspect
 
         var read = new FormReading(await desk.Units(), desk.Now);
         var found = read.Choice<Found>(nameof(form.Found), form.Found, "Say what was found.");
+        var said = form.Read(read);
         var parts = Flags<LookedAt>(form.Parts);
         read.RefuseUnless(form.LookedAt is "whole" or "part", nameof(form.LookedAt), "Say whether the whole loop was looked at.");
         read.RefuseUnless(form.LookedAt != "part" || parts != 0, nameof(form.LookedAt), "Tick what was looked at.");
         var missing = read.Count(nameof(form.TeethMissing), form.TeethMissing, Fields.TeethMissing);
-        var marks = Flags<BladeMarks>(form.Marks) | (missing > 0 ? BladeMarks.TeethMissing : BladeMarks.None);
         var command = new RecordInspection(tag, found ?? default)
         {
             LookedAt = form.LookedAt == "whole" ? Records.LookedAt.WholeLoop : parts,
-            Marks = marks,
+            Marks = Flags<BladeMarks>(form.Marks) | (missing > 0 ? BladeMarks.TeethMissing : BladeMarks.None),
             TeethMissing = (int?)missing,
-            CrackLengthM = read.Length(nameof(form.CrackLength), form.CrackLength, Fields.CrackLength),
-            CrackTyped = form.CrackLength?.Trim(),
-            Place = read.Choice<CrackPlace>(nameof(form.Place), form.Place, null),
-            Note = string.IsNullOrWhiteSpace(form.Note) ? null : form.Note.Trim(),
-            At = read.Time(nameof(form.At), form.At),
+            CrackLengthM = said.LengthM,
+            CrackTyped = said.Typed,
+            Place = said.Place,
+            Note = said.Note,
+            At = said.At,
         };
         return read.IsGood
             ? await desk.Send(command, form, BladeForm.Of(tag), $"Look at {Tags.Read(tag)}", state => Show(desk, tag, form, state))

@@ -26,6 +26,9 @@ public sealed record NewBladeForm : SpecFields
 
     public string? InspectEachMount { get; init; }
 
+    /// <summary>Bought or found used, and nobody knows how much.</summary>
+    public string? Used { get; init; }
+
     /// <summary>Used before this record began, from and to.</summary>
     public string? UsedLow { get; init; }
 
@@ -34,11 +37,18 @@ public sealed record NewBladeForm : SpecFields
     public string? Source { get; init; }
 }
 
-public sealed record NewBladeModel(NewBladeForm Form, FormState State, IReadOnlyList<Spec> Specs, ShopUnits Units);
+public sealed record NewBladeModel(NewBladeForm Form, FormState State, IReadOnlyList<Spec> Specs, ShopUnits Units)
+{
+    /// <summary>The loops the saws here take, so that none is measured at a blade that was never right.</summary>
+    public IReadOnlyList<(string Loop, string Saws)> Loops { get; init; } = [];
+}
 
 /// <summary>Blades new to the record: by the line printed on them, or by a specification the shop has.</summary>
 internal static class NewBlade
 {
+    /// <summary>Life used of a blade of which nobody knows anything: engineering defaults.</summary>
+    public const double UnknownLow = 0.2, UnknownHigh = 0.6;
+
     public static Task<IResult> Get(Desk desk, string? spec) => Show(desk, new NewBladeForm { Spec = spec }, FormState.New);
 
     public static async Task<IResult> Post([FromForm] NewBladeForm? form, Desk desk)
@@ -54,6 +64,12 @@ internal static class NewBlade
         await CheckTags(desk, form, read, tags);
         var every = read.Duration(nameof(form.InspectEvery), form.InspectEvery, Fields.RunHours);
         var (low, high) = (read.Number(nameof(form.UsedLow), form.UsedLow, "a part such as 0.2"), read.Number(nameof(form.UsedHigh), form.UsedHigh, "a part such as 0.6"));
+        if (form.Used is not null && string.IsNullOrWhiteSpace(form.UsedLow) && string.IsNullOrWhiteSpace(form.UsedHigh))
+        {
+            (low, high) = (UnknownLow, UnknownHigh);
+        }
+
+        read.RefuseUnless(high is not 0, nameof(form.UsedHigh), "A used blade has used something of its life: write more than 0.");
         read.RefuseUnless(low is null == high is null, nameof(form.UsedHigh), "Write both: used at least, and at most.");
         read.RefuseUnless(low is null || (low >= 0 && low <= high && high <= 2), nameof(form.UsedHigh), "From 0 to 2, the lower one first; 1 is where half of such blades have broken.");
         if (!read.IsGood)
@@ -160,6 +176,12 @@ internal static class NewBlade
     private static string Derived(string op, string part) =>
         new Guid(SHA256.HashData(Encoding.UTF8.GetBytes($"{op}/{part}")).AsSpan(0, 16)).ToString();
 
-    private static async Task<IResult> Show(Desk desk, NewBladeForm form, FormState state) => await desk.Page<NewBladePage, NewBladeModel>(
-        new(form, state, await desk.Db.Specs.AsNoTracking().OrderBy(s => s.Code).ToListAsync(), await desk.Units()), state.Status);
+    private static async Task<IResult> Show(Desk desk, NewBladeForm form, FormState state)
+    {
+        var units = await desk.Units();
+        var loops = (await desk.Shop()).Saws.Where(s => s.Saw.Active).GroupBy(s => s.Setup.LoopM).OrderBy(g => g.Key)
+            .Select(g => (units.Show(new Handbook.Quantities.Length(g.Key), Fields.Loop), string.Join(", ", g.Select(s => s.Saw.Name))));
+        return await desk.Page<NewBladePage, NewBladeModel>(
+            new(form, state, await desk.Db.Specs.AsNoTracking().OrderBy(s => s.Code).ToListAsync(), units) { Loops = [.. loops] }, state.Status);
+    }
 }

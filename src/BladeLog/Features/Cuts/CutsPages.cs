@@ -2,6 +2,7 @@ using BladeLog.Advice;
 using BladeLog.Records;
 using BladeLog.Records.Writing;
 using Microsoft.AspNetCore.Mvc;
+using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Features.Cuts;
 
@@ -56,6 +57,13 @@ internal static class CutsPages
     private static async Task<IResult> Move(int number, [FromForm] MoveForm? form, Desk desk)
     {
         form ??= new();
+
+        // A double tap: the list it would move in is another one by now.
+        if (Guid.TryParse(form.Op, out Guid op) && await desk.Db.Entries.AsNoTracking().FirstOrDefaultAsync(e => e.Op == op && e.Part == 0) is { AnswerPath: { } there })
+        {
+            return Results.Redirect(there);
+        }
+
         List<int> numbers = [.. QueueModel.Waiting(await desk.Shop()).Select(c => c.Number)];
         int at = numbers.IndexOf(number), to = form.To == "up" ? at - 1 : at + 1;
         if (at < 0 || form.To is not ("up" or "down" or "off") || (form.To != "off" && (to < 0 || to >= numbers.Count)))

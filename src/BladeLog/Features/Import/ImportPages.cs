@@ -79,7 +79,14 @@ internal static class ImportPages
         }
 
         IImportKind chosen = kinds.First(k => k.Key == reading.Kind);
+        string copy = await gate.File.CopyBefore("import", desk.Now);
         WriteResult result = await desk.Write(new ImportRows(chosen.Key, reading.Sha256) { Rows = reading.Commands }, op, chosen.Onwards);
+        if (result is not WriteResult.Done)
+        {
+            // Nothing was kept, so the copy holds nothing the shop has not.
+            File.Delete(copy);
+        }
+
         switch (result)
         {
             case WriteResult.Done done:

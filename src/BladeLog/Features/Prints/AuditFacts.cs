@@ -34,6 +34,15 @@ internal sealed record AuditFacts
 
     public required IReadOnlyList<(int SawId, DateTime UntilUtc, long Ms)> SawRuns { get; init; }
 
+    /// <summary>When the record begins: the first mount, look, run or training told of.</summary>
+    public DateTime? FirstUtc => new[]
+    {
+        Mounts.Select(m => m.AtUtc).Append(DateTime.MaxValue).Min(),
+        Looks.Select(l => l.Entry.AtUtc).Append(DateTime.MaxValue).Min(),
+        SawRuns.Select(r => r.UntilUtc).Append(DateTime.MaxValue).Min(),
+        Trainings.Select(t => t.Entry.AtUtc).Append(DateTime.MaxValue).Min(),
+    }.Min() is var first && first < DateTime.MaxValue ? first : null;
+
     /// <summary>Of inspections, holds, their clearing, breaks, trainings and checks.</summary>
     public required IReadOnlyList<DateTime> StruckOut { get; init; }
 
@@ -48,14 +57,14 @@ internal sealed record AuditFacts
         {
             Blades = await db.Blades.AsNoTracking().Include(b => b.Spec).ToListAsync(),
             Saws = await db.Saws.AsNoTracking().OrderBy(s => s.Code).ToListAsync(),
-            Looks = await All(db.Inspections),
-            Holds = await All(db.Holds),
-            Cleared = await All(db.HoldsCleared.Include(c => c.Hold.Entry)),
-            Breaks = await All(db.Breaks),
-            Retirements = await All(db.Retirements),
-            Checks = await All(db.StartChecks),
+            Looks = await Past.Standing(db.Inspections).ToListAsync(),
+            Holds = await Past.Standing(db.Holds).ToListAsync(),
+            Cleared = await Past.Standing(db.HoldsCleared.Include(c => c.Hold.Entry)).ToListAsync(),
+            Breaks = await Past.Standing(db.Breaks).ToListAsync(),
+            Retirements = await Past.Standing(db.Retirements).ToListAsync(),
+            Checks = await Past.Standing(db.StartChecks).ToListAsync(),
             Cuts = [.. (await db.CutsDone.AsNoTracking().Select(c => new { c.SawId, c.Entry.AtUtc }).ToListAsync()).Select(c => (c.SawId, c.AtUtc))],
-            Trainings = await All(db.Trainings.Include(t => t.Person).Include(t => t.By)),
+            Trainings = await Past.Standing(db.Trainings.Include(t => t.Person).Include(t => t.By)).ToListAsync(),
             Mounts = [.. (await db.Mounts.AsNoTracking().Select(m => new { m.BladeId, m.Entry.AtUtc, m.SawId }).ToListAsync()).Select(m => (m.BladeId, m.AtUtc, m.SawId)).OrderBy(m => m.AtUtc)],
             Runs = shares.ToLookup(s => s.BladeId, s => new RunUpTo(s.UntilUtc, s.Ms, s.SawId)),
             SawRuns = [.. (await db.Runs.AsNoTracking().Select(r => new { r.SawId, r.UntilUtc, r.RunningMs }).ToListAsync()).Select(r => (r.SawId, r.UntilUtc, r.RunningMs))],
@@ -80,7 +89,4 @@ internal sealed record AuditFacts
         var before = Mounts.Where(m => m.BladeId == bladeId && m.AtUtc <= at).ToList();
         return before.Count > 0 ? before[^1].SawId : Mounts.Where(m => m.BladeId == bladeId).Select(m => (int?)m.SawId).FirstOrDefault();
     }
-
-    private static Task<List<T>> All<T>(IQueryable<T> facts)
-        where T : Fact => facts.AsNoTracking().Include(f => f.Entry.Person).OrderBy(f => f.Entry.AtUtc).ThenBy(f => f.EntryId).ToListAsync();
 }

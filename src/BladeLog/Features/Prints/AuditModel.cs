@@ -39,7 +39,17 @@ public sealed record AuditModel
 
     public required IReadOnlyList<AuditRow> Trainings { get; init; }
 
+    /// <summary>Late or missing looks that were open within the days printed.</summary>
     public required int Gaps { get; init; }
+
+    /// <summary>The same since the first record, whatever days are printed.</summary>
+    public required int AllGaps { get; init; }
+
+    /// <summary>The day of the first record; null: there is none yet.</summary>
+    public required string? FirstRecord { get; init; }
+
+    /// <summary>The days printed reach back to the first record.</summary>
+    public required bool Whole { get; init; }
 
     public required string When { get; init; }
 }

@@ -7,7 +7,7 @@ using BladeLog.Ui.Pictures.Geometry;
 namespace BladeLog.Features.Rack;
 
 /// <summary>One blade as a row of the rack.</summary>
-public sealed record RackRow(string Tag, string Section, ToothSpec Teeth, string State, string? Word, string Note, SmallBand Band);
+public sealed record RackRow(string Tag, string Section, ToothSpec Teeth, string State, string? Word, string Note, SmallBand Band, Worked? Worked);
 
 /// <summary>The blades of one place, in the order a person walks.</summary>
 public sealed record RackGroup(string Name, string Remark, IReadOnlyList<RackRow> Rows, bool Folded = false);
@@ -56,16 +56,32 @@ public sealed record RackModel
         (BladeFile File, BladeAdvice Advice)[] shown = [.. all.Where(b => sought.Length > 0
             ? b.File.Blade.Tag.Contains(sought, StringComparison.OrdinalIgnoreCase)
             : chosen.Is(b.File, b.Advice))];
+        string[] words = query?.Split(' ', StringSplitOptions.RemoveEmptyEntries | StringSplitOptions.TrimEntries) ?? [];
+        bool bySight = shown.Length == 0 && words.Length > 1;
+        if (bySight)
+        {
+            // The label is off: what can be seen of the blade finds it.
+            shown = [.. all.Where(b => b.File.Place != Place.Gone && BySight(b.File, advice.Now, units) is var seen && words.All(w => seen.Contains(w, StringComparison.OrdinalIgnoreCase)))];
+            sought = query!.Trim();
+        }
+
         return new RackModel
         {
-            Title = sought.Length > 0 ? Found(shown.Length, sought) : free == 1 ? "1 blade is sharp and free" : $"{(free == 0 ? "No" : free)} blades are sharp and free",
+            Title = bySight ? $"{Said.Count(shown.Length, "blade", "blades")} like {sought}" : sought.Length > 0 ? Found(shown.Length, sought) : free == 1 ? "1 blade is sharp and free" : $"{(free == 0 ? "No" : free)} blades are sharp and free",
             Filters = [.. Kinds.Select(k => new RackFilter(k.Key, k.Name, all.Count(b => k.Is(b.File, b.Advice)))).Where(f => f.Count > 0 || f.Key == "all")],
             Show = sought.Length > 0 ? "" : chosen.Key,
             Query = sought.Length > 0 ? sought : null,
-            Nearest = sought.Length > 0 && shown.Length == 0 ? NearestTags.To(sought, advice.Now) : [],
+            Nearest = sought.Length > 0 && shown.Length == 0 && !bySight ? NearestTags.To(sought, advice.Now) : [],
             Groups = Grouped(shown, advice, units, folded: chosen.Key != "gone" && sought.Length == 0),
             NoBlades = all.Length == 0,
         };
+    }
+
+    /// <summary>Saw, width, thickness, teeth and hook: what is known without a label.</summary>
+    private static string BySight(BladeFile file, ShopNow shop, ShopUnits units)
+    {
+        var saw = shop.Saws.FirstOrDefault(s => s.Saw.Id == (file.SawId ?? file.LastSawId));
+        return $"{saw?.Saw.Code} {saw?.Saw.Name} {Said.Section(file, units)} {Said.Width(file.WidthM, units)} {Said.Teeth(file.Spec)} {file.Hook} {file.Spec.Code}".Replace(Figures.Glue, ' ');
     }
 
     private static string Found(int count, string sought) => count switch
@@ -151,14 +167,15 @@ public sealed record RackModel
             _ => ("ready", null),
         };
         string teeth = Said.Teeth(file.Spec), first = on is not null ? on.Saw.Name + ", " : file.Place == Place.Rack && file.Hook is { } hook ? hook + ", " : "";
-        return new RackRow(file.Blade.Tag, Said.Section(file, units), Drawn.Teeth(blade.Body, file.Spec), state, word, $"{first}{teeth}, {Remark(file, blade, advice, units)}", SmallBand.Of(blade, advice.Settings));
+        SmallBand band = SmallBand.Of(blade, advice.Settings);
+        return new RackRow(file.Blade.Tag, Said.Section(file, units), Drawn.Teeth(blade.Body, file.Spec), state, word, $"{first}{teeth}, {Remark(file, blade, advice, units)}", band, WorkedOut.Band(blade, band));
     }
 
     private static string Remark(BladeFile file, BladeAdvice blade, ShopAdvice advice, ShopUnits units) => blade.State switch
     {
-        BladeState.Retired => RetiredBecause(file.Retirement!.Reason),
-        BladeState.Broken => BrokeAt(file.Break!.Site),
-        BladeState.Hold => LifeWords.Hold(file.Hold!, advice.Words) is var said && said.StartsWith("on hold: ", StringComparison.Ordinal) ? said["on hold: ".Length..] : said,
+        BladeState.Retired => StoryWords.Retired(file.Retirement!.Reason),
+        BladeState.Broken => StoryWords.Broke(file.Break!.Site),
+        BladeState.Hold => LifeWords.HoldReason(file.Hold!, advice.Words) ?? "on hold",
         _ when blade.Record.UnknownHistory => "history unknown: inspect",
         _ when file.Place == Place.AtSharpener && !blade.Grind.Pays => "no further grind",
         _ when file.Place == Place.AtSharpener => Run(file),
@@ -173,33 +190,4 @@ public sealed record RackModel
     };
 
     private static string Run(BladeFile file) => Figures.With(Figures.Hours(file.Hours), "h");
-
-    private static string BrokeAt(BreakSite site) => site switch
-    {
-        BreakSite.Gullet => "broke at a gullet",
-        BreakSite.GulletAngled => "broke from a gullet, at an angle",
-        BreakSite.Weld => "broke at its weld",
-        BreakSite.BackEdge => "broke from the back edge",
-        BreakSite.Body => "broke in the body",
-        BreakSite.TeethStripped => "teeth stripped",
-        _ => "broke, place unknown",
-    };
-
-    private static string RetiredBecause(RetireReason reason) => reason switch
-    {
-        RetireReason.FatigueMark => "past its retire mark",
-        RetireReason.Crack => "cracked",
-        RetireReason.Broke => "broke",
-        RetireReason.WidthLimit => "under its least width",
-        RetireReason.TooManyJoints => "too many welds",
-        RetireReason.TeethStripped => "teeth stripped",
-        RetireReason.BodyDamage => "body damaged",
-        RetireReason.UnknownHistory => "history unknown",
-        RetireReason.Uneconomic => "not worth its grind",
-        RetireReason.Lost => "lost",
-        RetireReason.Sold => "sold",
-        RetireReason.Rejected => "rejected",
-        RetireReason.CutDown => "cut down to a shorter loop",
-        _ => "another reason",
-    };
 }

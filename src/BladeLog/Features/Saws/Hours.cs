@@ -32,6 +32,9 @@ public sealed record HoursForm : PostedForm
     public string? Source { get; init; }
 
     public string? Speed { get; init; }
+
+    /// <summary>Of the hours since the last reading, so long at the other speed.</summary>
+    public string? OtherSpeed { get; init; }
 }
 
 /// <summary>Running hours: read off the meter, else typed. They feed the clock of flexing.</summary>
@@ -79,6 +82,8 @@ internal static class Hours
         var start = read.Duration(nameof(form.NewMeterStart), form.NewMeterStart, Fields.HourMeter);
         var put = read.Time(nameof(form.NewMeterAt), form.NewMeterAt);
         var top = read.Duration(nameof(form.RollsOverAt), form.RollsOverAt, Fields.HourMeter);
+        var other = saw.Setup.Speeds.FirstOrDefault(s => s.SpeedMps != speed);
+        var atOther = speed is null || saw.Setup.Speeds.Count != 2 ? null : read.Duration(nameof(form.OtherSpeed), form.OtherSpeed, Fields.RunHours);
         return new ReadMeter(saw.Saw.Code, Ms(reading) ?? 0, form.Reading?.Trim() ?? "")
         {
             At = read.Time(nameof(form.At), form.At),
@@ -87,6 +92,8 @@ internal static class Hours
             NewMeterAt = answer == MeterAnswer.NewMeter ? put : null,
             RollsOverAtMs = answer == MeterAnswer.RolledOver ? Ms(top) : null,
             SpeedMps = speed,
+            OtherSpeedMs = Ms(atOther) ?? 0,
+            OtherSpeedMps = atOther is null ? null : other?.SpeedMps,
         };
     }
 
@@ -129,16 +136,18 @@ internal static class Hours
             shown = form with { Speed = saw.Setup.Speeds.FirstOrDefault(s => s.SpeedMps == last)?.Position.ToString(System.Globalization.CultureInfo.InvariantCulture) };
         }
 
-        return await SawForm.Show<HoursPage, HoursForm>(desk, code, shown, state, form.Kind == "meter" ? await LastReading(desk, saw, units) : await LastRun(desk, saw, units));
+        var (hint, stood) = form.Kind == "meter" ? await LastReading(desk, saw, units) : (await LastRun(desk, saw, units), null);
+        return await SawForm.Show<HoursPage, HoursForm>(desk, code, shown, state, hint, stood);
     }
 
-    private static async Task<string> LastReading(Desk desk, SawNow saw, ShopUnits units)
+    private static async Task<(string Hint, string? Stood)> LastReading(Desk desk, SawNow saw, ShopUnits units)
     {
         var last = await desk.Db.MeterReadings.AsNoTracking().Where(r => r.SawId == saw.Saw.Id)
             .OrderByDescending(r => r.Entry.AtUtc).ThenByDescending(r => r.EntryId).Select(r => new { r.ReadingMs, r.Entry.AtUtc }).FirstOrDefaultAsync();
         return last is null
-            ? "Its first reading."
-            : $"It stood at {Figures.With(Figures.Number(last.ReadingMs / 3_600_000.0, 1), "h")} on {Said.When(last.AtUtc, desk.Now, units)}.";
+            ? ("Its first reading.", null)
+            : ($"It stood at {Figures.With(Figures.Number(last.ReadingMs / 3_600_000.0, 1), "h")} on {Said.When(last.AtUtc, desk.Now, units)}.",
+                (last.ReadingMs / 3_600_000.0).ToString("0.0", System.Globalization.CultureInfo.InvariantCulture));
     }
 
     private static async Task<string> LastRun(Desk desk, SawNow saw, ShopUnits units) => await LastUntil(desk, saw) is { } until

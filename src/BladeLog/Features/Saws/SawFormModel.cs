@@ -21,20 +21,24 @@ public sealed record SawFormModel<TForm>(TForm Form, FormState State, SawNow Saw
     public string? Who { get; init; }
 
     public IReadOnlyList<string> People { get; init; } = [];
+
+    /// <summary>The last reading as it is typed, to step up from.</summary>
+    public string? Last { get; init; }
 }
 
 internal static class SawForm
 {
-    public static async Task<IResult> Show<TView, TForm>(Desk desk, string code, TForm form, FormState state, string? hint = null)
+    public static async Task<IResult> Show<TView, TForm>(Desk desk, string code, TForm form, FormState state, string? hint = null, string? last = null)
         where TView : View<SawFormModel<TForm>>
         where TForm : PostedForm
     {
         var shop = await desk.Shop();
         return shop.Saw(code) is { } saw
             ? await desk.Page<TView, SawFormModel<TForm>>(
-                new(form, state, saw, shop.Blades.FirstOrDefault(b => b.Blade.Id == saw.MountedBladeId), await desk.Units(), desk.Now) 
+                new(form, state, saw, shop.Blades.FirstOrDefault(b => b.Blade.Id == saw.MountedBladeId), await desk.Units(), desk.Now)
                 {
                     Hint = hint,
+                    Last = last,
                     Who = (await desk.Who())?.Initials,
                     People = await desk.Db.People.AsNoTracking().Where(p => p.Active).OrderBy(p => p.Initials).Select(p => p.Initials).ToListAsync(),
                 },

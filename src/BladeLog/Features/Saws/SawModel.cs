@@ -20,7 +20,7 @@ public sealed record SpeedPart(string Speed, string BendsAnHour, bool Usual);
 public sealed record CutLine(int Number, string Wood, string Use);
 
 /// <summary>A blade that fits, and how long it lasts here.</summary>
-public sealed record FittingRow(string Tag, string Section, ToothSpec Teeth, string State, string Where, string Lasts, SmallBand Band);
+public sealed record FittingRow(string Tag, string Section, ToothSpec Teeth, string State, string Where, string Lasts, SmallBand Band, Worked? Worked);
 
 /// <param name="Words">On the button.</param>
 /// <param name="Href">Where it leads, or where its form is sent.</param>
@@ -75,6 +75,8 @@ public sealed record SawModel
     public required IReadOnlyList<FittingRow> Fitting { get; init; }
 
     public required IReadOnlyList<BecauseLine> Because { get; init; }
+
+    public required IReadOnlyList<Worked> Worked { get; init; }
 
     public required IReadOnlyList<SawAction> Actions { get; init; }
 

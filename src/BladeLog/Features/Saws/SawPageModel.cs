@@ -17,9 +17,8 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
     private readonly BladeAdvice? on = advice.Now.Blades.FirstOrDefault(b => b.Blade.Id == saw.MountedBladeId) is { } file ? advice.On(file, saw) : null;
     private readonly PlannedCut? next = advice.NextCut(saw);
 
-    public SawModel Model(IReadOnlyList<PastFact> past, bool more)
+    public SawModel Model(PastPage past, Story story, bool first)
     {
-        Dictionary<int, string> saws = advice.Now.Saws.ToDictionary(s => s.Saw.Id, s => s.Saw.Name);
         (string state, string title, string lede) = Answer();
         double? span = next is { Choice: { Tension: { } tension } c }
             ? advice.Beams.Band(c.Blade.Body, tension.Stress.Value, setup, c.SpeedMps, c.Work.HeightM).GuideSpan.Millimetres
@@ -47,9 +46,10 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
             Cuts = [.. advice.Plan().Saws.FirstOrDefault(p => p.Saw == saw)?.Cuts.Select(Cut) ?? []],
             Fitting = [.. Fitting()],
             Because = Reckoned.Lines(Because(span, thrust), units),
+            Worked = Worked(),
             Actions = [.. Actions()],
-            Story = [.. past.Select(p => Story.Line(p, advice.Now.AsOf, units, advice.Words, saws))],
-            More = more,
+            Story = [.. past.Lines.Select(p => story.Line(p, About.Saw))],
+            More = first && past.More,
         };
     }
 
@@ -168,7 +168,8 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
             },
             b.File.Place == Place.Rack && b.File.Hook is { } hook ? $"{hook}, " : "",
             Lasts(b.Blade),
-            SmallBand.Of(b.Blade, advice.Settings)));
+            SmallBand.Of(b.Blade, advice.Settings),
+            WorkedOut.Band(b.Blade, SmallBand.Of(b.Blade, advice.Settings), saw)));
 
     private static string Lasts(BladeAdvice blade) => blade switch
     {
@@ -203,6 +204,13 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
             yield return new("thrust of the next cut", t, "N", $"force of all teeth against the feed, {n.Choice.Tag} in cut {n.Cut.Number} at the feed advised", "engineering-default", Provenance.EngineeringDefault);
         }
     }
+
+    /// <summary>What is on it first, then the blade of its next cut.</summary>
+    private IReadOnlyList<Worked> Worked() => WorkedOut.Rows(
+        on is null ? WorkedOut.Bends(saw) : WorkedOut.Life(on, saw) ?? WorkedOut.Bends(saw),
+        on is null ? null : WorkedOut.Tension(on, saw, advice.Words),
+        next is { } span ? WorkedOut.Push(span.Choice.Blade, saw, span.Cut.Number) : null,
+        next is { } cut ? WorkedOut.Cut(cut.Choice) : null);
 
     private IEnumerable<SawAction> Actions()
     {

@@ -126,7 +126,7 @@ internal static class SetupReading
             TiltMostRad = read.Angle(nameof(f.Tilt), f.Tilt, Fields.Bevel) ?? 0,
             MeterFactor = read.Number(nameof(f.MeterFactor), f.MeterFactor, "a factor such as 1 or 0.8") ?? 1,
         };
-        read.RefuseUnless(setup.MeterFactor is > 0 and <= 2, nameof(f.MeterFactor), "Running hours for each metered hour: above 0, at most 2.");
+        read.RefuseUnless(setup.MeterFactor is > 0 and <= 1, nameof(f.MeterFactor), "Running hours for each metered hour: above 0, at most 1.");
         AddWheels(setup, f, read);
         AddSpeeds(setup, f, read);
         return setup;

@@ -57,7 +57,10 @@ internal sealed class BladeFiles
             WholeLife = Sum(line.SelectMany(a => SpellsOf(a)).SelectMany(s => _rows.Paths[s.MountId].Select(Line))),
             TensionThisSpellPa = open is { } o ? MeasuredIn(o) : null,
             LastTensionPa = LastTensions(blade, own),
-            LeadsRad = _rows.Drifts[blade.Id].Where(d => last is null || d.At > last.Entry.AtUtc).GroupBy(d => d.SawId).ToDictionary(g => g.Key, g => g.Last().AngleRad),
+            // A saw set up anew since then leads another way.
+            LeadsRad = _rows.Drifts[blade.Id]
+                .Where(d => (last is null || d.At > last.Entry.AtUtc) && !_rows.Setups.Values.Any(s => s.SawId == d.SawId && s.Entry.AtUtc > d.At))
+                .GroupBy(d => d.SawId).ToDictionary(g => g.Key, g => g.Last().AngleRad),
             Hold = _rows.Holds.GetValueOrDefault(blade.Id),
             PriorUse = line.Select(a => _rows.PriorUses.GetValueOrDefault(a.Blade.Id)).FirstOrDefault(p => p is not null),
             Away = _rows.Away.GetValueOrDefault(blade.Id),

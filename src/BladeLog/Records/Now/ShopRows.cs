@@ -73,7 +73,7 @@ internal sealed class ShopRows
         var setups = await db.SawSetups.AsNoTracking().Include(s => s.Entry).Include(s => s.Wheels.OrderBy(x => x.Position)).Include(s => s.Speeds.OrderBy(x => x.Position)).AsSplitQuery().ToListAsync();
         return new ShopRows
         {
-            Shop = await db.Shops.AsNoTracking().FirstAsync(),
+            Shop = await db.Shops.AsNoTracking().OrderBy(s => s.Id).FirstAsync(),
             Settings = await db.Settings.AsNoTracking().ToDictionaryAsync(s => s.Key),
             Saws = await db.Saws.AsNoTracking().OrderBy(s => s.Code).ToListAsync(),
             Setups = setups.ToDictionary(s => s.EntryId),

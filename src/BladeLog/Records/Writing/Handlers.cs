@@ -16,6 +16,7 @@ internal static class Handlers
         EditSpec c => SpecHandler.Handle(w, c),
         AddBlades c => BladeHandler.Handle(w, c),
         EditBlade c => BladeHandler.Handle(w, c),
+        SplitLabel c => SplitLabelHandler.Handle(w, c),
         RetagBlade c => RetagBladeHandler.Handle(w, c),
         Swap c => SwapHandler.Handle(w, c),
         MoveSpell c => MoveSpellHandler.Handle(w, c),

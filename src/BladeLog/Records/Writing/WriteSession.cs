@@ -12,6 +12,8 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
 
     private readonly List<Problem> _refusals = [];
     private readonly List<Problem> _asks = [];
+    private readonly List<Entry> _entries = [];
+    private readonly List<Fact> _facts = [];
     private Shop? _shop;
     private int _part;
     private int _before;
@@ -28,6 +30,9 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
     public string AnswerPath { get; set; } = "/";
 
     public string OneMoreTap { get; private set; } = "Record it";
+
+    /// <summary>Something was entered again for another blade.</summary>
+    public bool Moved { get; set; }
 
     public WriteResult.Clash? ClashWith { get; set; }
 
@@ -62,6 +67,18 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
             first.AnswerPath = Sent.AnswerPath ?? AnswerPath;
         }
 
+        await Db.SaveChangesAsync();
+    }
+
+    /// <summary>Chains what was saved to the line before it. A large file's first entries are no longer held by then.</summary>
+    public async Task Seal()
+    {
+        foreach (var entry in _entries.Where(e => Db.Entry(e).State == EntityState.Detached))
+        {
+            Db.Entry(entry).State = EntityState.Unchanged;
+        }
+
+        Chain.Seal(Db, _entries, _facts, await Chain.Before(Db, _entries.Min(e => e.Id)));
         await Db.SaveChangesAsync();
     }
 
@@ -109,6 +126,7 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
         }
 
         Db.Entries.Add(entry);
+        _entries.Add(entry);
         return entry;
     }
 
@@ -125,6 +143,7 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
 
         fact.Entry = entry;
         Db.Add(fact);
+        _facts.Add(fact);
         return fact;
     }
 
@@ -179,7 +198,7 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
         ? string.Create(CultureInfo.InvariantCulture, $"{metres / Exact.Inch:#,0.###} in")
         : string.Create(CultureInfo.InvariantCulture, $"{metres * 1000:#,0.##} mm");
 
-    private Shop? Shop => _shop ??= Db.Shops.AsNoTracking().FirstOrDefault();
+    private Shop? Shop => _shop ??= Db.Shops.AsNoTracking().OrderBy(s => s.Id).FirstOrDefault();
 
     public void RefuseUnlessIn(Role role)
     {

@@ -36,6 +36,7 @@ public static class Fields
     public static TypedField GulletRadius { get; } = new("a gullet radius", 0.05e-3, 0.1) { Thousandths = true };
     public static TypedField Kerf { get; } = new("a kerf", 0.1e-3, 20e-3) { Thousandths = true };
     public static TypedField Set { get; } = new("a set", 0, 5e-3) { Thousandths = true };
+    public static TypedField Bite { get; } = new("a bite", 1e-6, 10e-3) { Thousandths = true };
     public static TypedField EdgeRadius { get; } = new("an edge radius", 0.1e-6, 1e-3) { Bare = "um", Thousandths = true };
     public static TypedField CrackLength { get; } = new("a crack length", 0, 0.6) { Thousandths = true };
     public static TypedField Loop { get; } = new("a loop length", 0.3, 40) { Large = true };

@@ -66,18 +66,6 @@ public sealed class LookTests
     }
 
     [Fact]
-    public async Task A_crack_measured_twice_tells_how_much_it_grew()
-    {
-        await using var app = await ShopApp.Sample();
-        (await app.Fill("/blades/Q-11/inspect", ("Found", "Crack"), ("LookedAt", "whole"), ("Place", "Gullet"), ("CrackLength", "1.2"), ("At", "yesterday 7:00"))).LeadsTo("/blades/Q-11");
-        Assert.DoesNotContain("between two looks", SampleApp.Text((await app.GetPage("/blades/Q-11")).Body), StringComparison.Ordinal);
-        (await app.Fill("/blades/Q-11/inspect", ("Found", "Crack"), ("LookedAt", "whole"), ("Place", "Gullet"), ("CrackLength", "2.6"))).LeadsTo("/blades/Q-11");
-        var text = SampleApp.Text((await app.GetPage("/blades/Q-11")).Body);
-        Assert.Contains("The crack grew 1.4 mm between two looks", text, StringComparison.Ordinal);
-        Assert.Contains("no running is written between. How fast it grew cannot be told. No life is told for a cracked blade.", text, StringComparison.Ordinal);
-    }
-
-    [Fact]
     public async Task A_hold_is_cleared_by_a_choice_and_other_needs_a_note()
     {
         await using var app = await ShopApp.Sample();

@@ -102,6 +102,18 @@ public sealed class ImportTests
     }
 
     [Fact]
+    public async Task Before_an_import_a_copy_is_kept_that_knows_nothing_of_it()
+    {
+        using ShopApp app = await ShopApp.Sample();
+        (_, IDocument page) = await Look(app, Cuts);
+        using HttpResponseMessage first = await Keep(app, page);
+        Assert.Equal(HttpStatusCode.Redirect, first.StatusCode);
+        string copy = Assert.Single(Directory.GetFiles(Path.Combine(app.Dir, "copies"), "before-import-*.db"));
+        await using ShopDb before = new(new DbContextOptionsBuilder<ShopDb>().UseSqlite($"Data Source={copy};Mode=ReadOnly;Pooling=False").Options);
+        Assert.Equal(15, await before.QueuedCuts.CountAsync());
+    }
+
+    [Fact]
     public async Task The_same_file_a_second_time_says_when_it_was_imported()
     {
         using ShopApp app = await ShopApp.Sample();

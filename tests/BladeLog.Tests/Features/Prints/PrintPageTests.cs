@@ -106,14 +106,27 @@ public sealed class PrintPageTests(SampleApp sample) : IClassFixture<SampleApp>
     [Fact]
     public async Task The_audit_of_the_whole_history_lists_38_gaps_and_655_inspections()
     {
-        var from = ShopApp.Today.AddDays(-548).ToString("yyyy-MM-dd", CultureInfo.InvariantCulture);
-        var page = await sample.Page($"/audit?from={from}");
+        var first = await sample.Page("/audit");
+        var tap = Assert.Single(first.QuerySelectorAll("a.btn"), a => a.TextContent == "Since the first record");
+        var page = await sample.Page(tap.GetAttribute("href")!);
+        Assert.Contains("38 looks came late or not at all. All of them stand below as gaps.", SampleApp.Text(page.QuerySelector(".audit")!), StringComparison.Ordinal);
         string Sum(string name) => SampleApp.Text(page.QuerySelectorAll(".tally tr").First(r => r.TextContent.StartsWith(name, StringComparison.Ordinal)).QuerySelector(".n"));
         Assert.Equal("655", Sum("Inspections"));
         Assert.Equal("38", Sum("Looks that came late"));
         Assert.Equal(("2", "1", "9"), (Sum("Holds"), Sum("Holds cleared"), Sum("Breaks")));
         var blades = page.QuerySelectorAll(".audit h2").First(h => h.TextContent == "By blade");
         Assert.Equal(38, page.QuerySelectorAll("tr.late").Count(r => r.CompareDocumentPosition(blades).HasFlag(DocumentPositions.Preceding)));
+    }
+
+    /// <summary>26 of the 38 were due, or still not looked at, in the last 365 days: counted again from the sample files by a script of its own.</summary>
+    [Fact]
+    public async Task The_audit_of_a_year_lists_its_26_gaps_and_says_that_there_were_38_since_the_first_record()
+    {
+        var page = await sample.Page("/audit");
+        Assert.Equal("26", SampleApp.Text(page.QuerySelectorAll(".tally tr").First(r => r.TextContent.StartsWith("Looks that came late", StringComparison.Ordinal)).QuerySelector(".n")));
+        Assert.Matches(@"In these days 26 looks came late or not at all; since the first record, \d+ \w+ 2025, 38\.", SampleApp.Text(page.QuerySelector(".audit")!));
+        var blades = page.QuerySelectorAll(".audit h2").First(h => h.TextContent == "By blade");
+        Assert.Equal(26, page.QuerySelectorAll("tr.late").Count(r => r.CompareDocumentPosition(blades).HasFlag(DocumentPositions.Preceding)));
     }
 
     [Fact]

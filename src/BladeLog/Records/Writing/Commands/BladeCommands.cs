@@ -38,6 +38,15 @@ public sealed record EditBlade(string Tag, int Version, string Spec) : Command
 /// <summary>A new label on a blade. The old one is kept and never used again.</summary>
 public sealed record RetagBlade(string Tag, string NewTag, DateTime? At = null) : Command;
 
+/// <summary>
+/// Two blades wore one label: from a time on, what is written of it happened to the other. That one has its own label by
+/// now; where it is new to the record, of a specification.
+/// </summary>
+public sealed record SplitLabel(string Tag, string OtherTag, DateTime FromUtc, string Reason) : Command
+{
+    public string? Spec { get; init; }
+}
+
 /// <summary>Use before this record began, as a range of the life used, 0 to 1.</summary>
 public sealed record RecordPriorUse(
     string Tag, double UsedLow, double UsedHigh, double? WidthM = null, int? Sharpenings = null, string? Source = null, DateTime? At = null) : Command;

@@ -1,3 +1,5 @@
+using System.Text.Json.Serialization;
+
 namespace BladeLog.Records.Writing;
 
 public sealed record RecordSharpening(string Tag, GrindKind Kind) : Command
@@ -70,6 +72,14 @@ public sealed record BackLine(string Tag, ReturnOutcome Outcome)
     public long? PriceMinor { get; init; }
 
     public bool Retire { get; init; }
+
+    /// <summary>One more tap: narrower than its least width, and meant.</summary>
+    [JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingDefault)]
+    public bool NarrowMeant { get; init; }
+
+    /// <summary>What the advice takes as its least width. Not part of what is recorded.</summary>
+    [JsonIgnore]
+    public double? LeastWidthM { get; init; }
 }
 
 public sealed record RecordHold(string Tag, HoldKind Kind) : Command

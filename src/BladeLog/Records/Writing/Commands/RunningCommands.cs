@@ -1,4 +1,5 @@
 using System.Text.Json.Serialization;
+using BladeLog.Handbook.Quantities;
 
 namespace BladeLog.Records.Writing;
 
@@ -65,6 +66,13 @@ public sealed record ReadMeter(string Saw, long ReadingMs, string ReadingTyped) 
 
     /// <summary>Null: the saw's usual speed.</summary>
     public double? SpeedMps { get; init; }
+
+    /// <summary>Of the hours since the last reading, so many ran at the saw's other speed.</summary>
+    [JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingDefault)]
+    public long OtherSpeedMs { get; init; }
+
+    [JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingDefault)]
+    public double? OtherSpeedMps { get; init; }
 }
 
 /// <summary>Hours typed, timed or logged over a window.</summary>

@@ -23,12 +23,23 @@ internal static class MoveSpellHandler
             return;
         }
 
+        Move(w, mount, dismount, blade, c.Reason);
+        blade.Folded = false;
+        Edits.Bump(w, await w.Db.Saws.SingleAsync(s => s.Id == mount.SawId));
+        w.Touched.Spell(mount.SawId, mount.BladeId, mount.Entry.AtUtc, dismount?.Entry.AtUtc);
+        w.Touched.Spell(mount.SawId, blade.Id, mount.Entry.AtUtc, dismount?.Entry.AtUtc);
+        w.AnswerPath = $"/b/{blade.Tag}";
+    }
+
+    /// <summary>Strikes a spell out and enters it again for another blade, at the same times.</summary>
+    public static void Move(WriteSession w, Mount mount, Dismount? dismount, Blade blade, string reason)
+    {
         if (dismount is not null)
         {
-            w.Void(dismount.EntryId, c.Reason);
+            w.Void(dismount.EntryId, reason);
         }
 
-        w.Void(mount.EntryId, c.Reason);
+        w.Void(mount.EntryId, reason);
         var moved = w.Add(
             new Mount
             {
@@ -45,11 +56,5 @@ internal static class MoveSpellHandler
         {
             w.Add(new Dismount { Mount = moved, Reason = dismount.Reason }, dismount.Entry.AtUtc);
         }
-
-        blade.Folded = false;
-        Edits.Bump(w, await w.Db.Saws.SingleAsync(s => s.Id == mount.SawId));
-        w.Touched.Spell(mount.SawId, mount.BladeId, mount.Entry.AtUtc, dismount?.Entry.AtUtc);
-        w.Touched.Spell(mount.SawId, blade.Id, mount.Entry.AtUtc, dismount?.Entry.AtUtc);
-        w.AnswerPath = $"/b/{blade.Tag}";
     }
 }

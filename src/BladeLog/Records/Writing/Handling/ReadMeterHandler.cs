@@ -16,6 +16,7 @@ internal static class ReadMeterHandler
         var at = w.At(c.At);
         w.RefuseUnless(c.ReadingMs >= 0, nameof(c.ReadingMs), "The reading must not be below zero.");
         w.RefuseUnless(c.SpeedMps is null or > 0, nameof(c.SpeedMps), "The blade speed must be above zero.");
+        w.RefuseUnless(c.OtherSpeedMs >= 0, nameof(c.OtherSpeedMs), "The hours at the other speed must not be below zero.");
         if (saw is null || !w.Stands)
         {
             return;
@@ -74,15 +75,15 @@ internal static class ReadMeterHandler
         if (after is not null && sameEpoch)
         {
             // The run of the next reading began before this one: it is split here.
-            var next = await w.Db.Runs.AsNoTracking().SingleOrDefaultAsync(r => r.ReadingId == after.EntryId);
-            if (next is not null)
+            var next = await w.Db.Runs.AsNoTracking().Where(r => r.ReadingId == after.EntryId).ToListAsync();
+            foreach (var run in next)
             {
-                w.Void(next.EntryId, "A reading in between was entered.");
-                w.Touched.Window(saw.Id, next.FromUtc, next.UntilUtc);
-                gone.Add(next.EntryId);
+                w.Void(run.EntryId, "A reading in between was entered.");
+                w.Touched.Window(saw.Id, run.FromUtc, run.UntilUtc);
+                gone.Add(run.EntryId);
             }
 
-            await AddRun(w, c, saw, at, after.At, after.ReadingMs - c.ReadingMs, after.EntryId, gone);
+            await AddRun(w, c, saw, at, after.At, after.ReadingMs - c.ReadingMs, after.EntryId, gone, next);
         }
 
         if (before is not null)
@@ -124,7 +125,7 @@ internal static class ReadMeterHandler
     private static MeterReading Reading(WriteSession w, ReadMeter c, Saw saw, DateTime at, int epochId) =>
         w.Add(new MeterReading { SawId = saw.Id, EpochId = epochId, ReadingMs = c.ReadingMs, ReadingTyped = c.ReadingTyped }, at);
 
-    private static async Task AddRun(WriteSession w, ReadMeter c, Saw saw, DateTime from, DateTime until, long meteredMs, int readingId, List<int> gone)
+    private static async Task AddRun(WriteSession w, ReadMeter c, Saw saw, DateTime from, DateTime until, long meteredMs, int readingId, List<int> gone, List<Run>? before = null)
     {
         var setup = await w.SetupAt(saw.Id, until);
         var running = (long)Math.Round(meteredMs * setup.MeterFactor, MidpointRounding.AwayFromZero);
@@ -133,6 +134,10 @@ internal static class ReadMeterHandler
             return;
         }
 
+        w.RefuseUnless(
+            before is not null || c.OtherSpeedMs <= running,
+            nameof(c.OtherSpeedMs),
+            $"That is more than the {RunRules.Hours(running)} it ran in all.");
         var elapsed = RunRules.Milliseconds(from, until);
         if (running > elapsed * (1 + RunRules.MeterTolerance))
         {
@@ -140,23 +145,29 @@ internal static class ReadMeterHandler
             return;
         }
 
-        var run = new Run
-        {
-            SawId = saw.Id,
-            FromUtc = from,
-            UntilUtc = until,
-            RunningMs = running,
-            RunningTyped = c.ReadingTyped,
-            SpeedMps = c.SpeedMps ?? setup.UsualSpeedMps,
-            Grade = HoursGrade.A,
-            Source = RunSource.Meter,
-            ReadingId = readingId,
-        };
-        w.Add(run, until);
+        var speed = c.SpeedMps ?? setup.UsualSpeedMps;
         gone.AddRange(await RunRules.GiveWay(w, saw, from, until));
-        await RunRules.Check(w, nameof(c.ReadingMs), saw, run, [.. gone, run.EntryId]);
+        var shares = before is null ? SpeedShares.Of(speed, running, c.OtherSpeedMps, c.OtherSpeedMs) : SpeedShares.Of(before, running, speed);
+        foreach (var (at, ms) in shares)
+        {
+            var run = new Run
+            {
+                SawId = saw.Id,
+                FromUtc = from,
+                UntilUtc = until,
+                RunningMs = ms,
+                RunningTyped = c.ReadingTyped,
+                SpeedMps = at,
+                Grade = HoursGrade.A,
+                Source = RunSource.Meter,
+                ReadingId = readingId,
+            };
+            w.Add(run, until);
+            await RunRules.Check(w, nameof(c.ReadingMs), saw, run, [.. gone, run.EntryId]);
+            await w.Save();
+            gone.Add(run.EntryId);
+        }
+
         w.Touched.Window(saw.Id, from, until);
-        await w.Save();
-        gone.Add(run.EntryId);
     }
 }

@@ -18,7 +18,7 @@ internal static class TakeBackHandler
 
         w.RefuseUnless(at >= batch.Entry.AtUtc, nameof(c.At), $"Batch {number} was sent on {w.Say(batch.Entry.AtUtc)}, after this.");
         var lines = await w.Db.BatchLines.AsNoTracking().Where(l => l.BatchId == batch.EntryId).ToListAsync();
-        var back = await w.Db.BatchReturns.AsNoTracking().Where(r => r.Line.BatchId == batch.EntryId).Select(r => r.LineId).ToListAsync();
+        var back = await w.Db.BatchReturns.AsNoTracking().Where(r => r.Line.BatchId == batch.EntryId).ToListAsync();
         var seen = new HashSet<int>();
         for (var i = 0; i < c.Lines.Count; i++)
         {
@@ -32,7 +32,7 @@ internal static class TakeBackHandler
     }
 
     private static async Task One(
-        WriteSession w, BackLine c, Blade blade, BatchLine? line, List<int> back, Batch batch, DateTime at, string field, HashSet<int> seen)
+        WriteSession w, BackLine c, Blade blade, BatchLine? line, List<BatchReturn> back, Batch batch, DateTime at, string field, HashSet<int> seen)
     {
         if (line is null)
         {
@@ -40,17 +40,24 @@ internal static class TakeBackHandler
             return;
         }
 
-        if (back.Contains(line.EntryId) || !seen.Add(blade.Id))
+        var before = back.Find(r => r.LineId == line.EntryId);
+        if ((before is not null && (before.Outcome != ReturnOutcome.Lost || c.Outcome == ReturnOutcome.Lost)) || !seen.Add(blade.Id))
         {
             w.Refuse($"{field}Tag", $"{blade.Tag} is back from batch {batch.Number} already.");
             return;
         }
 
+        await HereAfterAll(w, c, blade, before, batch);
         var now = await w.NowOf(blade);
         RecordSharpeningHandler.Check(w, blade, now, c.WidthM, c.GulletM, c.KerfM, field);
         if (!w.Stands)
         {
             return;
+        }
+
+        if (c.Outcome == ReturnOutcome.Sharpened && !c.Retire && !c.NarrowMeant && (c.LeastWidthM ?? blade.Spec.LeastWidthM) is { } least && c.WidthM < least)
+        {
+            w.Ask($"{field}WidthM", $"{blade.Tag} came back {w.Say(c.WidthM.Value)} wide; its least width is {w.Say(least)}. Retire it with this, or record it as it is: it may use up this edge and is ground no more.", "It is that narrow: record it");
         }
 
         w.Add(new BatchReturn { LineId = line.EntryId, Outcome = c.Outcome, WidthM = c.WidthM }, at);
@@ -78,5 +85,24 @@ internal static class TakeBackHandler
         }
 
         w.Touched.Blades.Add(blade.Id);
+    }
+
+    /// <summary>What was lost, or written off while it was away, is in somebody's hand: that it was gone is struck out in the same group.</summary>
+    private static async Task HereAfterAll(WriteSession w, BackLine c, Blade blade, BatchReturn? lost, Batch batch)
+    {
+        if (c.Outcome == ReturnOutcome.Lost)
+        {
+            return;
+        }
+
+        if (lost is not null)
+        {
+            w.Void(lost.EntryId, "It came back after all.");
+        }
+
+        foreach (var off in await w.Db.Retirements.AsNoTracking().Where(r => r.BladeId == blade.Id && r.Entry.AtUtc >= batch.Entry.AtUtc).ToListAsync())
+        {
+            w.Void(off.EntryId, "It came back after it was written off.");
+        }
     }
 }

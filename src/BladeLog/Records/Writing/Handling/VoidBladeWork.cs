@@ -53,6 +53,35 @@ internal static class VoidBladeWork
 
         w.Void(entry.Id, reason);
         w.Touched.Blades.Add(broke.BladeId);
+        if (w.Stands)
+        {
+            await TheDismountOf(w, broke, entry, reason);
+        }
+    }
+
+    /// <summary>
+    /// A break took the blade off its saw, in the form that told of it or in the one this completed: without the break it
+    /// is on the saw still. Once another blade has gone on there, or this one elsewhere, that it came off stays true.
+    /// </summary>
+    private static async Task TheDismountOf(WriteSession w, Break broke, Entry entry, string reason)
+    {
+        for (Guid? op = entry.Op; op is { } at;)
+        {
+            var off = await w.Db.Dismounts.AsNoTracking().Include(d => d.Entry).Include(d => d.Mount)
+                .FirstOrDefaultAsync(d => d.Entry.Op == at && d.Mount.BladeId == broke.BladeId && d.Reason == OffReason.Broke);
+            if (off is not null)
+            {
+                var since = (await FactReader.ReadSpells(w.Db, off.Mount.SawId, broke.BladeId, off.Entry.AtUtc)).Where(s => s.MountId != off.MountId && s.End > off.Entry.AtUtc);
+                if (!since.Any() && await OffTheSawAfter(w, broke.BladeId, off.Entry.AtUtc, broke.EntryId) is null)
+                {
+                    await VoidSpell.Dismount(w, off.Entry, reason, broke.EntryId);
+                }
+
+                return;
+            }
+
+            op = await w.Db.Voids.AsNoTracking().Where(v => v.Entry.Op == at && v.Voided.Kind == nameof(Break)).Select(v => (Guid?)v.Voided.Op).FirstOrDefaultAsync();
+        }
     }
 
     public static async Task Joint(WriteSession w, Entry entry, string reason)
@@ -123,7 +152,7 @@ internal static class VoidBladeWork
     }
 
     /// <summary>The first fact after a time that could only be while the blade was off the saw, named; null: none.</summary>
-    public static async Task<string?> OffTheSawAfter(WriteSession w, int bladeId, DateTime at)
+    public static async Task<string?> OffTheSawAfter(WriteSession w, int bladeId, DateTime at, int? butBreak = null)
     {
         var joint = await w.Db.Joints.AsNoTracking().Where(j => j.BladeId == bladeId && j.Entry.AtUtc >= at).OrderBy(j => j.EntryId).Select(j => (int?)j.EntryId).FirstOrDefaultAsync();
         if (joint is not null)
@@ -143,7 +172,7 @@ internal static class VoidBladeWork
             return $"entry {sent}, a batch it went away in";
         }
 
-        var broke = await w.Db.Breaks.AsNoTracking().Where(b => b.BladeId == bladeId && b.LatestUtc >= at && b.SawId != null).Select(b => (int?)b.EntryId).FirstOrDefaultAsync();
+        var broke = await w.Db.Breaks.AsNoTracking().Where(b => b.BladeId == bladeId && b.LatestUtc >= at && b.SawId != null && b.EntryId != butBreak).Select(b => (int?)b.EntryId).FirstOrDefaultAsync();
         return broke is null ? null : $"entry {broke}, its break";
     }
 }

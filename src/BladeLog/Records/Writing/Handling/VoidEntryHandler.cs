@@ -40,8 +40,9 @@ internal static class VoidEntryHandler
     {
         var group = await w.Db.Entries.AsNoTracking().Where(e => e.Op == entry.Op).OrderByDescending(e => e.Part).ToListAsync();
         var plain = group.Where(e => e.Kind is not (nameof(AddBlades) or nameof(CutDown) or "Void")).ToList();
-        var reading = plain.Exists(e => e.Kind == nameof(MeterReading));
-        if (!reading && group.Find(e => e.Kind == "Void") is not null)
+        // Hours that others gave way to bring those back by themselves.
+        var hours = plain.Exists(e => e.Kind is nameof(MeterReading)) || plain.TrueForAll(e => e.Kind == nameof(Run));
+        if (!hours && group.Find(e => e.Kind == "Void") is not null)
         {
             w.Refuse(nameof(c.EntryId), "This form also struck out what was there before: strike its lines out one by one.");
             return;

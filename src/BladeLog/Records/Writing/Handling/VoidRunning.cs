@@ -20,11 +20,8 @@ internal static class VoidRunning
         }
 
         w.Void(entry.Id, reason);
-        var own = await w.Db.Runs.AsNoTracking().SingleOrDefaultAsync(r => r.ReadingId == entry.Id);
-        if (own is not null)
-        {
-            Strike(w, own, reason);
-        }
+        var own = await w.Db.Runs.AsNoTracking().Where(r => r.ReadingId == entry.Id).ToListAsync();
+        own.ForEach(run => Strike(w, run, reason));
 
         if (line.TrueForAll(l => l.EntryId == entry.Id || l.EpochId != reading.EpochId))
         {
@@ -38,6 +35,11 @@ internal static class VoidRunning
         else if (after is not null)
         {
             w.Refuse("EntryId", $"Void first: entry {after.EntryId}, the reading of {w.Say(after.At)} that follows on from this one.");
+        }
+
+        if (w.Stands)
+        {
+            await HoursFromCuts.TakeTheirPlaceAgain(w, saw, entry.Op, reason);
         }
     }
 
@@ -53,6 +55,10 @@ internal static class VoidRunning
         var run = await w.Db.Runs.AsNoTracking().SingleAsync(r => r.EntryId == entry.Id);
         w.RefuseUnless(run.ReadingId is null, "EntryId", $"These hours come from the meter: void the reading, entry {run.ReadingId}.");
         Strike(w, run, reason);
+        if (run.Source != RunSource.FromCuts && w.Stands)
+        {
+            await HoursFromCuts.TakeTheirPlaceAgain(w, await w.Db.Saws.SingleAsync(s => s.Id == run.SawId), entry.Op, reason);
+        }
     }
 
     /// <summary>A cut goes with the hours that were taken from it, and is on the list again.</summary>
@@ -60,11 +66,7 @@ internal static class VoidRunning
     {
         var cut = await w.Db.CutsDone.AsNoTracking().SingleAsync(c => c.EntryId == entry.Id);
         w.Void(entry.Id, reason);
-        foreach (var run in await w.Db.Runs.AsNoTracking().Where(r => r.Entry.Op == entry.Op && r.Source == RunSource.FromCuts).ToListAsync())
-        {
-            Strike(w, run, reason);
-        }
-
+        await HoursFromCuts.GoWith(w, cut, entry, reason);
         var queued = await w.Db.QueuedCuts.SingleOrDefaultAsync(q => q.DoneEntryId == entry.Id);
         if (queued is not null)
         {
@@ -86,14 +88,11 @@ internal static class VoidRunning
         w.Touched.Window(setup.SawId, DateTime.MinValue, DateTime.MaxValue);
     }
 
-    private static async Task Bridge(WriteSession w, Saw saw, MeterLine before, MeterLine after, string reason, Run? own)
+    /// <summary>The reading after the gap counts from the one before it, at the speeds known of the two stretches.</summary>
+    private static async Task Bridge(WriteSession w, Saw saw, MeterLine before, MeterLine after, string reason, List<Run> own)
     {
-        var next = await w.Db.Runs.AsNoTracking().SingleOrDefaultAsync(r => r.ReadingId == after.EntryId);
-        if (next is not null)
-        {
-            Strike(w, next, reason);
-        }
-
+        var next = await w.Db.Runs.AsNoTracking().Where(r => r.ReadingId == after.EntryId).ToListAsync();
+        next.ForEach(run => Strike(w, run, reason));
         var setup = await w.SetupAt(saw.Id, after.At);
         var running = (long)Math.Round((after.ReadingMs - before.ReadingMs) * setup.MeterFactor, MidpointRounding.AwayFromZero);
         if (running == 0)
@@ -101,23 +100,28 @@ internal static class VoidRunning
             return;
         }
 
-        var run = new Run
+        var gone = own.Concat(next).Select(r => r.EntryId).ToList();
+        foreach (var (speed, ms) in SpeedShares.Of([.. next, .. own], running, setup.UsualSpeedMps))
         {
-            SawId = saw.Id,
-            FromUtc = before.At,
-            UntilUtc = after.At,
-            RunningMs = running,
-            SpeedMps = next?.SpeedMps ?? own?.SpeedMps ?? setup.UsualSpeedMps,
-            Grade = HoursGrade.A,
-            Source = RunSource.Meter,
-            ReadingId = after.EntryId,
-        };
-        w.Add(run, after.At);
-        await RunRules.Check(w, "EntryId", saw, run, [next?.EntryId ?? 0, own?.EntryId ?? 0]);
+            var run = new Run
+            {
+                SawId = saw.Id,
+                FromUtc = before.At,
+                UntilUtc = after.At,
+                RunningMs = ms,
+                SpeedMps = speed,
+                Grade = HoursGrade.A,
+                Source = RunSource.Meter,
+                ReadingId = after.EntryId,
+            };
+            w.Add(run, after.At);
+            await RunRules.Check(w, "EntryId", saw, run, gone);
+        }
+
         w.Touched.Window(saw.Id, before.At, after.At);
     }
 
-    private static void Strike(WriteSession w, Run run, string reason)
+    public static void Strike(WriteSession w, Run run, string reason)
     {
         w.Void(run.EntryId, reason);
         w.Touched.Window(run.SawId, run.FromUtc, run.UntilUtc);

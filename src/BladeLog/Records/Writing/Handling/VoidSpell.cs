@@ -31,7 +31,7 @@ internal static class VoidSpell
     }
 
     /// <summary>Without its dismount the blade is on the saw still, which nothing after it may deny.</summary>
-    public static async Task Dismount(WriteSession w, Entry entry, string reason)
+    public static async Task Dismount(WriteSession w, Entry entry, string reason, int? withBreak = null)
     {
         var dismount = await w.Db.Dismounts.AsNoTracking().Include(d => d.Entry).SingleAsync(d => d.EntryId == entry.Id);
         var mount = await w.Db.Mounts.AsNoTracking().Include(m => m.Entry).SingleAsync(m => m.EntryId == dismount.MountId);
@@ -42,7 +42,7 @@ internal static class VoidSpell
             w.Refuse("EntryId", $"Void first: entry {spell.MountId}, {await SpellRules.Words(w, spell)}.");
         }
 
-        if (await VoidBladeWork.OffTheSawAfter(w, mount.BladeId, at) is { } rests)
+        if (await VoidBladeWork.OffTheSawAfter(w, mount.BladeId, at, withBreak) is { } rests)
         {
             w.Refuse("EntryId", $"Void first: {rests}, for which the blade had to be off the saw.");
         }
