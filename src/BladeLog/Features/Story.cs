@@ -62,7 +62,7 @@ internal sealed class Story(ShopNow shop, ShopUnits units, IReadOnlyDictionary<i
         Batch b => $"Batch {b.Number} to {b.Service}",
         BatchLine l => OfBlade(l.BladeId, about, $"sent to {l.Batch.Service}, batch {l.Batch.Number}"),
         BatchReturn r => OfBlade(r.Line.BladeId, about, $"back from {r.Line.Batch.Service}, batch {r.Line.Batch.Number}: {StoryWords.Outcome(r.Outcome)}{Width(r.WidthM)}"),
-        TensionReading t => OfBlade(t.BladeId, about, $"{words.Tension} measured: {units.Show(new Stress(t.TensionPa))} on the body, on {Saw(t.SawId)}, by {t.How}"),
+        TensionReading t => OfBlade(t.BladeId, about, $"{words.Tension} measured: {units.Show(new Stress(t.TensionPa))} on the body, give or take {Uncertain(t.How)} %, on {Saw(t.SawId)}, by {t.How}"),
         Drift d => OfBlade(d.BladeId, about, $"leads {units.Show(new Angle(Math.Abs(d.AngleRad)))}{(d.AngleRad > 0 ? " left" : d.AngleRad < 0 ? " right" : "")} on {Saw(d.SawId)}"),
         KerfReading k => OfBlade(k.BladeId, about, $"measured: {(k.KerfM is null ? "" : "kerf ")}{Said.Kerf(k, units)}{After(", ", k.Note)}"),
         StockMove s => $"Stock of {specs[s.SpecId]}: {(s.Count > 0 ? "+" : "")}{Figures.Number(s.Count)}, {s.Reason.TrimEnd('.')}",
@@ -105,6 +105,9 @@ internal sealed class Story(ShopNow shop, ShopUnits units, IReadOnlyDictionary<i
         Found.Worn => "worn",
         _ => "something else",
     };
+
+    private static string Uncertain(string how) =>
+        Figures.Number(100 * Handbook.Band.Tension.Uncertainty(how == "pluck" ? Handbook.Band.TensionMethod.Pluck : Handbook.Band.TensionMethod.StrandForce));
 
     private string Tension(double? pa) => pa is { } p ? $", {units.Show(new Stress(p))} on the body" : "";
 

@@ -2,6 +2,7 @@ using BladeLog.Advice;
 using BladeLog.Advice.Life;
 using BladeLog.Records;
 using BladeLog.Ui;
+using BladeLog.Ui.Forms;
 using BladeLog.Ui.Pictures.Geometry;
 using Microsoft.EntityFrameworkCore;
 
@@ -28,6 +29,9 @@ public sealed record BladeFormModel<TForm>(TForm Form, FormState State, BladeFil
 
     /// <summary>What its measured kerf and set tell.</summary>
     public IReadOnlyList<string> KerfSays { get; init; } = [];
+
+    /// <summary>What the form works out before it records; none while nothing is typed.</summary>
+    public IReadOnlyList<BecauseLine> Lines { get; init; } = [];
 
     /// <summary>Further words a page needs: names to call, codes to choose from.</summary>
     public IReadOnlyList<string> Names { get; init; } = [];

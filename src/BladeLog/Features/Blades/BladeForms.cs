@@ -7,6 +7,8 @@ internal static class BladeForms
     {
         app.MapGet("/blades/new", NewBlade.Get);
         app.MapPost("/blades/new", NewBlade.Post);
+        app.MapGet("/specs/{code}/edit", SpecEdit.Get);
+        app.MapPost("/specs/{code}/edit", SpecEdit.Post);
         app.MapGet("/blades/{tag}/edit", Change.Get);
         app.MapPost("/blades/{tag}/edit", Change.Post);
         app.MapGet("/blades/{tag}/sharpen", Sharpen.Get);

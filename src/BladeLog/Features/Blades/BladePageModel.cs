@@ -117,6 +117,7 @@ internal static class BladePageModel
         }
 
         yield return new("Edit", At(blade, "edit"));
+        yield return new("Its kind", $"{SpecEdit.Of(file.Spec.Code)}?blade={Uri.EscapeDataString(tag)}");
     }
 
     private static IEnumerable<BladeCaution> Cautions(BladeAdvice blade)

@@ -39,13 +39,16 @@ internal static class Inspect
         var found = read.Choice<Found>(nameof(form.Found), form.Found, "Say what was found.");
         var said = form.Read(read);
         var parts = Flags<LookedAt>(form.Parts);
-        read.RefuseUnless(form.LookedAt is "whole" or "part", nameof(form.LookedAt), "Say whether the whole loop was looked at.");
+        var marks = Flags<BladeMarks>(form.Marks);
+
+        // A crack is written at once: where it lies was looked at, the rest may stay unsaid.
+        read.RefuseUnless(found == Records.Found.Crack || form.LookedAt is "whole" or "part", nameof(form.LookedAt), "Say whether the whole loop was looked at.");
         read.RefuseUnless(form.LookedAt != "part" || parts != 0, nameof(form.LookedAt), "Tick what was looked at.");
         var missing = read.Count(nameof(form.TeethMissing), form.TeethMissing, Fields.TeethMissing);
         var command = new RecordInspection(tag, found ?? default)
         {
-            LookedAt = form.LookedAt == "whole" ? Records.LookedAt.WholeLoop : parts,
-            Marks = Flags<BladeMarks>(form.Marks) | (missing > 0 ? BladeMarks.TeethMissing : BladeMarks.None),
+            LookedAt = form.LookedAt switch { "whole" => Records.LookedAt.WholeLoop, "part" => parts, _ => null },
+            Marks = missing > 0 ? marks | BladeMarks.TeethMissing : form.LookedAt is null && marks == 0 ? null : marks,
             TeethMissing = (int?)missing,
             CrackLengthM = said.LengthM,
             CrackTyped = said.Typed,

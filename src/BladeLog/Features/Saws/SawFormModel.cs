@@ -14,6 +14,11 @@ public sealed record SawFormModel<TForm>(TForm Form, FormState State, SawNow Saw
 
     public string? Tag => On?.Blade.Tag;
 
+    /// <summary>Who is at this tablet; null: nobody has said.</summary>
+    public string? Who { get; init; }
+
+    public IReadOnlyList<string> People { get; init; } = [];
+
     /// <summary>What this form says of how the saw stood before: the last reading, the last speed.</summary>
     public string? Hint { get; init; }
 
@@ -40,7 +45,7 @@ internal static class SawForm
                     Hint = hint,
                     Last = last,
                     Who = (await desk.Who())?.Initials,
-                    People = await desk.Db.People.AsNoTracking().Where(p => p.Active).OrderBy(p => p.Initials).Select(p => p.Initials).ToListAsync(),
+                    People = await Swap.Initials(desk),
                 },
                 state.Status)
             : Results.NotFound();

@@ -66,6 +66,9 @@ public sealed record SawModel
     /// <summary>Hours run with no blade known, as a question; null: none.</summary>
     public string? Question { get; init; }
 
+    /// <summary>When a program last sent its running; null: none ever did.</summary>
+    public string? Heard { get; init; }
+
     public required IReadOnlyList<WheelPart> Wheels { get; init; }
 
     public required IReadOnlyList<SpeedPart> Speeds { get; init; }

@@ -11,7 +11,7 @@ using BladeLog.Ui.Pictures;
 namespace BladeLog.Features.Saws;
 
 /// <summary>Puts the page of one saw together.</summary>
-internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits units, IdleShare idle, string? checker = null)
+internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits units, IdleShare idle, DateTime? heard = null, string? checker = null)
 {
     private readonly SawSetup setup = saw.Setup;
     private readonly BladeAdvice? on = advice.Now.Blades.FirstOrDefault(b => b.Blade.Id == saw.MountedBladeId) is { } file ? advice.On(file, saw) : null;
@@ -40,7 +40,8 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
             Hours = $"{Hours(saw.RunningMs)} run since this record began.{(idle.Accounted is { } share ? $" The cuts logged account for {Wording.Number(share * 100, 0)} %." : "")}",
             Checked = saw.LastCheck is { } check ? $"Looked at {Said.When(check.Entry.AtUtc, advice.Now.AsOf, units)}{(checker is null ? "" : $" by {checker}")}: {CheckWords.Says(check, units)}." : null,
             ToPutRight = CheckWords.ToPutRight(saw.LastCheck) is { Length: > 0 } wrong ? $"Found not right, and to be put right: {wrong}. This stands until the next check finds it right." : null,
-            Question = saw.NoBladeKnownMs > 0 ? $"{Hours(saw.NoBladeKnownMs)} of them with no blade known. Which blade was on? Enter its swap at the time it happened, and the hours find it." : null,
+            Question = saw.NoBladeKnownMs > 0 ? $"{Hours(saw.NoBladeKnownMs)} of them with no blade known. Say which was on, and the hours go to it." : null,
+            Heard = heard is { } last ? $"Last heard from the logger: {Said.When(last, advice.Now.AsOf, units)}." : null,
             Wheels = [.. setup.Wheels.OrderBy(w => w.Position).Select(Wheel)],
             Speeds = [.. setup.Speeds.OrderBy(s => s.Position).Select(s => new SpeedPart(units.ShowBandSpeed(new Speed(s.SpeedMps)), Figures.Number(BendsPerHour(s.SpeedMps)), s.Usual && setup.Speeds.Count > 1))],
             Cuts = [.. advice.Plan().Saws.FirstOrDefault(p => p.Saw == saw)?.Cuts.Select(Cut) ?? []],

@@ -128,7 +128,7 @@ internal static class StockPages
             Order = s.OrderInDays is null ? null : $"Order {s.Order} of {s.Spec.Code} {when}",
             Now = s.OrderInDays is 0,
             Blades = [.. s.Blades.Where(b => !StockCount.IsSpare(b)).OrderBy(b => b.File.Blade.Tag, NaturalOrder.Instance).Select(b => new StockBlade(b.File.Blade.Tag, Says(b, advice), WorkedOut.Life(b)))],
-            Edit = canEdit ? $"/specs/{s.Spec.Code}/edit" : null,
+            Edit = canEdit ? $"/specs/{Uri.EscapeDataString(s.Spec.Code)}/edit" : null,
             Price = s.Spec.PriceMinor is { } price ? units.ShowMoney(price) : "price not told",
         };
     }

@@ -99,6 +99,6 @@ public sealed class KerfPageTests
         using var app = await ShopApp.Sample();
         (await app.Fill("/blades/Q-11/kerf", ("How", "OverTeeth"), ("Kerf", "1.2"), ("Note", "after the nail"))).LeadsTo("/blades/Q-11");
         var page = await app.GetPage("/record");
-        Assert.Contains("Kerf of Q-11: 1.2 mm over the teeth, after the nail", SampleApp.Text(page.Body), StringComparison.Ordinal);
+        Assert.Contains("Q-11 measured: kerf 1.2 mm over the teeth, after the nail", SampleApp.Text(page.Body), StringComparison.Ordinal);
     }
 }

@@ -36,6 +36,15 @@ public sealed class LookTests
     }
 
     [Fact]
+    public async Task A_crack_is_written_at_once_and_was_looked_at_where_it_lies()
+    {
+        await using var app = await ShopApp.Sample();
+        (await app.Fill("/blades/Q-11/inspect", ("Found", "Crack"), ("Place", "Weld"))).LeadsTo("/blades/Q-11");
+        var look = await Last(app);
+        Assert.Equal((LookedAt.Weld, (BladeMarks?)null), (look.LookedAt, look.Marks));
+    }
+
+    [Fact]
     public async Task Each_thing_seen_stands_on_the_blades_page_with_what_it_means()
     {
         await using var app = await ShopApp.Sample();

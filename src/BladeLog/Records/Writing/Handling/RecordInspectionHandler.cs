@@ -49,7 +49,15 @@ internal static class RecordInspectionHandler
         var seen = c.Marks ?? BladeMarks.None;
         var there = ((seen & BladeMarks.InGullets) != 0 ? LookedAt.Gullets : LookedAt.Nothing)
             | (seen.HasFlag(BladeMarks.KinkOrTwist) ? LookedAt.Level : LookedAt.Nothing)
-            | (seen.HasFlag(BladeMarks.TeethMissing) ? LookedAt.Teeth : LookedAt.Nothing);
+            | (seen.HasFlag(BladeMarks.TeethMissing) ? LookedAt.Teeth : LookedAt.Nothing)
+            | c.Place switch
+            {
+                CrackPlace.Gullet => LookedAt.Gullets,
+                CrackPlace.Weld => LookedAt.Weld,
+                CrackPlace.BackEdge => LookedAt.BackEdge,
+                CrackPlace.Body => LookedAt.Body,
+                _ => LookedAt.Nothing,
+            };
         return c.LookedAt is null && there == LookedAt.Nothing ? null : there | (c.LookedAt ?? LookedAt.Nothing);
     }
 }
