@@ -13,7 +13,12 @@ if (call.Verb is not null)
 }
 
 await using var app = ShopHost.Build(call);
-await ShopHost.Open(app);
+if (await ShopHost.Open(app) is { } trouble)
+{
+    await Console.Error.WriteLineAsync(trouble);
+    return 2;
+}
+
 await app.RunAsync();
 return 0;
 

@@ -28,7 +28,7 @@ public sealed class CutJourneyTests(Workbench bench) : IClassFixture<Workbench>
             Assert.True(tablet.Taps <= 3, $"It took {tablet.Taps} taps.");
 
             await tablet.Tap(tablet.Button("It is cut"));
-            await Expect(tablet.Foot.Locator("[role=status]")).ToContainTextAsync("Saved");
+            await Expect(tablet.Page.Locator("#saved")).ToContainTextAsync("Saved");
             await tablet.Open("/cuts");
             await Expect(tablet.Title).ToContainTextAsync("14 cuts wait");
         }, script);
@@ -60,8 +60,8 @@ public sealed class CutJourneyTests(Workbench bench) : IClassFixture<Workbench>
     [ClassData(typeof(Tablets))]
     public async Task A_cut_no_blade_is_for_says_why_and_offers_no_blade(string screen)
     {
-        await using var shop = await ServedShop.Sample();
-        await bench.At(shop, Screen.Of(screen), async tablet =>
+        var at = await LookedAt.Get();
+        await bench.At(at.Shop, Screen.Of(screen), async tablet =>
         {
             await tablet.Open("/cuts/13");
             await Expect(tablet.Page.Locator("article.best")).ToHaveCountAsync(0);

@@ -44,6 +44,19 @@
     else if (e.matches('.btn,.opt,.pick') && f.matches('.btn,.opt,.pick') && dx < 7.5 && dy < 7.5) say('targets too close', `${name(e)} and ${name(f)}, ${Math.max(dx, dy).toFixed(1)} between`);
   }
 
+  // Risky ones (retire, strike out, restore): last on their page, and 112 px from what is tapped often. Undo is no risk.
+  const risky = e => !e.closest('.block') && (e.matches('a[href$="/retire"],a[href$="/restore"]') || (e.matches('button:not([name])') && /\/(retire|void|restore)$/.test(e.form?.getAttribute('action') ?? '')));
+  for (const [e, a] of boxes.filter(([t]) => risky(t))) for (const [f, b] of boxes) {
+    if (e === f || !f.matches(often) || risky(f) || (e.form && f.closest('form') === e.form)) continue;
+    const dx = Math.max(a.left - b.right, b.left - a.right), dy = Math.max(a.top - b.bottom, b.top - a.bottom);
+    if (Math.max(dx, dy) < 111.5) say('risky too near', `${name(e)} is ${Math.max(dx, dy).toFixed(0)} from ${name(f)}`);
+  }
+  for (const e of document.querySelectorAll('form:is([action$="/retire"],[action$="/void"],[action$="/restore"]) button[type=submit]')) {
+    if (e.closest('.block') || !shown(e)) continue;
+    const above = [...e.form.querySelectorAll('input:not([type=hidden]),select,textarea')].map(f => (f.closest('.opt') ?? f).getBoundingClientRect().bottom);
+    if (above.length && e.getBoundingClientRect().top - Math.max(...above) < 111.5) say('risky too near', `${name(e)} stands right below its answers`);
+  }
+
   // Text: 20 px at least, in pictures too, as it stands on the screen.
   const walk = document.createTreeWalker(document.body, NodeFilter.SHOW_TEXT);
   for (let n; (n = walk.nextNode());) {
@@ -56,6 +69,14 @@
   for (const e of document.querySelectorAll('input:not([type=hidden],[type=radio],[type=checkbox]),select,textarea')) {
     const px = parseFloat(getComputedStyle(e).fontSize);
     if (shown(e) && px < 19.9) say('text', `${name(e)} is typed at ${px.toFixed(1)} px`);
+  }
+
+  // Key data 24 px, a tag in a list 29, a figure on the floor 96, one of four signs 70.
+  for (const [which, least] of [['.key,.why,.btn,.frow>label,.frow>legend', 24], ['.hang .t,.choice .tag', 29], ['.fig p:not(.long) b', 96], ['.fig p.long b', 70]]) {
+    for (const e of document.querySelectorAll(which)) {
+      const px = parseFloat(getComputedStyle(e).fontSize);
+      if (shown(e) && !e.closest('.vh') && px < least - 0.1) say('key data', `${name(e)} is ${px.toFixed(1)} px, not ${least}`);
+    }
   }
 
   // Pictures: no label over another, none cut off at the screen's edge, no leader through a label.

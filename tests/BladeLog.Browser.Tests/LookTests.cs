@@ -3,7 +3,7 @@ namespace BladeLog.Browser.Tests;
 /// <summary>The measure itself: it must see what it is there to see, and be content with a sound page.</summary>
 public sealed class LookTests(Workbench bench) : IClassFixture<Workbench>, IAsyncLifetime
 {
-    private const string Sheet = "*{margin:0;box-sizing:border-box}body{font:20px/1.4 sans-serif}a,button{font-size:20px;display:inline-block;width:120px;height:120px;margin:8px}";
+    private const string Sheet = "*{margin:0;box-sizing:border-box}body{font:20px/1.4 sans-serif}a,button{font-size:24px;display:inline-block;width:120px;height:120px;margin:8px}";
 
     private ServedShop? _shop;
 
@@ -30,6 +30,10 @@ public sealed class LookTests(Workbench bench) : IClassFixture<Workbench>, IAsyn
     [InlineData("small for a frequent one", "<div class=hands><a class=btn href=/saws/S1/swap style='width:100px'>Swap</a></div>")]
     [InlineData("targets overlap", "<a href=/>Floor</a><a href=/rack style='margin-left:-60px'>Rack</a>")]
     [InlineData("targets too close", "<button class=btn style='margin:0'>One</button><button class=btn style='margin:0 0 0 4px'>Two</button>")]
+    [InlineData("risky too near", "<a class='btn big' href=/blades/Q-1/sharpen>Sharpen</a><a class=btn href=/blades/Q-1/retire style='margin:80px 0 0'>Retire</a>")]
+    [InlineData("risky too near", "<form action=/blades/Q-1/retire><label class=opt><input type=radio style='width:120px;height:120px'></label><div><button type=submit class='btn big'>Retire</button></div></form>")]
+    [InlineData("key data", "<p class=key>What counts</p>")]
+    [InlineData("key data", "<div class=fig><p style='font-size:60px'><b>723</b></p></div>")]
     [InlineData("text", "<p style='font-size:16px'>small print</p>")]
     [InlineData("text", "<input style='height:80px;width:200px;font-size:16px'>")]
     [InlineData("text", "<svg width=200 height=40 viewBox='0 0 400 80'><text x=0 y=40 style='font-size:20px'>shrunk</text></svg>")]

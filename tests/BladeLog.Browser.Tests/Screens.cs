@@ -6,10 +6,14 @@ public sealed record Screen(string Name, int Width, int Height)
     public static readonly Screen Lying = new("1280x800", 1280, 800);
     public static readonly Screen Standing = new("800x1280", 800, 1280);
     public static readonly Screen Phone = new("360x740", 360, 740);
+    public static readonly Screen Narrow = new("320x600", 320, 600);
 
-    public bool IsTablet => this != Phone;
+    /// <summary>The lying tablet zoomed to 200 %.</summary>
+    public static readonly Screen Doubled = new("640x400", 640, 400);
 
-    public static Screen Of(string name) => new[] { Lying, Standing, Phone }.Single(s => s.Name == name);
+    public bool IsTablet => this == Lying || this == Standing;
+
+    public static Screen Of(string name) => new[] { Lying, Standing, Phone, Narrow, Doubled }.Single(s => s.Name == name);
 }
 
 /// <summary>Both ways a tablet hangs on the wall.</summary>
@@ -19,6 +23,17 @@ public sealed class Tablets : TheoryData<string>
     {
         Add(Screen.Lying.Name);
         Add(Screen.Standing.Name);
+    }
+}
+
+/// <summary>A tablet both ways, and a phone.</summary>
+public sealed class Screens : TheoryData<string>
+{
+    public Screens()
+    {
+        Add(Screen.Lying.Name);
+        Add(Screen.Standing.Name);
+        Add(Screen.Phone.Name);
     }
 }
 

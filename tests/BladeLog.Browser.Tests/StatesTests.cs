@@ -25,8 +25,8 @@ public sealed class StatesTests(Workbench bench) : IClassFixture<Workbench>
     [InlineData("/rack?show=gone", "800x1280")]
     public async Task Each_state_has_its_own_word_and_shape(string path, string screen)
     {
-        await using var shop = await ServedShop.Sample();
-        await bench.At(shop, Screen.Of(screen), async tablet =>
+        var at = await LookedAt.Get();
+        await bench.At(at.Shop, Screen.Of(screen), async tablet =>
         {
             await tablet.Open(path);
             var states = await tablet.Page.EvaluateAsync<Seen[]>(ReadStates);

@@ -80,7 +80,7 @@ public sealed class SwapJourneyTests(Workbench bench) : IClassFixture<Workbench>
             shop.Clock.Advance(TimeSpan.FromSeconds(61));
             await tablet.Open("/");
             await Expect(tablet.Foot.GetByRole(AriaRole.Button)).ToHaveCountAsync(0);
-            await Expect(tablet.Foot.Locator("[role=status]")).ToContainTextAsync("Saved");
+            await Expect(tablet.Page.Locator("#saved")).ToContainTextAsync("Saved");
         });
     }
 
@@ -136,7 +136,7 @@ public sealed class SwapJourneyTests(Workbench bench) : IClassFixture<Workbench>
     {
         await tablet.IsAt("/saws/S3");
         await Expect(tablet.Page.Locator("main")).ToContainTextAsync(tag);
-        await Expect(tablet.Foot.Locator("[role=status]")).ToContainTextAsync("Saved");
+        await Expect(tablet.Page.Locator("#saved")).ToContainTextAsync("Saved");
         await tablet.Open("/");
         await Expect(tablet.Tile("S3").Locator(".on")).ToContainTextAsync(tag);
     }

@@ -4,10 +4,11 @@ using System.Text.RegularExpressions;
 namespace BladeLog.Browser.Tests;
 
 /// <summary>A tablet in a hand: it counts taps, and keeps what the browser complains about.</summary>
-public sealed class Tablet
+public sealed partial class Tablet
 {
     private readonly ConcurrentQueue<string> _complaints = new();
     private readonly HashSet<int> _expected = [];
+    private bool _mayLose;
 
     public Tablet(IPage page, Screen screen)
     {
@@ -15,7 +16,13 @@ public sealed class Tablet
         Screen = screen;
         page.PageError += (_, error) => _complaints.Enqueue($"script: {error}");
         page.Console += (_, message) => Hear(message);
-        page.RequestFailed += (_, request) => _complaints.Enqueue($"request: {request.Method} {request.Url} {request.Failure}");
+        page.RequestFailed += (_, request) =>
+        {
+            if (!_mayLose)
+            {
+                _complaints.Enqueue($"request: {request.Method} {request.Url} {request.Failure}");
+            }
+        };
         page.Response += (_, answer) =>
         {
             if (answer.Status >= 400 && !_expected.Contains(answer.Status))
@@ -38,6 +45,9 @@ public sealed class Tablet
 
     /// <summary>An answer that is part of the story, such as 422 for a form that must be put right.</summary>
     public void Expects(int status) => _expected.Add(status);
+
+    /// <summary>From here on a request that does not arrive is part of the story.</summary>
+    public void ExpectsLostRequests() => _mayLose = true;
 
     public async Task Open(string path)
     {
@@ -83,16 +93,19 @@ public sealed class Tablet
     /// <summary>The box of a choice; the whole label is the target.</summary>
     public ILocator Choice(string name) => Page.Locator("label.opt", new() { HasText = name });
 
-    public async Task IsAt(string path) => await Expect(Page).ToHaveURLAsync(new Regex(Regex.Escape(path) + "$"));
+    public async Task IsAt(string path) => await Expect(Page).ToHaveURLAsync(new Regex(Regex.Escape(path) + "$", RegexOptions.IgnoreCase));
 
     public void MustBeQuiet() => Assert.True(_complaints.IsEmpty, "The browser complained:\n" + string.Join('\n', _complaints));
 
     private void Hear(IConsoleMessage message)
     {
         // The status of an answer is judged where it arrives.
-        if (message.Type is "error" or "warning" && !message.Text.StartsWith("Failed to load resource: the server responded", StringComparison.Ordinal))
+        if (message.Type is "error" or "warning" && !(_mayLose && Lost().IsMatch(message.Text)) && !message.Text.StartsWith("Failed to load resource: the server responded", StringComparison.Ordinal))
         {
             _complaints.Enqueue($"console {message.Type}: {message.Text} {message.Location}");
         }
     }
+
+    [GeneratedRegex("^(Failed to load resource: net::|htmx: htmx:error: Failed to fetch)")]
+    private static partial Regex Lost();
 }

@@ -19,9 +19,11 @@ public sealed class ShopApp : WebApplicationFactory<Program>
 
     private static readonly Lazy<Task<string>> Template = new(MakeTemplate);
     private readonly HttpClient _client;
+    private readonly string? _sampleFiles;
 
-    private ShopApp(string dir, DateTimeOffset? now)
+    private ShopApp(string dir, DateTimeOffset? now, string? sampleFiles = null)
     {
+        _sampleFiles = sampleFiles;
         Dir = dir;
         Clock = new FakeTimeProvider(now ?? Today);
         _client = CreateClient(new WebApplicationFactoryClientOptions { AllowAutoRedirect = false });
@@ -35,6 +37,17 @@ public sealed class ShopApp : WebApplicationFactory<Program>
 
     /// <summary>As at the very first start: no file yet.</summary>
     public static ShopApp Unmade(DateTimeOffset? now = null) => new(NewDir(), now);
+
+    /// <summary>As it starts on a folder that somebody else filled.</summary>
+    public static async Task<ShopApp> OnFolder(Func<string, Task> fill)
+    {
+        var dir = NewDir();
+        await fill(dir);
+        return new(dir, Today);
+    }
+
+    /// <summary>No file yet, and sample files from another folder.</summary>
+    public static ShopApp WithSampleFiles(string folder) => new(NewDir(), Today, folder);
 
     /// <summary>A shop with nothing in it, made by the first start's own form.</summary>
     public static async Task<ShopApp> Empty(DateTimeOffset? now = null)
@@ -106,6 +119,11 @@ public sealed class ShopApp : WebApplicationFactory<Program>
     protected override void ConfigureWebHost(IWebHostBuilder builder)
     {
         builder.UseSetting("data", Dir);
+        if (_sampleFiles is not null)
+        {
+            builder.UseSetting("samplefiles", _sampleFiles);
+        }
+
         builder.ConfigureTestServices(services => services.AddSingleton<TimeProvider>(Clock));
     }
 

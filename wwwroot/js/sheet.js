@@ -66,11 +66,62 @@
   }
   addEventListener('pagehide', () => { if (sent) sessionStorage.setItem('sent', sent); });
 
+  // Keys beside a number: the figure of last time, and steps up and down from it. What is typed otherwise stays as it is.
+  document.documentElement.classList.add('scripted');
+  document.addEventListener('click', event => {
+    const key = event.target.closest('.steps button');
+    if (!key) return;
+    const keys = key.closest('.steps'), field = document.getElementById(keys.dataset.steps);
+    const from = field.value.trim() || keys.querySelector('[data-set]')?.dataset.set || '0';
+    const now = Number(from.replace(',', '.')), places = t => (t.split('.')[1] ?? '').length;
+    if (key.dataset.set !== undefined) field.value = key.dataset.set;
+    else if (Number.isFinite(now)) field.value = Math.max(0, now + Number(key.dataset.add)).toFixed(Math.max(places(key.dataset.add), places(from.replace(',', '.'))));
+    field.dispatchEvent(new Event('input', { bubbles: true }));
+  });
+
+  // What was saved is read aloud once, from the one place that no answer replaces.
+  const told = document.getElementById('told');
+  const lastSaved = () => {
+    const saved = document.querySelector('#saved dl'), undo = document.querySelector('.block .undo');
+    return saved ? [...saved.children, ...undo?.querySelectorAll('span') ?? []].map(e => e.textContent).join(' ') + (undo ? '|' + undo.action : '') : '';
+  };
+  let known = lastSaved();
+  const tell = words => { if (told) told.textContent = words; };
+  function tellSaved() {
+    const now = lastSaved();
+    if (now !== known) tell(now.split('|')[0]);
+    known = now;
+  }
+
+  // While an entry is on its way the title block says so, in words; when it does not arrive, too.
+  function waiting(word, remark) {
+    const place = document.getElementById('saved');
+    if (!place) return;
+    const list = document.createElement('dl');
+    for (const [tag, text] of [['dt', word], ['dd', remark]]) list.appendChild(document.createElement(tag)).textContent = text;
+    place.replaceChildren(list);
+    place.classList.add('waiting');
+  }
+  document.addEventListener('submit', event => { if (event.target.method === 'post') waiting('Sending', 'wait'); });
+  document.addEventListener('htmx:error', () => {
+    if (!document.querySelector('#saved.waiting')) return;
+    waiting('Not sent', 'tap again');
+    tell('Not sent. Tap again.');
+    for (const button of document.querySelectorAll('.btn.sent')) button.classList.remove('sent');
+  });
+
+  // An answer that is no page of ours, such as a bare sentence, is shown as it is.
+  document.addEventListener('htmx:after:request', event => {
+    const ctx = event.detail?.ctx;
+    if (ctx && !/ id="page"/.test(ctx.text ?? '')) ctx.select = null;
+  });
+
   // After a swap the focus goes to the first thing to read: the errors, else the title.
   document.addEventListener('htmx:after:swap', () => {
     arrived();
+    tellSaved();
     const goal = document.querySelector('[role=alert]') ?? document.querySelector('h1');
-    if (!goal || document.activeElement !== document.body) return;
+    if (!goal) return;
     goal.tabIndex = -1;
     goal.focus({ preventScroll: goal.matches('h1') });
   });

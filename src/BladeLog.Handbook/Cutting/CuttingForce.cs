@@ -125,6 +125,18 @@ public static partial class CuttingForce
         return (P_m - P_idle) * eps / P;
     }
 
+    /// <summary>Power a motor takes from the supply, from its current.</summary>
+    /// <remarks>P = m·U·I·cos φ, m = 1 on one phase, √3 on three (U between two phases). U voltage, V; I current in one line, A; cos φ power factor, above 0 and not
+    /// over 1. A motor that idles has a far lower power factor than one under load: its idle power is measured as power.</remarks>
+    /// <source key="derived" where="active power of alternating current, one phase and balanced three"/>
+    public static Power FromCurrent(double amperes, double volts, double powerFactor, bool threePhase)
+    {
+        double I = Require.Positive(amperes, "current");
+        double U = Require.Positive(volts, "voltage");
+        double cos_phi = Require.Within(powerFactor, double.Epsilon, 1, "The power factor must lie above 0 and not over 1.");
+        return new Power((threePhase ? Math.Sqrt(3) : 1) * U * I * cos_phi);
+    }
+
     /// <summary>The quantities of the force equation, unwrapped once.</summary>
     private readonly record struct Terms(
         double K, double k, double w_e, double z, double T, double p, double v, double H, double lambda_r, double MainEdge, double ThrustEdge)

@@ -85,4 +85,22 @@ public static class Kerf
     /// <source key="from-memory" where="sawmill texts: bite no less than the side clearance"/>
     public static double SpillRatio(Length bite, Length sideClearance) =>
         Require.NotNegative(bite.Metres, "bite") / Require.Positive(sideClearance.Metres, "side clearance");
+
+    /// <summary>Does dust slip out of the gullets past the body?</summary>
+    /// <remarks>c/s &lt; 1 on a power-fed mill with c &gt; 0.10 mm; never by hand. c bite, m; s side clearance, m.</remarks>
+    /// <source key="from-memory" where="sawmill texts: bite no less than the side clearance"/>
+    public static bool Spills(Length bite, Length sideClearance, bool powerFed) =>
+        powerFed && bite.Millimetres > 0.10 && SpillRatio(bite, sideClearance) < 1;
+
+    /// <summary>Whole grinds until the teeth want setting again.</summary>
+    /// <remarks>n = ⌊0.2 h_s/g⌋ + 1, the first n at which s_n = s₀·(1 − n·g/h_s) is less than 0.8 s₀. h_s height of the bend below the tip, m; g taken off the tip each
+    /// time, m, above zero.</remarks>
+    /// <source key="derived" where="set after grinding solved for the count; 0.8 of it is common practice"/>
+    public static double GrindsToSetting(Length offEachTime, Length bendBelowTip)
+    {
+        double g = Require.Positive(offEachTime.Metres, "stock ground off");
+        double h_s = Require.Positive(bendBelowTip.Metres, "height of the bend");
+        // A share that is a whole number of grinds must not lose one to rounding.
+        return Math.Floor(0.2 * h_s / g + 1e-9) + 1;
+    }
 }

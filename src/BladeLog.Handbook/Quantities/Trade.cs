@@ -77,6 +77,45 @@ public enum BodySteel
     WideStrip,
 }
 
+/// <summary>What is to be cut.</summary>
+public enum MaterialKind
+{
+    /// <summary>Solid wood.</summary>
+    Wood,
+
+    /// <summary>Panel of wood and glue.</summary>
+    Panel,
+
+    /// <summary>Not wood: known and stored, but no blade is ever advised for it.</summary>
+    Other,
+}
+
+/// <summary>How smooth the sawn face must be.</summary>
+public enum Finish
+{
+    /// <summary>Bite up to 0.03 mm.</summary>
+    Fine,
+
+    /// <summary>Bite up to 0.10 mm.</summary>
+    Medium,
+
+    /// <summary>No limit on the bite.</summary>
+    Rough,
+}
+
+/// <summary>How dirty the wood is.</summary>
+public enum Dirt
+{
+    /// <summary>Clean.</summary>
+    Clean,
+
+    /// <summary>Bark on, or dragged logs.</summary>
+    BarkOn,
+
+    /// <summary>Reclaimed timber.</summary>
+    Reclaimed,
+}
+
 /// <summary>How the cut runs to the fibres.</summary>
 public enum CutDirection
 {

@@ -35,19 +35,6 @@ public static class AbrasivenessTable
         ?? throw new ArgumentOutOfRangeException(nameof(abrasivenessClass), abrasivenessClass, "The wear class must be A1 to A5, P or none.");
 }
 
-/// <summary>How dirty the wood is.</summary>
-public enum Dirt
-{
-    /// <summary>Clean.</summary>
-    Clean,
-
-    /// <summary>Bark on, or dragged logs.</summary>
-    BarkOn,
-
-    /// <summary>Reclaimed timber.</summary>
-    Reclaimed,
-}
-
 /// <summary>What dirt does to edges.</summary>
 /// <param name="Dirt">Which.</param>
 /// <param name="Factor">m_d.</param>

@@ -2,19 +2,6 @@ using BladeLog.Handbook.Quantities;
 
 namespace BladeLog.Handbook.Tables;
 
-/// <summary>How smooth the sawn face must be.</summary>
-public enum Finish
-{
-    /// <summary>Bite up to 0.03 mm.</summary>
-    Fine,
-
-    /// <summary>Bite up to 0.10 mm.</summary>
-    Medium,
-
-    /// <summary>No limit on the bite.</summary>
-    Rough,
-}
-
 /// <summary>A limit and where it comes from.</summary>
 /// <param name="Value">The figure, in the unit its holder names.</param>
 /// <param name="Because">In words.</param>
@@ -50,6 +37,12 @@ public static class CutLimits
 
     /// <summary>Push by hand, amber, N.</summary>
     public static Limit PushAmber { get; } = new(100, "guideline push to keep a load moving, men", Provenance.Published, "hse-l23");
+
+    /// <summary>Push to start a load moving or to stop it, green, N.</summary>
+    public static Limit PushToStartGreen { get; } = new(150, "guideline push to start or stop a load, women", Provenance.Published, "hse-l23");
+
+    /// <summary>Push to start a load moving or to stop it, amber, N.</summary>
+    public static Limit PushToStartAmber { get; } = new(200, "guideline push to start or stop a load, men", Provenance.Published, "hse-l23");
 
     /// <summary>Push with fingers within 150 mm of the blade: amber above, N.</summary>
     public static Limit PushPrecision { get; } = new(50, "fingers near the blade", Provenance.EngineeringDefault, "engineering-default");

@@ -2,19 +2,6 @@ using BladeLog.Handbook.Quantities;
 
 namespace BladeLog.Handbook.Tables;
 
-/// <summary>What is to be cut.</summary>
-public enum MaterialKind
-{
-    /// <summary>Solid wood.</summary>
-    Wood,
-
-    /// <summary>Panel of wood and glue.</summary>
-    Panel,
-
-    /// <summary>Not wood: known and stored, but no blade is ever advised for it.</summary>
-    Other,
-}
-
 /// <summary>What a cut goes through, wood or not.</summary>
 /// <param name="Key">Short name for records.</param>
 /// <param name="Name">Name of the trade.</param>

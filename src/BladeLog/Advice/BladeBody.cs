@@ -83,7 +83,7 @@ public sealed record BladeBody
             Thickness = Known.Yours(t, file.Blade.MeasuredThicknessM is null ? Box : "measured"),
             Gullet = Given(file.GulletM, "measured") ?? Given(spec.GulletDepthM, Box)
                 ?? share with { Value = Math.Min(share.Value * spec.PitchCoarseM, settings[BladeSettings.GulletOfWidth] * spec.WidthM) },
-            Kerf = Given(file.KerfM, "measured") ?? Given(spec.KerfM, Box) ?? kerf with { Value = kerf.Value * t },
+            Kerf = Given(file.KerfM, "measured") ?? Given(t + file.Kerf.Set?.BothM, "body and set, both measured") ?? Given(spec.KerfM, Box) ?? kerf with { Value = kerf.Value * t },
             Rake = Given(spec.RakeRad, Box)
                 ?? (spec.ToothForm == ToothForm.Hook
                     ? settings.Known(BladeSettings.HookRake, Math.PI / 180)

@@ -138,6 +138,27 @@ internal sealed class AskForm(IQueryCollection query, ShopUnits units, bool from
         }
     }
 
+    /// <summary>Plain factors one after the other, none at all where it is empty.</summary>
+    public IReadOnlyList<double>? Factors(string name, string label, string hint)
+    {
+        string typed = Typed(name);
+        _typed |= typed.Length > 0;
+        List<double> read = [];
+        foreach (string part in typed.Split([';', '\n'], StringSplitOptions.RemoveEmptyEntries | StringSplitOptions.TrimEntries))
+        {
+            if (!Amount.TryReadAll(Amount.Clean(part), false, out var amount) || amount.Value < 0.1 || amount.Value > 10 || read.Count == 100)
+            {
+                Add(new(name, label, typed, null, $"\"{part}\" is no factor. Write numbers between 0.1 and 10, with a semicolon between two, at most 100."));
+                return null;
+            }
+
+            read.Add(amount.Value);
+        }
+
+        Add(new(name, label, typed, typed.Length > 0 ? null : hint, null));
+        return read;
+    }
+
     /// <summary>One word out of a few.</summary>
     public T Choose<T>(string name, string label, T start, string mark, params (T Value, string Word, string Label)[] words)
         where T : struct, Enum

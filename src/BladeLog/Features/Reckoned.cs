@@ -43,7 +43,7 @@ internal static class Reckoned
     }
 
     /// <summary>"Roessle, Fatemi 2000" of a key of the list of sources.</summary>
-    private static string? Source(string key)
+    public static string? Source(string key)
     {
         if (Marks.Contains(key))
         {

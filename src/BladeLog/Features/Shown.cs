@@ -41,7 +41,7 @@ internal sealed class Shown(ShopUnits units)
 
     /// <summary>One line of the reckoning. Keys that are no publication say nothing beyond their mark.</summary>
     public static BecauseLine Line(string what, string value, string formula, string source, Provenance provenance) =>
-        new(what, value, formula, source is "derived" or "engineering-default" or "common-practice" or "from-memory" ? null : source, provenance);
+        new(what, value, formula, Reckoned.Source(source), provenance);
 
     /// <summary>Points of a line, evenly spaced on its axis.</summary>
     public static IReadOnlyList<Point> Points(AxisScale x, Func<double, double?> y, int count = 60) =>

@@ -15,6 +15,8 @@ public sealed record SmallBand
 
     public (double Share, string Words)? Worn { get; init; }
 
+    public bool Any => Life is not null || Range is not null || Worn is not null;
+
     public static SmallBand Of(BladeAdvice blade, AdviceSettings settings)
     {
         ArgumentNullException.ThrowIfNull(blade);

@@ -1,115 +1,117 @@
 using BladeLog.Advice;
+using BladeLog.Advice.Life;
 using BladeLog.Handbook.Quantities;
 using BladeLog.Records;
 using BladeLog.Ui;
+using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Features;
 
 /// <summary>One line of what happened.</summary>
 public sealed record StoryLine(string When, string Words, string? Struck);
 
-/// <summary>The past in sentences.</summary>
-internal static class Story
+/// <summary>Whose page a line stands on: what the page names already is not named again.</summary>
+internal enum About
 {
-    public static StoryLine Line(PastFact past, DateTime now, ShopUnits units, Wording words, IReadOnlyDictionary<int, string> saws)
+    Shop,
+    Blade,
+    Saw,
+}
+
+/// <summary>The past in plain words and the shop's units: one wording for each kind of fact.</summary>
+internal sealed class Story(ShopNow shop, ShopUnits units, IReadOnlyDictionary<int, string> specs)
+{
+    private readonly Wording words = Wording.Of(shop.Shop);
+    private readonly Dictionary<int, string> saws = shop.Saws.ToDictionary(s => s.Saw.Id, s => s.Saw.Name);
+    private readonly Dictionary<int, string> tags = shop.Blades.ToDictionary(b => b.Blade.Id, b => b.Blade.Tag);
+
+    public static async Task<Story> Of(Desk desk) =>
+        new(await desk.Shop(), await desk.Units(), await desk.Db.Specs.AsNoTracking().ToDictionaryAsync(s => s.Id, s => s.Code));
+
+    public StoryLine Line(PastEntry past, About about)
     {
         ArgumentNullException.ThrowIfNull(past);
-        string by = past.Who is { } who ? $" ({who})" : "";
+        Entry entry = past.Entry;
+        string by = entry.Person is { } who ? $" ({who.Initials})" : "";
+        string struck = entry.Void is { } v ? $"Struck out{(v.Entry.Person is { } striker ? " by " + striker.Initials : "")}: {v.Reason.TrimEnd('.')}." : "";
         return new StoryLine(
-            Said.When(past.AtUtc, now, units),
-            $"{Says(past.Fact, units, words, saws)}{by}.",
-            past.Struck ? $"Struck out{(past.StruckBy is { } striker ? " by " + striker : "")}: {past.StruckWhy?.TrimEnd('.')}." : null);
+            Said.When(entry.AtUtc, shop.AsOf, units),
+            $"{(past.Fact is { } fact ? Says(fact, about) : entry.Kind)}{by}.",
+            struck.Length == 0 ? null : struck);
     }
 
-    private static string Says(Fact fact, ShopUnits units, Wording words, IReadOnlyDictionary<int, string> saws) => fact switch
+    /// <summary>What a fact says, without its full stop.</summary>
+    public string Says(Fact fact, About about) => fact switch
     {
-        Mount m => $"{(m.Blade is { } b ? b.Tag + " on" : "Put on " + m.Saw.Name)}{Tension(m.TensionPa, units)}{(m.InsideOut ? ", inside out" : "")}{(m.Although is { } why ? $", although {why}" : "")}",
-        Dismount d => $"{(d.Mount.Blade is { } b ? b.Tag + " off" : "Off " + d.Mount.Saw.Name)}, {Off(d.Reason)}",
-        Slack s => s.LetOff ? $"{Said.Capital(words.Tension)} let off" : $"{Said.Capital(words.Tension)} put on",
-        Sharpening s => $"Sharpened, {(s.Kind == GrindKind.FullProfile ? "full profile" : "faces")}{(s.SetAgain ? ", set again" : "")}{Width(s.WidthM, units)}{(s.BatchId is null ? "" : ", by the service")}",
-        Joint j => $"Welded to {units.Show(new Length(j.LoopM), Fields.Loop)}, {Quality(j.Quality)}{(j.Method is { } how ? ", " + how : "")}",
-        Split => "Cut down: a new blade with its own tag came of it",
-        PriorUse p => $"Used {Wording.Share(p.UsedLow)} to {Wording.Share(p.UsedHigh)} of its life before this record{(p.Source is { } from ? ": " + from.TrimEnd('.') : "")}",
-        Hang h => h.Place == Place.Bench ? "Put on the bench" : $"Hung up{(h.Hook is { } hook ? " on " + hook : "")}",
+        Mount m => $"{On(m, about)}{Tension(m.TensionPa)}{(m.InsideOut ? ", inside out" : "")}{After(", although ", m.Although)}",
+        Dismount d => $"{Off(d.Mount, about)}, {StoryWords.Off(d.Reason)}",
+        Slack s => AtSaw(s.SawId, about, $"{words.Tension} {(s.LetOff ? "let off" : "put on")}"),
+        SawSetup s => AtSaw(s.SawId, about, "set up as it is from here on"),
+        MeterEpoch e => AtSaw(e.SawId, about, $"hour meter: {StoryWords.Epoch(e.Reason)}, from {Hours(e.StartReadingMs)}"),
+        MeterReading r => AtSaw(r.SawId, about, $"hour meter read: {Hours(r.ReadingMs)}"),
+        Run r => AtSaw(r.SawId, about, $"ran {Hours(r.RunningMs)}, grade {r.Grade}"),
+        CutDone c => AtSaw(c.SawId, about, $"cut {c.SpeciesTyped} {words.Length(c.HeightM)}, {Said.Count(c.Pieces, "piece", "pieces")} of {words.Distance(c.LengthM)}{(c.Nail ? ", a nail was hit" : "")}"),
+        Sharpening s => OfBlade(s.BladeId, about, $"sharpened, {(s.Kind == GrindKind.FullProfile ? "full profile" : "faces")}{(s.SetAgain ? ", set again" : "")}{Width(s.WidthM)}{(s.BatchId is null ? "" : ", by the service")}"),
+        Joint j => OfBlade(j.BladeId, about, $"welded to {units.Show(new Length(j.LoopM), Fields.Loop)}, {StoryWords.Quality(j.Quality)}{After(", ", j.Method)}"),
+        Split s => $"{tags[s.ParentId]} cut down to {tags[s.ChildId]}{Width(s.WidthM)}",
+        PriorUse p => OfBlade(p.BladeId, about, $"used {Wording.Share(p.UsedLow)} to {Wording.Share(p.UsedHigh)} of its life before this record{After(": ", p.Source)}"),
+        Hang h => OfBlade(h.BladeId, about, h.Place == Place.Bench ? "put on the bench" : $"hung up{After(" on ", h.Hook)}"),
         Retag r => $"Tag {r.OldTag} put right to {r.NewTag}",
-        BatchLine l => $"Sent to {l.Batch.Service}, batch {l.Batch.Number}",
-        BatchReturn r => $"Back from {r.Line.Batch.Service}, batch {r.Line.Batch.Number}: {Outcome(r.Outcome)}{Width(r.WidthM, units)}",
-        TensionReading t => $"{Said.Capital(words.Tension)} measured: {units.Show(new Stress(t.TensionPa))} on the body{(saws.TryGetValue(t.SawId, out string? saw) ? ", on " + saw : "")}",
-        Drift d => $"Leads {units.Show(new Angle(Math.Abs(d.AngleRad)))}{(d.AngleRad > 0 ? " left" : d.AngleRad < 0 ? " right" : "")}{(saws.TryGetValue(d.SawId, out string? on) ? " on " + on : "")}",
-        Hold h => $"Put on hold: {HoldWhat(h, words)}{(h.Note is { } note ? ", " + note.TrimEnd('.') : "")}",
-        HoldCleared c => $"Hold cleared: {c.How.TrimEnd('.')}",
-        Inspection i => $"Inspected: {Finding(i, words)}{(i.Note is { } note ? ", " + note.TrimEnd('.') : "")}",
-        Break b => $"{(b.Blade is { } broken ? broken.Tag + " broke" : "Broke")}{Site(b.Site)}{(b.Note is { } note ? ", " + note.TrimEnd('.') : "")}",
-        Retirement r => $"Retired{(r.Note is { } note ? ": " + note.TrimEnd('.') : "")}{(r.CutUp ? ", cut up" : "")}",
-        SawSetup => "Set up as it is from here on",
-        MeterEpoch e => $"Hour meter: {Epoch(e.Reason)}, from {Hours(e.StartReadingMs)}",
-        MeterReading r => $"Hour meter read: {Hours(r.ReadingMs)}",
-        Run r => $"Ran {Hours(r.RunningMs)}",
-        CutDone c => $"Cut {c.SpeciesTyped} {words.Length(c.HeightM)}, {Said.Count(c.Pieces, "piece", "pieces")} of {words.Distance(c.LengthM)}{(c.Nail ? ", a nail was hit" : "")}",
-        _ => fact.Entry.Kind,
+        Batch b => $"Batch {b.Number} to {b.Service}",
+        BatchLine l => OfBlade(l.BladeId, about, $"sent to {l.Batch.Service}, batch {l.Batch.Number}"),
+        BatchReturn r => OfBlade(r.Line.BladeId, about, $"back from {r.Line.Batch.Service}, batch {r.Line.Batch.Number}: {StoryWords.Outcome(r.Outcome)}{Width(r.WidthM)}"),
+        TensionReading t => OfBlade(t.BladeId, about, $"{words.Tension} measured: {units.Show(new Stress(t.TensionPa))} on the body, give or take {Uncertain(t.How)} %, on {Saw(t.SawId)}, by {t.How}"),
+        Drift d => OfBlade(d.BladeId, about, $"leads {units.Show(new Angle(Math.Abs(d.AngleRad)))}{(d.AngleRad > 0 ? " left" : d.AngleRad < 0 ? " right" : "")} on {Saw(d.SawId)}"),
+        KerfReading k => OfBlade(k.BladeId, about, $"measured: {(k.KerfM is null ? "" : "kerf ")}{Said.Kerf(k, units)}{After(", ", k.Note)}"),
+        StockMove s => $"Stock of {specs[s.SpecId]}: {(s.Count > 0 ? "+" : "")}{Figures.Number(s.Count)}, {s.Reason.TrimEnd('.')}",
+        Hold h => OfBlade(h.BladeId, about, $"put on hold: {LifeWords.HoldReason(h, words) ?? "no reason told"}{After(", ", h.Note)}"),
+        HoldCleared c => OfBlade(c.Hold.BladeId, about, $"hold cleared{After(": ", c.How)}"),
+        Inspection i => OfBlade(i.BladeId, about, $"inspected: {Seen(i)}{After(", ", i.Note)}"),
+        Break b => OfBlade(b.BladeId, about, $"{StoryWords.Broke(b.Site)}{(about != About.Saw && b.SawId is { } on ? $", on {Saw(on)}" : "")}{After(", ", b.Note)}"),
+        Retirement r => OfBlade(r.BladeId, about, $"retired: {StoryWords.Retired(r.Reason)}{After(", ", r.Note)}{(r.CutUp ? ", cut up" : "")}"),
+        LabelPrinted l => $"Label {l.Tag} printed",
+        HandOver h => $"Hand-over note: {(h.Text.Length > 80 ? h.Text[..80] + "…" : h.Text)}",
+        HandOverRead => "Hand-over note read",
+        Trained t => $"{t.Person.Initials} trained by {t.By.Initials}: {TaskWords.Of(t.Task)}, {(t.SawId is { } saw ? Saw(saw) : "all saws")}{(t.RefresherUtc is { } due ? "; refresher due " + Said.Day(due, units) : "")}",
+        _ => throw new ArgumentOutOfRangeException(nameof(fact), fact.GetType().Name, "This kind of fact has no wording."),
     };
 
-    private static string Tension(double? pa, ShopUnits units) => pa is { } p ? $", {units.Show(new Stress(p))} on the body" : "";
-
-    private static string Width(double? metres, ShopUnits units) => metres is { } w ? $", width now {Said.Width(w, units)}" : "";
-
-    private static string Hours(long ms) => Figures.With(Figures.Number(ms / 3_600_000.0, 1), "h");
-
-    private static string Quality(WeldQuality quality) => quality switch
+    private string On(Mount m, About about) => about switch
     {
-        WeldQuality.Good => "a good weld",
-        WeldQuality.Best => "the best weld",
-        _ => "a doubtful weld",
+        About.Blade => $"Put on {Saw(m.SawId)}",
+        About.Saw => $"{tags[m.BladeId]} on",
+        _ => $"{tags[m.BladeId]} on {Saw(m.SawId)}",
     };
 
-    private static string Outcome(ReturnOutcome outcome) => outcome switch
+    private string Off(Mount m, About about) => about switch
     {
-        ReturnOutcome.Sharpened => "sharpened",
-        ReturnOutcome.Rejected => "rejected",
-        ReturnOutcome.Unsharpened => "not sharpened",
-        _ => "lost",
+        About.Blade => $"Off {Saw(m.SawId)}",
+        About.Saw => $"{tags[m.BladeId]} off",
+        _ => $"{tags[m.BladeId]} off {Saw(m.SawId)}",
     };
 
-    private static string Off(OffReason reason) => reason switch
-    {
-        OffReason.StillSharp => "still sharp",
-        OffReason.Dull => "dull",
-        OffReason.CrackOrClicking => "crack or clicking",
-        OffReason.Broke => "broke",
-        OffReason.OtherWork => "other work",
-        _ => "found off",
-    };
+    private string OfBlade(int id, About about, string said) => about == About.Blade ? Said.Capital(said) : $"{tags[id]} {said}";
 
-    private static string HoldWhat(Hold hold, Wording words)
-    {
-        string said = Advice.Life.LifeWords.Hold(hold, words);
-        return said.StartsWith("on hold: ", StringComparison.Ordinal) ? said["on hold: ".Length..] : "no reason told";
-    }
+    private string AtSaw(int id, About about, string said) => about == About.Saw ? Said.Capital(said) : $"{Saw(id)} {said}";
 
-    private static string Finding(Inspection i, Wording words) => i.Found switch
+    private string Saw(int id) => saws.GetValueOrDefault(id, "a saw without a setup");
+
+    private string Seen(Inspection look) => look.Found switch
     {
         Found.NothingSeen => "nothing seen",
-        Found.Crack => i.CrackLengthM is { } length ? $"crack {words.Length(length)}" : "crack",
+        Found.Crack => look.CrackLengthM is { } length ? $"crack {words.Length(length)}" : "crack",
         Found.Worn => "worn",
         _ => "something else",
     };
 
-    private static string Site(BreakSite site) => site switch
-    {
-        BreakSite.Gullet => " at a gullet",
-        BreakSite.GulletAngled => " from a gullet, at an angle",
-        BreakSite.Weld => " at its weld",
-        BreakSite.BackEdge => " from the back edge",
-        BreakSite.Body => " in the body",
-        BreakSite.TeethStripped => ": teeth stripped",
-        _ => "",
-    };
+    private static string Uncertain(string how) =>
+        Figures.Number(100 * Handbook.Band.Tension.Uncertainty(how == "pluck" ? Handbook.Band.TensionMethod.Pluck : Handbook.Band.TensionMethod.StrandForce));
 
-    private static string Epoch(EpochReason reason) => reason switch
-    {
-        EpochReason.First => "first reading",
-        EpochReason.NewMeter => "a new meter",
-        EpochReason.RolledOver => "rolled over",
-        _ => "rolled back",
-    };
+    private string Tension(double? pa) => pa is { } p ? $", {units.Show(new Stress(p))} on the body" : "";
+
+    private string Width(double? metres) => metres is { } w ? $", width now {Said.Width(w, units)}" : "";
+
+    private static string After(string lead, string? said) => said is null ? "" : lead + said.TrimEnd('.');
+
+    private static string Hours(long ms) => Figures.With(Figures.Number(ms / 3_600_000.0, 1), "h");
 }

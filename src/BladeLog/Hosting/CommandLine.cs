@@ -6,7 +6,7 @@ internal sealed record Call(string? Verb, string? Operand, string? DataDir, bool
 internal static class CommandLine
 {
     private static readonly string[] Verbs = ["verify", "backup", "restore"];
-    private static readonly string[] FrameworkOptions = ["environment", "contentroot", "applicationname"];
+    private static readonly string[] FrameworkOptions = ["environment", "contentroot", "applicationname", "samplefiles"];
 
     public static Call Read(string[] args)
     {

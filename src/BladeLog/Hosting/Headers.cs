@@ -4,7 +4,7 @@ namespace BladeLog.Hosting;
 internal static class Headers
 {
     private const string ContentPolicy =
-        "default-src 'none'; script-src 'self'; style-src 'self'; img-src 'self' data:; connect-src 'self'; " +
+        "default-src 'none'; script-src 'self'; style-src 'self'; img-src 'self' data:; connect-src 'self'; manifest-src 'self'; " +
         "form-action 'self'; base-uri 'none'; frame-ancestors 'none'; object-src 'none'";
 
     public static void UseShopHeaders(this WebApplication app) => app.Use(async (context, next) =>

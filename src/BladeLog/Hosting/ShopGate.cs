@@ -3,7 +3,7 @@ using BladeLog.Records;
 namespace BladeLog.Hosting;
 
 /// <summary>Whether the shop can be served: not yet made, open, or in trouble.</summary>
-internal sealed class ShopGate(ShopFile file, TimeProvider clock)
+internal sealed class ShopGate(ShopFile file, TimeProvider clock, IConfiguration configuration)
 {
     /// <summary>What keeps the shop shut, in a sentence for the screen.</summary>
     public string? Trouble { get; private set; }
@@ -33,6 +33,9 @@ internal sealed class ShopGate(ShopFile file, TimeProvider clock)
             Trouble = $"The folder {file.Dir} cannot be used: {e.Message}";
         }
     }
+
+    /// <summary>Makes the invented shop. The setting names another folder of sample files, for whoever writes new ones.</summary>
+    public Task MakeSample() => Make(db => SampleShop.Fill(db, configuration["samplefiles"] ?? SampleShop.Folder, clock.GetUtcNow().UtcDateTime));
 
     /// <summary>Makes the file and fills it; on any failure nothing of it stays.</summary>
     public async Task Make(Func<ShopDb, Task> fill)

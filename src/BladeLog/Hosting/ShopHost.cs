@@ -2,6 +2,7 @@ using System.Text.Json.Serialization;
 using System.Text.Json.Serialization.Metadata;
 using BladeLog.Features;
 using BladeLog.Records;
+using BladeLog.Records.Sample;
 using BladeLog.Ui;
 using BladeLog.Ui.Json;
 using Microsoft.AspNetCore.DataProtection;
@@ -31,17 +32,28 @@ internal static class ShopHost
         return app;
     }
 
-    public static async Task Open(WebApplication app)
+    /// <returns>What keeps the program from serving, in a sentence; null: nothing.</returns>
+    public static async Task<string?> Open(WebApplication app)
     {
         var gate = app.Services.GetRequiredService<ShopGate>();
         if (app.Configuration["sample"] == "true")
         {
-            await gate.Make(db => SampleShop.Fill(db, SampleShop.Folder, app.Services.GetRequiredService<TimeProvider>().GetUtcNow().UtcDateTime));
+            try
+            {
+                await gate.MakeSample();
+            }
+            catch (SampleFileException e)
+            {
+                Close(gate.File, throwAway: true);
+                return e.Message;
+            }
         }
         else
         {
             await gate.TryOpen();
         }
+
+        return null;
     }
 
     private static void AddServices(WebApplicationBuilder builder, ShopFile file)

@@ -71,6 +71,8 @@ public sealed class ShopDb(DbContextOptions<ShopDb> options) : DbContext(options
 
     public DbSet<Drift> Drifts => Set<Drift>();
 
+    public DbSet<KerfReading> KerfReadings => Set<KerfReading>();
+
     public DbSet<StockMove> StockMoves => Set<StockMove>();
 
     public DbSet<Hold> Holds => Set<Hold>();

@@ -21,12 +21,16 @@ public sealed class ShopFile(string dir) : IDisposable
     private const int CopiesKept = 5;
 
     private FileStream? _lock;
+    private bool _marked;
 
     public string Dir { get; } = System.IO.Path.GetFullPath(dir);
 
     public string Path => System.IO.Path.Combine(Dir, "bladelog.db");
 
     public string LockPath => System.IO.Path.Combine(Dir, "bladelog.lock");
+
+    /// <summary>Stands while the file is open. Where it stands at a start, the last stop was no clean one.</summary>
+    public string OpenMarkPath => System.IO.Path.Combine(Dir, "bladelog.open");
 
     public string CopiesDir => System.IO.Path.Combine(Dir, "copies");
 
@@ -84,6 +88,7 @@ public sealed class ShopFile(string dir) : IDisposable
             File.SetUnixFileMode(Path, UnixFileMode.UserRead | UnixFileMode.UserWrite);
         }
 
+        MarkOpen();
         await using var db = NewContext();
         await db.Database.MigrateAsync();
         await MarkSchema(db);
@@ -108,7 +113,12 @@ public sealed class ShopFile(string dir) : IDisposable
         try
         {
             await db.Database.OpenConnectionAsync();
-            CheckOurs((SqliteConnection)db.Database.GetDbConnection(), db.Database.GetMigrations().Count());
+            var connection = (SqliteConnection)db.Database.GetDbConnection();
+            CheckOurs(connection, db.Database.GetMigrations().Count());
+            if (!_marked && File.Exists(OpenMarkPath))
+            {
+                CheckWhole(connection);
+            }
         }
         catch (SqliteException e)
         {
@@ -121,6 +131,7 @@ public sealed class ShopFile(string dir) : IDisposable
             throw Newer();
         }
 
+        MarkOpen();
         if (!(await db.Database.GetPendingMigrationsAsync()).Any())
         {
             return null;
@@ -173,6 +184,12 @@ public sealed class ShopFile(string dir) : IDisposable
             SqliteConnection.ClearPool(connection);
         }
 
+        if (_marked)
+        {
+            File.Delete(OpenMarkPath);
+            _marked = false;
+        }
+
         _lock?.Dispose();
         _lock = null;
     }
@@ -191,6 +208,26 @@ public sealed class ShopFile(string dir) : IDisposable
         if (Scalar(connection, "PRAGMA user_version") > migrations)
         {
             throw Newer();
+        }
+    }
+
+    private void MarkOpen()
+    {
+        File.WriteAllBytes(OpenMarkPath, []);
+        _marked = true;
+    }
+
+    /// <summary>SQLite may answer wrongly from a damaged page without an error, and the check reports in rows: only the one word "ok" is good.</summary>
+    private void CheckWhole(SqliteConnection connection)
+    {
+        using var command = connection.CreateCommand();
+        command.CommandText = "PRAGMA quick_check(1)";
+        var said = command.ExecuteScalar() as string;
+        if (said != "ok")
+        {
+            throw new ShopFileException(
+                $"BladeLog was not stopped cleanly, and the file {Path} is damaged ({said?.ReplaceLineEndings(" ") ?? "no answer"}). "
+                + $"Nothing was changed. Stop BladeLog and put the last good copy back: restore COPY --data {Dir}. Copies made before an upgrade lie in {CopiesDir}.");
         }
     }
 

@@ -151,4 +151,15 @@ public sealed class CuttingForceTests
         Assert.Equal(1.25, CuttingForce.FitFactorFrom(new Power(150 + 1.25 * model.Watts / 0.85), new Power(150), model), 1e-12);
         Assert.Throws<ArgumentOutOfRangeException>(() => CuttingForce.FitFactorFrom(new Power(100), new Power(150), model));
     }
+
+    [Theory] // by hand: 4,000 W at the shaft over 0.85 and over √3 times 400 V times 0.82 is 8.2834 A; one phase at 230 V
+    [InlineData(8.2833, 400, 0.82, true, 4000 / 0.85)]
+    [InlineData(10, 230, 1, false, 2300)]
+    [InlineData(10, 230, 0.8, false, 1840)]
+    public void A_current_tells_the_power_a_motor_takes(double amperes, double volts, double factor, bool three, double watts)
+    {
+        Assert.Equal(watts, CuttingForce.FromCurrent(amperes, volts, factor, three).Watts, 1e-3 * watts);
+        Assert.Throws<ArgumentOutOfRangeException>(() => CuttingForce.FromCurrent(amperes, volts, 1.1, three));
+        Assert.Throws<ArgumentOutOfRangeException>(() => CuttingForce.FromCurrent(0, volts, factor, three));
+    }
 }

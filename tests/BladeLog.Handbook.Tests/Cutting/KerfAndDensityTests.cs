@@ -57,6 +57,29 @@ public sealed class KerfAndDensityTests
     public void Dust_of_a_hand_fed_cut_passes_the_body() => // independent program, cutting specification 2.4
         Printed.Check("0.0708333", Kerf.SpillRatio(Kinematics.BitePerTooth(Feed(2), Mm(8.5), new Speed(16)), Kerf.SetPerSide(Mm(1.1), Mm(0.6))));
 
+    [Theory] // common practice: set again every second or third sharpening; 0.15 mm off a bend 2 mm below the tip leaves 0.85 after two and 0.775 after three
+    [InlineData(0.15, 2, 3)]
+    [InlineData(0.2, 2, 3)]
+    [InlineData(0.25, 2, 2)]
+    [InlineData(0.1, 2, 5)]
+    public void Teeth_want_setting_when_the_set_has_first_fallen_under_four_fifths(double off, double bend, double grinds)
+    {
+        Assert.Equal(grinds, Kerf.GrindsToSetting(Mm(off), Mm(bend)));
+        Length fresh = Mm(0.25);
+        Assert.True(Kerf.NeedsSetting(Kerf.SetAfter(fresh, grinds, Mm(off * 1.000001), Mm(bend)), fresh));
+        Assert.False(Kerf.NeedsSetting(Kerf.SetAfter(fresh, grinds - 1, Mm(off * 0.999999), Mm(bend)), fresh));
+        Assert.Throws<ArgumentOutOfRangeException>(() => Kerf.GrindsToSetting(Mm(0), Mm(bend)));
+    }
+
+    [Fact]
+    public void Dust_spills_only_on_power_fed_mills_with_a_bite_under_the_clearance() // from memory, sawmill texts: bite no less than the side clearance
+    {
+        Assert.True(Kerf.Spills(Mm(0.3), Mm(0.4), powerFed: true));
+        Assert.False(Kerf.Spills(Mm(0.4), Mm(0.4), powerFed: true));
+        Assert.False(Kerf.Spills(Mm(0.3), Mm(0.4), powerFed: false));
+        Assert.False(Kerf.Spills(Mm(0.09), Mm(0.4), powerFed: true));
+    }
+
     [Fact]
     public void Tips_ground_narrow_still_clear_the_body_and_green_wood_wants_more()
     {

@@ -65,4 +65,11 @@ public sealed class CutLimitsTests
         Assert.Equal((70, 100), (CutLimits.PushGreen.Value, CutLimits.PushAmber.Value));
         Assert.Equal(Provenance.Published, CutLimits.PushGreen.Provenance);
     }
+
+    [Fact]
+    public void Push_to_start_a_load_is_the_published_guideline() // HSE L23: to start or stop a load, 150 N women, 200 N men
+    {
+        Assert.Equal((150, 200), (CutLimits.PushToStartGreen.Value, CutLimits.PushToStartAmber.Value));
+        Assert.All([CutLimits.PushToStartGreen, CutLimits.PushToStartAmber], l => Assert.Equal((Provenance.Published, "hse-l23"), (l.Provenance, l.SourceKey)));
+    }
 }

@@ -1,5 +1,6 @@
 using BladeLog.Advice;
 using BladeLog.Advice.Cuts;
+using BladeLog.Handbook.Quantities;
 using BladeLog.Records;
 using CsCheck;
 

@@ -1,3 +1,4 @@
+using BladeLog.Handbook.Quantities;
 using BladeLog.Records;
 using BladeLog.Records.Folding;
 using BladeLog.Records.Writing;

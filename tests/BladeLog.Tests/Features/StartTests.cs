@@ -1,4 +1,7 @@
 using System.Net;
+using BladeLog.Hosting;
+using BladeLog.Records;
+using Microsoft.Extensions.DependencyInjection;
 
 namespace BladeLog.Tests.Features;
 
@@ -44,5 +47,39 @@ public sealed class StartTests
         using var app = await ShopApp.Sample();
         using var health = await app.Client.GetAsync("/health");
         Assert.Equal(HttpStatusCode.OK, health.StatusCode);
+    }
+
+    [Fact]
+    public async Task Sample_files_that_cannot_be_read_are_told_on_the_start_page_and_nothing_is_made()
+    {
+        var folder = Directory.CreateTempSubdirectory("bladelog-bad").FullName;
+        try
+        {
+            using var app = ShopApp.WithSampleFiles(folder);
+            using var answer = await app.PostForm("/start", new() { ["Begin"] = "sample" });
+            Assert.Equal(HttpStatusCode.UnprocessableEntity, answer.StatusCode);
+            Assert.Contains("The sample shop needs the file", await answer.Content.ReadAsStringAsync(), StringComparison.Ordinal);
+            Assert.Empty(Directory.EnumerateFiles(app.Dir, "*.db"));
+
+            // The way stays open: the shop's own can be begun on the same folder.
+            using var own = await app.PostForm("/start", new() { ["Begin"] = "empty", ["Name"] = "Mine", ["Zone"] = "UTC" });
+            Assert.Equal(HttpStatusCode.Redirect, own.StatusCode);
+        }
+        finally
+        {
+            Directory.Delete(folder, recursive: true);
+        }
+    }
+
+    [Fact]
+    public async Task Sample_files_that_cannot_be_read_end_the_sample_with_one_sentence()
+    {
+        var folder = Directory.CreateTempSubdirectory("bladelog-bad").FullName;
+        var call = new Call(null, null, null, true, null, ["--sample=true", $"--samplefiles={folder}"]);
+        await using var app = ShopHost.Build(call);
+        var place = app.Services.GetRequiredService<ShopFile>().Dir;
+        Assert.StartsWith("The sample shop needs the file", await ShopHost.Open(app), StringComparison.Ordinal);
+        Assert.False(Directory.Exists(place));
+        Directory.Delete(folder);
     }
 }

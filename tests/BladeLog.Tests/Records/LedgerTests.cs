@@ -55,7 +55,10 @@ public class LedgerTests
     {
         using var shop = await TempShop.WithSaws();
         await using var db = shop.Db();
-        await db.Database.ExecuteSqlRawAsync("update entry set previous_hash = x'00', hash = x'01' where id = 1");
+        db.Entries.Add(new Entry { Id = 1000, Op = Guid.NewGuid(), Kind = nameof(Hang), AtUtc = TempShop.Day, EnteredUtc = TempShop.Day });
+        await db.SaveChangesAsync();
+        await db.Database.ExecuteSqlRawAsync("update entry set previous_hash = x'00', hash = x'01' where id = 1000");
+        await Assert.ThrowsAsync<SqliteException>(() => db.Database.ExecuteSqlRawAsync("update entry set hash = x'02' where id = 1000"));
         await Assert.ThrowsAsync<SqliteException>(() => db.Database.ExecuteSqlRawAsync("update entry set hash = x'02' where id = 1"));
     }
 

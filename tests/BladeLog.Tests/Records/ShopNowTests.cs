@@ -113,46 +113,33 @@ public class ShopNowTests
         await shop.Do(SwapTests.On("S1", "Q-1", 0));
         var hold = await shop.Do(new RecordHold("Q-1", HoldKind.Crack) { CrackLengthM = 0.002, Place = CrackPlace.Gullet, At = Day.AddHours(1) });
         await shop.Do(new VoidEntry(hold, "a scratch"), await shop.Person("OT"));
-        var blade = await shop.Ask(async db => await History.OfBlade(db, await db.Blades.Where(b => b.Tag == "Q-1").Select(b => b.Id).SingleAsync()));
-        Assert.Equal(["Hold", "Mount"], blade.Select(r => r.Kind));
-        Assert.Equal(("OT", "a scratch", "Q-1"), (blade[0].StruckOut!.Person, blade[0].StruckOut!.Reason, blade[0].Tag));
-        Assert.Contains(new HistoryPart("crack", null, 0.002, "m"), blade[0].Parts);
-        Assert.Null(blade[1].StruckOut);
-
-        var all = await shop.Ask(db => History.All(db, 3));
-        Assert.Equal(3, all.Count);
-        Assert.True(all[0].AtUtc >= all[1].AtUtc);
+        var blade = await shop.Ask(async db => await Past.OfBlade(db, await db.Blades.Where(b => b.Tag == "Q-1").Select(b => b.Id).SingleAsync(), 10));
+        Assert.Equal(["Hold", "Mount"], blade.Lines.Select(r => r.Entry.Kind));
+        var struck = blade.Lines[0].Entry.Void!;
+        Assert.Equal(("OT", "a scratch", 0.002), (struck.Entry.Person!.Initials, struck.Reason, ((Hold)blade.Lines[0].Fact!).CrackLengthM));
+        Assert.Null(blade.Lines[1].Entry.Void);
+        Assert.False(blade.More);
     }
 
     [Fact]
-    public async Task Every_kind_of_fact_has_its_line_in_the_history()
+    public async Task The_past_is_read_a_page_at_a_time_what_was_entered_last_first()
     {
-        using var shop = await CutDownShop();
-        await shop.Do(new RecordDrift("S1", "Q-2", 0.02));
-        await shop.Do(new RecordTension("S1", "Q-2", 1e8, "100", "gauge"));
-        await shop.Do(new RecordStock("A", 3, "bought"));
-        await shop.Do(new HangUp("Q-2", Place.Rack, "R2-4"));
-        await shop.Do(new RetagBlade("Q-2", "Q-7"));
-        await shop.Do(new RecordPriorUse("Q-7", 0.2, 0.6));
-        await shop.Do(new SendBatch("B-1", "a service", ["Q-7"]));
-        await shop.Do(new TakeBack("B-1", [new BackLine("Q-7", ReturnOutcome.Sharpened)]));
-        await shop.Do(new RecordRetirement("Q-7", RetireReason.Sold));
-        await shop.Do(new RecordInspection("Q-3", Found.Crack));
-        await shop.Do(new ClearHold("Q-3", "ground out"), await shop.Person("OT"));
-        await shop.Do(new SlackTension("S1", true));
-        await shop.Do(new ReadMeter("S1", 0, "0"));
-        await shop.Do(RunningTests.Cut(1));
-        await shop.Do(new ReadHandOver(await shop.Do(new SaveHandOver("Q-3 hangs on H-1."), await shop.Person("OT"))), await shop.Person("JP"));
-        await shop.Do(new RecordTraining("JP", TrainedTask.Sharpen, "OT"));
-        await shop.Do(new RecordLabels(["Q-3"]));
-        var rows = await shop.Ask(db => History.All(db, 500));
-        var facts = typeof(Fact).Assembly.GetTypes().Where(t => t.IsSubclassOf(typeof(Fact)) && t != typeof(VoidFact)).Select(t => t.Name).ToList();
-        Assert.All(facts, kind => Assert.Contains(rows, r => r.Kind == kind));
-        Assert.All(rows.Where(r => facts.Contains(r.Kind)), r => Assert.True(r.Parts.Count > 0 || r.Tag is not null || r.Saw is not null, r.Kind));
+        using var shop = await TempShop.WithSaws();
+        await shop.Do(new HangUp("Q-1", Place.Bench, null) { At = Day });
+        await shop.Do(new HangUp("Q-2", Place.Bench, null) { At = Day.AddDays(-1) });
+        var first = await shop.Ask(db => Past.OfShop(db, 2));
+        Assert.Equal(["Hang", "Hang"], first.Lines.Select(l => l.Entry.Kind));
+        Assert.True(first.Lines[0].Entry.Id > first.Lines[1].Entry.Id && first.Lines[0].Entry.AtUtc < first.Lines[1].Entry.AtUtc);
+        Assert.True(first.More);
+        var rest = await shop.Ask(db => Past.OfShop(db, 500, 2));
+        Assert.False(rest.More);
+        Assert.True(rest.Lines[0].Entry.Id < first.Lines[1].Entry.Id);
+        Assert.Null(await shop.Ask(db => Past.Of(db, 99_999)));
+        Assert.Equal("Hang", (await shop.Ask(db => Past.Of(db, first.Lines[0].Entry.Id)))!.Entry.Kind);
     }
 
     /// <summary>A blade sharpened once, broken at its weld, cut down for a smaller saw and run there.</summary>
-    private static async Task<TempShop> CutDownShop()
+    internal static async Task<TempShop> CutDownShop()
     {
         var shop = await TempShop.WithSaws();
         await shop.Do(new AddSaw("S3", "Small", false, TempShop.Setup(3.5), Day.AddDays(-1)));

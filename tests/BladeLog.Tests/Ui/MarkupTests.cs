@@ -124,7 +124,9 @@ public partial class MarkupTests
         Assert.Equal("/undo", undo.GetAttribute("action"));
         Assert.Equal("a-token", undo.QuerySelector("input[name=__RequestVerificationToken]")!.GetAttribute("value"));
         Assert.Equal("op-1", undo.QuerySelector("input[name=op]")!.GetAttribute("value"));
-        Assert.Equal("Saved10:42", page.QuerySelector("[role=status]")!.TextContent.Trim());
+        Assert.Equal("Saved10:42", page.QuerySelector("#saved")!.TextContent.Trim());
+        Assert.Null(page.QuerySelector("#page [role=status]"));
+        Assert.Equal("true", page.QuerySelector("body > [role=status]")!.GetAttribute("aria-atomic"));
         Assert.Equal("true", page.Body!.GetAttribute("hx-boost:inherited"));
         Assert.Contains("\"defaultTimeout\":8000", page.QuerySelector("meta[name=htmx-config]")!.GetAttribute("content"), StringComparison.Ordinal);
         Assert.All(page.QuerySelectorAll("link[href],script[src]"), e => Assert.Contains("?v=", e.GetAttribute("href") ?? e.GetAttribute("src"), StringComparison.Ordinal));

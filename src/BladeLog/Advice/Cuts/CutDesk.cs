@@ -171,7 +171,13 @@ internal sealed class CutDesk(Shop shop, AdviceSettings settings, DamageTable da
             yield return CutWords.OverPull(c.Saw, c.Tension, words);
         }
 
-        foreach (string outside in CutChecks.Cautions(c.Case!, new Speed(c.Gate!.AdvisedMps!.Value)))
+        Speed advised = new(c.Gate!.AdvisedMps!.Value);
+        if (Kerf.Spills(Kinematics.BitePerTooth(advised, c.Case!.Pitch, c.Case.BandSpeed), Kerf.SetPerSide(c.Case.Kerf, c.Case.Thickness), c.Work.WithFeeder(c.Saw.Setup)))
+        {
+            yield return CutWords.Spills();
+        }
+
+        foreach (string outside in CutChecks.Cautions(c.Case, advised))
         {
             yield return outside;
         }

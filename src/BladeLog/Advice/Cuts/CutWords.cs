@@ -112,6 +112,8 @@ public static class CutWords
 
     public static string Supervisor() => "with a supervisor";
 
+    public static string Spills() => "the bite is smaller than the side clearance: dust slips out past the body";
+
     public static string Nails() => "nails likely: go over the wood with a detector first";
 
     public static string OverPull(SawNow saw, BladeTension tension, Wording words)

@@ -66,7 +66,7 @@ public sealed record CutWork
             Density12 = new Known(material?.Density12 ?? double.NaN, material?.Provenance ?? Provenance.FromMemory, material?.Name ?? "not known"),
             Moisture = cut.MoisturePct is { } given
                 ? Known.Yours(given, "given")
-                : material is { Kind: not Handbook.Tables.MaterialKind.Wood } panel
+                : material is { Kind: not MaterialKind.Wood } panel
                     ? new Known(panel.DefaultMoisture, Provenance.EngineeringDefault, "default, not yours")
                     : settings.Known(CutSettings.Moisture),
             WoodFactor = settings.WoodFactor(material?.WearClass ?? "none"),

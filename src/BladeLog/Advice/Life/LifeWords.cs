@@ -29,7 +29,11 @@ public static class LifeWords
 
     public static string ThicknessToWheel(double ratio) => $"Its body is 1/{Wording.Number(1 / ratio, 0)} of the smallest wheel.";
 
-    public static string Hold(Hold hold, Wording words)
+    /// <summary>"on hold: crack 2.6 mm at a gullet".</summary>
+    public static string Hold(Hold hold, Wording words) => HoldReason(hold, words) is { } reason ? $"on hold: {reason}" : "on hold";
+
+    /// <summary>"crack 2.6 mm at a gullet"; null where nobody said.</summary>
+    public static string? HoldReason(Hold hold, Wording words)
     {
         ArgumentNullException.ThrowIfNull(hold);
         ArgumentNullException.ThrowIfNull(words);
@@ -37,14 +41,14 @@ public static class LifeWords
         {
             HoldKind.Crack => (hold.CrackLengthM, hold.Place) switch
             {
-                ({ } length, { } place) => $"on hold: crack {words.Length(length)} {Where(place)}",
-                (null, { } place) => $"on hold: crack {Where(place)}",
-                ({ } length, null) => $"on hold: crack {words.Length(length)}",
-                _ => "on hold: crack",
+                ({ } length, { } place) => $"crack {words.Length(length)} {Where(place)}",
+                (null, { } place) => $"crack {Where(place)}",
+                ({ } length, null) => $"crack {words.Length(length)}",
+                _ => "crack",
             },
-            HoldKind.Clicking => "on hold: clicking heard",
-            HoldKind.Damage => "on hold: damage",
-            _ => "on hold",
+            HoldKind.Clicking => "clicking heard",
+            HoldKind.Damage => "damage",
+            _ => null,
         };
     }
 

@@ -7,7 +7,7 @@ using BladeLog.Ui.Pictures.Geometry;
 namespace BladeLog.Features.Bench;
 
 /// <summary>One blade on the day's list: why, and where to write what was done.</summary>
-public sealed record BenchRow(string Tag, ToothSpec Teeth, string Why, string Where, string Href, string Verb);
+public sealed record BenchRow(string Tag, ToothSpec Teeth, string Why, string Where, string Href, string Verb, Worked? Worked);
 
 /// <summary>A batch that is out.</summary>
 public sealed record BatchRow(string Number, string Service, string Sent, string Promised, bool Late, IReadOnlyList<string> Tags);
@@ -69,6 +69,6 @@ public sealed record BenchModel(IReadOnlyList<BenchRow> Sharpen, IReadOnlyList<B
             Place.Bench => "on the bench",
             _ => file.Hook is null ? "on the rack" : $"hook {file.Hook}",
         };
-        return new BenchRow(file.Blade.Tag, Drawn.Teeth(blade.Body, file.Spec), why, where, $"/blades/{file.Blade.Tag}/{page}", verb);
+        return new BenchRow(file.Blade.Tag, Drawn.Teeth(blade.Body, file.Spec), why, where, $"/blades/{file.Blade.Tag}/{page}", verb, verb is "Sharpen" or "No grind" ? WorkedOut.Edge(blade) : verb == "Look" ? WorkedOut.Life(blade) : null);
     }
 }

@@ -1,6 +1,3 @@
-using BladeLog.Records;
-using Microsoft.EntityFrameworkCore;
-
 namespace BladeLog.Features.Bench;
 
 /// <summary>What the person at the bench has to do today, and what is away.</summary>
@@ -16,17 +13,5 @@ internal static class BenchPages
     }
 
     private static async Task<IResult> Get(Desk desk) =>
-        await desk.Page<BenchPage, BenchModel>(BenchModel.Of(await desk.Advice(), await OffAsDull(desk), await desk.Units()));
-
-    /// <summary>Blades that came off as dull and were not ground since.</summary>
-    public static async Task<IReadOnlySet<int>> OffAsDull(Desk desk)
-    {
-        var db = desk.Db;
-        var dull = await db.Dismounts.AsNoTracking()
-            .Where(d => d.Reason == OffReason.Dull
-                && !db.Sharpenings.Any(s => s.BladeId == d.Mount.BladeId && s.Entry.AtUtc >= d.Entry.AtUtc)
-                && !db.Mounts.Any(m => m.BladeId == d.Mount.BladeId && m.Entry.AtUtc >= d.Entry.AtUtc))
-            .Select(d => d.Mount.BladeId).ToListAsync();
-        return dull.ToHashSet();
-    }
+        await desk.Page<BenchPage, BenchModel>(BenchModel.Of(await desk.Advice(), await DullBlades.OffAsDull(desk.Db), await desk.Units()));
 }

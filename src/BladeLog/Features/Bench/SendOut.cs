@@ -56,7 +56,7 @@ internal static class SendOut
     private static async Task<IResult> Show(Desk desk, SendOutForm form, FormState state)
     {
         var advice = await desk.Advice();
-        var dull = await BenchPages.OffAsDull(desk);
+        var dull = await DullBlades.OffAsDull(desk.Db);
         var rows = advice.Now.Blades.Where(b => b.Place is Place.Rack or Place.Bench && b.Hold is null).Select(advice.Of)
             .Where(b => b.State == BladeState.Sharpen || dull.Contains(b.File.Blade.Id) || form.Pick?.Contains(b.File.Blade.Tag) == true)
             .OrderBy(b => b.File.Blade.Tag, StringComparer.Ordinal)

@@ -58,9 +58,21 @@ public sealed record BladeModel
     /// <summary>Null: held, so no life is told at all.</summary>
     public LifePart? Life { get; init; }
 
+    /// <summary>Where its life, its edge, its width and the rest are worked out.</summary>
+    public IReadOnlyList<Worked> WorkedLife { get; init; } = [];
+
+    public IReadOnlyList<Worked> WorkedEdge { get; init; } = [];
+
+    public IReadOnlyList<Worked> WorkedLimits { get; init; } = [];
+
+    public IReadOnlyList<Worked> Worked { get; init; } = [];
+
     public required string EdgeTitle { get; init; }
 
     public required string EdgeWords { get; init; }
+
+    /// <summary>What its measured kerf and set tell.</summary>
+    public IReadOnlyList<string> KerfSays { get; init; } = [];
 
     public BitePart? Bite { get; init; }
 
@@ -83,8 +95,8 @@ public sealed record BladeModel
 
     public IReadOnlyList<StoryLine> Story { get; init; } = [];
 
-    /// <summary>Entries not shown; 0: all are.</summary>
-    public int Older { get; init; }
+    /// <summary>There are entries not shown.</summary>
+    public bool More { get; init; }
 }
 
 /// <summary>No blade of this tag.</summary>

@@ -8,16 +8,12 @@ namespace BladeLog.Features.Blades;
 /// <summary>Puts the page of one blade together.</summary>
 internal static class BladePageModel
 {
-    private const int Shown = 8;
-
-    public static BladeModel Of(BladeFile file, ShopAdvice advice, ShopUnits units, IReadOnlyList<PastFact> past, bool all)
+    public static BladeModel Of(BladeFile file, ShopAdvice advice, ShopUnits units, PastPage past, IReadOnlyList<Fact> cracks, Story story)
     {
         BladeAdvice blade = advice.Of(file);
         BladeParts parts = new(blade, advice, units);
         (string edgeTitle, string edgeWords) = parts.Edge();
         (string governs, IReadOnlyList<LimitPart> limits) = parts.Limits();
-        Dictionary<int, string> saws = advice.Now.Saws.ToDictionary(s => s.Saw.Id, s => s.Saw.Name);
-        IReadOnlyList<PastFact> told = all ? past : [.. past.Take(Shown)];
         return new BladeModel
         {
             Tag = file.Blade.Tag,
@@ -31,21 +27,26 @@ internal static class BladePageModel
             Kerf = blade.Body.Kerf.Value * 1e3,
             Depth = blade.Body.Gullet.Value * 1e3,
             Tip = blade.Body.Tip,
-            Facts = [.. parts.Facts(), .. CrackFacts.Of(file, past, advice.Words)],
+            Facts = [.. parts.Facts(), .. CrackFacts.Of(file, cracks, advice.Words)],
             Life = parts.Life(),
             EdgeTitle = edgeTitle,
             EdgeWords = edgeWords,
+            KerfSays = KerfWords.Of(file, advice.Settings, advice.Words),
             Bite = parts.Bite(),
             GovernsTitle = governs,
             Limits = limits,
             Runs = parts.Runs(),
             Paths = parts.Paths(),
             Because = Reckoned.Lines(BladeFigures.Of(blade, advice.Settings), units),
+            WorkedLife = WorkedOut.Rows(WorkedOut.Life(blade)),
+            WorkedEdge = WorkedOut.Rows(WorkedOut.Edge(blade)),
+            WorkedLimits = WorkedOut.Rows(WorkedOut.Grinding(blade)),
+            Worked = WorkedOut.Rows(WorkedOut.Tension(blade, null, advice.Words), WorkedOut.Push(blade, null)),
             Actions = [.. Actions(blade, advice)],
             Last = blade.State == BladeState.Retired ? null : new BladeAction($"Retire {file.Blade.Tag}", At(blade, "retire")),
             Cautions = [.. Cautions(blade)],
-            Story = [.. told.Select(p => Story.Line(p, advice.Now.AsOf, units, advice.Words, saws))],
-            Older = past.Count - told.Count,
+            Story = [.. past.Lines.Select(p => story.Line(p, About.Blade))],
+            More = past.More,
         };
     }
 
@@ -100,15 +101,23 @@ internal static class BladePageModel
             yield return new("It broke", At(blade, "break"), Alarm: true);
             yield return new("Welded", At(blade, "join"));
             yield return new("Leads", At(blade, "drift"));
+            yield return new("Kerf and set", At(blade, "kerf"));
+            yield return new(Said.Capital(advice.Words.Tension), At(blade, "tension"));
         }
 
         yield return new("What if", At(blade, "what-if"));
-        if (blade.State != BladeState.Hold)
+        if (blade.State != BladeState.Retired && file.Place is Place.Rack or Place.Bench)
         {
-            yield return new("Workings", $"/workings/band-life?blade={tag}{(blade.Record.On is { } asked ? $"&saw={asked.Saw.Code}" : "")}");
+            yield return new("Where it hangs", At(blade, "hang"));
+        }
+
+        if (blade.State is not (BladeState.Broken or BladeState.Retired))
+        {
+            yield return new("Label", $"/labels?tags={Uri.EscapeDataString(tag)}");
         }
 
         yield return new("Edit", At(blade, "edit"));
+        yield return new("Its kind", $"{SpecEdit.Of(file.Spec.Code)}?blade={Uri.EscapeDataString(tag)}");
     }
 
     private static IEnumerable<BladeCaution> Cautions(BladeAdvice blade)

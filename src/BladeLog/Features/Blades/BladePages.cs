@@ -5,6 +5,8 @@ namespace BladeLog.Features.Blades;
 /// <summary>The page of one blade.</summary>
 internal static class BladePages
 {
+    private const int Shown = 8;
+
     public static void Map(WebApplication app) => app.MapGet("/blades/{tag}", Get);
 
     private static async Task<IResult> Get(Desk desk, string tag, string? all)
@@ -16,7 +18,7 @@ internal static class BladePages
             return await desk.Page<NoBladePage, NoBladeModel>(new NoBladeModel(sought.Length > 20 ? sought[..20] + "…" : sought, NearestTags.To(sought.Length > 20 ? sought[..20] : sought, shop)), StatusCodes.Status404NotFound);
         }
 
-        IReadOnlyList<PastFact> past = await Past.OfBlade(desk.Db, blade.Blade.Id);
-        return await desk.Page<BladePage, BladeModel>(BladePageModel.Of(blade, await desk.Advice(), await desk.Units(), past, all is not null));
+        PastPage past = await Past.OfBlade(desk.Db, blade.Blade.Id, all is null ? Shown : int.MaxValue);
+        return await desk.Page<BladePage, BladeModel>(BladePageModel.Of(blade, await desk.Advice(), await desk.Units(), past, await CrackFacts.Read(desk.Db, blade.Blade.Id), await Story.Of(desk)));
     }
 }

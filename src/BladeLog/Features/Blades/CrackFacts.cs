@@ -2,18 +2,35 @@ using BladeLog.Advice;
 using BladeLog.Advice.Life;
 using BladeLog.Records;
 using BladeLog.Ui;
+using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Features.Blades;
 
 /// <summary>Cracks that were measured more than once.</summary>
 internal static class CrackFacts
 {
-    /// <summary>What a crack grew by between two measurements. No life is reckoned from it: any crack that can be seen is a hold.</summary>
-    public static IEnumerable<BladeFact> Of(BladeFile file, IReadOnlyList<PastFact> past, Wording words)
+    /// <summary>The blade's measured cracks and, where there are two to compare, its time on the saws.</summary>
+    public static async Task<IReadOnlyList<Fact>> Read(ShopDb db, int bladeId)
     {
-        Fact[] facts = [.. past.Where(p => !p.Struck).Select(p => p.Fact)];
-        IEnumerable<CrackSeen> seen = facts.OfType<Inspection>().Where(f => f.CrackLengthM > 0).Select(f => new CrackSeen(f.Entry.AtUtc, f.CrackLengthM!.Value, f.Place))
-            .Concat(facts.OfType<Records.Hold>().Where(f => f.CrackLengthM > 0).Select(f => new CrackSeen(f.Entry.AtUtc, f.CrackLengthM!.Value, f.Place)));
+        List<Fact> facts =
+        [
+            .. await Past.Standing(db.Inspections.Where(f => f.BladeId == bladeId && f.CrackLengthM > 0)).ToListAsync(),
+            .. await Past.Standing(db.Holds.Where(f => f.BladeId == bladeId && f.CrackLengthM > 0)).ToListAsync(),
+        ];
+        if (facts.Count > 1)
+        {
+            facts.AddRange(await Past.Standing(db.Mounts.Where(f => f.BladeId == bladeId)).ToListAsync());
+            facts.AddRange(await Past.Standing(db.Dismounts.Where(f => f.Mount.BladeId == bladeId)).ToListAsync());
+        }
+
+        return facts;
+    }
+
+    /// <summary>What a crack grew by between two measurements. No life is reckoned from it: any crack that can be seen is a hold.</summary>
+    public static IEnumerable<BladeFact> Of(BladeFile file, IReadOnlyList<Fact> facts, Wording words)
+    {
+        IEnumerable<CrackSeen> seen = facts.OfType<Inspection>().Select(f => new CrackSeen(f.Entry.AtUtc, f.CrackLengthM!.Value, f.Place))
+            .Concat(facts.OfType<Records.Hold>().Select(f => new CrackSeen(f.Entry.AtUtc, f.CrackLengthM!.Value, f.Place)));
         Dictionary<int, DateTime> off = facts.OfType<Dismount>().ToDictionary(f => f.MountId, f => f.Entry.AtUtc);
         IEnumerable<(DateTime, DateTime)> spells = facts.OfType<Mount>().Select(f => (f.Entry.AtUtc, off.GetValueOrDefault(f.EntryId, DateTime.MaxValue)));
         foreach (CrackGrown growth in CrackGrown.Of(file, seen, [.. spells]))

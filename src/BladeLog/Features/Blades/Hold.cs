@@ -1,21 +1,12 @@
 using BladeLog.Records;
 using BladeLog.Records.Writing;
-using BladeLog.Ui;
 using Microsoft.AspNetCore.Mvc;
 
 namespace BladeLog.Features.Blades;
 
-public sealed record HoldForm : PostedForm
+public sealed record HoldForm : CrackForm
 {
     public string? Kind { get; init; }
-
-    public string? CrackLength { get; init; }
-
-    public string? Place { get; init; }
-
-    public string? Note { get; init; }
-
-    public string? At { get; init; }
 }
 
 /// <summary>Do not use it until a named person clears it.</summary>
@@ -33,13 +24,14 @@ internal static class Hold
 
         var read = new FormReading(await desk.Units(), desk.Now);
         var kind = read.Choice<HoldKind>(nameof(form.Kind), form.Kind, "Say why it is put on hold.");
+        var said = form.Read(read);
         var command = new RecordHold(tag, kind ?? default)
         {
-            CrackLengthM = read.Length(nameof(form.CrackLength), form.CrackLength, Fields.CrackLength),
-            CrackTyped = form.CrackLength?.Trim(),
-            Place = read.Choice<CrackPlace>(nameof(form.Place), form.Place, null),
-            Note = string.IsNullOrWhiteSpace(form.Note) ? null : form.Note.Trim(),
-            At = read.Time(nameof(form.At), form.At),
+            CrackLengthM = said.LengthM,
+            CrackTyped = said.Typed,
+            Place = said.Place,
+            Note = said.Note,
+            At = said.At,
         };
         return read.IsGood
             ? await desk.Send(command, form, BladeForm.Of(tag), $"Hold of {Tags.Read(tag)}", state => Show(desk, tag, form, state))

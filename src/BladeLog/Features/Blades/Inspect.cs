@@ -1,21 +1,12 @@
 using BladeLog.Records;
 using BladeLog.Records.Writing;
-using BladeLog.Ui;
 using Microsoft.AspNetCore.Mvc;
 
 namespace BladeLog.Features.Blades;
 
-public sealed record InspectForm : PostedForm
+public sealed record InspectForm : CrackForm
 {
     public string? Found { get; init; }
-
-    public string? CrackLength { get; init; }
-
-    public string? Place { get; init; }
-
-    public string? Note { get; init; }
-
-    public string? At { get; init; }
 
     /// <summary>Asked because a nail, a stone or grit was hit.</summary>
     public string? Nail { get; init; }
@@ -36,13 +27,14 @@ internal static class Inspect
 
         var read = new FormReading(await desk.Units(), desk.Now);
         var found = read.Choice<Found>(nameof(form.Found), form.Found, "Say what was found.");
+        var said = form.Read(read);
         var command = new RecordInspection(tag, found ?? default)
         {
-            CrackLengthM = read.Length(nameof(form.CrackLength), form.CrackLength, Fields.CrackLength),
-            CrackTyped = form.CrackLength?.Trim(),
-            Place = read.Choice<CrackPlace>(nameof(form.Place), form.Place, null),
-            Note = string.IsNullOrWhiteSpace(form.Note) ? null : form.Note.Trim(),
-            At = read.Time(nameof(form.At), form.At),
+            CrackLengthM = said.LengthM,
+            CrackTyped = said.Typed,
+            Place = said.Place,
+            Note = said.Note,
+            At = said.At,
         };
         return read.IsGood
             ? await desk.Send(command, form, BladeForm.Of(tag), $"Look at {Tags.Read(tag)}", state => Show(desk, tag, form, state))

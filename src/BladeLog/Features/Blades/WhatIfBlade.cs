@@ -37,6 +37,9 @@ public sealed record WhatIfBladeModel
 
     public IReadOnlyList<string> Remarks { get; init; } = [];
 
+    /// <summary>Where the figures of the change are worked out.</summary>
+    public IReadOnlyList<Worked> Worked { get; init; } = [];
+
     /// <summary>On hold: no life is told.</summary>
     public string? Held { get; init; }
 
@@ -144,6 +147,7 @@ internal static class WhatIfBlade
             Rows = [.. Rows(compared, model.Held is not null, shown)],
             Stops = stops,
             Remarks = remarks,
+            Worked = model.Held is null ? [WorkedOut.Changed(then)] : [],
         };
     }
 

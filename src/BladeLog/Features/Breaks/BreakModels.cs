@@ -5,7 +5,7 @@ using BladeLog.Ui.Pictures.Geometry;
 namespace BladeLog.Features.Breaks;
 
 /// <summary>One break in the list.</summary>
-public sealed record BreakRow(int Entry, string Tag, string When, string Saw, string Site, string Hours, string Used, string Bending, string Thickness, string Cost, bool ToComplete);
+public sealed record BreakRow(int Entry, string Tag, string When, string Saw, string Site, string Hours, string Used, string Bending, string Thickness, string Cost, bool ToComplete, Worked? Worked);
 
 /// <summary>Breaks that gather.</summary>
 public sealed record ClusterPart(string Title, string Says, string Tags);
@@ -56,6 +56,8 @@ public sealed record BreakModel
     public required IReadOnlyList<ClusterPart> Clusters { get; init; }
 
     public required IReadOnlyList<BecauseLine> Because { get; init; }
+
+    public IReadOnlyList<Worked> Worked { get; init; } = [];
 
     public required CompleteForm Form { get; init; }
 

@@ -44,6 +44,7 @@ internal sealed class BreakSays(ShopAdvice advice, ShopUnits units, DateTime now
             LifeWords = Life(b),
             Clusters = [.. Clusters.Where(c => c.Broken.Any(x => x.Tag == tag)).Select(Cluster)],
             Because = Reckoned.Lines(Because(b), units),
+            Worked = WorkedOut.Rows(WorkedOut.Life(b.Blade, b.Saw), WorkedOut.Tension(b.Blade, b.Saw, advice.Words)),
             Form = form,
             State = state,
             ToComplete = b.ToComplete,
@@ -62,7 +63,8 @@ internal sealed class BreakSays(ShopAdvice advice, ShopUnits units, DateTime now
         Bending(b) is { } stress ? units.Show(stress) : "",
         b.Blade.Record.ThicknessToWheel is { } ratio ? $"1/{Wording.Number(1 / ratio, 0)}" : "",
         units.ShowMoney(b.Cost.Total),
-        b.ToComplete);
+        b.ToComplete,
+        WorkedOut.Life(b.Blade, b.Saw));
 
     private ClusterPart Cluster(BreakCluster c)
     {

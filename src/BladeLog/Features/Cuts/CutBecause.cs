@@ -10,8 +10,6 @@ namespace BladeLog.Features.Cuts;
 /// <summary>The figures behind a choice as rows, in four groups.</summary>
 public sealed record CutBecause(IReadOnlyList<BecauseLine> Blade, IReadOnlyList<BecauseLine> Limits, IReadOnlyList<BecauseLine> Forces, IReadOnlyList<BecauseLine> Job)
 {
-    private static readonly HashSet<string> NoSource = ["derived", "common-practice", "from-memory", "engineering-default"];
-
     internal static CutBecause Of(Choice choice, ShopAdvice advice, ShopUnits units)
     {
         ArgumentNullException.ThrowIfNull(choice);
@@ -32,7 +30,7 @@ public sealed record CutBecause(IReadOnlyList<BecauseLine> Blade, IReadOnlyList<
         Said.Capital(f.Name == "tension" ? words.Tension : f.Name),
         Value(f, units),
         f.How,
-        NoSource.Contains(f.Source) ? null : f.Source,
+        Reckoned.Source(f.Source),
         f.Provenance);
 
     private static string Value(Figure f, ShopUnits units) => f.Unit switch

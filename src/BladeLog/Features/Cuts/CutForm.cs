@@ -4,7 +4,6 @@ using BladeLog.Records;
 using BladeLog.Records.Writing;
 using BladeLog.Ui;
 using Microsoft.AspNetCore.Mvc;
-using MaterialTable = BladeLog.Handbook.Tables.MaterialTable;
 using Problem = BladeLog.Ui.Forms.Problem;
 
 namespace BladeLog.Features.Cuts;
@@ -57,7 +56,7 @@ public sealed record CutForm
     {
         Op = Guid.NewGuid().ToString(),
         Pieces = "1",
-        Dirt = nameof(Records.Dirt.Clean),
+        Dirt = nameof(Handbook.Quantities.Dirt.Clean),
         Direction = nameof(CutDirection.Rip),
     };
 
@@ -93,7 +92,7 @@ public sealed record CutForm
             read.Refuse(nameof(Job), "Say in a few words what it is for, such as drawer fronts.");
         }
 
-        Wood? wood = Wood.Read(Species, read, nameof(Species));
+        Wood? wood = read.Wood(Species, nameof(Species));
         double? height = read.NeedLength(Height, nameof(Height), Fields.CutHeight), length = read.NeedLength(Length, nameof(Length), Fields.Board);
         int? pieces = read.NeedPieces(Pieces, nameof(Pieces));
         CutKind? kind = read.OneOf<CutKind>(Kind, nameof(Kind), "Choose what kind of work it is.");
@@ -136,48 +135,6 @@ public sealed record CutForm
             Due = due,
         };
     }
-}
-
-/// <summary>A word typed for a wood, and what the handbook takes it for.</summary>
-internal sealed record Wood(string Key, string Typed, string? TakenAs, MaterialKind Kind, string WearClass)
-{
-    private const int LongestName = 60;
-
-    public static Wood? Read(string? text, FormReader read, string field)
-    {
-        string typed = (text ?? "").Trim();
-        if (typed.Length is 0 or > LongestName)
-        {
-            read.Refuse(field, "Say which wood or panel it is, such as European oak or birch plywood.");
-            return null;
-        }
-
-        if (MaterialTable.Find(typed, out string? takenAs) is not { } found)
-        {
-            IReadOnlyList<string> near = MaterialTable.NearestNames(typed);
-            read.Refuse(field, near.Count > 0
-                ? $"\"{typed}\" is not a wood known here. The nearest names are {string.Join(", ", near)}: tap one, or write another."
-                : $"\"{typed}\" is not a wood known here. Write its usual name, such as European oak.");
-            return null;
-        }
-
-        MaterialKind kind = found.Kind switch
-        {
-            Handbook.Tables.MaterialKind.Wood => MaterialKind.Wood,
-            Handbook.Tables.MaterialKind.Panel => MaterialKind.Panel,
-            _ => MaterialKind.Other,
-        };
-        return new Wood(found.Key, typed, takenAs, kind, found.WearClass);
-    }
-
-    /// <summary>Names to tap where the word is not known; none where it is.</summary>
-    public static IReadOnlyList<string> Offers(string? text)
-    {
-        string typed = (text ?? "").Trim();
-        return typed.Length is 0 or > LongestName || MaterialTable.Find(typed, out _) is not null ? [] : MaterialTable.NearestNames(typed);
-    }
-
-    public static IReadOnlyList<string> Names { get; } = [.. MaterialTable.All.Select(m => m.Name)];
 }
 
 public sealed record CutFormModel(int? Number, CutForm Form, IReadOnlyList<Problem> Problems, ShopUnits Units, string MoistureDefault)

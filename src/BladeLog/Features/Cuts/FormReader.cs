@@ -12,6 +12,17 @@ internal sealed class FormReader(ShopUnits units, DateTime now)
 
     public ShopUnits Units => units;
 
+    public Wood? Wood(string? text, string field)
+    {
+        Wood? wood = Features.Wood.Read(text, out string? wrong);
+        if (wrong is not null)
+        {
+            Refuse(field, wrong);
+        }
+
+        return wood;
+    }
+
     public double? Length(string? text, string field, TypedField kind) => Read(text, field, t => units.ReadLength(t, kind))?.Metres;
 
     public double? NeedLength(string? text, string field, TypedField kind) => Need(text, field, t => units.ReadLength(t, kind))?.Metres;

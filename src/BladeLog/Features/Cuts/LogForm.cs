@@ -85,7 +85,7 @@ public sealed record LogForm
         Saw = saw.Saw.Code,
         Speed = Plain(saw.Setup.UsualSpeedMps),
         Pieces = "1",
-        Dirt = nameof(Records.Dirt.Clean),
+        Dirt = nameof(Handbook.Quantities.Dirt.Clean),
         Assumed = Plain(feed),
     };
 
@@ -103,7 +103,7 @@ public sealed record LogForm
             read.Refuse(nameof(Saw), "Choose the saw it was cut on.");
         }
 
-        Wood? wood = Wood.Read(Species, read, nameof(Species));
+        Wood? wood = read.Wood(Species, nameof(Species));
         if (wood is { Kind: MaterialKind.Other })
         {
             read.Refuse(nameof(Species), $"{wood.Typed} is not wood: its wear on an edge is not known here, so such a cut is not counted.");

@@ -1,7 +1,6 @@
 using BladeLog.Handbook.Quantities;
 using BladeLog.Records;
 using BladeLog.Ui.Json;
-using MaterialTable = BladeLog.Handbook.Tables.MaterialTable;
 
 namespace BladeLog.Features.Cuts;
 
@@ -71,9 +70,9 @@ internal sealed record QueuedCutIn
     /// <summary>The row of the list; null with its sentence said where the wood is not known.</summary>
     public QueuedCut? Queued(Guid uid, string at, BodyReader reader)
     {
-        if (MaterialTable.Find(Species, out var takenAs) is not { } material)
+        if (Wood.Read(Species, out var wrong) is not { } wood)
         {
-            reader.Say($"{at}.species", $"\"{Species}\" is not a wood known here. The nearest names are: {string.Join(", ", MaterialTable.NearestNames(Species))}.");
+            reader.Say($"{at}.species", wrong!);
             return null;
         }
 
@@ -81,10 +80,10 @@ internal sealed record QueuedCutIn
         {
             Uid = uid,
             Job = Job,
-            Material = Enum.Parse<MaterialKind>(material.Kind.ToString()),
-            SpeciesKey = material.Key,
-            SpeciesTyped = Species,
-            TakenAs = takenAs,
+            Material = wood.Kind,
+            SpeciesKey = wood.Key,
+            SpeciesTyped = wood.Typed,
+            TakenAs = wood.TakenAs,
             HeightM = Height / 1e3,
             LengthM = Length / 1e3,
             Pieces = Pieces,

@@ -13,6 +13,9 @@ public sealed record BigFigure(string Number, string Unit, string Way, string St
     public double? Worn { get; init; }
 
     public LifeFigures? Life { get; init; }
+
+    /// <summary>Where the figure is worked out.</summary>
+    public Worked? Worked { get; init; }
 }
 
 /// <summary>The next cut of a saw and what to do for it.</summary>
@@ -106,7 +109,7 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
 
     private static string Heard(Hold hold, ShopAdvice advice, ShopUnits units, IReadOnlyDictionary<int, string> initials)
     {
-        string what = hold.Kind == HoldKind.Clicking ? "Clicking heard" : Said.Capital(LifeWords.Hold(hold, advice.Words)["on hold: ".Length..]);
+        string what = Said.Capital(LifeWords.HoldReason(hold, advice.Words) ?? "put on hold");
         string when = hold.Entry is { } entry ? " " + Said.When(entry.AtUtc, advice.Now.AsOf, units) : "";
         string who = hold.Entry?.PersonId is { } id && initials.TryGetValue(id, out string? name) ? " by " + name : "";
         return $"Do not run. {what}{when}{who}.";
@@ -140,7 +143,7 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
         string depth = left.CutNumber is { } n ? $"in cut {n}" : $"in clean wood {Wording.Number(left.DepthM * 1e3, 0)} mm deep at {Wording.Number(left.FeedMps * 60, 1)} m/min";
         // An edge that will not be ground again runs into the scrap, not into the grinder.
         string stop = blade.Grind.Pays ? "grind" : "scrap";
-        return new BigFigure(Figures.Floor(value), unit, "to", stop, $"Sharpness: {Figures.Number(value)} {unit} left {depth}") { Worn = blade.Edge.Used };
+        return new BigFigure(Figures.Floor(value), unit, "to", stop, $"Sharpness: {Figures.Number(value)} {unit} left {depth}") { Worn = blade.Edge.Used, Worked = WorkedOut.Edge(blade, null, left.CutNumber) };
     }
 
     private static (BigFigure? Figure, string? Words) Limit(BladeAdvice blade, ShopAdvice advice, ShopUnits units)
@@ -156,7 +159,7 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
             (double hours, string way, string stop) = life.Reckoned.Blade < advice.Settings.WatchMark ? (life.HoursToWatch!.Value, "to", "look")
                 : !blade.PastRetireMark ? (life.HoursToRetire!.Value, "to", "retire")
                 : (0, "past", "mark");
-            return (new BigFigure(Hours(hours), "h", way, stop, LifeBandGeometry.Describe(band)) { Life = band }, null);
+            return (new BigFigure(Hours(hours), "h", way, stop, LifeBandGeometry.Describe(band)) { Life = band, Worked = WorkedOut.Life(blade) }, null);
         }
 
         if (life.Verdict == Handbook.Fatigue.LifeVerdict.Unsuitable)
@@ -176,7 +179,7 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
     {
         int left = Math.Max(0, blade.File.Spec.MostSharpenings!.Value - blade.File.Sharpenings);
         string word = left == 1 ? "grind" : "grinds";
-        return new BigFigure(Figures.Floor(left), "", word, "left", $"{left} {word} left; flexing will not end it") { Worn = used };
+        return new BigFigure(Figures.Floor(left), "", word, "left", $"{left} {word} left; flexing will not end it") { Worn = used, Worked = WorkedOut.Grinding(blade) };
     }
 
     private static BigFigure WidthLeft(BladeAdvice blade, double used, ShopUnits units)
@@ -185,7 +188,7 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
         (string number, string unit) = units.Units == UnitSystem.Inch
             ? ((left / Handbook.Units.Exact.Inch).ToString("0.00", System.Globalization.CultureInfo.InvariantCulture), "in")
             : (left < 0.00995 ? (left * 1e3).ToString("0.0", System.Globalization.CultureInfo.InvariantCulture) : Figures.Floor(left * 1e3), "mm");
-        return new BigFigure(number, unit, "width", "left", $"{number} {unit} of width left; flexing will not end it") { Worn = used };
+        return new BigFigure(number, unit, "width", "left", $"{number} {unit} of width left; flexing will not end it") { Worn = used, Worked = WorkedOut.Grinding(blade) };
     }
 
     /// <summary>Under ten hours a decimal matters, unless it is nought.</summary>

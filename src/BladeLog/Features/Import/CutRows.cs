@@ -2,7 +2,6 @@ using BladeLog.Handbook.Quantities;
 using BladeLog.Records;
 using BladeLog.Records.Writing;
 using BladeLog.Ui;
-using MaterialTable = BladeLog.Handbook.Tables.MaterialTable;
 
 namespace BladeLog.Features.Import;
 
@@ -80,16 +79,16 @@ internal sealed class CutRows(ShopNow shop) : IImportKind
             return [];
         }
 
-        Same(row.Line, $"{job}|{species!.Value.Key}|{height}|{length}|{radius}", job!, remarks);
+        Same(row.Line, $"{job}|{species!.Key}|{height}|{length}|{radius}", job!, remarks);
         return
         [
             new QueueCut(new QueuedCut
             {
                 Job = job!,
-                Material = species.Value.Kind,
-                SpeciesKey = species.Value.Key,
-                SpeciesTyped = species.Value.Typed,
-                TakenAs = species.Value.TakenAs,
+                Material = species.Kind,
+                SpeciesKey = species.Key,
+                SpeciesTyped = species.Typed,
+                TakenAs = species.TakenAs,
                 HeightM = height!.Value,
                 HeightTyped = row.Understood["height"],
                 LengthM = length!.Value,
@@ -126,7 +125,7 @@ internal sealed class CutRows(ShopNow shop) : IImportKind
         _jobs.TryAdd(signature, line);
     }
 
-    private static (string Key, string Typed, string? TakenAs, MaterialKind Kind)? Species(RowReader row)
+    private static Wood? Species(RowReader row)
     {
         row.Need("species", "Say which wood or panel it is.");
         if (row.Text("species") is not { } typed)
@@ -134,23 +133,16 @@ internal sealed class CutRows(ShopNow shop) : IImportKind
             return null;
         }
 
-        if (typed.Length > 60 || MaterialTable.Find(typed, out string? takenAs) is not { } found)
+        var wood = Wood.Read(typed, out var wrong);
+        if (wrong is not null)
         {
-            IReadOnlyList<string> near = typed.Length > 60 ? [] : MaterialTable.NearestNames(typed);
-            row.Refuse("species", near.Count > 0 ? $"\"{typed}\" is not a wood known here. The nearest names are {string.Join(", ", near)}." : "This is not a wood known here.");
-            return null;
+            row.Refuse("species", wrong);
+        }
+        else if (wood is { TakenAs: { } takenAs })
+        {
+            row.Say("species", $"{typed}, taken as {takenAs}");
         }
 
-        if (takenAs is not null)
-        {
-            row.Say("species", $"{typed}, taken as {found.Name}");
-        }
-
-        return (found.Key, typed, takenAs, found.Kind switch
-        {
-            Handbook.Tables.MaterialKind.Wood => MaterialKind.Wood,
-            Handbook.Tables.MaterialKind.Panel => MaterialKind.Panel,
-            _ => MaterialKind.Other,
-        });
+        return wood;
     }
 }

@@ -5,12 +5,9 @@ using BladeLog.Ui;
 namespace BladeLog.Features.Prints;
 
 /// <summary>The record of a stretch of time on paper: what was looked at, held, cleared, broken and taught, and where a look is missing.</summary>
-internal sealed class Audit(AuditFacts facts, DateTime from, DateTime to, DateTime now, ShopUnits units, Wording words)
+internal sealed class Audit(AuditFacts facts, DateTime from, DateTime to, DateTime now, ShopUnits units, Story story)
 {
     private readonly IReadOnlyList<BladeGaps> _gaps = facts.Gaps();
-    private readonly Dictionary<int, string> _saws = facts.Saws.ToDictionary(s => s.Id, s => s.Name);
-
-    private string Tag(int id) => facts.Blades.First(b => b.Id == id).Tag;
 
     public AuditModel Model(AuditForm form, FormState state)
     {
@@ -21,8 +18,8 @@ internal sealed class Audit(AuditFacts facts, DateTime from, DateTime to, DateTi
         {
             Form = form,
             State = state,
-            From = Printing.Day(from, units),
-            To = Printing.Day(to.AddTicks(-1), units),
+            From = Said.Day(from, units),
+            To = Said.Day(to.AddTicks(-1), units),
             Sums =
             [
                 ("Inspections", Figures.Number(looks.Count)),
@@ -38,10 +35,10 @@ internal sealed class Audit(AuditFacts facts, DateTime from, DateTime to, DateTi
             ],
             Saws = [.. facts.Saws.Select(OfSaw)],
             Blades = [.. facts.Blades.OrderBy(b => b.Tag, NaturalOrder.Instance).Select(OfBlade).Where(p => p.Rows.Count > 0)],
-            Trainings = [.. facts.Trainings.Where(In).Select(t => Row(t, Training(t)))],
+            Trainings = [.. facts.Trainings.Where(In).Select(t => Row(t, About.Shop))],
             Gaps = gaps,
             AllGaps = _gaps.Sum(g => g.Gaps.Count(x => x.DueUtc < now)),
-            FirstRecord = facts.FirstUtc is { } first ? Printing.Day(first, units) : null,
+            FirstRecord = facts.FirstUtc is { } first ? Said.Day(first, units) : null,
             Whole = facts.FirstUtc is not { } begun || (from <= begun && to > now),
             When = Printing.When(now, units),
         };
@@ -52,11 +49,11 @@ internal sealed class Audit(AuditFacts facts, DateTime from, DateTime to, DateTi
         var ran = facts.Runs[blade.Id].Where(r => r.UntilUtc >= from && r.UntilUtc < to).Sum(r => r.Ms);
         IEnumerable<AuditRow> rows =
         [
-            .. facts.Looks.Where(l => l.BladeId == blade.Id && In(l)).Select(l => Row(l, "Inspected: " + Seen(l))),
-            .. facts.Holds.Where(h => h.BladeId == blade.Id && In(h)).Select(h => Row(h, "Hold: " + HoldWords(h))),
-            .. facts.Cleared.Where(c => c.Hold.BladeId == blade.Id && In(c)).Select(c => Row(c, "Hold cleared: " + c.How.TrimEnd('.'))),
-            .. facts.Breaks.Where(b => b.BladeId == blade.Id && In(b)).Select(b => Row(b, BreakWords(b))),
-            .. facts.Retirements.Where(r => r.BladeId == blade.Id && In(r)).Select(r => Row(r, $"Retired{(r.Note is { } note ? ": " + note.TrimEnd('.') : "")}{(r.CutUp ? ", cut up" : "")}")),
+            .. facts.Looks.Where(l => l.BladeId == blade.Id && In(l)).Select(l => Row(l, About.Blade)),
+            .. facts.Holds.Where(h => h.BladeId == blade.Id && In(h)).Select(h => Row(h, About.Blade, Cleared(h))),
+            .. facts.Cleared.Where(c => c.Hold.BladeId == blade.Id && In(c)).Select(c => Row(c, About.Blade)),
+            .. facts.Breaks.Where(b => b.BladeId == blade.Id && In(b)).Select(b => Row(b, About.Blade)),
+            .. facts.Retirements.Where(r => r.BladeId == blade.Id && In(r)).Select(r => Row(r, About.Blade)),
             .. _gaps.First(g => g.Blade.Id == blade.Id).Gaps.Where(Lies).Select(g => Row(g, GapWords(g, blade))),
         ];
         return new AuditPart(
@@ -72,10 +69,10 @@ internal sealed class Audit(AuditFacts facts, DateTime from, DateTime to, DateTi
         var gaps = _gaps.SelectMany(g => g.Gaps.Where(x => x.SawId == saw.Id && Lies(x)).Select(x => (Gap: x, g.Blade))).ToList();
         IEnumerable<AuditRow> rows =
         [
-            .. facts.Holds.Where(h => In(h) && facts.SawOf(h.BladeId, h.Entry.AtUtc) == saw.Id).Select(h => Row(h, $"{Tag(h.BladeId)} on hold: {HoldWords(h)}")),
-            .. facts.Cleared.Where(c => In(c) && facts.SawOf(c.Hold.BladeId, c.Hold.Entry.AtUtc) == saw.Id).Select(c => Row(c, $"{Tag(c.Hold.BladeId)}, hold cleared: {c.How.TrimEnd('.')}")),
-            .. facts.Breaks.Where(b => In(b) && (b.SawId ?? facts.SawOf(b.BladeId, b.Entry.AtUtc)) == saw.Id).Select(b => Row(b, $"{Tag(b.BladeId)}: {BreakWords(b)}")),
-            .. facts.Trainings.Where(t => In(t) && t.SawId == saw.Id).Select(t => Row(t, Training(t))),
+            .. facts.Holds.Where(h => In(h) && facts.SawOf(h.BladeId, h.Entry.AtUtc) == saw.Id).Select(h => Row(h, About.Saw, Cleared(h))),
+            .. facts.Cleared.Where(c => In(c) && facts.SawOf(c.Hold.BladeId, c.Hold.Entry.AtUtc) == saw.Id).Select(c => Row(c, About.Saw)),
+            .. facts.Breaks.Where(b => In(b) && (b.SawId ?? facts.SawOf(b.BladeId, b.Entry.AtUtc)) == saw.Id).Select(b => Row(b, About.Saw)),
+            .. facts.Trainings.Where(t => In(t) && t.SawId == saw.Id).Select(t => Row(t, About.Saw)),
             .. gaps.Select(g => Row(g.Gap, $"{g.Blade.Tag}: {GapWords(g.Gap, g.Blade)}")),
         ];
         return new AuditPart(saw.Name, $"ran {Hours(ran)}; its blades were inspected {Said.Count(looks, "time", "times")}; {Said.Count(gaps.Count, "look", "looks")} late or missing", [.. rows.OrderBy(r => r.At)]);
@@ -86,11 +83,11 @@ internal sealed class Audit(AuditFacts facts, DateTime from, DateTime to, DateTi
     /// <summary>A gap that was open within the time asked.</summary>
     private bool Lies(InspectionGap gap) => gap.DueUtc < to && (gap.LookedUtc ?? DateTime.MaxValue) >= from;
 
-    private AuditRow Row(Fact fact, string what)
+    private AuditRow Row(Fact fact, About about, string since = "")
     {
         var entry = fact.Entry;
         var later = Said.Local(entry.EnteredUtc, units).Date != Said.Local(entry.AtUtc, units).Date;
-        return new AuditRow(entry.AtUtc, Printing.When(entry.AtUtc, units), what, $"{entry.Person?.Initials ?? "not told"}{(later ? $", entered {Printing.Day(entry.EnteredUtc, units)}" : "")}");
+        return new AuditRow(entry.AtUtc, Printing.When(entry.AtUtc, units), story.Says(fact, about) + since, $"{entry.Person?.Initials ?? "not told"}{(later ? $", entered {Said.Day(entry.EnteredUtc, units)}" : "")}");
     }
 
     private AuditRow Row(InspectionGap gap, string what) => new(gap.DueUtc, Printing.When(gap.DueUtc, units), what, "nobody", Gap: true);
@@ -111,32 +108,9 @@ internal sealed class Audit(AuditFacts facts, DateTime from, DateTime to, DateTi
         _ => "no rule of inspection set",
     };
 
-    private string Seen(Inspection look) => (look.Found switch
-    {
-        Found.NothingSeen => "nothing seen",
-        Found.Crack => $"crack{(look.CrackLengthM is { } length ? " " + words.Length(length) : "")}",
-        Found.Worn => "worn",
-        _ => "something else",
-    }) + (look.Note is { } note ? ", " + note.TrimEnd('.') : "");
-
-    private string HoldWords(Hold hold) => $"{Labels.Reason(hold, words) switch { "" => "no reason told", var why => why }}{(hold.Note is { } note ? ", " + note.TrimEnd('.') : "")}{Cleared(hold)}";
-
     private string Cleared(Hold hold) => facts.Cleared.FirstOrDefault(c => c.HoldId == hold.EntryId) is { } cleared
-        ? $"; cleared {Printing.Day(cleared.Entry.AtUtc, units)} by {cleared.Entry.Person?.Initials ?? "somebody"}"
+        ? $"; cleared {Said.Day(cleared.Entry.AtUtc, units)} by {cleared.Entry.Person?.Initials ?? "somebody"}"
         : facts.Retirements.Any(r => r.BladeId == hold.BladeId) ? "; retired" : "; not cleared";
-
-    private static string BreakWords(Break broke) => $"Broke{(broke.Site switch
-    {
-        BreakSite.Gullet => " at a gullet",
-        BreakSite.Weld => " at its weld",
-        BreakSite.BackEdge => " from the back edge",
-        BreakSite.Body => " in the body",
-        BreakSite.TeethStripped => ": teeth stripped",
-        _ => ", place not told",
-    })}{(broke.Note is { } note ? ", " + note.TrimEnd('.') : "")}";
-
-    private string Training(Trained t) =>
-        $"{t.Person.Initials} trained by {t.By.Initials}: {TaskWords.Of(t.Task)}, {(t.SawId is { } saw ? _saws[saw] : "all saws")}{(t.RefresherUtc is { } due ? $"; refresher due {Printing.Day(due, units)}" : "")}";
 
     private static string Hours(long ms) => Figures.With(Figures.Number(ms / 3_600_000.0, 1), "h");
 }

@@ -52,12 +52,12 @@ internal sealed record AuditFacts
         {
             Blades = await db.Blades.AsNoTracking().Include(b => b.Spec).ToListAsync(),
             Saws = await db.Saws.AsNoTracking().OrderBy(s => s.Code).ToListAsync(),
-            Looks = await All(db.Inspections),
-            Holds = await All(db.Holds),
-            Cleared = await All(db.HoldsCleared.Include(c => c.Hold.Entry)),
-            Breaks = await All(db.Breaks),
-            Retirements = await All(db.Retirements),
-            Trainings = await All(db.Trainings.Include(t => t.Person).Include(t => t.By)),
+            Looks = await Past.Standing(db.Inspections).ToListAsync(),
+            Holds = await Past.Standing(db.Holds).ToListAsync(),
+            Cleared = await Past.Standing(db.HoldsCleared.Include(c => c.Hold.Entry)).ToListAsync(),
+            Breaks = await Past.Standing(db.Breaks).ToListAsync(),
+            Retirements = await Past.Standing(db.Retirements).ToListAsync(),
+            Trainings = await Past.Standing(db.Trainings.Include(t => t.Person).Include(t => t.By)).ToListAsync(),
             Mounts = [.. (await db.Mounts.AsNoTracking().Select(m => new { m.BladeId, m.Entry.AtUtc, m.SawId }).ToListAsync()).Select(m => (m.BladeId, m.AtUtc, m.SawId)).OrderBy(m => m.AtUtc)],
             Runs = shares.ToLookup(s => s.BladeId, s => new RunUpTo(s.UntilUtc, s.Ms, s.SawId)),
             SawRuns = [.. (await db.Runs.AsNoTracking().Select(r => new { r.SawId, r.UntilUtc, r.RunningMs }).ToListAsync()).Select(r => (r.SawId, r.UntilUtc, r.RunningMs))],
@@ -82,7 +82,4 @@ internal sealed record AuditFacts
         var before = Mounts.Where(m => m.BladeId == bladeId && m.AtUtc <= at).ToList();
         return before.Count > 0 ? before[^1].SawId : Mounts.Where(m => m.BladeId == bladeId).Select(m => (int?)m.SawId).FirstOrDefault();
     }
-
-    private static Task<List<T>> All<T>(IQueryable<T> facts)
-        where T : Fact => facts.AsNoTracking().Include(f => f.Entry.Person).OrderBy(f => f.Entry.AtUtc).ThenBy(f => f.EntryId).ToListAsync();
 }

@@ -1,5 +1,4 @@
 using System.Globalization;
-using BladeLog.Advice;
 
 namespace BladeLog.Features.Prints;
 
@@ -9,6 +8,7 @@ internal static class AuditPages
     public const string First = "first";
 
     public static void Map(WebApplication app) => app.MapGet("/audit", (Desk desk, string? from, string? to, string? since) => Get(desk, new AuditForm { From = from, To = to }, since == First));
+
     private static async Task<IResult> Get(Desk desk, AuditForm form, bool sinceFirst)
     {
         var units = await desk.Units();
@@ -28,7 +28,7 @@ internal static class AuditPages
             (first, last) = (today.AddYears(-1).AddDays(1), today);
         }
 
-        var audit = new Audit(facts, Start(first), Start(last.AddDays(1)), desk.Now, units, Wording.Of((await desk.Shop()).Shop));
+        var audit = new Audit(facts, Start(first), Start(last.AddDays(1)), desk.Now, units, await Story.Of(desk));
         var state = read.IsGood ? FormState.New : read.State;
         return await desk.Page<AuditPage, AuditModel>(audit.Model(form, state), state.Status);
 

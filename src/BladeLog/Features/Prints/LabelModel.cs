@@ -74,14 +74,7 @@ internal static partial class Labels
             Said.Section(file, units) + (units.Units == UnitSystem.Inch ? "" : $"{Figures.Glue}mm"),
             Said.Teeth(file.Spec),
             Code(file.Blade.Tag),
-            file.Hold is { } hold ? Reason(hold, words) : null);
-    }
-
-    /// <summary>"crack 2.6 mm at a gullet"; empty where nobody said.</summary>
-    public static string Reason(Hold hold, Wording words)
-    {
-        var said = LifeWords.Hold(hold, words);
-        return said.StartsWith("on hold: ", StringComparison.Ordinal) ? said["on hold: ".Length..] : "";
+            file.Hold is { } hold ? LifeWords.HoldReason(hold, words) ?? "" : null);
     }
 
     /// <summary>Sheets of seven rows; a long label takes a row for itself.</summary>

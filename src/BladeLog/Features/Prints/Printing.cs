@@ -7,6 +7,4 @@ namespace BladeLog.Features.Prints;
 internal static class Printing
 {
     public static string When(DateTime utc, ShopUnits units) => Said.Local(utc, units).ToString("d MMM yyyy, HH:mm", CultureInfo.InvariantCulture);
-
-    public static string Day(DateTime utc, ShopUnits units) => Said.Local(utc, units).ToString("d MMM yyyy", CultureInfo.InvariantCulture);
 }

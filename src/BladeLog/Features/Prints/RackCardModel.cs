@@ -1,4 +1,5 @@
 using BladeLog.Advice;
+using BladeLog.Advice.Life;
 using BladeLog.Handbook.Cutting;
 using BladeLog.Handbook.Quantities;
 using BladeLog.Records;
@@ -95,9 +96,9 @@ internal static class RackCard
         var hook = file.Hook!;
         if (file.Hold is { } hold)
         {
-            var why = Labels.Reason(hold, advice.Words);
+            var why = LifeWords.HoldReason(hold, advice.Words);
             var who = clearers.Count == 0 ? "Nobody may clear it yet." : $"{string.Join(" or ", clearers)} clears it after a look.";
-            return new PegRow(Number(hook), file.Blade.Tag, Drawn.Teeth(blade.Body, file.Spec), section, $"HOLD{(why.Length > 0 ? ": " + why : "")}, stays off", who, Held: true);
+            return new PegRow(Number(hook), file.Blade.Tag, Drawn.Teeth(blade.Body, file.Spec), section, $"HOLD{(why is null ? "" : ": " + why)}, stays off", who, Held: true);
         }
 
         return new PegRow(

@@ -7,7 +7,7 @@ using BladeLog.Ui.Pictures.Geometry;
 namespace BladeLog.Features.Rack;
 
 /// <summary>One blade as a row of the rack.</summary>
-public sealed record RackRow(string Tag, string Section, ToothSpec Teeth, string State, string? Word, string Note, SmallBand Band);
+public sealed record RackRow(string Tag, string Section, ToothSpec Teeth, string State, string? Word, string Note, SmallBand Band, Worked? Worked);
 
 /// <summary>The blades of one place, in the order a person walks.</summary>
 public sealed record RackGroup(string Name, string Remark, IReadOnlyList<RackRow> Rows, bool Folded = false);
@@ -167,14 +167,15 @@ public sealed record RackModel
             _ => ("ready", null),
         };
         string teeth = Said.Teeth(file.Spec), first = on is not null ? on.Saw.Name + ", " : file.Place == Place.Rack && file.Hook is { } hook ? hook + ", " : "";
-        return new RackRow(file.Blade.Tag, Said.Section(file, units), Drawn.Teeth(blade.Body, file.Spec), state, word, $"{first}{teeth}, {Remark(file, blade, advice, units)}", SmallBand.Of(blade, advice.Settings));
+        SmallBand band = SmallBand.Of(blade, advice.Settings);
+        return new RackRow(file.Blade.Tag, Said.Section(file, units), Drawn.Teeth(blade.Body, file.Spec), state, word, $"{first}{teeth}, {Remark(file, blade, advice, units)}", band, WorkedOut.Band(blade, band));
     }
 
     private static string Remark(BladeFile file, BladeAdvice blade, ShopAdvice advice, ShopUnits units) => blade.State switch
     {
-        BladeState.Retired => RetiredBecause(file.Retirement!.Reason),
-        BladeState.Broken => BrokeAt(file.Break!.Site),
-        BladeState.Hold => LifeWords.Hold(file.Hold!, advice.Words) is var said && said.StartsWith("on hold: ", StringComparison.Ordinal) ? said["on hold: ".Length..] : said,
+        BladeState.Retired => StoryWords.Retired(file.Retirement!.Reason),
+        BladeState.Broken => StoryWords.Broke(file.Break!.Site),
+        BladeState.Hold => LifeWords.HoldReason(file.Hold!, advice.Words) ?? "on hold",
         _ when blade.Record.UnknownHistory => "history unknown: inspect",
         _ when file.Place == Place.AtSharpener && !blade.Grind.Pays => "no further grind",
         _ when file.Place == Place.AtSharpener => Run(file),
@@ -189,33 +190,4 @@ public sealed record RackModel
     };
 
     private static string Run(BladeFile file) => Figures.With(Figures.Hours(file.Hours), "h");
-
-    private static string BrokeAt(BreakSite site) => site switch
-    {
-        BreakSite.Gullet => "broke at a gullet",
-        BreakSite.GulletAngled => "broke from a gullet, at an angle",
-        BreakSite.Weld => "broke at its weld",
-        BreakSite.BackEdge => "broke from the back edge",
-        BreakSite.Body => "broke in the body",
-        BreakSite.TeethStripped => "teeth stripped",
-        _ => "broke, place unknown",
-    };
-
-    private static string RetiredBecause(RetireReason reason) => reason switch
-    {
-        RetireReason.FatigueMark => "past its retire mark",
-        RetireReason.Crack => "cracked",
-        RetireReason.Broke => "broke",
-        RetireReason.WidthLimit => "under its least width",
-        RetireReason.TooManyJoints => "too many welds",
-        RetireReason.TeethStripped => "teeth stripped",
-        RetireReason.BodyDamage => "body damaged",
-        RetireReason.UnknownHistory => "history unknown",
-        RetireReason.Uneconomic => "not worth its grind",
-        RetireReason.Lost => "lost",
-        RetireReason.Sold => "sold",
-        RetireReason.Rejected => "rejected",
-        RetireReason.CutDown => "cut down to a shorter loop",
-        _ => "another reason",
-    };
 }

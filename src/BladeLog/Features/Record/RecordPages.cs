@@ -16,7 +16,7 @@ public sealed record VoidForm : PostedForm
 /// <summary>One line of the ledger in words.</summary>
 public sealed record EntryLine(int Id, string When, string Entered, string Who, string What, string? Struck, bool CanVoid);
 
-public sealed record RecordModel(IReadOnlyList<EntryLine> Lines, int Page, bool Older, string? Blade);
+public sealed record RecordModel(IReadOnlyList<EntryLine> Lines, int Page, bool Older);
 
 public sealed record VoidModel(VoidForm Form, FormState State, EntryLine Line, bool Taken);
 
@@ -36,8 +36,10 @@ internal static class RecordPages
     private static async Task<IResult> List(Desk desk, int? page)
     {
         var skip = Math.Max(0, (page ?? 1) - 1) * Lines;
-        var entries = await Entries(desk).Where(e => e.Kind != "Void").OrderByDescending(e => e.Id).Skip(skip).Take(Lines + 1).ToListAsync();
-        return await desk.Page<RecordPage, RecordModel>(new(await EntryWords.Of(desk, entries.Take(Lines).ToList()), Math.Max(1, page ?? 1), entries.Count > Lines, null));
+        var past = await Past.OfShop(desk.Db, Lines, skip);
+        var (story, units) = (await Story.Of(desk), await desk.Units());
+        return await desk.Page<RecordPage, RecordModel>(
+            new([.. past.Lines.Select(p => EntryWords.Line(p, story, desk.Now, units))], Math.Max(1, page ?? 1), past.More));
     }
 
     private static async Task<IResult> Strike([FromForm] VoidForm? form, Desk desk, int entry)
@@ -60,16 +62,12 @@ internal static class RecordPages
 
     private static async Task<IResult> Show(Desk desk, int entry, VoidForm form, FormState state)
     {
-        var found = await Entries(desk).Where(e => e.Id == entry).ToListAsync();
-        if (found.Count == 0)
+        if (await Past.Of(desk.Db, entry) is not { } found)
         {
             return Results.NotFound();
         }
 
-        var line = (await EntryWords.Of(desk, found))[0];
+        var line = EntryWords.Line(found, await Story.Of(desk), desk.Now, await desk.Units());
         return await desk.Page<VoidPage, VoidModel>(new(form, state, line, !line.CanVoid), state.Status);
     }
-
-    private static IQueryable<Entry> Entries(Desk desk) =>
-        desk.Db.Entries.AsNoTracking().Include(e => e.Person).Include(e => e.Void).ThenInclude(v => v!.Entry).ThenInclude(e => e.Person);
 }

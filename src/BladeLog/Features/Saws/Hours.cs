@@ -136,16 +136,18 @@ internal static class Hours
             shown = form with { Speed = saw.Setup.Speeds.FirstOrDefault(s => s.SpeedMps == last)?.Position.ToString(System.Globalization.CultureInfo.InvariantCulture) };
         }
 
-        return await SawForm.Show<HoursPage, HoursForm>(desk, code, shown, state, form.Kind == "meter" ? await LastReading(desk, saw, units) : await LastRun(desk, saw, units));
+        var (hint, stood) = form.Kind == "meter" ? await LastReading(desk, saw, units) : (await LastRun(desk, saw, units), null);
+        return await SawForm.Show<HoursPage, HoursForm>(desk, code, shown, state, hint, stood);
     }
 
-    private static async Task<string> LastReading(Desk desk, SawNow saw, ShopUnits units)
+    private static async Task<(string Hint, string? Stood)> LastReading(Desk desk, SawNow saw, ShopUnits units)
     {
         var last = await desk.Db.MeterReadings.AsNoTracking().Where(r => r.SawId == saw.Saw.Id)
             .OrderByDescending(r => r.Entry.AtUtc).ThenByDescending(r => r.EntryId).Select(r => new { r.ReadingMs, r.Entry.AtUtc }).FirstOrDefaultAsync();
         return last is null
-            ? "Its first reading."
-            : $"It stood at {Figures.With(Figures.Number(last.ReadingMs / 3_600_000.0, 1), "h")} on {Said.When(last.AtUtc, desk.Now, units)}.";
+            ? ("Its first reading.", null)
+            : ($"It stood at {Figures.With(Figures.Number(last.ReadingMs / 3_600_000.0, 1), "h")} on {Said.When(last.AtUtc, desk.Now, units)}.",
+                (last.ReadingMs / 3_600_000.0).ToString("0.0", System.Globalization.CultureInfo.InvariantCulture));
     }
 
     private static async Task<string> LastRun(Desk desk, SawNow saw, ShopUnits units) => await LastUntil(desk, saw) is { } until

@@ -11,6 +11,8 @@ internal static class SawForms
         app.MapPost("/saws/{code}/edit", SetupSaw.PostEdit);
         app.MapGet("/saws/{code}/swap", Swap.Get);
         app.MapPost("/saws/{code}/swap", Swap.Post);
+        app.MapGet("/saws/{code}/then", Then.Get);
+        app.MapPost("/saws/{code}/then", Then.Post);
         app.MapGet("/saws/{code}/hours", Hours.Get);
         app.MapPost("/saws/{code}/hours", Hours.Post);
         app.MapGet("/saws/{code}/timer", Timer.Get);

@@ -20,7 +20,7 @@ public sealed record SpeedPart(string Speed, string BendsAnHour, bool Usual);
 public sealed record CutLine(int Number, string Wood, string Use);
 
 /// <summary>A blade that fits, and how long it lasts here.</summary>
-public sealed record FittingRow(string Tag, string Section, ToothSpec Teeth, string State, string Where, string Lasts, SmallBand Band);
+public sealed record FittingRow(string Tag, string Section, ToothSpec Teeth, string State, string Where, string Lasts, SmallBand Band, Worked? Worked);
 
 public sealed record SawAction(string Words, string Href, bool Main = false, bool Alarm = false);
 
@@ -55,6 +55,9 @@ public sealed record SawModel
     /// <summary>Hours run with no blade known, as a question; null: none.</summary>
     public string? Question { get; init; }
 
+    /// <summary>When a program last sent its running; null: none ever did.</summary>
+    public string? Heard { get; init; }
+
     public required IReadOnlyList<WheelPart> Wheels { get; init; }
 
     public required IReadOnlyList<SpeedPart> Speeds { get; init; }
@@ -64,6 +67,8 @@ public sealed record SawModel
     public required IReadOnlyList<FittingRow> Fitting { get; init; }
 
     public required IReadOnlyList<BecauseLine> Because { get; init; }
+
+    public required IReadOnlyList<Worked> Worked { get; init; }
 
     public required IReadOnlyList<SawAction> Actions { get; init; }
 

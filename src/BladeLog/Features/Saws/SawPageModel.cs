@@ -11,15 +11,14 @@ using BladeLog.Ui.Pictures;
 namespace BladeLog.Features.Saws;
 
 /// <summary>Puts the page of one saw together.</summary>
-internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits units, IdleShare idle)
+internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits units, IdleShare idle, DateTime? heard = null)
 {
     private readonly SawSetup setup = saw.Setup;
     private readonly BladeAdvice? on = advice.Now.Blades.FirstOrDefault(b => b.Blade.Id == saw.MountedBladeId) is { } file ? advice.On(file, saw) : null;
     private readonly PlannedCut? next = advice.NextCut(saw);
 
-    public SawModel Model(IReadOnlyList<PastFact> past, bool more)
+    public SawModel Model(PastPage past, Story story, bool first)
     {
-        Dictionary<int, string> saws = advice.Now.Saws.ToDictionary(s => s.Saw.Id, s => s.Saw.Name);
         (string state, string title, string lede) = Answer();
         double? span = next is { Choice: { Tension: { } tension } c }
             ? advice.Beams.Band(c.Blade.Body, tension.Stress.Value, setup, c.SpeedMps, c.Work.HeightM).GuideSpan.Millimetres
@@ -39,15 +38,17 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
             Facts = [.. Facts()],
             Mounted = Mounted(),
             Hours = $"{Hours(saw.RunningMs)} run since this record began.{(idle.Accounted is { } share ? $" The cuts logged account for {Wording.Number(share * 100, 0)} %." : "")}",
-            Question = saw.NoBladeKnownMs > 0 ? $"{Hours(saw.NoBladeKnownMs)} of them with no blade known. Which blade was on? Enter its swap at the time it happened, and the hours find it." : null,
+            Question = saw.NoBladeKnownMs > 0 ? $"{Hours(saw.NoBladeKnownMs)} of them with no blade known. Say which was on, and the hours go to it." : null,
+            Heard = heard is { } last ? $"Last heard from the logger: {Said.When(last, advice.Now.AsOf, units)}." : null,
             Wheels = [.. setup.Wheels.OrderBy(w => w.Position).Select(Wheel)],
             Speeds = [.. setup.Speeds.OrderBy(s => s.Position).Select(s => new SpeedPart(units.ShowBandSpeed(new Speed(s.SpeedMps)), Figures.Number(BendsPerHour(s.SpeedMps)), s.Usual && setup.Speeds.Count > 1))],
             Cuts = [.. advice.Plan().Saws.FirstOrDefault(p => p.Saw == saw)?.Cuts.Select(Cut) ?? []],
             Fitting = [.. Fitting()],
             Because = Reckoned.Lines(Because(span, thrust), units),
+            Worked = Worked(),
             Actions = [.. Actions()],
-            Story = [.. past.Select(p => Story.Line(p, advice.Now.AsOf, units, advice.Words, saws))],
-            More = more,
+            Story = [.. past.Lines.Select(p => story.Line(p, About.Saw))],
+            More = first && past.More,
         };
     }
 
@@ -165,7 +166,8 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
             },
             b.File.Place == Place.Rack && b.File.Hook is { } hook ? $"{hook}, " : "",
             Lasts(b.Blade),
-            SmallBand.Of(b.Blade, advice.Settings)));
+            SmallBand.Of(b.Blade, advice.Settings),
+            WorkedOut.Band(b.Blade, SmallBand.Of(b.Blade, advice.Settings), saw)));
 
     private static string Lasts(BladeAdvice blade) => blade switch
     {
@@ -200,6 +202,13 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
             yield return new("thrust of the next cut", t, "N", $"force of all teeth against the feed, {n.Choice.Tag} in cut {n.Cut.Number} at the feed advised", "engineering-default", Provenance.EngineeringDefault);
         }
     }
+
+    /// <summary>What is on it first, then the blade of its next cut.</summary>
+    private IReadOnlyList<Worked> Worked() => WorkedOut.Rows(
+        on is null ? WorkedOut.Bends(saw) : WorkedOut.Life(on, saw) ?? WorkedOut.Bends(saw),
+        on is null ? null : WorkedOut.Tension(on, saw, advice.Words),
+        next is { } span ? WorkedOut.Push(span.Choice.Blade, saw, span.Cut.Number) : null,
+        next is { } cut ? WorkedOut.Cut(cut.Choice) : null);
 
     private IEnumerable<SawAction> Actions()
     {

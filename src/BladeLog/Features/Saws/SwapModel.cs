@@ -65,6 +65,9 @@ public sealed record SwapModel
 
     public IReadOnlyList<CheckLine> Checks { get; init; } = [];
 
+    /// <summary>Where the figures of the checks are worked out.</summary>
+    public IReadOnlyList<Worked> Worked { get; init; } = [];
+
     public IReadOnlyList<SwapOffer> Offers { get; init; } = [];
 
     public IReadOnlyList<SwapOffer> MoreOffers { get; init; } = [];
@@ -111,6 +114,7 @@ public sealed record SwapModel
             OffHook = off?.Hook,
             On = on is null ? null : Picture(advice, on),
             Checks = on is null ? [] : SwapChecks.Of(advice, saw, on, units),
+            Worked = on is null ? [] : WorkedOut.Rows(WorkedOut.Life(advice.On(on, saw), saw), WorkedOut.Tension(advice.On(on, saw), saw, advice.Words)),
             Offers = [.. offers.Take(4)],
             MoreOffers = [.. offers.Skip(4)],
             PullWord = units.PullName,

@@ -7,8 +7,6 @@ using BladeLog.Handbook.Tables;
 using BladeLog.Records;
 using BladeLog.Ui;
 using BladeLog.Ui.Forms;
-using Finish = BladeLog.Records.Finish;
-using MaterialKind = BladeLog.Records.MaterialKind;
 
 namespace BladeLog.Features.Saws;
 
@@ -74,7 +72,7 @@ internal static class WhatIfSaw
         SawSetup setup = saw.Setup;
         Shown shown = new(units);
         AskForm form = new(query, units, true);
-        Material? wood = form.Look("wood", "Wood", "European oak", "default, not yours", Find, [.. MaterialTable.All.Where(m => m.Kind == Handbook.Tables.MaterialKind.Wood).Select(m => m.Name)]);
+        Material? wood = form.Look("wood", "Wood", "European oak", "default, not yours", Find, [.. MaterialTable.All.Where(m => m.Kind == MaterialKind.Wood).Select(m => m.Name)]);
         double? moisture = form.Moisture("moisture", "Moisture", new Given(wood?.DefaultMoisture ?? 10, "default, not yours"));
         double? feed = form.Feed("feed", "Feed that is decent", new Given((setup.FeederN is null ? ByHand : WithFeeder) / 60, "default, not yours"));
         Edges edges = form.Choose("edges", "Edges", Edges.Now, "as the page begins", (Edges.Now, "now", "as they are now"), (Edges.Ground, "ground", "freshly ground"));
@@ -205,7 +203,7 @@ internal static class WhatIfSaw
         Job = "what-if",
         SpeciesKey = wood.Key,
         SpeciesTyped = wood.Name,
-        Material = wood.Kind == Handbook.Tables.MaterialKind.Panel ? MaterialKind.Panel : MaterialKind.Wood,
+        Material = wood.Kind == MaterialKind.Panel ? MaterialKind.Panel : MaterialKind.Wood,
         HeightM = 0.1,
         LengthM = 1,
         MoisturePct = moisture,

@@ -48,9 +48,9 @@ internal static class HandOverPages
         var db = desk.Db;
         var units = await desk.Units();
         var who = await desk.Who();
-        var notes = await db.HandOvers.AsNoTracking().Include(h => h.Entry.Person).OrderByDescending(h => h.Entry.AtUtc).ThenByDescending(h => h.EntryId).Take(Shown).ToListAsync();
+        var notes = await Past.Standing(db.HandOvers).Reverse().Take(Shown).ToListAsync();
         var ids = notes.Select(n => n.EntryId).ToList();
-        var reads = (await db.HandOversRead.AsNoTracking().Include(r => r.Entry.Person).Where(r => ids.Contains(r.HandOverId)).OrderBy(r => r.EntryId).ToListAsync()).ToLookup(r => r.HandOverId);
+        var reads = (await Past.Standing(db.HandOversRead.Where(r => ids.Contains(r.HandOverId))).ToListAsync()).ToLookup(r => r.HandOverId);
         var rows = notes.ConvertAll(n => new ShiftNote(
             n.EntryId,
             Said.When(n.Entry.AtUtc, desk.Now, units),
@@ -59,7 +59,7 @@ internal static class HandOverPages
             [.. reads[n.EntryId].Select(r => r.Entry.Person?.Initials ?? "somebody")],
             who is null || (n.Entry.PersonId != who.Id && !reads[n.EntryId].Any(r => r.Entry.PersonId == who.Id))));
         var people = await db.People.AsNoTracking().Where(p => p.Active).OrderBy(p => p.Initials).Select(p => p.Initials).ToListAsync();
-        var draft = form.Text ?? string.Join('\n', Draft(await desk.Advice(), await OffAsDull(db)));
+        var draft = form.Text ?? string.Join('\n', Draft(await desk.Advice(), await DullBlades.OffAsDull(db)));
         return await desk.Page<HandOverPage, HandOverModel>(
             new(form with { Text = draft }, state, rows, people, who?.Initials), state.Status);
     }
@@ -69,7 +69,7 @@ internal static class HandOverPages
     {
         var here = advice.Now.Blades.Where(b => b.Place is not (Place.Gone or Place.AtSharpener)).OrderBy(b => b.Blade.Tag, NaturalOrder.Instance).Select(advice.Of)
             .Where(b => b.State is not (BladeState.Broken or BladeState.Retired)).ToList();
-        List<string> lines = [.. here.Where(b => b.File.Hold is not null).Select(b => $"Hold: {b.File.Blade.Tag}, {Hold(b.File.Hold!, advice.Words)}{Where(b.File, advice.Now)}.")];
+        List<string> lines = [.. here.Where(b => b.File.Hold is not null).Select(b => $"Hold: {b.File.Blade.Tag}, {LifeWords.HoldReason(b.File.Hold!, advice.Words) ?? "no reason told"}{Where(b.File, advice.Now)}.")];
         void Say(string what, IEnumerable<string> things)
         {
             string[] all = [.. things];
@@ -104,23 +104,10 @@ internal static class HandOverPages
         };
     }
 
-    private static string Hold(Hold hold, Wording words)
-    {
-        var said = LifeWords.Hold(hold, words);
-        return said.StartsWith("on hold: ", StringComparison.Ordinal) ? said["on hold: ".Length..] : "no reason told";
-    }
-
     private static string Where(BladeFile file, ShopNow now) => file.Place switch
     {
         Place.OnSaw => $" on {now.Saws.First(s => s.Saw.Id == file.SawId).Saw.Name}",
         Place.Bench => " on the bench",
         _ => file.Hook is { } hook ? $" on {hook}" : "",
     };
-
-    /// <summary>Came off as dull, and neither ground nor put on again since.</summary>
-    private static async Task<IReadOnlySet<int>> OffAsDull(ShopDb db) => (await db.Dismounts.AsNoTracking()
-        .Where(d => d.Reason == OffReason.Dull
-            && !db.Sharpenings.Any(s => s.BladeId == d.Mount.BladeId && s.Entry.AtUtc >= d.Entry.AtUtc)
-            && !db.Mounts.Any(m => m.BladeId == d.Mount.BladeId && m.Entry.AtUtc >= d.Entry.AtUtc))
-        .Select(d => d.Mount.BladeId).ToListAsync()).ToHashSet();
 }

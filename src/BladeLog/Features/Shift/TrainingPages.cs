@@ -21,14 +21,16 @@ public sealed record TrainingForm : PostedForm
     public string? At { get; init; }
 }
 
-/// <summary>One task a person is able at, on one saw or on all.</summary>
-public sealed record Able(string Task, string Since, string By, string? Due, bool Expired);
+/// <summary>What a person is able at on one saw or on all: until when, short for the matrix, and the whole line with when and by whom.</summary>
+public sealed record Able(string Until, bool Expired, string Line);
 
-/// <summary>A person's row: a cell for each saw, and one for what goes for all.</summary>
-public sealed record TrainingRow(string Person, IReadOnlyList<IReadOnlyList<Able>> Cells);
+/// <summary>One task of a person: a cell for each saw, and one for what goes for all.</summary>
+public sealed record TrainingRow(string Task, IReadOnlyList<Able?> Cells);
+
+public sealed record TrainedPerson(string Person, IReadOnlyList<TrainingRow> Rows);
 
 public sealed record TrainingModel(
-    TrainingForm Form, FormState State, IReadOnlyList<string> Columns, IReadOnlyList<TrainingRow> Rows, int Expired,
+    TrainingForm Form, FormState State, IReadOnlyList<string> Columns, IReadOnlyList<TrainedPerson> Trained, int Expired,
     IReadOnlyList<Ui.Forms.Answer> Saws, IReadOnlyList<string> People, string? Who);
 
 /// <summary>Who was found able at which task on which saw, by whom, and until when.</summary>
@@ -66,19 +68,25 @@ internal static class TrainingPages
         var trainings = await desk.Db.Trainings.AsNoTracking().Include(t => t.Entry).Include(t => t.Person).Include(t => t.By).Where(t => t.Person.Active).ToListAsync();
 
         // What was taught again stands for what was taught before.
-        var stand = trainings.GroupBy(t => (t.PersonId, t.SawId, t.Task)).Select(g => g.OrderBy(t => t.Entry.AtUtc).ThenBy(t => t.EntryId).Last()).ToLookup(t => (t.Person.Initials, t.SawId));
-        List<int?> columns = [.. saws.Select(s => (int?)s.Id), null];
-        var rows = people.Where(p => columns.Exists(c => stand[(p, c)].Any())).Select(p => new TrainingRow(
-            p, [.. columns.Select(c => (IReadOnlyList<Able>)[.. stand[(p, c)].OrderBy(t => t.Task).Select(t => Words(t, desk.Now, units))])])).ToList();
+        var stand = trainings.GroupBy(t => (t.PersonId, t.SawId, t.Task)).Select(g => g.OrderBy(t => t.Entry.AtUtc).ThenBy(t => t.EntryId).Last()).ToList();
+        List<(int? Id, string Name)> columns = [.. saws.Select(s => ((int?)s.Id, s.Name)), (null, "All saws")];
+        var trained = stand.GroupBy(t => t.Person.Initials).OrderBy(g => g.Key, NaturalOrder.Instance).Select(person => new TrainedPerson(
+            person.Key,
+            [.. person.GroupBy(t => t.Task).OrderBy(g => g.Key).Select(task => new TrainingRow(
+                Said.Capital(TaskWords.Of(task.Key)),
+                [.. columns.Select(c => task.FirstOrDefault(t => t.SawId == c.Id) is { } able ? Words(able, c.Name, desk.Now, units) : null)]))])).ToList();
         return await desk.Page<TrainingPage, TrainingModel>(
-            new(form, state, [.. saws.Select(s => s.Name), "All saws"], rows, rows.Sum(r => r.Cells.Sum(c => c.Count(a => a.Expired))),
+            new(form, state, [.. columns.Select(c => c.Name)], trained, trained.Sum(p => p.Rows.Sum(r => r.Cells.Count(a => a is { Expired: true }))),
                 [.. saws.Select(s => new Ui.Forms.Answer(s.Code, s.Name))], people, (await desk.Who())?.Initials),
             state.Status);
     }
 
-    private static Able Words(Trained t, DateTime now, Ui.ShopUnits units)
+    private static Able Words(Trained t, string on, DateTime now, Ui.ShopUnits units)
     {
-        string Day(DateTime utc) => Said.Local(utc, units).ToString("d MMM yyyy", CultureInfo.InvariantCulture);
-        return new Able(Said.Capital(TaskWords.Of(t.Task)), Day(t.Entry.AtUtc), t.By.Initials, t.RefresherUtc is { } due ? Day(due) : null, t.RefresherUtc <= now);
+        string Day(DateTime utc, string format) => Said.Local(utc, units).ToString(format, CultureInfo.InvariantCulture);
+        var line = $"{Said.Capital(TaskWords.Of(t.Task))}, {(t.SawId is null ? "all saws" : on)}: {Day(t.Entry.AtUtc, "d MMM yyyy")} by {t.By.Initials}";
+        return t.RefresherUtc is { } due
+            ? new Able(Day(due, "MMM yyyy"), due <= now, $"{line}, to {Day(due, "d MMM yyyy")}")
+            : new Able("for good", Expired: false, $"{line}, for good");
     }
 }

@@ -1,5 +1,6 @@
 using BladeLog.Hosting;
 using BladeLog.Records;
+using BladeLog.Records.Sample;
 using BladeLog.Ui;
 using BladeLog.Ui.Forms;
 using Microsoft.AspNetCore.Diagnostics;
@@ -37,7 +38,7 @@ internal static class StartPages
 
     private static IResult Get(ShopGate gate) => gate.IsOpen ? Results.Redirect("/") : Page(gate, new StartForm(), []);
 
-    private static async Task<IResult> Post([FromForm] StartForm? form, ShopGate gate, TimeProvider clock)
+    private static async Task<IResult> Post([FromForm] StartForm? form, ShopGate gate)
     {
         form ??= new();
         if (gate.IsOpen)
@@ -67,13 +68,19 @@ internal static class StartPages
             return Page(gate, form, problems, StatusCodes.Status422UnprocessableEntity);
         }
 
-        await gate.Make(form.Begin == "sample"
-            ? db => SampleShop.Fill(db, SampleShop.Folder, clock.GetUtcNow().UtcDateTime)
-            : async db =>
+        try
+        {
+            await (form.Begin == "sample" ? gate.MakeSample() : gate.Make(async db =>
             {
                 db.Shops.Add(new Shop { Uid = Guid.NewGuid(), Name = name, Zone = form.Zone! });
                 await db.SaveChangesAsync();
-            });
+            }));
+        }
+        catch (SampleFileException e)
+        {
+            return Page(gate, form, [new Problem("Begin", e.Message)], StatusCodes.Status422UnprocessableEntity);
+        }
+
         return Results.Redirect("/");
     }
 

@@ -57,7 +57,8 @@ internal static class CostPages
             k.KeepIsCheaper ? $"{tag}: keep it for the next {hours}" : $"{tag}: retire it now",
             $"Keeping it for {hours}: {keep}, the chance of a break times {units.ShowMoney(k.BreakCost)}, what a break costs on {blade.Record.On!.Saw.Name}.",
             $"Retiring it now: {retire}, the unused part of its price of {units.ShowMoney(blade.File.Spec.PriceMinor ?? 0)}.",
-            $"{Figures.ChanceSentence(k.Chance)} such blades break in those {hours}{(blade.Record.UnknownHistory ? "; its history is unknown, so the worse end is taken" : "")} (handbook alone).{(blade.PastRetireMark ? " It is past its retire mark: rough work only." : "")}");
+            $"{Figures.ChanceSentence(k.Chance)} such blades break in those {hours}{(blade.Record.UnknownHistory ? "; its history is unknown, so the worse end is taken" : "")} (handbook alone).{(blade.PastRetireMark ? " It is past its retire mark: rough work only." : "")}",
+            WorkedOut.Rows(WorkedOut.Life(blade)));
     }
 
     /// <summary>Kinds that can be sharpened and fit the saw, at reference feed.</summary>

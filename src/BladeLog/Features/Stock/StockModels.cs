@@ -19,6 +19,9 @@ public sealed record StockRow
 
     public required int Least { get; init; }
 
+    /// <summary>Whose figure the least is.</summary>
+    public required string LeastFrom { get; init; }
+
     public required string Use { get; init; }
 
     /// <summary>"Order 2 of E1 by 8 Dec"; null: nothing to order.</summary>
@@ -36,7 +39,7 @@ public sealed record StockRow
     public required string Price { get; init; }
 }
 
-public sealed record StockBlade(string Tag, string Says);
+public sealed record StockBlade(string Tag, string Says, Worked? Worked);
 
 public sealed record StockForm : PostedForm
 {
@@ -74,7 +77,7 @@ public sealed record StockModel
 /// <summary>One line of costs; an empty figure is not logged.</summary>
 public sealed record CostRow(string Name, string? Href, string Bought, string Sharpened, string Broke, string Metre, string SquareMetre, string BoardFoot, string Cut, string Hour);
 
-public sealed record KeepPart(string Title, string Keep, string Retire, string Chance);
+public sealed record KeepPart(string Title, string Keep, string Retire, string Chance, IReadOnlyList<Worked> Worked);
 
 public sealed record CostsModel
 {

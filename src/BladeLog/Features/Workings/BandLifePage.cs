@@ -90,7 +90,8 @@ internal static class BandLifePage
             if (from.Held is null && form.Try(() => BandLife.Of(asked)) is { } life)
             {
                 title = Title(life);
-                lines.AddRange(Lines(life, shown, settings));
+                lines.AddRange(BandLifeLines.Of(life, shown, settings));
+                lines.AddRange(BandLifeLines.OfRecord(life, from));
                 if (life.TakesSet)
                 {
                     cautions.Add("This band takes a set on the wheel: tension and bending together pass what the body springs back from.");
@@ -101,17 +102,10 @@ internal static class BandLifePage
             }
         }
 
-        return new WorkingModel
+        return WorkingModel.Of(Path, "Life of a band", title, form, from) with
         {
-            Path = Path,
-            Name = "Life of a band",
-            Title = title,
-            Fields = form.Fields,
-            Picks = from.Picks,
-            Problems = form.Problems,
-            Example = form.Example,
-            From = from.Words,
             Stopped = from.Held,
+            Leads = from is { Blade: { } on, Saw: { } saw } ? WorkedOut.Rows(WorkedOut.Tension(on, saw, from.Advice.Words), WorkedOut.Push(on, saw), WorkedOut.Edge(on, saw), WorkedOut.Grinding(on)) : [],
             Lines = lines,
             Curves = curves,
             Range =
@@ -131,29 +125,6 @@ internal static class BandLifePage
         LifeVerdict.NotLimiting => "Flexing will not end it",
         LifeVerdict.Marginal => $"Marginal: half of such blades broken at {Figures.Hours(life.MedianHours)}{Figures.Glue}h",
         _ => $"Half of such blades broken at {Figures.Hours(life.MedianHours)}{Figures.Glue}h",
-    };
-
-    private static IEnumerable<BecauseLine> Lines(BandLifeResult life, Shown shown, AdviceSettings settings)
-    {
-        bool hours = life.Verdict is LifeVerdict.Marginal or LifeVerdict.Finite;
-        yield return Line("Running tension", shown.StressText(life.RunningTension.Pascals), "tension at rest and, where the wheel is sprung, density times speed squared", "mote-1965", Provenance.FromMemory);
-        yield return Line("Reversed amplitude at the gullets", shown.StressText(life.Gullet.EquivalentAmplitude.Max(a => a.Pascals)), "Walker: greatest stress to the power 1 less g, times half the bending to the power g; g from the strength of the body", "dowling-2009", Provenance.Published);
-        yield return Line("Reversed amplitude at the weld", shown.StressText(life.Weld.EquivalentAmplitude.Max(a => a.Pascals)), "the same over the weld's strength factor, at no more than 40 HRC", "engineering-default", Provenance.EngineeringDefault);
-        yield return Line("Median bends at the gullets", Bends(life.Gullet.MedianBends), "stress-life line from the hardness: 4.25 HB + 225 MPa, slope -0.09 with the factor of a ground surface", "roessle-fatemi-2000", Provenance.Published);
-        yield return Line("Median bends at the weld", Bends(life.Weld.MedianBends), "the same line at the weld's hardness", "roessle-fatemi-2000", Provenance.EngineeringDefault);
-        yield return Line("Median bends of the blade", Bends(life.MedianBends), "gullets and weld in series, whichever breaks first", "derived", settings.ProvenanceOf(LifeSettings.Shape));
-        if (hours)
-        {
-            yield return Line("Median life", Figures.With(Figures.Hours(life.MedianHours), "h"), "median bends over bends an hour", "derived", Provenance.EngineeringDefault);
-            yield return Line("1 in 10 broken", Figures.With(Figures.Hours(life.TenthPercentileBends / life.BendsPerHour), "h"), "from the scatter between blades alone", "engineering-default", settings.ProvenanceOf(LifeSettings.Shape));
-        }
-    }
-
-    private static string Bends(double bends) => bends switch
-    {
-        >= 1e9 => "over 1,000 million",
-        >= 1e6 => Figures.Number(bends / 1e6, 2) + " million",
-        _ => Figures.Number(Math.Round(bends, 0)),
     };
 
     private static CurveFigure Curve(BandCase asked, BandLifeResult life, Shown shown, bool wheelDrawn)
@@ -179,7 +150,7 @@ internal static class BandLifePage
                 new CurveLine("half of such blades broken", Points(x, v => At(v).MedianHours)),
                 new CurveLine("1 in 10 broken, by scatter alone", Points(x, v => At(v) is var r ? r.TenthPercentileBends / r.BendsPerHour : null)),
             ],
-            new CurveHere(now, life.MedianHours, $"{Figures.Number(now, wheelDrawn ? 0 : 2)} {shown.SmallUnit}: {(life.Verdict is LifeVerdict.Marginal or LifeVerdict.Finite ? Figures.Hours(life.MedianHours) + " h" : Title(life).Split(':')[0])}"))
+            new CurveHere(now, life.MedianHours, $"{Figures.Number(now, wheelDrawn ? 0 : 2)} {shown.SmallUnit}: {(life.Verdict is LifeVerdict.Marginal or LifeVerdict.Finite ? Figures.Hours(life.MedianHours) + " h" : Title(life).Split(':')[0].ToLowerInvariant())}"))
         {
             Lesson = wheelDrawn
                 ? "The axis of hours begins where a blade is unsuitable and ends where flexing no longer ends it. All wheels changed alike, loop and speed kept."

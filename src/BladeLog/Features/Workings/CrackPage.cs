@@ -1,5 +1,4 @@
 using BladeLog.Advice;
-using BladeLog.Handbook.Band;
 using BladeLog.Handbook.Fatigue;
 using BladeLog.Handbook.Quantities;
 using BladeLog.Ui;
@@ -29,11 +28,7 @@ internal static class CrackPage
         string title = "Why is any crack a hold?";
         List<BecauseLine> lines = [];
         List<CurveFigure> curves = [];
-        List<string> range =
-        [
-            "Linear elastic fracture mechanics and the law of Paris: growth for each bend is a constant times the range of the stress intensity to a power.",
-            "The shape factor of an edge crack, the constants of Paris and the share of bending are from memory, not checked against the book.",
-        ];
+        List<string> range = [.. Cracked.Method];
         if (t is { } thick && wheels is { } w && w.Any(d => thick * 20 > d))
         {
             form.Refuse("wheels", $"A band {shown.SmallText(thick, 2)} thick cannot lie on a wheel of {shown.SmallText(w.Min(), 0)}. Check both figures.");
@@ -47,26 +42,19 @@ internal static class CrackPage
         }
 
         if (a0 is { } seen && b is { } B && t is { } T && wheels is { } W && v is { } V && L is { } loop && tension is { } pull
-            && form.Try(() => Case(B, T, W, V, loop, pull, steel, settings)) is { } asked
+            && form.Try(() => Cracked.Case(B, T, W, V, loop, pull, steel, settings)) is { } asked
             && form.Try(() => CrackGrowth.Run(asked, new Length(seen))) is { } run)
         {
             title = Title(run, shown);
-            lines.AddRange(Lines(asked, run, shown));
+            lines.AddRange(Cracked.Lines(asked, run, shown));
             range.AddRange(run.Assumptions);
             CrackRun half = CrackGrowth.Run(asked with { ThroughShare = 0.5 }, new Length(seen));
-            lines.Add(Line("If only half the bending worked through the thickness", Minutes(half), "the same with the fall of the stress to the middle allowed for", "engineering-default", Provenance.EngineeringDefault));
+            lines.Add(Line("If only half the bending worked through the thickness", Cracked.Minutes(half), "the same with the fall of the stress to the middle allowed for", "engineering-default", Provenance.EngineeringDefault));
             curves.Add(Curve(asked, run, shown));
         }
 
-        return new WorkingModel
+        return WorkingModel.Of(Path, "How fast a crack runs", title, form, null) with
         {
-            Path = Path,
-            Name = "How fast a crack runs",
-            Title = title,
-            Fields = form.Fields,
-            Picks = [],
-            Problems = form.Problems,
-            Example = form.Example,
             Lines = lines,
             Curves = curves,
             Range = range,
@@ -75,44 +63,12 @@ internal static class CrackPage
         };
     }
 
-    private static CrackCase Case(double body, double thickness, IReadOnlyList<double> wheels, double speed, double loop, double tension, CrackSteel steel, AdviceSettings settings) => new()
-    {
-        BodyWidth = new Length(body),
-        Bending = [.. wheels.Select(d => BendingStress.OverWheel(new Length(thickness), new Length(d), settings.Steel.YoungsModulus))],
-        RunningTension = Tension.Running(new Stress(tension), Tension.Support(TensionSystem.Sprung), settings.Steel.Density, new Speed(speed)),
-        BandSpeed = new Speed(speed),
-        Loop = new Length(loop),
-        Material = steel,
-    };
-
     private static string Title(CrackRun run, Shown shown) => run.End switch
     {
         CrackEnd.AtOnce => $"A crack of {shown.SmallText(run.From.Metres)} parts the band at once",
         CrackEnd.DoesNotRun => "So small a crack does not run in dry air; it is a hold all the same",
-        _ => $"A crack of {shown.SmallText(run.From.Metres)} parts the band in {Minutes(run)}",
+        _ => $"A crack of {shown.SmallText(run.From.Metres)} parts the band in {Cracked.Minutes(run)}",
     };
-
-    private static string Minutes(CrackRun run) => run.End switch
-    {
-        CrackEnd.AtOnce => "no time",
-        CrackEnd.DoesNotRun => "none reckoned",
-        _ when run.Minutes < 1 => "less than a minute",
-        _ when run.Minutes < 120 => $"about {Figures.Number(run.Minutes, 0)} min of running",
-        _ => $"about {Figures.Number(run.Minutes / 60, run.Minutes < 570 ? 1 : 0)} h of running",
-    };
-
-    private static IEnumerable<BecauseLine> Lines(CrackCase asked, CrackRun run, Shown shown)
-    {
-        yield return Line("Bending stress", shown.StressText(asked.Bending.Max(s => s.Pascals)), "stiffness of the steel times thickness over wheel and thickness, smallest wheel", "derived", Provenance.Derived);
-        yield return Line("Running tension", shown.StressText(asked.RunningTension.Pascals), "tension at rest and density times speed squared", "mote-1965", Provenance.FromMemory);
-        yield return Line("Range of the stress intensity at first", Figures.With(Figures.Number(run.FirstRange.MegapascalRootMetres, 1), "MPa√m"), "shape factor times bending stress times root of pi and length", "tada", Provenance.FromMemory);
-        yield return Line("Length at which the band parts", shown.SmallText(run.To.Metres), $"where tension and bending together reach {Figures.Number(asked.Toughness.MegapascalRootMetres, 0)} MPa√m", "engineering-default", Provenance.EngineeringDefault);
-        if (run.End is CrackEnd.Parts or CrackEnd.Slack)
-        {
-            yield return Line("Bends until then", Figures.Number(Math.Round(run.Bends, 0)), "growth for each bend, summed over the wheels", "barsom-rolfe", Provenance.FromMemory);
-            yield return Line("Running until then", Minutes(run), "bends over bends an hour", "barsom-rolfe", Provenance.FromMemory);
-        }
-    }
 
     private static CurveFigure Curve(CrackCase asked, CrackRun run, Shown shown)
     {

@@ -59,16 +59,8 @@ internal static class CurvePage
             curves.Add(Curve(width, thickness, slot, usual, a, shown));
         }
 
-        return new WorkingModel
+        return WorkingModel.Of(Path, "Tightest curve", title, form, from) with
         {
-            Path = Path,
-            Name = "Tightest curve",
-            Title = title,
-            Fields = form.Fields,
-            Picks = from.Picks,
-            Problems = form.Problems,
-            Example = form.Example,
-            From = from.Words,
             Lines = lines,
             Curves = curves,
             Range =
@@ -77,6 +69,7 @@ internal static class CurvePage
                 "Between the two radii it goes with relief cuts, twist and heavy wear on the sides.",
                 "The tables were made for blades of 3 to 32 mm; they lie 1.3 to 1.7 times above the hard bound.",
             ],
+            Leads = from is { Blade: { } on, Choice: { } choice } ? WorkedOut.Rows(WorkedOut.Cut(choice), WorkedOut.Grinding(on)) : [],
             Cautions = ["Do not back out of a curve with the saw running fast: it pulls the blade off its wheels."],
         };
     }

@@ -10,7 +10,7 @@ internal static class CutCurves
 {
     public static IReadOnlyList<CurveFigure> Of(CutCase cut, CutLimitsAt limits, Shown shown)
     {
-        CutLimitsAt At(CutCase changed) => CutLimitsAt.Of(changed, limits.Fill, limits.PowerW, limits.PushN, limits.ThrustN);
+        CutLimitsAt At(CutCase changed) => CutLimitsAt.Of(changed, limits.Held);
         double r = cut.EdgeRadius.Micrometres, H = cut.CutHeight.Metres, per = shown.Small(1);
         AxisScale edge = AxisScale.Even(5, Math.Max(60, 1.2 * r)), depth = AxisScale.Even(shown.Small(0.2 * H), shown.Small(2 * H));
         CurveFigure byEdge = Figure("Feeds against the edge", edge, "edge radius, µm", x => At(cut with { EdgeRadius = Length.FromMicrometres(x) }), r, Micrometres(cut.EdgeRadius.Metres, 0));
@@ -27,17 +27,17 @@ internal static class CutCurves
             IReadOnlyList<Point> Line(Func<CutLimitsAt, double?> feed) =>
                 [.. sampled.Select((l, i) => new Point(x.Value(100.0 * i / 60), shown.Feed(feed(l) ?? double.NaN)))];
             List<CurveLine> lines = [new("rubs below", Line(l => l.Rubbing)), new("no chip below", Line(l => l.NoChip)), new("chip room", Line(l => l.ChipRoom))];
-            if (limits.PowerW is not null)
+            if (limits.Held.PowerW is not null)
             {
                 lines.Add(new CurveLine("motor", Line(l => l.Power)));
             }
 
-            if (limits.PushN is not null)
+            if (limits.Held.PushN is not null)
             {
-                lines.Add(new CurveLine("push", Line(l => l.Push)));
+                lines.Add(new CurveLine(limits.Held.PowerFed ? "feeder" : "push", Line(l => l.Push)));
             }
 
-            if (limits.ThrustN is not null)
+            if (limits.Held.ThrustN is not null)
             {
                 lines.Add(new CurveLine("blade bends", Line(l => l.Blade)));
             }

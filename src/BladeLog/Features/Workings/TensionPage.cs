@@ -87,16 +87,8 @@ internal static class TensionPage
             }
         }
 
-        return new WorkingModel
+        return WorkingModel.Of(Path, Said.Capital(form.Units.PullName), title, form, from) with
         {
-            Path = Path,
-            Name = Said.Capital(form.Units.PullName),
-            Title = title,
-            Fields = form.Fields,
-            Picks = from.Picks,
-            Problems = form.Problems,
-            Example = form.Example,
-            From = from.Words,
             Lines = lines,
             Curves = curves,
             Range =
@@ -105,6 +97,7 @@ internal static class TensionPage
                 "A stretch counts from where the slack has just gone. The frame and the tyre give way too, so wheel travel reads high.",
                 "A plucked span is at least 150 mm long, free of guides, with the saw off and isolated.",
             ],
+            Leads = from is { Blade: { } on, Saw: { } saw } ? WorkedOut.Rows(WorkedOut.Life(on, saw), WorkedOut.Push(on, saw)) : [],
             Cautions = [$"Do not exceed the {form.Units.PullName} the saw's maker states."],
         };
     }

@@ -29,7 +29,7 @@ internal static class ThrustLimitsPage
         double? above = form.Length("above", "Upper guide over the wood", Fields.CutHeight, Given.Of(setup?.ClearanceM, "as the saw is set up", 0.010));
         TensionSystem system = form.Choose("system", "Wheel held by", setup?.TensionSystem ?? TensionSystem.Sprung, setup is null ? "example" : "as the saw is set up",
             (TensionSystem.Sprung, "sprung", "spring, weight, air or oil"), (TensionSystem.Locked, "locked", "a locked screw"));
-        double? v = form.BandSpeed("speed", "Band speed", Given.Of(setup?.UsualSpeedMps, "usual speed of the saw", 15));
+        double? v = form.BandSpeed("speed", "Band speed", from.Speed(15));
         Sure sure = form.Choose("sure", $"The {form.Units.PullName} is", tensioned?.Guessed == true ? Sure.Guessed : Sure.Measured, tensioned is null ? "example" : "as recorded",
             (Sure.Measured, "measured", "measured or set to a target"), (Sure.Guessed, "guessed", "only guessed"));
 
@@ -50,7 +50,8 @@ internal static class ThrustLimitsPage
 
         if (below is { } lo && above is { } hi && H is { } high)
         {
-            lines.Add(Line("Span between the guides", shown.SmallText(lo + high + hi, 0), "lower guide under the wood, height, upper guide over the wood", "derived", Provenance.Derived));
+            double span = Math.Max(lo + high + hi, setup?.GuideSpanLeastM ?? 0);
+            lines.Add(Line("Span between the guides", shown.SmallText(span, 0), span > lo + high + hi ? "as close as the guides of this saw come" : "lower guide under the wood, height, upper guide over the wood", "derived", Provenance.Derived));
             if (w is { } W && t is { } T && g is { } G && tension is { } pull && v is { } speed)
             {
                 GuidedBand band = new()
@@ -59,7 +60,7 @@ internal static class ThrustLimitsPage
                     Thickness = new Length(T),
                     GulletDepth = new Length(G),
                     Tension = new Stress(pull),
-                    GuideSpan = new Length(lo + high + hi),
+                    GuideSpan = new Length(span),
                     CutHeight = new Length(high),
                     CutCentre = new Length(lo + (high / 2)),
                     Steel = settings.Steel,
@@ -77,16 +78,8 @@ internal static class ThrustLimitsPage
             }
         }
 
-        return new WorkingModel
+        return WorkingModel.Of(Path, "Push a blade stands", title, form, from) with
         {
-            Path = Path,
-            Name = "Push a blade stands",
-            Title = title,
-            Fields = form.Fields,
-            Picks = from.Picks,
-            Problems = form.Problems,
-            Example = form.Example,
-            From = from.Words,
             Stopped = from.Blade?.File.Hold is null ? null : $"{from.Blade.File.Blade.Tag} is on hold: it cuts nothing until it is cleared.",
             Lines = lines,
             Curves = curves,
@@ -97,6 +90,7 @@ internal static class ThrustLimitsPage
                 "Guides that hold the back; where the back bearing stands away from the side guides the blade stands a half to a third.",
                 "The front edge may go slack before anything else happens: that is the comfortable limit. Half the buckling push is where to stop.",
             ],
+            Leads = from is { Blade: { } on, Saw: { } saw } ? WorkedOut.Rows(from.Choice is { } choice ? WorkedOut.Cut(choice) : null, WorkedOut.Tension(on, saw, from.Advice.Words)) : [],
             Cautions = [$"{Said.Capital(form.Units.PullName)} is the worst-known figure here: a fifth less is about a fifth less push."],
         };
     }

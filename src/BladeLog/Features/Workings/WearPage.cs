@@ -30,8 +30,8 @@ internal static class WearPage
         double? dull = form.Length("dull", "Dull at", Fields.EdgeRadius, Given.Of(settings.Known(LifeSettings.Dull, 1e-6), 40e-6));
         (double depth, double referenceFeed) = setup is null ? (0.1, 2.0 / 60) : Sharpness.Reference(setup, settings);
         double? H = form.Length("height", "Height of the wood along the blade", Fields.CutHeight, Given.Of(from.Cut?.HeightM ?? (setup is null ? null : depth), from.Cut is null ? "depth for metres left" : "of the cut", 0.1));
-        double? f = form.Feed("feed", "Feed", Given.Of(setup is null ? null : referenceFeed, "feed for metres left", 2.0 / 60));
-        double? v = form.BandSpeed("speed", "Band speed", Given.Of(setup?.UsualSpeedMps, "usual speed of the saw", 16));
+        double? f = form.Feed("feed", "Feed", from.Choice?.Gate?.AdvisedMps is { } advised ? new Given(advised, "advised for the cut") : Given.Of(setup is null ? null : referenceFeed, "feed for metres left", 2.0 / 60));
+        double? v = form.BandSpeed("speed", "Band speed", from.Speed(16));
         double? L = form.Length("loop", "Loop", Fields.Loop, Given.Of(blade?.File.LoopM ?? setup?.LoopM, "of the blade", 3.4));
         double? factor = form.Number("factor", "Wear of the wood against a clean medium one, dirt counted in", "a wear factor", 0.1, 100, "", Given.Of(from.Cut is { } c ? c.WoodFactor with { Value = c.WoodFactor.Value * c.DirtFactor.Value } : null, 1));
 
@@ -60,7 +60,8 @@ internal static class WearPage
                 lines.Add(Line("Area left", Figures.With(Figures.Number(area, 1), "m²"), "path left over path for a square metre and the wood's factor", "derived", rate.Provenance));
                 if (H is { } height)
                 {
-                    lines.Add(Line("Metres left", Figures.With(Figures.Number(area / height, area / height < 10 ? 1 : 0), "m"), "area left over the height of the wood", "derived", rate.Provenance));
+                    (double metres, string unit) = Said.Cut(area / height, form.Units);
+                    lines.Add(Line("Metres left", Figures.With(Figures.Number(metres, metres < 10 ? 1 : 0), unit), "area left over the height of the wood", "derived", rate.Provenance));
                 }
             }
 
@@ -79,16 +80,8 @@ internal static class WearPage
             });
         }
 
-        return new WorkingModel
+        return WorkingModel.Of(Path, "Wear of the edge", title, form, from) with
         {
-            Path = Path,
-            Name = "Wear of the edge",
-            Title = title,
-            Fields = form.Fields,
-            Picks = from.Picks,
-            Problems = form.Problems,
-            Example = form.Example,
-            From = from.Words,
             Lines = lines,
             Curves = curves,
             Range =
@@ -97,6 +90,7 @@ internal static class WearPage
                 "The linear growth is from saw-teeth texts, from memory; the rates are engineering defaults. Not checked beyond 80 µm.",
                 "A nail, grit or a burn ends an edge at once.",
             ],
+            Leads = from.Blade is { } on ? WorkedOut.Rows(from.Choice is { } choice ? WorkedOut.Cut(choice) : null, WorkedOut.Grinding(on)) : [],
             Cautions = [],
         };
     }

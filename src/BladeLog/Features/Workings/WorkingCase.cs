@@ -2,6 +2,7 @@ using BladeLog.Advice;
 using BladeLog.Advice.Cuts;
 using BladeLog.Records;
 using BladeLog.Ui.Forms;
+using Choice = BladeLog.Advice.Cuts.Choice;
 
 namespace BladeLog.Features.Workings;
 
@@ -28,6 +29,16 @@ internal sealed class WorkingCase
 
     /// <summary>Tension of the blade on the saw; null where either is missing.</summary>
     public BladeTension? Tension => Blade is { } blade && Saw is { } saw ? blade.Body.TensionOn(saw.Setup, blade.File, Settings) : null;
+
+    /// <summary>The blade in the cut on the saw as the choices reckon it; null where it is refused before, or one of the three is missing.</summary>
+    public Choice? Choice => Cut is { } cut && Blade is { } blade && Saw is { } saw
+        ? Advice.For(cut.Cut).Choices.FirstOrDefault(c => c.Gate is not null && c.Blade.File.Blade.Id == blade.File.Blade.Id && c.Saw.Saw.Id == saw.Saw.Id)
+        : null;
+
+    /// <summary>The speed the saw is run at for the cut, else its usual one.</summary>
+    public Given Speed(double example) => Choice is { } c && c.SpeedMps != c.Saw.Setup.UsualSpeedMps
+        ? new Given(c.SpeedMps, "speed chosen for the cut")
+        : Given.Of(Saw?.Setup.UsualSpeedMps, "usual speed of the saw", example);
 
     /// <summary>"Q-09 on Osprey, cut 2".</summary>
     public string? Words

@@ -38,6 +38,22 @@ public sealed record WorkingModel
 
     /// <summary>Why there is no answer at all: a held blade.</summary>
     public string? Stopped { get; init; }
+
+    /// <summary>Other pages that go with the answer, as whole rows.</summary>
+    public IReadOnlyList<Worked> Leads { get; init; } = [];
+
+    /// <summary>What every working shares: its form as read, and whose figures stand in it.</summary>
+    internal static WorkingModel Of(string path, string name, string title, AskForm form, WorkingCase? from) => new()
+    {
+        Path = path,
+        Name = name,
+        Title = title,
+        Fields = form.Fields,
+        Picks = from?.Picks ?? [],
+        Problems = form.Problems,
+        Example = form.Example,
+        From = from?.Words,
+    };
 }
 
 /// <summary>A group of formulas in the list.</summary>

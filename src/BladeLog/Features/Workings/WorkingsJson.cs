@@ -12,6 +12,8 @@ internal static class WorkingsJson
         Post<TensionIn, TensionOut>(workings, "/tension", "Tension on the body from a pull, a wheel load, a stretch or a plucked note", TensionWorking.Answer);
         Post<ThrustLimitsIn, ThrustLimitsOut>(workings, "/thrust-limits", "How hard the wood may push before the front edge goes slack or the band twists away", ThrustLimitsWorking.Answer);
         Post<CutIn, CutOut>(workings, "/cut", "Bite, chip room, forces, power and the feeds that work", CutWorking.Answer);
+        Post<CurveIn, CurveAnswer>(workings, "/curve", "Tightest curve of a blade from its width, thickness and kerf", CurveWorking.Answer);
+        Post<WearIn, WearOut>(workings, "/wear", "Rounding of an edge with the wood it has gone through, and what is left of it", WearWorking.Answer);
     }
 
     private static void Post<TIn, TOut>(RouteGroupBuilder group, string path, string summary, Func<TIn, BodyReader, TOut?> answer)

@@ -11,6 +11,8 @@ internal static class WorkingsPages
         new(CutPage.Path, "A cut", "Bite, chip room, forces, power and the feeds that work; against the edge and the depth."),
         new(CurvePage.Path, "Tightest curve", "Radius from width, thickness and kerf; against the kerf."),
         new(WearPage.Path, "Wear of the edge", "Rounding from the wood gone through; path, area and metres to dull."),
+        new(GrindingPage.Path, "Width and set", "What sharpening takes away; sharpenings left, when to set again."),
+        new(ForceFactorPage.Path, "Your own force factor", "From the ammeter in a cut, so that force and power are your saw's."),
         new(CrackPage.Path, "How fast a crack runs", "Why any crack is a hold. Never for a blade of the shop."),
     ];
 
@@ -23,6 +25,8 @@ internal static class WorkingsPages
         Get(app, CutPage.Path, CutPage.Of);
         Get(app, CurvePage.Path, CurvePage.Of);
         Get(app, WearPage.Path, WearPage.Of);
+        Get(app, GrindingPage.Path, GrindingPage.Of);
+        Get(app, ForceFactorPage.Path, ForceFactorPage.Of);
         app.MapGet(CrackPage.Path, async (HttpRequest request, Desk desk) =>
         {
             WorkingModel model = CrackPage.Of(new AskForm(request.Query, await desk.Units(), false), (await desk.Advice()).Settings);

@@ -79,6 +79,14 @@ public static class Facts
         var drift = Fact<Drift>(model);
         Refers<Drift, Saw>(drift, null, d => d.SawId);
         Refers<Drift, Blade>(drift, null, d => d.BladeId);
+        var kerf = Fact<KerfReading>(model);
+        Refers(kerf, k => k.Blade, k => k.BladeId);
+        Refers(kerf, k => k.Saw, k => k.SawId);
+        kerf.ToTable(t =>
+        {
+            t.HasCheckConstraint("ck_kerf_reading_says_something", "kerf_m is not null or set_both_m is not null");
+            t.HasCheckConstraint("ck_kerf_reading_both_sides", "(set_left_m is null) = (set_right_m is null) and (set_left_m is null or set_both_m is not null)");
+        });
         Refers<StockMove, Spec>(Fact<StockMove>(model), null, s => s.SpecId);
 
         Refers(Fact<Hold>(model), h => h.Blade, h => h.BladeId);

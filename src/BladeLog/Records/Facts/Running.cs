@@ -1,3 +1,5 @@
+using BladeLog.Handbook.Quantities;
+
 namespace BladeLog.Records;
 
 /// <summary>How a tension is known.</summary>

@@ -1,3 +1,5 @@
+using BladeLog.Handbook.Quantities;
+
 namespace BladeLog.Records.Folding;
 
 /// <summary>A saw's setup from a date.</summary>

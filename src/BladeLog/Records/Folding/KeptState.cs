@@ -1,3 +1,5 @@
+using BladeLog.Handbook.Quantities;
+
 namespace BladeLog.Records.Folding;
 
 /// <summary>All kept state, as the facts say it should be.</summary>

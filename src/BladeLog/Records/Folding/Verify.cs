@@ -14,6 +14,11 @@ public static class Verify
             found.AddRange((await Pragma(db, sql)).Where(line => line != "ok").Select(line => $"{what} is damaged: {line}"));
         }
 
+        if (await Chain.FirstBreak(db) is { } broken)
+        {
+            found.Add(broken);
+        }
+
         found.AddRange(await Kept(db));
         return found;
     }

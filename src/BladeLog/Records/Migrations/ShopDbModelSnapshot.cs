@@ -800,6 +800,75 @@ namespace BladeLog.Records.Migrations
                         });
                 });
 
+            modelBuilder.Entity("BladeLog.Records.KerfReading", b =>
+                {
+                    b.Property<int>("EntryId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("entry_id");
+
+                    b.Property<int>("BladeId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("blade_id");
+
+                    b.Property<string>("How")
+                        .IsRequired()
+                        .HasColumnType("TEXT")
+                        .HasColumnName("how");
+
+                    b.Property<double?>("KerfM")
+                        .HasColumnType("REAL")
+                        .HasColumnName("kerf_m");
+
+                    b.Property<string>("KerfTyped")
+                        .HasColumnType("TEXT")
+                        .HasColumnName("kerf_typed");
+
+                    b.Property<string>("Note")
+                        .HasColumnType("TEXT")
+                        .HasColumnName("note");
+
+                    b.Property<int?>("SawId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("saw_id");
+
+                    b.Property<double?>("SetBothM")
+                        .HasColumnType("REAL")
+                        .HasColumnName("set_both_m");
+
+                    b.Property<double?>("SetLeftM")
+                        .HasColumnType("REAL")
+                        .HasColumnName("set_left_m");
+
+                    b.Property<double?>("SetRightM")
+                        .HasColumnType("REAL")
+                        .HasColumnName("set_right_m");
+
+                    b.Property<string>("SetTyped")
+                        .HasColumnType("TEXT")
+                        .HasColumnName("set_typed");
+
+                    b.HasKey("EntryId");
+
+                    b.HasIndex("BladeId");
+
+                    b.HasIndex("SawId");
+
+                    b.ToTable("kerf_reading", t =>
+                        {
+                            t.HasCheckConstraint("ck_kerf_reading_both_sides", "(set_left_m is null) = (set_right_m is null) and (set_left_m is null or set_both_m is not null)");
+
+                            t.HasCheckConstraint("ck_kerf_reading_kerf_m", "\"kerf_m\" > 0 and \"kerf_m\" < 1e300");
+
+                            t.HasCheckConstraint("ck_kerf_reading_says_something", "kerf_m is not null or set_both_m is not null");
+
+                            t.HasCheckConstraint("ck_kerf_reading_set_both_m", "\"set_both_m\" > 0 and \"set_both_m\" < 1e300");
+
+                            t.HasCheckConstraint("ck_kerf_reading_set_left_m", "\"set_left_m\" >= 0 and \"set_left_m\" < 1e300");
+
+                            t.HasCheckConstraint("ck_kerf_reading_set_right_m", "\"set_right_m\" >= 0 and \"set_right_m\" < 1e300");
+                        });
+                });
+
             modelBuilder.Entity("BladeLog.Records.LabelPrinted", b =>
                 {
                     b.Property<int>("EntryId")
@@ -1945,6 +2014,10 @@ namespace BladeLog.Records.Migrations
                         .HasColumnType("TEXT")
                         .HasColumnName("kerf_typed");
 
+                    b.Property<int?>("LeastStock")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("least_stock");
+
                     b.Property<double?>("LeastWidthM")
                         .HasColumnType("REAL")
                         .HasColumnName("least_width_m");
@@ -2063,6 +2136,8 @@ namespace BladeLog.Records.Migrations
                             t.HasCheckConstraint("ck_spec_kerf_m", "\"kerf_m\" > 0 and \"kerf_m\" < 1e300");
 
                             t.HasCheckConstraint("ck_spec_kerf_over_body", "kerf_m is null or kerf_m > thickness_m");
+
+                            t.HasCheckConstraint("ck_spec_least_stock", "\"least_stock\" >= 0");
 
                             t.HasCheckConstraint("ck_spec_least_width", "least_width_m is null or least_width_m <= width_m");
 
@@ -2711,6 +2786,32 @@ namespace BladeLog.Records.Migrations
                     b.Navigation("Blade");
 
                     b.Navigation("Entry");
+                });
+
+            modelBuilder.Entity("BladeLog.Records.KerfReading", b =>
+                {
+                    b.HasOne("BladeLog.Records.Blade", "Blade")
+                        .WithMany()
+                        .HasForeignKey("BladeId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.HasOne("BladeLog.Records.Entry", "Entry")
+                        .WithOne()
+                        .HasForeignKey("BladeLog.Records.KerfReading", "EntryId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.HasOne("BladeLog.Records.Saw", "Saw")
+                        .WithMany()
+                        .HasForeignKey("SawId")
+                        .OnDelete(DeleteBehavior.Restrict);
+
+                    b.Navigation("Blade");
+
+                    b.Navigation("Entry");
+
+                    b.Navigation("Saw");
                 });
 
             modelBuilder.Entity("BladeLog.Records.LabelPrinted", b =>

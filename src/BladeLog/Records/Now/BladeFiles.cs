@@ -45,7 +45,7 @@ internal sealed class BladeFiles
             WidthM = now.WidthM,
             LoopM = now.LoopM,
             GulletM = sharpenings.LastOrDefault(s => s.GulletM is not null)?.GulletM,
-            KerfM = sharpenings.LastOrDefault(s => s.KerfM is not null)?.KerfM,
+            Kerf = KerfNow.Of(sharpenings, line.SelectMany(a => _rows.Kerfs[a.Blade.Id].Where(k => k.Entry.AtUtc <= a.Until))),
             EdgeAfterM = last?.EdgeAfterM,
             Weld = joint?.Quality ?? WeldQuality.Good,
             Welds = Welds(line),

@@ -1,3 +1,5 @@
+using BladeLog.Handbook.Quantities;
+
 namespace BladeLog.Records;
 
 /// <summary>Where a blade is.</summary>

@@ -2,75 +2,58 @@ using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Records;
 
-/// <summary>One fact of the past with who entered it; a struck-out one stays, with who struck it out and why.</summary>
-public sealed record PastFact(Fact Fact)
-{
-    public DateTime AtUtc => Fact.Entry.AtUtc;
+/// <summary>
+/// One line of the record with what it says; an edit of a thing says nothing beyond its kind. A struck-out line stays,
+/// with who struck it out and why.
+/// </summary>
+public sealed record PastEntry(Entry Entry, Fact? Fact);
 
-    public string? Who => Fact.Entry.Person?.Initials;
+/// <summary>A stretch of the record, and whether older lines follow it.</summary>
+public sealed record PastPage(IReadOnlyList<PastEntry> Lines, bool More);
 
-    public bool Struck => Fact.Entry.Void is not null;
-
-    public string? StruckWhy => Fact.Entry.Void?.Reason;
-
-    public string? StruckBy => Fact.Entry.Void?.Entry.Person?.Initials;
-}
-
-/// <summary>What happened to a blade or at a saw, newest first, struck-out entries among the rest.</summary>
+/// <summary>What happened, read back, struck-out lines among the rest: the one reader of the past.</summary>
 public static class Past
 {
-    public static async Task<IReadOnlyList<PastFact>> OfBlade(ShopDb db, int bladeId)
+    private const string Void = "Void";
+
+    /// <summary>Everything that was entered, what was entered last first.</summary>
+    public static Task<PastPage> OfShop(ShopDb db, int most, int skip = 0) =>
+        Page(db, Entries(db).Where(e => e.Kind != Void).OrderByDescending(e => e.Id), most, skip);
+
+    /// <summary>What happened to a blade, the newest first.</summary>
+    public static Task<PastPage> OfBlade(ShopDb db, int bladeId, int most) => Page(db, Newest(db, PastIds.OfBlade(db, bladeId)), most);
+
+    /// <summary>What happened at a saw, the newest first. Hours that came of a meter reading are told by the reading.</summary>
+    public static Task<PastPage> OfSaw(ShopDb db, int sawId, int most) => Page(db, Newest(db, PastIds.OfSaw(db, sawId)), most);
+
+    /// <summary>One line; null where there is none.</summary>
+    public static async Task<PastEntry?> Of(ShopDb db, int entryId) =>
+        (await Page(db, Entries(db).Where(e => e.Id == entryId).OrderBy(e => e.Id), 1)).Lines.SingleOrDefault();
+
+    /// <summary>The facts of one kind that stand, the oldest first, with who entered them.</summary>
+    public static IOrderedQueryable<T> Standing<T>(IQueryable<T> facts)
+        where T : Fact => facts.AsNoTracking().Include(f => f.Entry.Person).OrderBy(f => f.Entry.AtUtc).ThenBy(f => f.EntryId);
+
+    private static IQueryable<Entry> Entries(ShopDb db) =>
+        db.Entries.AsNoTracking().Include(e => e.Person).Include(e => e.Void!.Entry.Person);
+
+    private static IOrderedQueryable<Entry> Newest(ShopDb db, IQueryable<int> ids) =>
+        Entries(db).Where(e => ids.Contains(e.Id)).OrderByDescending(e => e.AtUtc).ThenByDescending(e => e.Id);
+
+    private static async Task<PastPage> Page(ShopDb db, IOrderedQueryable<Entry> entries, int most, int skip = 0)
     {
-        List<Fact> facts =
-        [
-            .. await Read(db.Mounts.Include(m => m.Saw).Where(m => m.BladeId == bladeId)),
-            .. await Read(db.Dismounts.Include(d => d.Mount.Saw).Where(d => d.Mount.BladeId == bladeId)),
-            .. await Read(db.Sharpenings.Where(f => f.BladeId == bladeId)),
-            .. await Read(db.Joints.Where(f => f.BladeId == bladeId)),
-            .. await Read(db.Splits.Where(f => f.ParentId == bladeId || f.ChildId == bladeId)),
-            .. await Read(db.PriorUses.Where(f => f.BladeId == bladeId)),
-            .. await Read(db.Hangs.Where(f => f.BladeId == bladeId)),
-            .. await Read(db.Retags.Where(f => f.BladeId == bladeId)),
-            .. await Read(db.BatchLines.Include(l => l.Batch).Where(f => f.BladeId == bladeId)),
-            .. await Read(db.BatchReturns.Include(r => r.Line.Batch).Where(f => f.Line.BladeId == bladeId)),
-            .. await Read(db.TensionReadings.Where(f => f.BladeId == bladeId)),
-            .. await Read(db.Drifts.Where(f => f.BladeId == bladeId)),
-            .. await Read(db.Holds.Where(f => f.BladeId == bladeId)),
-            .. await Read(db.HoldsCleared.Where(f => f.Hold.BladeId == bladeId)),
-            .. await Read(db.Inspections.Where(f => f.BladeId == bladeId)),
-            .. await Read(db.Breaks.Where(f => f.BladeId == bladeId)),
-            .. await Read(db.Retirements.Where(f => f.BladeId == bladeId)),
-        ];
-        return Newest(facts);
+        // One line beyond the page tells whether there are more.
+        var read = await entries.Skip(skip).Take(Math.Min(most, int.MaxValue - 1) + 1).ToListAsync();
+        var page = read.Take(most).ToList();
+        var facts = new Dictionary<int, Fact>();
+        foreach (var kind in page.GroupBy(e => e.Kind))
+        {
+            foreach (var fact in await PastFacts.Read(db, kind.Key, [.. kind.Select(e => e.Id)]))
+            {
+                facts[fact.EntryId] = fact;
+            }
+        }
+
+        return new PastPage([.. page.Select(e => new PastEntry(e, facts.GetValueOrDefault(e.Id)))], read.Count > most);
     }
-
-    /// <summary>The last facts at a saw.</summary>
-    public static async Task<IReadOnlyList<PastFact>> OfSaw(ShopDb db, int sawId, int most)
-    {
-        List<Fact> facts =
-        [
-            .. await Last(db.SawSetups.Where(f => f.SawId == sawId), most),
-            .. await Last(db.Mounts.Include(m => m.Blade).Where(f => f.SawId == sawId), most),
-            .. await Last(db.Dismounts.Include(d => d.Mount.Blade).Where(f => f.Mount.SawId == sawId), most),
-            .. await Last(db.Slacks.Where(f => f.SawId == sawId), most),
-            .. await Last(db.MeterEpochs.Where(f => f.SawId == sawId), most),
-            .. await Last(db.MeterReadings.Where(f => f.SawId == sawId), most),
-            .. await Last(db.Runs.Where(f => f.SawId == sawId && f.ReadingId == null), most),
-            .. await Last(db.CutsDone.Where(f => f.SawId == sawId), most),
-            .. await Last(db.Breaks.Include(b => b.Blade).Where(f => f.SawId == sawId), most),
-        ];
-        return [.. Newest(facts).Take(most)];
-    }
-
-    private static Task<List<T>> Last<T>(IQueryable<T> facts, int most)
-        where T : Fact => Read(facts.OrderByDescending(f => f.Entry.AtUtc).ThenByDescending(f => f.EntryId).Take(most));
-
-    private static Task<List<T>> Read<T>(IQueryable<T> facts)
-        where T : Fact => facts.AsNoTracking().IgnoreQueryFilters()
-            .Include(f => f.Entry.Person)
-            .Include(f => f.Entry.Void!.Entry.Person)
-            .ToListAsync();
-
-    private static IReadOnlyList<PastFact> Newest(List<Fact> facts) =>
-        [.. facts.OrderByDescending(f => f.Entry.AtUtc).ThenByDescending(f => f.EntryId).Select(f => new PastFact(f))];
 }

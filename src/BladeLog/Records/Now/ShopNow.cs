@@ -65,7 +65,11 @@ public sealed record BladeFile
     /// <summary>As measured at the last sharpening; null: the specification's.</summary>
     public double? GulletM { get; init; }
 
-    public double? KerfM { get; init; }
+    /// <summary>What was measured of its kerf and set, and still holds.</summary>
+    public KerfNow Kerf { get; init; } = KerfNow.Nothing;
+
+    /// <summary>As measured last; null: never, or not since it was set again.</summary>
+    public double? KerfM => Kerf.LastM;
 
     public double? EdgeAfterM { get; init; }
 

@@ -36,6 +36,8 @@ internal sealed class ShopRows
 
     public required ILookup<int, DriftRow> Drifts { get; init; }
 
+    public required ILookup<int, KerfReading> Kerfs { get; init; }
+
     public required IReadOnlyDictionary<int, Hold> Holds { get; init; }
 
     public required IReadOnlyDictionary<int, PriorUse> PriorUses { get; init; }
@@ -62,7 +64,7 @@ internal sealed class ShopRows
         var setups = await db.SawSetups.AsNoTracking().Include(s => s.Entry).Include(s => s.Wheels.OrderBy(x => x.Position)).Include(s => s.Speeds.OrderBy(x => x.Position)).AsSplitQuery().ToListAsync();
         return new ShopRows
         {
-            Shop = await db.Shops.AsNoTracking().FirstAsync(),
+            Shop = await db.Shops.AsNoTracking().OrderBy(s => s.Id).FirstAsync(),
             Settings = await db.Settings.AsNoTracking().ToDictionaryAsync(s => s.Key),
             Saws = await db.Saws.AsNoTracking().OrderBy(s => s.Code).ToListAsync(),
             Setups = setups.ToDictionary(s => s.EntryId),
@@ -80,6 +82,8 @@ internal sealed class ShopRows
                 .OrderBy(t => t.At).ThenBy(t => t.Id).ToLookup(t => t.BladeId),
             Drifts = (await db.Drifts.AsNoTracking().Select(d => new DriftRow(d.BladeId, d.SawId, d.Entry.AtUtc, d.EntryId, d.AngleRad)).ToListAsync())
                 .OrderBy(d => d.At).ThenBy(d => d.Id).ToLookup(d => d.BladeId),
+            Kerfs = (await db.KerfReadings.AsNoTracking().Include(k => k.Entry).ToListAsync())
+                .OrderBy(k => k.Entry.AtUtc).ThenBy(k => k.EntryId).ToLookup(k => k.BladeId),
             Holds = await db.Holds.AsNoTracking().Include(h => h.Entry).Where(h => db.BladesNow.Any(b => b.HoldId == h.EntryId)).ToDictionaryAsync(h => h.BladeId),
             PriorUses = Last(await db.PriorUses.AsNoTracking().Include(p => p.Entry).ToListAsync(), p => p.BladeId),
             Away = await ReadAway(db),

@@ -1,5 +1,6 @@
 using BladeLog.Records.Folding;
 using BladeLog.Records.Sample;
+using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Records;
 
@@ -23,12 +24,22 @@ public static class SampleShop
             var ledger = new SampleLedger();
             new SampleFacts(folder, things, ledger).Read();
             db.ChangeTracker.Clear();
-            db.AddRange(ledger.Close());
+            var facts = ledger.Close();
+            db.AddRange(facts);
+            foreach (var (entry, previous, hash) in Chain.Links(db, facts.Select(f => f.Entry), facts, null))
+            {
+                (entry.PreviousHash, entry.Hash) = (previous, hash);
+            }
+
             await db.SaveChangesAsync();
             db.ChangeTracker.Clear();
 
             await Kept.Rebuild(db);
             await transaction.CommitAsync();
+        }
+        catch (DbUpdateException e)
+        {
+            throw new SampleFileException($"The sample files say what the records do not take: {(e.InnerException ?? e).Message}");
         }
         finally
         {

@@ -2,35 +2,12 @@ using BladeLog.Handbook.Quantities;
 
 namespace BladeLog.Records;
 
-public enum MaterialKind
-{
-    Wood,
-    Panel,
-
-    /// <summary>Known and stored; advice always refuses it.</summary>
-    Other,
-}
-
 public enum CutKind
 {
     Board,
     Resaw,
     Beam,
     Log,
-}
-
-public enum Finish
-{
-    Fine,
-    Medium,
-    Rough,
-}
-
-public enum Dirt
-{
-    Clean,
-    BarkOn,
-    Reclaimed,
 }
 
 /// <summary>A job waiting to be cut. Height is the wood along the blade.</summary>

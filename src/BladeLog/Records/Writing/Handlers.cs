@@ -38,6 +38,7 @@ internal static class Handlers
         RecordPriorUse c => RecordPriorUseHandler.Handle(w, c),
         RecordTension c => RecordTensionHandler.Handle(w, c),
         RecordDrift c => RecordTensionHandler.Handle(w, c),
+        RecordKerf c => RecordKerfHandler.Handle(w, c),
         RecordStock c => RecordStockHandler.Handle(w, c),
         HangUp c => HangUpHandler.Handle(w, c),
         QueueCut c => CutListHandler.Handle(w, c),

@@ -78,6 +78,7 @@ public sealed class ShopWriter(IDbContextFactory<ShopDb> contexts) : IDisposable
 
         var entry = session.First ?? throw new InvalidOperationException($"{command.GetType().Name} made no entry.");
         await session.Save();
+        await session.Seal();
         var (id, path) = (entry.Id, entry.AnswerPath ?? "/");
         if (command is ImportRows { Rows.Count: > ManyRows })
         {

@@ -12,6 +12,8 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
 
     private readonly List<Problem> _refusals = [];
     private readonly List<Problem> _asks = [];
+    private readonly List<Entry> _entries = [];
+    private readonly List<Fact> _facts = [];
     private Shop? _shop;
     private int _part;
     private int _before;
@@ -68,6 +70,9 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
         await Db.SaveChangesAsync();
     }
 
+    /// <summary>Chains what was saved to the line before it.</summary>
+    public Task Seal() => Chain.Seal(Db, _entries, _facts);
+
     public void Refuse(string field, string sentence) => _refusals.Add(new Problem(_fieldPrefix + field, sentence));
 
     public void RefuseUnless(bool holds, string field, string sentence)
@@ -112,6 +117,7 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
         }
 
         Db.Entries.Add(entry);
+        _entries.Add(entry);
         return entry;
     }
 
@@ -128,6 +134,7 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
 
         fact.Entry = entry;
         Db.Add(fact);
+        _facts.Add(fact);
         return fact;
     }
 
@@ -182,7 +189,7 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
         ? string.Create(CultureInfo.InvariantCulture, $"{metres / Exact.Inch:#,0.###} in")
         : string.Create(CultureInfo.InvariantCulture, $"{metres * 1000:#,0.##} mm");
 
-    private Shop? Shop => _shop ??= Db.Shops.AsNoTracking().FirstOrDefault();
+    private Shop? Shop => _shop ??= Db.Shops.AsNoTracking().OrderBy(s => s.Id).FirstOrDefault();
 
     public void RefuseUnlessIn(Role role)
     {

@@ -52,6 +52,14 @@ public sealed class FloorPageTests(SampleApp sample) : IClassFixture<SampleApp>
     }
 
     [Fact]
+    public async Task The_floor_stands_while_a_blade_is_on_hold_for_a_reason_of_its_own()
+    {
+        await using ShopApp app = await ShopApp.Sample();
+        (await app.Fill("/blades/Q-01/hold", ("Kind", "Other"), ("Note", "found on the floor"))).LeadsTo("/blades/Q-01");
+        Assert.Contains("Do not run. Put on hold", SampleApp.Text((await app.GetPage("/")).QuerySelector("#saw-S1")), StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void A_saw_on_hold_tells_no_figure_but_what_was_heard()
     {
         ShopNow shop = DemoShopFixture.Build();

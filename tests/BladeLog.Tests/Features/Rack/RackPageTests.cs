@@ -44,9 +44,9 @@ public sealed class RackPageTests(SampleApp sample) : IClassFixture<SampleApp>
     {
         IDocument page = await sample.Page("/rack");
         IElement held = page.QuerySelector("a[href='/blades/Q-14']")!;
-        Assert.Null(held.QuerySelector("svg.life"));
+        Assert.Null(held.Closest(".banded")!.QuerySelector("svg.life"));
         Assert.Contains("crack 2.6 mm in a gullet", SampleApp.Text(held), StringComparison.Ordinal);
-        IElement unknown = page.QuerySelector("a[href='/blades/Q-06']")!;
+        IElement unknown = page.QuerySelector("a[href='/blades/Q-06']")!.Closest(".banded")!;
         Assert.Contains("used 0.2 to 0.6", unknown.QuerySelector("svg.life")!.GetAttribute("aria-label"), StringComparison.Ordinal);
         Assert.Empty(unknown.QuerySelectorAll("svg.life .used"));
     }

@@ -9,7 +9,7 @@ public sealed class RecordTests
         await app.Be("JP");
         (await app.Fill("/blades/Q-11/hang", ("Place", "Bench"))).LeadsTo("/blades/Q-11");
         var page = await app.GetPage("/record");
-        Assert.Contains("Q-11 on the bench", page.QuerySelector(".entries li")!.TextContent, StringComparison.Ordinal);
+        Assert.Contains("Q-11 put on the bench", page.QuerySelector(".entries li")!.TextContent, StringComparison.Ordinal);
         Assert.NotNull(page.QuerySelector("a[href='/record?page=2']"));
         Assert.NotNull((await app.GetPage("/record?page=2")).QuerySelector("a[href='/record?page=1']"));
     }

@@ -1,4 +1,6 @@
 using BladeLog.Records;
+using BladeLog.Records.Folding;
+using BladeLog.Tests.Records;
 using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Tests.Features.Saws;
@@ -23,6 +25,34 @@ public sealed class SawFormTests
         Assert.Equal((RunSource.Meter, HoursGrade.A), (run.Source, run.Grade));
         Assert.InRange(run.RunningMs, 0.49 * 3_600_000, 0.51 * 3_600_000);
         await app.AssertKept();
+    }
+
+    [Fact]
+    public async Task Hours_with_no_blade_known_are_part_of_the_saws_hours_and_not_counted_twice()
+    {
+        using var app = await ShopApp.Empty();
+        await using (var db = app.NewContext())
+        {
+            // Ten hours run, of which four fall into a spell of a blade and six into none.
+            var day = ShopApp.Today.UtcDateTime.Date.AddDays(-3);
+            var blade = new Blade { Tag = "Q-1", Spec = TempShop.Spec("A") };
+            var saw = new Saw { Code = "S1", Name = "First" };
+            Entry At(int hour, string kind) => new() { Op = Guid.NewGuid(), Kind = kind, AtUtc = day.AddHours(hour), EnteredUtc = day.AddHours(hour) };
+            var setup = TempShop.Setup();
+            (setup.Saw, setup.Entry) = (saw, At(0, nameof(SawSetup)));
+            var mount = new Mount { Entry = At(6, nameof(Mount)), Saw = saw, Blade = blade };
+            db.AddRange(setup, mount, new Run { Entry = At(10, nameof(Run)), Saw = saw, FromUtc = day, UntilUtc = day.AddHours(10), RunningMs = 36_000_000, SpeedMps = 20, Grade = HoursGrade.A });
+            await db.SaveChangesAsync();
+            await Kept.Rebuild(db);
+        }
+
+        var json = (await app.GetJson("/api/v1/saws/S1"));
+        Assert.Equal((10.0, 6.0), (json.GetProperty("hours").GetDouble(), json.GetProperty("no_blade_known_hours").GetDouble()));
+        var page = SampleApp.Text((await app.GetPage("/saws/S1")).Body);
+        Assert.Contains("10 h run since this record began", page, StringComparison.Ordinal);
+        Assert.Contains("6 h of them with no blade known", page, StringComparison.Ordinal);
+        Assert.DoesNotContain("16 h", page, StringComparison.Ordinal);
+        Assert.DoesNotContain("16 h", SampleApp.Text((await app.GetPage("/")).Body), StringComparison.Ordinal);
     }
 
     [Fact]

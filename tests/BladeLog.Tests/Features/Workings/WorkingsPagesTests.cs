@@ -6,7 +6,7 @@ namespace BladeLog.Tests.Features.Workings;
 /// <summary>The workings as pages: a form is an address, a result can be shared, bad input keeps the rest.</summary>
 public sealed class WorkingsPagesTests
 {
-    private static readonly string[] Pages = ["band-life", "tension", "thrust-limits", "cut", "curve", "wear", "crack"];
+    private static readonly string[] Pages = ["band-life", "tension", "thrust-limits", "cut", "curve", "wear", "grinding", "force-factor", "crack"];
 
     [Fact]
     public async Task The_list_leads_to_every_group_by_whole_rows()
@@ -37,7 +37,7 @@ public sealed class WorkingsPagesTests
     public async Task The_form_sent_as_it_stands_gives_the_same_answer_at_an_address()
     {
         using var app = await ShopApp.Sample();
-        foreach (string start in (string[])["band-life", "tension", "thrust-limits?blade=Q-01&saw=S1&cut=7", "cut?blade=Q-09&saw=S2&cut=2", "curve?blade=Q-17", "wear?blade=Q-09", "crack"])
+        foreach (string start in (string[])["band-life", "tension", "thrust-limits?blade=Q-01&saw=S1&cut=7", "cut?blade=Q-09&saw=S2&cut=2", "curve?blade=Q-17", "wear?blade=Q-09", "grinding?blade=Q-09", "force-factor", "crack"])
         {
             IDocument page = await app.GetPage("/workings/" + start);
             var form = page.QuerySelectorAll("form[method=get]")[^1];

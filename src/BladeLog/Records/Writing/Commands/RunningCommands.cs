@@ -1,4 +1,5 @@
 using System.Text.Json.Serialization;
+using BladeLog.Handbook.Quantities;
 
 namespace BladeLog.Records.Writing;
 

@@ -17,7 +17,7 @@ internal static class SaveShopHandler
 
         w.NewEntry(nameof(SaveShop), w.Now);
         w.AnswerPath = "/setup";
-        var shop = await w.Db.Shops.FirstOrDefaultAsync();
+        var shop = await w.Db.Shops.OrderBy(s => s.Id).FirstOrDefaultAsync();
         if (shop is null)
         {
             w.Db.Shops.Add(c.Shop);
@@ -37,7 +37,7 @@ internal static class SaveShopHandler
                 && uri.UserInfo.Length == 0 && uri.HostNameType != UriHostNameType.Unknown && name.All(ch => ch < 128) && name.Length <= 100),
             nameof(c.LanName),
             "Write the machine's name on the network, and its port: saws.local:5080.");
-        var shop = await w.Db.Shops.FirstOrDefaultAsync();
+        var shop = await w.Db.Shops.OrderBy(s => s.Id).FirstOrDefaultAsync();
         w.RefuseUnless(shop is not null, nameof(c.LanName), "There is no shop yet.");
         if (!w.Stands || !await Edits.Guard(w, shop!, c.Version, "the shop"))
         {

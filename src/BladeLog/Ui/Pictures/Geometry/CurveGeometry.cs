@@ -72,7 +72,7 @@ public sealed record CurveGeometry(double Height, double Top, IReadOnlyList<Curv
 
         double x = figure.X.At(here.X);
         marks.Add(new Upright("lead dash", x, top - Row, top + Plot));
-        marks.Add(x <= 50 ? new Words(null, x, 8, top - 12, here.Text) : new Words(null, x, -8, top - 12, here.Text, "end"));
+        marks.Add(x <= 50 ? new Words("asked", x, 8, top - 12, here.Text) : new Words("asked", x, -8, top - 12, here.Text, "end"));
         return here.Y is { } y && figure.Y.Holds(y) ? new Point(x, top + Y(figure, y)) : null;
     }
 
