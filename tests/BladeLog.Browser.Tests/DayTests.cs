@@ -97,7 +97,7 @@ public sealed class DayTests(Workbench bench) : IClassFixture<Workbench>
         {
             await At(2, 7, 26);
             await tablet.Open("/saws/S2/swap");
-            var scan = tablet.Page.GetByLabel("Scan or type");
+            var scan = tablet.Field("Scan or type");
             await scan.FillAsync("http://shop.local/b/Q-13");
             await scan.PressAsync("Enter");
             await Expect(tablet.Title).ToContainTextAsync("Q-08 off, Q-13 on");
@@ -197,7 +197,7 @@ public sealed class DayTests(Workbench bench) : IClassFixture<Workbench>
             await Within(3, "sharpening, task 8", "/bench", async () =>
             {
                 await tablet.Tap(Row("Q-17"));
-                await tablet.Tap(tablet.Choice("Faces"));
+                await tablet.Tap(tablet.Choice("the tooth faces only"));
                 await tablet.Tap(tablet.Button("Record the grind"));
                 await tablet.IsAt("/blades/Q-17");
             });
@@ -223,7 +223,7 @@ public sealed class DayTests(Workbench bench) : IClassFixture<Workbench>
                 await Within(2, "hour meter, task 5", "/", async () =>
                 {
                     await tablet.Tap(tablet.OnTile(saw, "Hours"));
-                    await tablet.Page.GetByLabel("The meter shows").FillAsync(await NextReading(saw));
+                    await tablet.Field("The meter shows").FillAsync(await NextReading(saw));
                     await tablet.Tap(tablet.Button("Record"));
                     await tablet.IsAt("/saws/" + saw);
                 });
@@ -232,7 +232,7 @@ public sealed class DayTests(Workbench bench) : IClassFixture<Workbench>
             await Within(2, "hours without a meter, task 5", "/", async () =>
             {
                 await tablet.Tap(tablet.OnTile("S3", "Hours"));
-                await tablet.Page.GetByLabel("The wheels turned for").FillAsync("1:30");
+                await tablet.Field("The wheels turned for").FillAsync("1:30");
                 await tablet.Tap(tablet.Button("Record"));
                 await tablet.IsAt("/saws/S3");
             });
@@ -243,7 +243,7 @@ public sealed class DayTests(Workbench bench) : IClassFixture<Workbench>
         {
             await At(2, 16, 0);
             await tablet.Open("/handover");
-            var note = tablet.Page.GetByLabel("The note");
+            var note = tablet.Field("The note");
             var lines = (await note.InputValueAsync()).Split('\n');
             Assert.Contains(lines, l => l.StartsWith("Hold: Q-20, crack 2.6 mm in a gullet", StringComparison.Ordinal));
             Assert.Equal(2, lines.Count(l => l.StartsWith("Hold: ", StringComparison.Ordinal)));

@@ -19,7 +19,7 @@ public sealed class UndoTests(Workbench bench) : IClassFixture<Workbench>
         ("cut at the saw", "/saws/S2/cut", ["first:Again"]),
         ("look", "/blades/Q-18/inspect", ["choose:Nothing seen", "press:Record the look"]),
         ("crack", "/blades/Q-18/inspect", ["choose:Crack", "choose:Gullet", "press:Record the look"]),
-        ("grind", "/blades/Q-18/sharpen", ["choose:Faces", "press:Record the grind"]),
+        ("grind", "/blades/Q-18/sharpen", ["choose:the tooth faces only", "press:Record the grind"]),
         ("place", "/blades/Q-18/hang", ["choose:Bench", "press:Record it"]),
         ("lead", "/blades/Q-08/drift", ["choose:RU", "fill:It leads by=0.5", "choose:Left", "press:Record it"]),
         ("hand-over", "/handover", ["press:Hand over"]),
@@ -67,7 +67,7 @@ public sealed class UndoTests(Workbench bench) : IClassFixture<Workbench>
                 await tablet.Tap(tablet.Choice(what).First);
                 break;
             case "fill":
-                await tablet.Page.GetByLabel(what.Split('=')[0]).First.FillAsync(what.Split('=')[1]);
+                await tablet.Field(what.Split('=')[0]).FillAsync(what.Split('=')[1]);
                 break;
             case "press":
                 await tablet.Tap(tablet.Button(what));
