@@ -41,6 +41,7 @@ def write_facts(folder, batches, sharpenings, spells_by_saw, spells_by_tag, runs
     facts.runs_and_meters(book, runs, rng)
     facts.cuts(book, runs)
     facts.sharpenings(book, sharpenings, batches)
+    facts.kerf_readings(book, sharpenings)
     facts.breaks(book, spells_by_tag)
     facts.ends_and_joints(book, spells_by_tag)
     facts.hangs(book, spells_by_tag, sharpenings)

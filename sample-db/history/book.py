@@ -9,6 +9,7 @@ REF_LETTERS = {
     "batches": "b", "batch_lines": "l", "returns": "u", "joints": "j", "splits": "p", "prior_use": "o",
     "holds": "h", "holds_cleared": "k", "inspections": "i", "tension_readings": "t", "breaks": "x",
     "retirements": "z", "retags": "a", "voids": "v", "hangs": "w", "trainings": "q", "handovers": "n",
+    "kerf_readings": "y",
 }
 
 

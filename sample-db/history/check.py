@@ -48,6 +48,7 @@ def check(folder):
     check_cuts(files, spells)
     check_paths(files)
     check_sharpenings(files, spells)
+    check_kerf_readings(files)
     check_loops(files)
     check_away_and_held(files, spells)
     check_inspections(files, spells, shares)
@@ -181,6 +182,18 @@ def check_sharpenings(files, spells):
         require(len(own) == b["grinds"], f"{tag} has {len(own)} sharpenings, not {b['grinds']}")
         widths = [b["width_new"]] + [float(s["width_mm"]) for s in own]
         require(widths == sorted(widths, reverse=True) and widths[-1] == b["width"], f"{tag}: widths {widths}")
+
+
+def check_kerf_readings(files):
+    """The set beside the body gives the kerf of the specification, and so does every measure that still holds."""
+    for r in files.kerf_readings:
+        spec = SPECS[BLADES[r["tag"]]["spec"]]
+        again = [at(s) for s in files.sharpenings if s["tag"] == r["tag"] and s["set_again"] == "yes"]
+        if r["set_left_mm"]:
+            both = float(r["set_left_mm"]) + float(r["set_right_mm"])
+            require(abs(spec["body_mm"] + both - spec["kerf_mm"]) < 1e-9, f"{r['ref']}: body and set are not the kerf")
+        if r["kerf_mm"] and max(again, default=at(r)) <= at(r):
+            require(float(r["kerf_mm"]) == spec["kerf_mm"], f"{r['ref']} would move the shop's figures")
 
 
 def check_loops(files):

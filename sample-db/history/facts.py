@@ -3,7 +3,7 @@
 from .book import day_time
 from .cuts import OPERATORS
 from .plan import DAY, works
-from .tables import BLADES, BROKE, FIRST_DAY, OPEN_BATCH, OPEN_BATCH_TAGS, PERIODS, RUN_SOURCE, SAWS, SPECS, UNIT_MS
+from .tables import BLADES, BROKE, FIRST_DAY, KERF_READINGS, OPEN_BATCH, OPEN_BATCH_TAGS, PERIODS, RUN_SOURCE, SAWS, SPECS, UNIT_MS
 
 # The first reading of each hour meter; Osprey's and Longreach's follow from the stories.
 OLD_HERON_FIRST = 6204.3
@@ -185,6 +185,15 @@ def _open_batch(book):
     for tag in OPEN_BATCH_TAGS:
         note = notes.get(tag, "touched up here, wants the whole profile and the set")
         book.add("batch_lines", -6 * DAY + 540, batch=OPEN_BATCH, tag=tag, wanted="full_profile", note=note)
+
+
+def kerf_readings(book, all_sharpenings):
+    """Kerf and set measured after a sharpening, 0 being the last one."""
+    for tag, after, how, kerf, left, right, note, who in KERF_READINGS:
+        own = [s for s in all_sharpenings if s.tag == tag]
+        at = own[after - 1].at + 40
+        book.add("kerf_readings", at, tag=tag, **day_time(at), how=how, kerf_mm=kerf, set_left_mm=left, set_right_mm=right,
+                 note=note, who=who)
 
 
 BREAKS = {  # tag: site, moment, damage, minutes lost, note

@@ -132,6 +132,16 @@ BROKE = ("Q-04", "Q-22", "Q-23", "Q-26", "Q-27", "Q-28", "Q-29", "Q-36", "Q-37")
 OPEN_BATCH = "B-031"
 OPEN_BATCH_TAGS = ("Q-07", "Q-10", "Q-33", "Q-34", "Q-35")
 
+# tag, after which of its sharpenings (0: the last), how, kerf mm, set left and right mm, note, who
+# What still holds agrees with the specification, so that no figure of the shop rests on these rows alone.
+KERF_READINGS = [
+    ("Q-37", 2, "test_cut", 2.05, 0.42, 0.46, "the slot is wider than the teeth: guides were loose", "OT"),
+    ("Q-02", 0, "over_teeth", 1.36, 0.28, 0.28, "", "OT"),
+    ("Q-08", 0, "over_teeth", 1.5, "", "", "", "MI"),
+    ("Q-09", 0, "test_cut", 1.5, "", "", "for the resaw list", "JP"),
+    ("Q-18", 0, "dial_gauge", "", 0.21, 0.14, "leads when cutting free", "OT"),
+]
+
 # what the shop calls it, key and wear class of the handbook's table
 SPECIES = [
     ("European oak", "european_oak", "wood", "A3"), ("European larch", "european_larch", "wood", "A2"),

@@ -27,6 +27,8 @@ public static class BladeSettings
 
     public static readonly SettingDefinition KerfSet = new("blade.kerf_set", "Kerf of set teeth over the body", 1.8, "times the body", 1.1, 2.0, EngineeringDefault, "kerf, where none is measured");
     public static readonly SettingDefinition KerfTipped = new("blade.kerf_tipped", "Kerf of swaged and tipped teeth over the body", 2.0, "times the body", 1.1, 3.0, EngineeringDefault, "kerf, where none is measured");
+    public static readonly SettingDefinition SetUneven = new("blade.set_uneven", "Set of one side over the other from which a blade is said to lead", 0.05, "mm", 0, 1, EngineeringDefault, "why a blade leads");
+    public static readonly SettingDefinition Flutter = new("blade.flutter", "Slot over the set teeth from which a blade is said to flutter", 0.05, "mm", 0, 1, EngineeringDefault, "what a test cut tells");
     public static readonly SettingDefinition GulletShare = new("blade.gullet_share", "Gullet depth of regular and hook teeth", 0.40, "of the pitch", 0.1, 0.7, EngineeringDefault, "gullet depth, where none is given");
     public static readonly SettingDefinition GulletShareSkip = new("blade.gullet_share_skip", "Gullet depth of skip teeth", 0.25, "of the pitch", 0.1, 0.7, EngineeringDefault, "gullet depth, where none is given");
     public static readonly SettingDefinition GulletOfWidth = new("blade.gullet_of_width", "Greatest gullet depth", 0.20, "of the width", 0.1, 0.5, Published, "gullet depth, where none is given", "spons");
@@ -44,7 +46,7 @@ public static class BladeSettings
         YoungsModulus, Poisson, Density, GulletTension, GulletBending, Knee,
         HrcFlexible, HrcSpring, HrcBimetal, HrcCarbide, HrcWide,
         TensionFlexible, TensionSpring, TensionBimetal, TensionCarbide, TensionWide,
-        KerfSet, KerfTipped, GulletShare, GulletShareSkip, GulletOfWidth, HookRake, LeastWidth, Grind, MostWelds,
+        KerfSet, KerfTipped, SetUneven, Flutter, GulletShare, GulletShareSkip, GulletOfWidth, HookRake, LeastWidth, Grind, MostWelds,
         FrontEdge, FrontEdgeGuessed, Buckling,
     ];
 }

@@ -30,6 +30,9 @@ public sealed record StockLine
 
     public required int Least { get; init; }
 
+    /// <summary>The least is the kind's own, not the one for every kind.</summary>
+    public required bool OwnLeast { get; init; }
+
     /// <summary>Hours a week the kind ran lately.</summary>
     public required double HoursPerWeek { get; init; }
 
@@ -62,7 +65,7 @@ public static class StockCount
     /// <param name="hoursPerWeek">Hours a week each specification ran lately, by its id.</param>
     /// <param name="uncounted">Spares without a tag, by specification.</param>
     /// <param name="leadDays">From order to delivery.</param>
-    /// <param name="least">Least at hand of a kind that is in use.</param>
+    /// <param name="least">Least at hand of a kind that is in use and has no least of its own.</param>
     public static IReadOnlyList<StockLine> Of(
         IEnumerable<Spec> specs, ShopAdvice advice, IReadOnlyDictionary<int, double> hoursPerWeek, IReadOnlyDictionary<int, int> uncounted, double leadDays, int least)
     {
@@ -89,7 +92,7 @@ public static class StockCount
         BladeAdvice[] used = [.. here.Where(b => !IsSpare(b))], off = [.. used.Where(b => b.File.Place != Place.OnSaw)];
         int spare = Math.Max(0, uncounted) + here.Count(IsSpare);
         BladeAdvice[] inUse = used.Length > 0 ? used : here;
-        int needed = hours > 0 ? least : 0, atHand = used.Length + spare;
+        int needed = spec.LeastStock ?? (hours > 0 ? least : 0), atHand = used.Length + spare;
         double Gone(double days) => ExpectedGone(inUse, hours * days / 7, advice);
         int? shortIn = needed == 0 ? null : Enumerable.Range(0, Horizon + 1).Cast<int?>().FirstOrDefault(d => atHand - Gone(d!.Value) <= needed - 0.5);
         return new StockLine
@@ -103,6 +106,7 @@ public static class StockCount
             Away = blades.Count(b => b.File.Place == Place.AtSharpener && b.State != BladeState.Hold),
             OnHold = blades.Count(b => b.State == BladeState.Hold),
             Least = needed,
+            OwnLeast = spec.LeastStock is not null,
             HoursPerWeek = hours,
             GoneInLeadTime = Gone(leadDays),
             DaysUntilShort = shortIn,

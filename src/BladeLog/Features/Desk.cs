@@ -16,6 +16,9 @@ internal sealed class Desk(TimeProvider clock, ShopDb db, ShopWriter writer, IHt
     /// <summary>The person who said last who is at this tablet.</summary>
     public const string WhoCookie = "who";
 
+    /// <summary>The device of what another program sent.</summary>
+    public const string ByJson = "JSON";
+
     /// <summary>What was just recorded and can be taken back: entry, words, time.</summary>
     private const string SavedCookie = "saved";
 
@@ -85,10 +88,10 @@ internal sealed class Desk(TimeProvider clock, ShopDb db, ShopWriter writer, IHt
         where TView : View<TModel> => Html.View<TView, TModel>(model, await Chrome(), status);
 
     /// <summary>Records a form's command. A form without an op, or with one that is no GUID, gets a new one: it cannot be sent twice then.</summary>
-    public async Task<WriteResult> Write(Command command, string? op, string? answerPath, string? typedAt = null) =>
+    public async Task<WriteResult> Write(Command command, string? op, string? answerPath, string? typedAt = null, string? device = null) =>
         await writer.Write(
             command,
-            new Sent(Guid.TryParse(op, out var id) ? id : Guid.NewGuid(), Now, (await Who())?.Id, null, typedAt, answerPath),
+            new Sent(Guid.TryParse(op, out var id) ? id : Guid.NewGuid(), Now, (await Who())?.Id, device, typedAt, answerPath),
             Http.RequestAborted);
 
     /// <summary>Where a recorded form leads: to its page, with an undo for a minute.</summary>

@@ -90,6 +90,9 @@ internal static class Said
         };
     }
 
+    /// <summary>"1:25 h" of a time that has passed.</summary>
+    public static string Clock(TimeSpan time) => Figures.With($"{Math.Floor(time.TotalHours):0}:{time.Minutes:00}", "h");
+
     public static string Day(DateTime utc, ShopUnits units) => Local(utc, units).ToString("d MMM yyyy", System.Globalization.CultureInfo.InvariantCulture);
 
     public static DateTime Local(DateTime utc, ShopUnits units)
@@ -106,6 +109,21 @@ internal static class Said
         return !blade.LeadsRad.TryGetValue(sawId, out double rad) ? null
             : Math.Abs(rad) < 0.0008 ? "runs true: set the fence parallel"
             : $"leads {units.Show(new Angle(Math.Abs(rad)))} {(rad > 0 ? "left" : "right")}: set the fence";
+    }
+
+    /// <summary>"1.2 mm in a test cut; set 0.27 mm left, 0.21 mm right".</summary>
+    public static string Kerf(KerfReading reading, ShopUnits units)
+    {
+        ArgumentNullException.ThrowIfNull(reading);
+        ArgumentNullException.ThrowIfNull(units);
+        string? kerf = reading.KerfM is { } k ? $"{units.Show(new Length(k), Fields.Kerf)} {(reading.How == KerfHow.TestCut ? "in a test cut" : "over the teeth")}" : null;
+        string? set = reading switch
+        {
+            { SetLeftM: { } left, SetRightM: { } right } => $"set {units.Show(new Length(left), Fields.Set)} left, {units.Show(new Length(right), Fields.Set)} right",
+            { SetBothM: { } both } => $"set {units.Show(new Length(both), Fields.Set)}, both sides together",
+            _ => null,
+        };
+        return string.Join("; ", new[] { kerf, set }.OfType<string>());
     }
 
     public static string Capital(string words) => words.Length == 0 ? words : char.ToUpperInvariant(words[0]) + words[1..];

@@ -46,6 +46,8 @@ internal sealed class Story(ShopNow shop, ShopUnits units, IReadOnlyDictionary<i
         Mount m => $"{On(m, about)}{Tension(m.TensionPa)}{(m.InsideOut ? ", inside out" : "")}{After(", although ", m.Although)}",
         Dismount d => $"{Off(d.Mount, about)}, {StoryWords.Off(d.Reason)}",
         Slack s => AtSaw(s.SawId, about, $"{words.Tension} {(s.LetOff ? "let off" : "put on")}"),
+        StartCheck c => AtSaw(c.SawId, about, $"looked at before starting: {CheckWords.Says(c, units)}"),
+        TimerStarted t => AtSaw(t.SawId, about, "timer started"),
         SawSetup s => AtSaw(s.SawId, about, "set up as it is from here on"),
         MeterEpoch e => AtSaw(e.SawId, about, $"hour meter: {StoryWords.Epoch(e.Reason)}, from {Hours(e.StartReadingMs)}"),
         MeterReading r => AtSaw(r.SawId, about, $"hour meter read: {Hours(r.ReadingMs)}"),
@@ -60,12 +62,13 @@ internal sealed class Story(ShopNow shop, ShopUnits units, IReadOnlyDictionary<i
         Batch b => $"Batch {b.Number} to {b.Service}",
         BatchLine l => OfBlade(l.BladeId, about, $"sent to {l.Batch.Service}, batch {l.Batch.Number}"),
         BatchReturn r => OfBlade(r.Line.BladeId, about, $"back from {r.Line.Batch.Service}, batch {r.Line.Batch.Number}: {StoryWords.Outcome(r.Outcome)}{Width(r.WidthM)}"),
-        TensionReading t => OfBlade(t.BladeId, about, $"{words.Tension} measured: {units.Show(new Stress(t.TensionPa))} on the body, on {Saw(t.SawId)}, by {t.How}"),
+        TensionReading t => OfBlade(t.BladeId, about, $"{words.Tension} measured: {units.Show(new Stress(t.TensionPa))} on the body, give or take {Uncertain(t.How)} %, on {Saw(t.SawId)}, by {t.How}"),
         Drift d => OfBlade(d.BladeId, about, $"leads {units.Show(new Angle(Math.Abs(d.AngleRad)))}{(d.AngleRad > 0 ? " left" : d.AngleRad < 0 ? " right" : "")} on {Saw(d.SawId)}"),
+        KerfReading k => OfBlade(k.BladeId, about, $"measured: {(k.KerfM is null ? "" : "kerf ")}{Said.Kerf(k, units)}{After(", ", k.Note)}"),
         StockMove s => $"Stock of {specs[s.SpecId]}: {(s.Count > 0 ? "+" : "")}{Figures.Number(s.Count)}, {s.Reason.TrimEnd('.')}",
         Hold h => OfBlade(h.BladeId, about, $"put on hold: {LifeWords.HoldReason(h, words) ?? "no reason told"}{After(", ", h.Note)}"),
         HoldCleared c => OfBlade(c.Hold.BladeId, about, $"hold cleared{After(": ", c.How)}"),
-        Inspection i => OfBlade(i.BladeId, about, $"inspected: {Seen(i)}{After(", ", i.Note)}"),
+        Inspection i => OfBlade(i.BladeId, about, $"inspected: {Seen(i)}{InspectionWords.Beside(i)}{After(", ", i.Note)}"),
         Break b => OfBlade(b.BladeId, about, $"{StoryWords.Broke(b.Site)}{(about != About.Saw && b.SawId is { } on ? $", on {Saw(on)}" : "")}{After(", ", b.Note)}"),
         Retirement r => OfBlade(r.BladeId, about, $"retired: {StoryWords.Retired(r.Reason)}{After(", ", r.Note)}{(r.CutUp ? ", cut up" : "")}"),
         LabelPrinted l => $"Label {l.Tag} printed",
@@ -102,6 +105,9 @@ internal sealed class Story(ShopNow shop, ShopUnits units, IReadOnlyDictionary<i
         Found.Worn => "worn",
         _ => "something else",
     };
+
+    private static string Uncertain(string how) =>
+        Figures.Number(100 * Handbook.Band.Tension.Uncertainty(how == "pluck" ? Handbook.Band.TensionMethod.Pluck : Handbook.Band.TensionMethod.StrandForce));
 
     private string Tension(double? pa) => pa is { } p ? $", {units.Show(new Stress(p))} on the body" : "";
 

@@ -117,7 +117,7 @@ public sealed class WholeShopTests(DemoShopFixture shop) : IClassFixture<DemoSho
     [Fact]
     public void A_kerf_narrower_than_the_body_is_refused_in_words()
     {
-        BladeFile slip = shop.Blade("Q-08") with { KerfM = 0.5e-3 };
+        BladeFile slip = shop.Blade("Q-08") with { Kerf = new KerfNow(null, new MeasuredLength(0.5e-3, default), null) };
         Choice c = shop.Advice.Try(shop.Advice.For(shop.Cut(2)).Work, shop.Advice.On(slip, shop.Saw("S2")), shop.Saw("S2"));
         Assert.Equal("its kerf is entered narrower than its body: measure both", c.Reason.Sentence);
     }

@@ -2,6 +2,7 @@ using BladeLog.Advice;
 using BladeLog.Advice.Life;
 using BladeLog.Records;
 using BladeLog.Ui;
+using BladeLog.Ui.Forms;
 using BladeLog.Ui.Pictures.Geometry;
 using Microsoft.EntityFrameworkCore;
 
@@ -25,6 +26,12 @@ public sealed record BladeFormModel<TForm>(TForm Form, FormState State, BladeFil
 
     /// <summary>Why another grind is not worth its price; null: it is.</summary>
     public string? NoGrind { get; init; }
+
+    /// <summary>What its measured kerf and set tell.</summary>
+    public IReadOnlyList<string> KerfSays { get; init; } = [];
+
+    /// <summary>What the form works out before it records; none while nothing is typed.</summary>
+    public IReadOnlyList<BecauseLine> Lines { get; init; } = [];
 
     /// <summary>Further words a page needs: names to call, codes to choose from.</summary>
     public IReadOnlyList<string> Names { get; init; } = [];
@@ -58,6 +65,7 @@ internal static class BladeForm
         {
             Who = (await desk.Who())?.Initials,
             People = await desk.Db.People.AsNoTracking().Where(p => p.Active).OrderBy(p => p.Initials).Select(p => p.Initials).ToListAsync(),
+            KerfSays = KerfWords.Of(file, advice.Settings, advice.Words),
             NoGrind = blade.Grind.Pays ? null : LifeWords.NoGrind(blade, advice.Settings, advice.Words),
         };
         return await desk.Page<TView, BladeFormModel<TForm>>(with is null ? model : await with(model), state.Status);

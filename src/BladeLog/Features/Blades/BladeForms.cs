@@ -7,6 +7,8 @@ internal static class BladeForms
     {
         app.MapGet("/blades/new", NewBlade.Get);
         app.MapPost("/blades/new", NewBlade.Post);
+        app.MapGet("/specs/{code}/edit", SpecEdit.Get);
+        app.MapPost("/specs/{code}/edit", SpecEdit.Post);
         app.MapGet("/blades/{tag}/edit", Change.Get);
         app.MapPost("/blades/{tag}/edit", Change.Post);
         app.MapGet("/blades/{tag}/sharpen", Sharpen.Get);
@@ -27,6 +29,8 @@ internal static class BladeForms
         app.MapPost("/blades/{tag}/tension", Pull.Post);
         app.MapGet("/blades/{tag}/drift", Lead.Get);
         app.MapPost("/blades/{tag}/drift", Lead.Post);
+        app.MapGet("/blades/{tag}/kerf", Kerf.Get);
+        app.MapPost("/blades/{tag}/kerf", Kerf.Post);
         app.MapGet("/blades/{tag}/two", TwoBlades.Get);
         app.MapPost("/blades/{tag}/two", TwoBlades.Post);
         app.MapGet("/blades/{tag}/hang", Hang.Get);

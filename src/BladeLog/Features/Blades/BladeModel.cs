@@ -71,6 +71,9 @@ public sealed record BladeModel
 
     public required string EdgeWords { get; init; }
 
+    /// <summary>What its measured kerf and set tell.</summary>
+    public IReadOnlyList<string> KerfSays { get; init; } = [];
+
     public BitePart? Bite { get; init; }
 
     public required string GovernsTitle { get; init; }

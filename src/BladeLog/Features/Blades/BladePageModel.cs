@@ -31,6 +31,7 @@ internal static class BladePageModel
             Life = parts.Life(),
             EdgeTitle = edgeTitle,
             EdgeWords = edgeWords,
+            KerfSays = KerfWords.Of(file, advice.Settings, advice.Words),
             Bite = parts.Bite(),
             GovernsTitle = governs,
             Limits = limits,
@@ -100,6 +101,8 @@ internal static class BladePageModel
             yield return new("It broke", At(blade, "break"), Alarm: true);
             yield return new("Welded", At(blade, "join"));
             yield return new("Leads", At(blade, "drift"));
+            yield return new("Kerf and set", At(blade, "kerf"));
+            yield return new(Said.Capital(advice.Words.Tension), At(blade, "tension"));
         }
 
         yield return new("What if", At(blade, "what-if"));
@@ -108,11 +111,26 @@ internal static class BladePageModel
             yield return new("Where it hangs", At(blade, "hang"));
         }
 
+        if (blade.State is not (BladeState.Broken or BladeState.Retired))
+        {
+            yield return new("Label", $"/labels?tags={Uri.EscapeDataString(tag)}");
+        }
+
         yield return new("Edit", At(blade, "edit"));
+        yield return new("Its kind", $"{SpecEdit.Of(file.Spec.Code)}?blade={Uri.EscapeDataString(tag)}");
     }
 
     private static IEnumerable<BladeCaution> Cautions(BladeAdvice blade)
     {
+        if (blade.State is not (BladeState.Broken or BladeState.Retired))
+        {
+            string means = string.Join(" ", MarkWords.Means(blade));
+            if (means.Length > 0)
+            {
+                yield return new(means, "Seen at a look; it stands until another look there. Common practice.");
+            }
+        }
+
         if (blade.State == BladeState.Hold)
         {
             yield return new("On hold: do not run it. Any crack that can be seen means hold, on every saw here, whatever its length and whatever the hours say.", "The tenth of the width that US law allows is for wide band head saws only: 29 CFR 1910.265(e)(2)(i).", Stop: true);

@@ -24,6 +24,7 @@ internal sealed class BladeParts(BladeAdvice blade, ShopAdvice advice, ShopUnits
         [
             new("Width", Said.Width(file.WidthM, units), $"{Bare(file.Spec.WidthM)} new, {Bare(blade.Body.LeastWidth.Value)} least{Mark(blade.Body.LeastWidth)}, {ground}"),
             new("Body", units.Show(new Length(blade.Body.Thickness.Value), Fields.Thickness), life is { ThicknessToWheel: { } ratio, On: { } on } ? $"1/{Wording.Number(1 / ratio, 0)} of {Whose(on)} smallest wheel" : null),
+            new("Kerf", units.Show(new Length(blade.Body.Kerf.Value), Fields.Kerf), KerfFrom()),
             new("Teeth", Said.Teeth(file.Spec), $"{pitch}, {Figures.Number(double.RadiansToDegrees(blade.Body.Rake.Value))}°{Mark(blade.Body.Rake)}, {TipWords()}"),
             new("Loop", file.LoopM is { } loop ? units.Show(new Length(loop), Fields.Loop) : "not welded yet", $"{Said.Count(file.Welds, "weld", "welds")}, {WeldWords()}"),
             new("Run", Figures.With(Figures.Hours(file.Hours), "h"), file.Hours > 0 ? $"{Millions(life.Bends)} bends" : "never on"),
@@ -220,6 +221,19 @@ internal sealed class BladeParts(BladeAdvice blade, ShopAdvice advice, ShopUnits
             : "At the sharpener",
         _ => "Gone",
     };
+
+    /// <summary>Where the kerf reckoned with comes from, and since when.</summary>
+    private string KerfFrom()
+    {
+        string On(DateTime at) => Said.When(at, advice.Now.AsOf, units);
+        return file.Kerf switch
+        {
+            { Slot: { } slot, OverTeeth: var teeth } when teeth is null || slot.AtUtc >= teeth.Value.AtUtc => $"in a test cut, {On(slot.AtUtc)}",
+            { OverTeeth: { } teeth } => $"over the teeth, {On(teeth.AtUtc)}",
+            { Set: { } set } => $"body and set, {On(set.AtUtc)}",
+            _ => blade.Body.Kerf.From,
+        };
+    }
 
     private string WeldWords() => file.Weld switch
     {

@@ -42,6 +42,8 @@ public abstract record SpecFields : PostedForm
     public string? MostSharpenings { get; init; }
 
     public string? Price { get; init; }
+
+    public string? LeastStock { get; init; }
 }
 
 internal static class SpecReading
@@ -84,6 +86,7 @@ internal static class SpecReading
             SharpeningPriceMinor = read.Money(nameof(form.SharpeningPrice), form.SharpeningPrice),
             MostSharpenings = (int?)read.Count(nameof(form.MostSharpenings), form.MostSharpenings),
             PriceMinor = read.Money(nameof(form.Price), form.Price),
+            LeastStock = (int?)read.Count(nameof(form.LeastStock), form.LeastStock, Fields.Stock),
         };
     }
 

@@ -33,7 +33,7 @@ public sealed record CrackExample(string Says, string Whose, IReadOnlyList<Becau
         {
             CrackEnd.AtOnce => $"A crack of {shown.SmallText(Seen)} parts such a blade at once.",
             CrackEnd.DoesNotRun => $"A crack of {shown.SmallText(Seen)} does not run in such a blade in dry air; it is a hold all the same.",
-            _ => $"From a crack of {shown.SmallText(Seen)}, {Cracked.Minutes(run)} part such a blade.",
+            _ => $"A crack of {shown.SmallText(Seen)} parts such a blade in {Cracked.Minutes(run)}.",
         };
         string body = $"a body {shown.SmallText(section.BodyM)} by {shown.SmallText(section.ThicknessM, 2)} over wheels of {shown.SmallText(section.Wheels.Min(), 0)} at {units.ShowBandSpeed(new Speed(section.SpeedMps))}";
         return new CrackExample(

@@ -13,6 +13,11 @@ public sealed record SawFormModel<TForm>(TForm Form, FormState State, SawNow Saw
 
     public string? Tag => On?.Blade.Tag;
 
+    /// <summary>Who is at this tablet; null: nobody has said.</summary>
+    public string? Who { get; init; }
+
+    public IReadOnlyList<string> People { get; init; } = [];
+
     /// <summary>What this form says of how the saw stood before: the last reading, the last speed.</summary>
     public string? Hint { get; init; }
 
@@ -29,7 +34,13 @@ internal static class SawForm
         var shop = await desk.Shop();
         return shop.Saw(code) is { } saw
             ? await desk.Page<TView, SawFormModel<TForm>>(
-                new(form, state, saw, shop.Blades.FirstOrDefault(b => b.Blade.Id == saw.MountedBladeId), await desk.Units(), desk.Now) { Hint = hint, Last = last },
+                new(form, state, saw, shop.Blades.FirstOrDefault(b => b.Blade.Id == saw.MountedBladeId), await desk.Units(), desk.Now)
+                {
+                    Hint = hint,
+                    Last = last,
+                    Who = (await desk.Who())?.Initials,
+                    People = await Swap.Initials(desk),
+                },
                 state.Status)
             : Results.NotFound();
     }

@@ -63,7 +63,7 @@ internal static class SawsJson
         }
 
         var code = now.Saw(body.Saw)!.Saw.Code;
-        var result = await desk.Write(Command(body, code), body.Op.ToString(), $"/saws/{code}");
+        var result = await desk.Write(Command(body, code), body.Op.ToString(), $"/saws/{code}", device: Desk.ByJson);
         return result is WriteResult.Done done
             ? Results.Ok(new RunsOut(done.EntryId, code, await Recorded(desk.Db, body.Op)))
             : JsonAnswers.NotRecorded(result, field => SentAs.GetValueOrDefault(field, "body"));

@@ -19,6 +19,9 @@ public sealed record StockRow
 
     public required int Least { get; init; }
 
+    /// <summary>Whose figure the least is.</summary>
+    public required string LeastFrom { get; init; }
+
     public required string Use { get; init; }
 
     /// <summary>"Order 2 of E1 by 8 Dec"; null: nothing to order.</summary>

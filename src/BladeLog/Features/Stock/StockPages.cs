@@ -57,7 +57,10 @@ internal static class StockPages
         Dictionary<int, int> moved = await desk.Db.StockMoves.AsNoTracking().GroupBy(m => m.SpecId).Select(g => new { g.Key, Sum = g.Sum(m => m.Count) }).ToDictionaryAsync(g => g.Key, g => g.Sum);
         bool canEdit = endpoints.Endpoints.OfType<RouteEndpoint>().Any(e => "/" + e.RoutePattern.RawText?.Trim('/') == EditAddress);
         IReadOnlyList<StockLine> lines = StockCount.Of(specs.OrderBy(s => s.Code, NaturalOrder.Instance), advice, hours, moved, leadDays, (int)leastCount);
-        StockRow[] rows = [.. lines.Select(s => Row(s, advice, units, desk.Now, canEdit)).OrderByDescending(r => r.Now).ThenByDescending(r => r.Order is not null)];
+        string forAll = least is not null && leastCount != advice.Settings[StockSettings.Least] ? "as asked below"
+            : advice.Settings.Known(StockSettings.Least).IsDefault ? "default, not yours"
+            : "yours, for every kind";
+        StockRow[] rows = [.. lines.Select(s => Row(s, advice, units, desk.Now, canEdit, forAll)).OrderByDescending(r => r.Now).ThenByDescending(r => r.Order is not null)];
         int toOrder = lines.Count(s => s.OrderInDays <= leadDays);
         return await desk.Page<StockPage, StockModel>(
             new StockModel
@@ -71,7 +74,7 @@ internal static class StockPages
                 Rows = rows,
                 LeadDays = leadDays.ToString("0.##", CultureInfo.InvariantCulture),
                 Least = leastCount.ToString("0", CultureInfo.InvariantCulture),
-                Basis = $"Reckoned from the hours each kind ran in the last {weeks:0.#} weeks, shared by its blades at hand: a blade is gone once it passes its retire mark, and before that with its chance to break (handbook alone). Blades at the sharpener or on hold do not count. A kind that did not run has no least.",
+                Basis = $"Reckoned from the hours each kind ran in the last {weeks:0.#} weeks, shared by its blades at hand: a blade is gone once it passes its retire mark, and before that with its chance to break (handbook alone). Blades at the sharpener or on hold do not count. A kind without a least of its own has none while it does not run.",
                 Form = form,
                 State = state,
                 Who = (await desk.Who())?.Initials,
@@ -89,7 +92,7 @@ internal static class StockPages
         return shares.ToDictionary(s => s.Key, s => s.Ms / 3_600_000.0 / weeks);
     }
 
-    private static StockRow Row(StockLine s, ShopAdvice advice, ShopUnits units, DateTime now, bool canEdit)
+    private static StockRow Row(StockLine s, ShopAdvice advice, ShopUnits units, DateTime now, bool canEdit, string forAll)
     {
         List<string> counts = [];
         void Add(int n, string words)
@@ -118,13 +121,14 @@ internal static class StockPages
             Counts = counts.Count == 0 ? "none left" : string.Join(", ", counts),
             AtHand = s.AtHand,
             Least = s.Least,
+            LeastFrom = s.OwnLeast ? "yours" : forAll,
             Use = s.HoursPerWeek > 0
                 ? $"{Figures.With(Figures.Hours(s.HoursPerWeek), "h")} a week; {(s.GoneInLeadTime < 0.05 ? "none is" : $"about {Wording.Number(s.GoneInLeadTime, 1)} are")} expected to be gone before an order is here"
                 : "did not run lately",
             Order = s.OrderInDays is null ? null : $"Order {s.Order} of {s.Spec.Code} {when}",
             Now = s.OrderInDays is 0,
             Blades = [.. s.Blades.Where(b => !StockCount.IsSpare(b)).OrderBy(b => b.File.Blade.Tag, NaturalOrder.Instance).Select(b => new StockBlade(b.File.Blade.Tag, Says(b, advice), WorkedOut.Life(b)))],
-            Edit = canEdit ? $"/specs/{s.Spec.Code}/edit" : null,
+            Edit = canEdit ? $"/specs/{Uri.EscapeDataString(s.Spec.Code)}/edit" : null,
             Price = s.Spec.PriceMinor is { } price ? units.ShowMoney(price) : "price not told",
         };
     }

@@ -11,7 +11,7 @@ public static class Checks
 {
     private static readonly HashSet<string> MayBeZero =
     [
-        "lower_guide_m", "clearance_m", "idle_w", "crack_length_m", "angle_rad", "bevel_rad",
+        "lower_guide_m", "clearance_m", "idle_w", "crack_length_m", "angle_rad", "bevel_rad", "set_left_m", "set_right_m",
     ];
 
     private static readonly string[] AboveZero = ["_m", "_mps", "_pa", "_w", "_n", "_n_per_m", "_hrc", "_h"];

@@ -34,6 +34,9 @@ public static class Facts
         Refers(mount, m => m.Blade, m => m.BladeId);
         Refers(Fact<Dismount>(model), d => d.Mount, d => d.MountId);
         Refers(Fact<Slack>(model), s => s.Saw, s => s.SawId);
+        var check = Fact<StartCheck>(model);
+        Refers(check, c => c.Saw, c => c.SawId);
+        check.Ignore(c => c.SawNotRight);
 
         Refers<MeterEpoch, Saw>(Fact<MeterEpoch>(model), null, e => e.SawId);
         var reading = Fact<MeterReading>(model);
@@ -43,6 +46,8 @@ public static class Facts
         var run = Fact<Run>(model);
         Refers(run, r => r.Saw, r => r.SawId);
         Refers<Run, MeterReading>(run, null, r => r.ReadingId);
+        Refers<Run, TimerStarted>(run, null, r => r.TimerId);
+        Refers(Fact<TimerStarted>(model), t => t.Saw, t => t.SawId);
 
         // By its end first: what is entered is mostly recent, so few runs end after a window begins.
         run.HasIndex(r => new { r.SawId, r.UntilUtc, r.FromUtc });
@@ -79,6 +84,14 @@ public static class Facts
         var drift = Fact<Drift>(model);
         Refers<Drift, Saw>(drift, null, d => d.SawId);
         Refers<Drift, Blade>(drift, null, d => d.BladeId);
+        var kerf = Fact<KerfReading>(model);
+        Refers(kerf, k => k.Blade, k => k.BladeId);
+        Refers(kerf, k => k.Saw, k => k.SawId);
+        kerf.ToTable(t =>
+        {
+            t.HasCheckConstraint("ck_kerf_reading_says_something", "kerf_m is not null or set_both_m is not null");
+            t.HasCheckConstraint("ck_kerf_reading_both_sides", "(set_left_m is null) = (set_right_m is null) and (set_left_m is null or set_both_m is not null)");
+        });
         Refers<StockMove, Spec>(Fact<StockMove>(model), null, s => s.SpecId);
 
         Refers(Fact<Hold>(model), h => h.Blade, h => h.BladeId);

@@ -165,6 +165,51 @@ public sealed class Drift : Fact
     public double AngleRad { get; set; }
 }
 
+public enum KerfHow
+{
+    /// <summary>A cut into waste, and feelers in the slot.</summary>
+    TestCut,
+
+    /// <summary>A caliper over the set teeth or the tips.</summary>
+    OverTeeth,
+
+    /// <summary>A dial gauge on single teeth, against the body.</summary>
+    DialGauge,
+}
+
+/// <summary>
+/// Kerf and set as measured outside a sharpening. Left and right are those of the blade as it runs, seen from the side
+/// its teeth point to, the teeth pointing down. Good until the teeth are set again.
+/// </summary>
+public sealed class KerfReading : Fact
+{
+    public int BladeId { get; set; }
+
+    public Blade Blade { get; set; } = null!;
+
+    /// <summary>Where the test cut was made.</summary>
+    public int? SawId { get; set; }
+
+    public Saw? Saw { get; set; }
+
+    public KerfHow How { get; set; }
+
+    public double? KerfM { get; set; }
+
+    public string? KerfTyped { get; set; }
+
+    public double? SetLeftM { get; set; }
+
+    public double? SetRightM { get; set; }
+
+    /// <summary>Both sides together: the sum of the two, or what was measured where the sides were not told apart.</summary>
+    public double? SetBothM { get; set; }
+
+    public string? SetTyped { get; set; }
+
+    public string? Note { get; set; }
+}
+
 public sealed class StockMove : Fact
 {
     public int SpecId { get; set; }

@@ -4,6 +4,7 @@ using System.Security.Cryptography;
 using System.Text;
 using Microsoft.EntityFrameworkCore;
 using Microsoft.EntityFrameworkCore.Metadata;
+using Microsoft.EntityFrameworkCore.Storage;
 
 namespace BladeLog.Records;
 
@@ -19,19 +20,44 @@ public static class Chain
 {
     private static readonly ConcurrentDictionary<IEntityType, IReadOnlyList<Column>> Columns = new();
 
-    /// <summary>Gives entries their hashes, once they and their facts have their numbers.</summary>
-    internal static void Seal(ShopDb db, IEnumerable<Entry> entries, IEnumerable<Fact> made, byte[]? previous)
+    /// <summary>The hashes of entries that have their numbers, with their facts, in the order of the chain.</summary>
+    internal static IEnumerable<(Entry Entry, byte[]? Previous, byte[] Hash)> Links(ShopDb db, IEnumerable<Entry> entries, IEnumerable<Fact> made, byte[]? previous)
     {
         var facts = made.ToLookup(f => f.EntryId, f => Hash(db, f));
         foreach (var entry in entries.OrderBy(e => e.Id))
         {
-            (entry.PreviousHash, entry.Hash) = (previous, previous = Hash(db, entry, previous, facts[entry.Id]));
+            var hash = Hash(db, entry, previous, facts[entry.Id]);
+            yield return (entry, previous, hash);
+            previous = hash;
         }
     }
 
-    /// <summary>The hash of the line before this one; null where there is none, or where it was written before hashes were kept.</summary>
-    internal static Task<byte[]?> Before(ShopDb db, int entryId) =>
-        db.Entries.Where(e => e.Id < entryId).OrderByDescending(e => e.Id).Select(e => e.Hash).FirstOrDefaultAsync();
+    /// <summary>Chains entries just saved to the line before them, in the transaction under way.</summary>
+    /// <remarks>By plain commands: two more round trips of the change tracker would cost more than the write itself.</remarks>
+    internal static async Task Seal(ShopDb db, IReadOnlyCollection<Entry> entries, IEnumerable<Fact> made)
+    {
+        await using var command = db.Database.GetDbConnection().CreateCommand();
+        command.Transaction = db.Database.CurrentTransaction?.GetDbTransaction();
+        var id = Parameter("@id");
+        id.Value = entries.Min(e => e.Id);
+        command.CommandText = "select hash from entry where id < @id order by id desc limit 1";
+        var before = await command.ExecuteScalarAsync() as byte[];
+        command.CommandText = "update entry set previous_hash = @previous, hash = @hash where id = @id";
+        var (previous, hash) = (Parameter("@previous"), Parameter("@hash"));
+        foreach (var link in Links(db, entries, made, before))
+        {
+            (id.Value, previous.Value, hash.Value) = (link.Entry.Id, link.Previous ?? (object)DBNull.Value, link.Hash);
+            await command.ExecuteNonQueryAsync();
+        }
+
+        System.Data.Common.DbParameter Parameter(string name)
+        {
+            var parameter = command.CreateParameter();
+            parameter.ParameterName = name;
+            command.Parameters.Add(parameter);
+            return parameter;
+        }
+    }
 
     /// <summary>The first line that does not fit, in a sentence; null where all fit.</summary>
     public static async Task<string?> FirstBreak(ShopDb db)

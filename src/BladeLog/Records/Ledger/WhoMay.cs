@@ -8,6 +8,10 @@ public static class WhoMay
         [nameof(HoldCleared)] = new(Role.ClearHolds, Enforced: true),
         [nameof(Sharpening)] = new(Role.Sharpen, Enforced: false),
         [nameof(Joint)] = new(Role.Weld, Enforced: false),
+        [nameof(StartCheck)] = new(null, Enforced: false),
+        [nameof(TimerStarted)] = new(null, Enforced: false),
+        // Anyone with a caliper may measure; only setting the teeth is a sharpener's work.
+        [nameof(KerfReading)] = new(null, Enforced: false),
         [nameof(HandOver)] = new(null, Enforced: false),
         [nameof(HandOverRead)] = new(null, Enforced: false),
         // Training to clear holds gives the right to it, so its handler asks for that right.

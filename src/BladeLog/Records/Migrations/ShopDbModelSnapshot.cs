@@ -745,6 +745,14 @@ namespace BladeLog.Records.Migrations
                         .HasColumnType("TEXT")
                         .HasColumnName("found");
 
+                    b.Property<string>("LookedAt")
+                        .HasColumnType("TEXT")
+                        .HasColumnName("looked_at");
+
+                    b.Property<string>("Marks")
+                        .HasColumnType("TEXT")
+                        .HasColumnName("marks");
+
                     b.Property<string>("Note")
                         .HasColumnType("TEXT")
                         .HasColumnName("note");
@@ -753,6 +761,10 @@ namespace BladeLog.Records.Migrations
                         .HasColumnType("TEXT")
                         .HasColumnName("place");
 
+                    b.Property<int?>("TeethMissing")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("teeth_missing");
+
                     b.HasKey("EntryId");
 
                     b.HasIndex("BladeId");
@@ -760,6 +772,8 @@ namespace BladeLog.Records.Migrations
                     b.ToTable("inspection", t =>
                         {
                             t.HasCheckConstraint("ck_inspection_crack_length_m", "\"crack_length_m\" >= 0 and \"crack_length_m\" < 1e300");
+
+                            t.HasCheckConstraint("ck_inspection_teeth_missing", "\"teeth_missing\" >= 0");
                         });
                 });
 
@@ -797,6 +811,75 @@ namespace BladeLog.Records.Migrations
                     b.ToTable("joint", t =>
                         {
                             t.HasCheckConstraint("ck_joint_loop_m", "\"loop_m\" > 0 and \"loop_m\" < 1e300");
+                        });
+                });
+
+            modelBuilder.Entity("BladeLog.Records.KerfReading", b =>
+                {
+                    b.Property<int>("EntryId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("entry_id");
+
+                    b.Property<int>("BladeId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("blade_id");
+
+                    b.Property<string>("How")
+                        .IsRequired()
+                        .HasColumnType("TEXT")
+                        .HasColumnName("how");
+
+                    b.Property<double?>("KerfM")
+                        .HasColumnType("REAL")
+                        .HasColumnName("kerf_m");
+
+                    b.Property<string>("KerfTyped")
+                        .HasColumnType("TEXT")
+                        .HasColumnName("kerf_typed");
+
+                    b.Property<string>("Note")
+                        .HasColumnType("TEXT")
+                        .HasColumnName("note");
+
+                    b.Property<int?>("SawId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("saw_id");
+
+                    b.Property<double?>("SetBothM")
+                        .HasColumnType("REAL")
+                        .HasColumnName("set_both_m");
+
+                    b.Property<double?>("SetLeftM")
+                        .HasColumnType("REAL")
+                        .HasColumnName("set_left_m");
+
+                    b.Property<double?>("SetRightM")
+                        .HasColumnType("REAL")
+                        .HasColumnName("set_right_m");
+
+                    b.Property<string>("SetTyped")
+                        .HasColumnType("TEXT")
+                        .HasColumnName("set_typed");
+
+                    b.HasKey("EntryId");
+
+                    b.HasIndex("BladeId");
+
+                    b.HasIndex("SawId");
+
+                    b.ToTable("kerf_reading", t =>
+                        {
+                            t.HasCheckConstraint("ck_kerf_reading_both_sides", "(set_left_m is null) = (set_right_m is null) and (set_left_m is null or set_both_m is not null)");
+
+                            t.HasCheckConstraint("ck_kerf_reading_kerf_m", "\"kerf_m\" > 0 and \"kerf_m\" < 1e300");
+
+                            t.HasCheckConstraint("ck_kerf_reading_says_something", "kerf_m is not null or set_both_m is not null");
+
+                            t.HasCheckConstraint("ck_kerf_reading_set_both_m", "\"set_both_m\" > 0 and \"set_both_m\" < 1e300");
+
+                            t.HasCheckConstraint("ck_kerf_reading_set_left_m", "\"set_left_m\" >= 0 and \"set_left_m\" < 1e300");
+
+                            t.HasCheckConstraint("ck_kerf_reading_set_right_m", "\"set_right_m\" >= 0 and \"set_right_m\" < 1e300");
                         });
                 });
 
@@ -1355,6 +1438,10 @@ namespace BladeLog.Records.Migrations
                         .HasColumnType("REAL")
                         .HasColumnName("speed_mps");
 
+                    b.Property<int?>("TimerId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("timer_id");
+
                     b.Property<DateTime>("UntilUtc")
                         .HasColumnType("TEXT")
                         .HasColumnName("until_utc");
@@ -1362,6 +1449,8 @@ namespace BladeLog.Records.Migrations
                     b.HasKey("EntryId");
 
                     b.HasIndex("ReadingId");
+
+                    b.HasIndex("TimerId");
 
                     b.HasIndex("SawId", "UntilUtc", "FromUtc");
 
@@ -1945,6 +2034,10 @@ namespace BladeLog.Records.Migrations
                         .HasColumnType("TEXT")
                         .HasColumnName("kerf_typed");
 
+                    b.Property<int?>("LeastStock")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("least_stock");
+
                     b.Property<double?>("LeastWidthM")
                         .HasColumnType("REAL")
                         .HasColumnName("least_width_m");
@@ -2064,6 +2157,8 @@ namespace BladeLog.Records.Migrations
 
                             t.HasCheckConstraint("ck_spec_kerf_over_body", "kerf_m is null or kerf_m > thickness_m");
 
+                            t.HasCheckConstraint("ck_spec_least_stock", "\"least_stock\" >= 0");
+
                             t.HasCheckConstraint("ck_spec_least_width", "least_width_m is null or least_width_m <= width_m");
 
                             t.HasCheckConstraint("ck_spec_least_width_m", "\"least_width_m\" > 0 and \"least_width_m\" < 1e300");
@@ -2122,6 +2217,47 @@ namespace BladeLog.Records.Migrations
                         {
                             t.HasCheckConstraint("ck_split_width_m", "\"width_m\" > 0 and \"width_m\" < 1e300");
                         });
+                });
+
+            modelBuilder.Entity("BladeLog.Records.StartCheck", b =>
+                {
+                    b.Property<int>("EntryId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("entry_id");
+
+                    b.Property<bool>("BrakeRight")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("brake_right");
+
+                    b.Property<bool>("GuardsRight")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("guards_right");
+
+                    b.Property<string>("Note")
+                        .HasColumnType("TEXT")
+                        .HasColumnName("note");
+
+                    b.Property<bool?>("QuietRight")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("quiet_right");
+
+                    b.Property<int>("SawId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("saw_id");
+
+                    b.Property<bool?>("TensionRight")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("tension_right");
+
+                    b.Property<bool>("UnderTableRight")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("under_table_right");
+
+                    b.HasKey("EntryId");
+
+                    b.HasIndex("SawId");
+
+                    b.ToTable("start_check");
                 });
 
             modelBuilder.Entity("BladeLog.Records.StockMove", b =>
@@ -2250,6 +2386,30 @@ namespace BladeLog.Records.Migrations
                     b.ToTable("thing_history", t =>
                         {
                             t.HasCheckConstraint("ck_thing_history_version", "\"version\" > 0");
+                        });
+                });
+
+            modelBuilder.Entity("BladeLog.Records.TimerStarted", b =>
+                {
+                    b.Property<int>("EntryId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("entry_id");
+
+                    b.Property<int>("SawId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("saw_id");
+
+                    b.Property<double?>("SpeedMps")
+                        .HasColumnType("REAL")
+                        .HasColumnName("speed_mps");
+
+                    b.HasKey("EntryId");
+
+                    b.HasIndex("SawId");
+
+                    b.ToTable("timer_started", t =>
+                        {
+                            t.HasCheckConstraint("ck_timer_started_speed_mps", "\"speed_mps\" > 0 and \"speed_mps\" < 1e300");
                         });
                 });
 
@@ -2713,6 +2873,32 @@ namespace BladeLog.Records.Migrations
                     b.Navigation("Entry");
                 });
 
+            modelBuilder.Entity("BladeLog.Records.KerfReading", b =>
+                {
+                    b.HasOne("BladeLog.Records.Blade", "Blade")
+                        .WithMany()
+                        .HasForeignKey("BladeId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.HasOne("BladeLog.Records.Entry", "Entry")
+                        .WithOne()
+                        .HasForeignKey("BladeLog.Records.KerfReading", "EntryId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.HasOne("BladeLog.Records.Saw", "Saw")
+                        .WithMany()
+                        .HasForeignKey("SawId")
+                        .OnDelete(DeleteBehavior.Restrict);
+
+                    b.Navigation("Blade");
+
+                    b.Navigation("Entry");
+
+                    b.Navigation("Saw");
+                });
+
             modelBuilder.Entity("BladeLog.Records.LabelPrinted", b =>
                 {
                     b.HasOne("BladeLog.Records.Blade", "Blade")
@@ -2909,6 +3095,11 @@ namespace BladeLog.Records.Migrations
                         .OnDelete(DeleteBehavior.Restrict)
                         .IsRequired();
 
+                    b.HasOne("BladeLog.Records.TimerStarted", null)
+                        .WithMany()
+                        .HasForeignKey("TimerId")
+                        .OnDelete(DeleteBehavior.Restrict);
+
                     b.Navigation("Entry");
 
                     b.Navigation("Saw");
@@ -3037,6 +3228,25 @@ namespace BladeLog.Records.Migrations
                     b.Navigation("Entry");
                 });
 
+            modelBuilder.Entity("BladeLog.Records.StartCheck", b =>
+                {
+                    b.HasOne("BladeLog.Records.Entry", "Entry")
+                        .WithOne()
+                        .HasForeignKey("BladeLog.Records.StartCheck", "EntryId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.HasOne("BladeLog.Records.Saw", "Saw")
+                        .WithMany()
+                        .HasForeignKey("SawId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.Navigation("Entry");
+
+                    b.Navigation("Saw");
+                });
+
             modelBuilder.Entity("BladeLog.Records.StockMove", b =>
                 {
                     b.HasOne("BladeLog.Records.Entry", "Entry")
@@ -3092,6 +3302,25 @@ namespace BladeLog.Records.Migrations
                         .WithMany()
                         .HasForeignKey("PersonId")
                         .OnDelete(DeleteBehavior.Restrict);
+                });
+
+            modelBuilder.Entity("BladeLog.Records.TimerStarted", b =>
+                {
+                    b.HasOne("BladeLog.Records.Entry", "Entry")
+                        .WithOne()
+                        .HasForeignKey("BladeLog.Records.TimerStarted", "EntryId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.HasOne("BladeLog.Records.Saw", "Saw")
+                        .WithMany()
+                        .HasForeignKey("SawId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.Navigation("Entry");
+
+                    b.Navigation("Saw");
                 });
 
             modelBuilder.Entity("BladeLog.Records.Trained", b =>

@@ -21,6 +21,12 @@ public sealed record SawNow(Saw Saw, SawSetup Setup, int? MountedBladeId, DateTi
 {
     /// <summary>The tension is let off.</summary>
     public bool Slack { get; init; }
+
+    /// <summary>The last start-of-shift check; null: never checked.</summary>
+    public StartCheck? LastCheck { get; init; }
+
+    /// <summary>The start of the timer that runs now; null: none runs.</summary>
+    public TimerStarted? Timer { get; init; }
 }
 
 /// <summary>
@@ -32,6 +38,9 @@ public sealed record ExposureLine(SawSetup Setup, double SpeedMps, long RunningM
 {
     /// <summary>When the spell began.</summary>
     public DateTime FromUtc { get; init; }
+
+    /// <summary>What was seen in the gullets by the end of the spell.</summary>
+    public BladeMarks Marks { get; init; }
 
     public double Hours => RunningMs / 3_600_000.0;
 }
@@ -65,7 +74,11 @@ public sealed record BladeFile
     /// <summary>As measured at the last sharpening; null: the specification's.</summary>
     public double? GulletM { get; init; }
 
-    public double? KerfM { get; init; }
+    /// <summary>What was measured of its kerf and set, and still holds.</summary>
+    public KerfNow Kerf { get; init; } = KerfNow.Nothing;
+
+    /// <summary>As measured last; null: never, or not since it was set again.</summary>
+    public double? KerfM => Kerf.LastM;
 
     public double? EdgeAfterM { get; init; }
 
@@ -105,6 +118,12 @@ public sealed record BladeFile
     public Retirement? Retirement { get; init; }
 
     public Inspection? LastInspection { get; init; }
+
+    /// <summary>What the last looks saw that stands still: a full-profile grind takes burrs away.</summary>
+    public BladeMarks Marks { get; init; }
+
+    /// <summary>Teeth that were missing at that look, where they were counted.</summary>
+    public int? TeethMissing { get; init; }
 
     public DateTime? LastInspectedUtc { get; init; }
 

@@ -15,6 +15,7 @@ internal sealed partial class SampleFacts
         Each("batch_lines", SendBlade);
         Each("returns", Return);
         Each("sharpenings", Sharpen);
+        Each("kerf_readings", Kerf);
         Each("prior_use", PriorUse);
         Each("splits", Split);
         Each("joints", Join);
@@ -67,6 +68,23 @@ internal sealed partial class SampleFacts
             EdgeAfterM = row.OptionalNumber("edge_um") / 1e6,
             PriceMinor = row.OptionalMoney("price_minor"),
         }, null, s => s.BatchId = batch?.EntryId);
+    }
+
+    private void Kerf(SampleRow row)
+    {
+        var (left, right) = (row.OptionalMetres("set_left_mm"), row.OptionalMetres("set_right_mm"));
+        Add(row, new KerfReading
+        {
+            BladeId = Blade(row),
+            How = row.Case<KerfHow>("how"),
+            KerfM = row.OptionalMetres("kerf_mm"),
+            KerfTyped = row.Optional("kerf_mm") is { } kerf ? $"{kerf} mm" : null,
+            SetLeftM = left,
+            SetRightM = right,
+            SetBothM = left + right,
+            SetTyped = left is null ? null : $"{row.Text("set_left_mm")} mm; {row.Text("set_right_mm")} mm",
+            Note = row.Optional("note"),
+        });
     }
 
     private void PriorUse(SampleRow row) => Add(row, new PriorUse

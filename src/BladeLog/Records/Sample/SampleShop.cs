@@ -26,7 +26,11 @@ public static class SampleShop
             db.ChangeTracker.Clear();
             var facts = ledger.Close();
             db.AddRange(facts);
-            Chain.Seal(db, facts.Select(f => f.Entry), facts, null);
+            foreach (var (entry, previous, hash) in Chain.Links(db, facts.Select(f => f.Entry), facts, null))
+            {
+                (entry.PreviousHash, entry.Hash) = (previous, hash);
+            }
+
             await db.SaveChangesAsync();
             db.ChangeTracker.Clear();
 

@@ -64,6 +64,9 @@ public sealed class Spec : Thing
 
     public long? PriceMinor { get; set; }
 
+    /// <summary>Fewest to have at hand; null: the shop's setting for every kind.</summary>
+    public int? LeastStock { get; set; }
+
     /// <summary>Mean pitch: 25.4 mm over the mean TPI, so the harmonic mean of the two pitches.</summary>
     public double PitchMeanM => 2 / (1 / PitchCoarseM + 1 / PitchFineM);
 }

@@ -22,6 +22,8 @@ internal static partial class ConstraintWords
         ["ck_saw_setup_tilt"] = new("TiltMostRad", "The tilt must be less than 90 degrees."),
         ["ck_run_window"] = new("UntilUtc", "The end must be after the beginning."),
         ["ck_sharpening_gullet"] = new("GulletM", "The gullet must be less deep than the blade is wide."),
+        ["ck_kerf_reading_says_something"] = new("KerfM", "Write the kerf, or the set."),
+        ["ck_kerf_reading_both_sides"] = new("SetLeftM", "Write the set of both sides, or both together."),
         ["ck_prior_use_range"] = new("UsedHigh", "The upper end must not be below the lower one."),
         ["ck_break_window"] = new("LatestUtc", "The latest time must not be before the earliest."),
         ["ck_break_hours"] = new("HoursHigh", "The upper hours must not be below the lower ones."),

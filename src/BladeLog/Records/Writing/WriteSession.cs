@@ -70,17 +70,8 @@ internal sealed class WriteSession(ShopDb db, Sent sent, byte[] body)
         await Db.SaveChangesAsync();
     }
 
-    /// <summary>Chains what was saved to the line before it. A large file's first entries are no longer held by then.</summary>
-    public async Task Seal()
-    {
-        foreach (var entry in _entries.Where(e => Db.Entry(e).State == EntityState.Detached))
-        {
-            Db.Entry(entry).State = EntityState.Unchanged;
-        }
-
-        Chain.Seal(Db, _entries, _facts, await Chain.Before(Db, _entries.Min(e => e.Id)));
-        await Db.SaveChangesAsync();
-    }
+    /// <summary>Chains what was saved to the line before it.</summary>
+    public Task Seal() => Chain.Seal(Db, _entries, _facts);
 
     public void Refuse(string field, string sentence) => _refusals.Add(new Problem(_fieldPrefix + field, sentence));
 

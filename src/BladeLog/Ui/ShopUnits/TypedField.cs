@@ -35,6 +35,7 @@ public static class Fields
     public static TypedField GulletDepth { get; } = new("a gullet depth", 0.1e-3, 0.1) { Thousandths = true };
     public static TypedField GulletRadius { get; } = new("a gullet radius", 0.05e-3, 0.1) { Thousandths = true };
     public static TypedField Kerf { get; } = new("a kerf", 0.1e-3, 20e-3) { Thousandths = true };
+    public static TypedField Set { get; } = new("a set", 0, 5e-3) { Thousandths = true };
     public static TypedField Bite { get; } = new("a bite", 1e-6, 10e-3) { Thousandths = true };
     public static TypedField EdgeRadius { get; } = new("an edge radius", 0.1e-6, 1e-3) { Bare = "um", Thousandths = true };
     public static TypedField CrackLength { get; } = new("a crack length", 0, 0.6) { Thousandths = true };
@@ -69,7 +70,9 @@ public static class Fields
     public static TypedField Seconds { get; } = new("a time", 0, 10_000 * 3600.0) { Bare = "s" };
 
     public static TypedField Pieces { get; } = new("a number of pieces", 1, 1e6);
+    public static TypedField TeethMissing { get; } = new("a number of teeth", 1, 500);
     public static TypedField Count { get; } = new("a whole number", 0, 1e9);
+    public static TypedField Stock { get; } = new("a number of blades", 0, 1000);
     public static TypedField Revolutions { get; } = new("a wheel speed", 1, 20_000);
 
     /// <summary>In minor units.</summary>

@@ -12,7 +12,7 @@ public sealed class StockPageTests(SampleApp sample) : IClassFixture<SampleApp>
     public async Task Blades_at_the_sharpener_are_no_stock()
     {
         string mill = await Row("E1");
-        Assert.Contains("1 at hand, least 1: 1 on a saw, 3 at the sharpener, promised", mill, StringComparison.Ordinal);
+        Assert.Contains("1 at hand, least 1 (default, not yours): 1 on a saw, 3 at the sharpener, promised", mill, StringComparison.Ordinal);
     }
 
     [Fact]
@@ -86,6 +86,33 @@ public sealed class StockPageTests(SampleApp sample) : IClassFixture<SampleApp>
         Assert.Contains("75.00, what a break costs on Osprey", text, StringComparison.Ordinal);
         Assert.Matches("About [0-9]+ in (100|1,000) such blades break in those 10 h", text);
         Assert.Contains("Q-14 is on hold: no chance is told of it.", SampleApp.Text((await sample.Page("/stock/costs?blade=Q-14")).Body), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task A_least_of_the_kind_wins_over_that_of_every_kind_and_says_whose_it_is()
+    {
+        await using ShopApp app = await ShopApp.Sample();
+        async Task<string> Kind(string code, string path = "/stock") => SampleApp.Text(
+            (await app.GetPage(path)).QuerySelectorAll("section").First(s => SampleApp.Text(s.QuerySelector("h2")).StartsWith(code + ":", StringComparison.Ordinal)));
+
+        // Three of the four mill blades are away: one at hand, and three are wanted.
+        await using (ShopDb db = app.NewContext())
+        {
+            await db.Database.ExecuteSqlRawAsync("update spec set least_stock = 3 where code = 'E1'");
+            await db.Database.ExecuteSqlRawAsync("update spec set least_stock = 2 where code = 'E2'");
+            await db.Database.ExecuteSqlRawAsync("update spec set least_stock = 0 where code = 'B3'");
+        }
+
+        string mill = await Kind("E1");
+        Assert.Contains("1 at hand, least 3 (yours)", mill, StringComparison.Ordinal);
+        Assert.Matches("Order [2-9] of E1 now", mill);
+        Assert.Contains("least 3 (yours)", await Kind("E1", "/stock?lead=14&least=7"), StringComparison.Ordinal);
+        Assert.Contains("(as asked below)", await Kind("B4", "/stock?lead=14&least=7"), StringComparison.Ordinal);
+
+        // It did not run lately, and is wanted all the same.
+        Assert.Contains("Order 2 of E2 now", await Kind("E2"), StringComparison.Ordinal);
+        string none = await Kind("B3");
+        Assert.Contains("least 0 (yours)", none, StringComparison.Ordinal);
     }
 
     private async Task<string> Row(string code)

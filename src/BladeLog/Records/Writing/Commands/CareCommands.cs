@@ -24,6 +24,31 @@ public sealed record RecordSharpening(string Tag, GrindKind Kind) : Command
     public bool WiderMeant { get; init; }
 }
 
+/// <summary>Kerf and set as measured outside a sharpening. The set is of both sides, or of both together.</summary>
+public sealed record RecordKerf(string Tag, KerfHow How) : Command
+{
+    public string? Saw { get; init; }
+
+    public double? KerfM { get; init; }
+
+    public string? KerfTyped { get; init; }
+
+    public double? SetLeftM { get; init; }
+
+    public double? SetRightM { get; init; }
+
+    public double? SetBothM { get; init; }
+
+    public string? SetTyped { get; init; }
+
+    public string? Note { get; init; }
+
+    public DateTime? At { get; init; }
+
+    /// <summary>One more tap: far wider than the body, and meant.</summary>
+    public bool WideMeant { get; init; }
+}
+
 public sealed record SendBatch(string Number, string Service, IReadOnlyList<string> Tags, DateTime? PromisedUtc = null, DateTime? At = null) : Command;
 
 /// <summary>What came back from the sharpener; what is not named stays away.</summary>
@@ -76,6 +101,13 @@ public sealed record ClearHold(string Tag, string How, DateTime? At = null) : Co
 /// <summary>A crack found puts the blade on hold in the same group.</summary>
 public sealed record RecordInspection(string Tag, Found Found) : Command
 {
+    /// <summary>Null: not said.</summary>
+    public LookedAt? LookedAt { get; init; }
+
+    public BladeMarks? Marks { get; init; }
+
+    public int? TeethMissing { get; init; }
+
     public double? CrackLengthM { get; init; }
 
     public string? CrackTyped { get; init; }
