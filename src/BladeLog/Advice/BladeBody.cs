@@ -1,3 +1,4 @@
+using BladeLog.Handbook.Fatigue;
 using BladeLog.Handbook.Quantities;
 using BladeLog.Records;
 
@@ -60,6 +61,12 @@ public sealed record BladeBody
 
     public required BodySteel Steel { get; init; }
 
+    /// <summary>Burrs left in the gullets are taken as a punched edge.</summary>
+    public GulletFinish GulletFinish { get; init; } = GulletFinish.Ground;
+
+    /// <summary>Rust was seen in the gullets.</summary>
+    public bool Rusty { get; init; }
+
     /// <summary>The shop's own target, Pa on the body.</summary>
     public double? TargetPa { get; init; }
 
@@ -98,7 +105,7 @@ public sealed record BladeBody
             TipMaterial = spec.TipMaterial,
             Steel = spec.BodySteel,
             TargetPa = spec.TensionPa,
-        };
+        }.With(file.Marks);
     }
 
     /// <summary>
@@ -135,6 +142,13 @@ public sealed record BladeBody
             ? new BladeTension(new Known(most.Value, Provenance.Derived, "greatest pull of the saw"), TensionRule.SawGreatestPull, guessed, 1)
             : new BladeTension(common, TensionRule.DefaultOfSteel, guessed, common.Value / most);
     }
+
+    /// <summary>The same body with its gullets as a look saw them.</summary>
+    public BladeBody With(BladeMarks marks) => this with
+    {
+        GulletFinish = marks.HasFlag(BladeMarks.Burrs) ? GulletFinish.Punched : GulletFinish.Ground,
+        Rusty = marks.HasFlag(BladeMarks.Rust),
+    };
 
     private static Known? Given(double? value, string from) => value is { } v ? Known.Yours(v, from) : null;
 }

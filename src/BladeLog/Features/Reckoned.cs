@@ -24,6 +24,7 @@ internal static class Reckoned
         "N" => units.Show(new Force(f.Value)),
         "W" => units.Show(new Power(f.Value)),
         "" => Number(f.Value),
+        "×" => "×" + f.Value.ToString("0.00", CultureInfo.InvariantCulture),
         "°" => Number(f.Value) + "°",
         _ => Figures.With(Number(f.Value), f.Unit),
     };

@@ -90,6 +90,9 @@ internal static class Said
         };
     }
 
+    /// <summary>"1:25 h" of a time that has passed.</summary>
+    public static string Clock(TimeSpan time) => Figures.With($"{Math.Floor(time.TotalHours):0}:{time.Minutes:00}", "h");
+
     public static string Day(DateTime utc, ShopUnits units) => Local(utc, units).ToString("d MMM yyyy", System.Globalization.CultureInfo.InvariantCulture);
 
     public static DateTime Local(DateTime utc, ShopUnits units)

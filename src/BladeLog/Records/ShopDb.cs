@@ -41,6 +41,10 @@ public sealed class ShopDb(DbContextOptions<ShopDb> options) : DbContext(options
 
     public DbSet<Slack> Slacks => Set<Slack>();
 
+    public DbSet<StartCheck> StartChecks => Set<StartCheck>();
+
+    public DbSet<TimerStarted> TimersStarted => Set<TimerStarted>();
+
     public DbSet<MeterEpoch> MeterEpochs => Set<MeterEpoch>();
 
     public DbSet<MeterReading> MeterReadings => Set<MeterReading>();

@@ -42,9 +42,10 @@ public static class Figures
         return v > 999 ? ">999" : v.ToString("0", Plain);
     }
 
-    /// <summary>The used part of a life with its band: "0.6 (0.15 to 2.5)".</summary>
-    public static string Used(double used, double low, double high) =>
-        $"{TwoFigureText(used)} ({TwoFigureText(low)} to {TwoFigureText(high)})";
+    /// <summary>The used part of a life with its band: "0.6 (0.15 to 2.5)"; nothing used has none.</summary>
+    public static string Used(double used, double low, double high) => used == 0 && low == 0 && high == 0
+        ? "0"
+        : $"{TwoFigureText(used)} ({TwoFigureText(low)} to {TwoFigureText(high)})";
 
     /// <summary>A chance in words a shop counts in: "about 4 in 1,000".</summary>
     public static string Chance(double probability)

@@ -70,7 +70,8 @@ public sealed class TensionAndBodyTests(DemoShopFixture shop) : IClassFixture<De
         BladeFile q18 = shop.Blade("Q-18");
         ExposureLine run = q18.Exposures[0], half = run with { RunningMs = run.RunningMs / 2 };
         double straight = Gullet(q18), turned = Gullet(q18 with { Exposures = [half, half with { InsideOut = true }] });
-        Assert.Equal(straight / 2, turned, 9);
+        // The face that lies on the wheels bears far less, yet not nothing.
+        Assert.InRange(turned, straight / 2, straight / 2 * 1.1);
         Assert.Equal(straight, Gullet(q18 with { Exposures = [half, half] }), 6);
 
         double Gullet(BladeFile blade) => shop.Advice.On(blade, shop.Saw("S3")).Record.Used.Gullet;

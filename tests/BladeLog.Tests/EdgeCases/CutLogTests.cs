@@ -21,7 +21,7 @@ public sealed class CutLogTests
         Assert.Equal("/blades/Q-08/inspect?nail=1", done.Location);
         var look = await app.GetPage(done.Location!);
         Assert.Contains("count the teeth lost", SampleApp.Text(look.Body), StringComparison.Ordinal);
-        (await app.SendForm(look, "/blades/Q-08/inspect", ("Found", "Worn"), ("Note", "2 teeth gone"))).LeadsTo("/blades/Q-08");
+        (await app.SendForm(look, "/blades/Q-08/inspect", ("Found", "Worn"), ("LookedAt", "whole"), ("Note", "2 teeth gone"))).LeadsTo("/blades/Q-08");
         await using var db = app.NewContext();
         Assert.True((await db.CutsDone.OrderByDescending(c => c.EntryId).FirstAsync()).Nail);
     }

@@ -38,7 +38,7 @@ public sealed class LooksAndMoneyTests
     public async Task The_page_of_a_cracked_blade_tells_its_growth_and_no_life()
     {
         using var app = await ShopApp.Sample();
-        (await app.Fill("/blades/Q-14/inspect", ("Found", "Crack"), ("Place", "Gullet"), ("CrackLength", "3.1"))).LeadsTo("/blades/Q-14");
+        (await app.Fill("/blades/Q-14/inspect", ("Found", "Crack"), ("LookedAt", "whole"), ("Place", "Gullet"), ("CrackLength", "3.1"))).LeadsTo("/blades/Q-14");
         var page = await app.GetPage("/blades/Q-14");
         var facts = SampleApp.Text(page.QuerySelector("dl.facts"));
         Assert.Matches(@"Crack ?2\.6 mm to 3\.1 mm in a gullet ?no running between the two", facts);

@@ -25,7 +25,7 @@ public sealed class ResentFormsTests
         Form("/blades/new", "/blades/new", ("Tags", "N-1 N-2"), ("Spec", "A1"), ("UsedLow", "0.2"), ("UsedHigh", "0.6")),
         Form("/blades/{tag}/edit", "/blades/Q-13/edit", ("InspectEvery", "6")),
         Form("/blades/{tag}/sharpen", "/blades/Q-13/sharpen", ("Kind", "Face")),
-        Form("/blades/{tag}/inspect", "/blades/Q-13/inspect", ("Found", "NothingSeen")),
+        Form("/blades/{tag}/inspect", "/blades/Q-13/inspect", ("Found", "NothingSeen"), ("LookedAt", "whole")),
         Form("/blades/{tag}/hold", "/blades/Q-11/hold", ("Kind", "Damage")),
         Form("/blades/{tag}/clear", "/blades/Q-11/clear", ("How", "no damage found")),
         Form("/blades/{tag}/hang", "/blades/Q-13/hang", ("Place", "Rack"), ("Hook", "R1-1")),

@@ -45,6 +45,16 @@ public static class BladeFigures
         yield return new("tension", life.Tension!.Stress.Value / 1e6, "MPa", $"on the body: {life.Tension.Stress.From}", "engineering-default", life.Tension.Stress.Provenance);
         yield return new("bends an hour", rate.Result.BendsPerHour, "", "wheels times band speed over loop", "derived", Provenance.Derived);
         yield return new("median bends", rate.Result.MedianBends, "", "stress-life line of the body's hardness with the factors of gullet and weld", "roessle-fatemi-2000", settings.ProvenanceOf(BladeSettings.GulletBending));
+        if (life.RustFactor is { } rust)
+        {
+            yield return new("rust in the gullets: life", rust, "×", "median bends with the strength of the gullets times 0.7, over those without", "engineering-default", Provenance.EngineeringDefault);
+        }
+
+        if (life.BurrFactor is { } burrs)
+        {
+            yield return new("burrs in the gullets: life", burrs, "×", "median bends with the surface factor of a punched gullet, over those of a ground one", "noll-lipson-1946", Provenance.EngineeringDefault);
+        }
+
         if (life.MedianHours is { } median)
         {
             yield return new("median life on this saw", median, "h", "median bends over bends an hour", "derived", Provenance.EngineeringDefault);

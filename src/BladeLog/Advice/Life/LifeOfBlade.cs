@@ -80,6 +80,12 @@ public sealed record LifeOfBlade
 
     public Damage? Rate { get; init; }
 
+    /// <summary>What rust in the gullets leaves of the median bends on the saw asked on; null: none was seen.</summary>
+    public double? RustFactor { get; init; }
+
+    /// <summary>What burrs in the gullets leave of them; null: none were seen.</summary>
+    public double? BurrFactor { get; init; }
+
     public LifeVerdict? Verdict => Rate?.Result.Verdict;
 
     /// <summary>Hours are told between unsuitable and not limiting; outside them the ladder's word stands alone.</summary>
@@ -107,19 +113,16 @@ public sealed record LifeOfBlade
         ArgumentNullException.ThrowIfNull(level);
         ArgumentNullException.ThrowIfNull(settings);
         double shape = settings[LifeSettings.Shape], faceA = 0, faceB = 0, weld = 0, bends = 0;
+
+        // Over wheels to one side the inner face never governs, so a blade never turned needs no second face.
+        bool turned = file.Exposures.Any(e => e.InsideOut);
         foreach (ExposureLine line in file.Exposures)
         {
             double tension = line.TensionPa ?? body.TensionOn(line.Setup, file with { TensionThisSpellPa = null }, settings).Stress.Value;
-            Damage rate = damage.Of(body, file.Weld, line.Setup, line.SpeedMps, tension, line.LoopM);
+            Damage rate = damage.Of(body.With(line.Marks), file.Weld, line.Setup, line.SpeedMps, tension, line.LoopM);
             bends += line.Hours * rate.Result.BendsPerHour;
-            if (line.InsideOut)
-            {
-                faceB += line.Hours * rate.Gullet;
-            }
-            else
-            {
-                faceA += line.Hours * rate.Gullet;
-            }
+            faceA += line.Hours * (line.InsideOut ? rate.InnerFace : rate.Gullet);
+            faceB += line.Hours * (line.InsideOut ? rate.Gullet : turned ? rate.InnerFace : 0);
 
             if (line.OnThisWeld)
             {
@@ -149,8 +152,11 @@ public sealed record LifeOfBlade
         double shape = settings[LifeSettings.Shape], v = on.Setup.UsualSpeedMps;
         BladeTension tension = body.TensionOn(on.Setup, file, settings);
         Damage rate = damage.Of(body, file.Weld, on.Setup, v, tension.Stress.Value, file.LoopM ?? on.Setup.LoopM);
+        double? Left(BladeBody without) => rate.Result.MedianBends / damage.Of(without, file.Weld, on.Setup, v, tension.Stress.Value, file.LoopM ?? on.Setup.LoopM).Result.MedianBends;
         LifeOfBlade asked = this with
         {
+            RustFactor = body.Rusty ? Left(body with { Rusty = false }) : null,
+            BurrFactor = body.GulletFinish == GulletFinish.Punched ? Left(body with { GulletFinish = GulletFinish.Ground }) : null,
             On = on,
             SpeedMps = v,
             Tension = tension,

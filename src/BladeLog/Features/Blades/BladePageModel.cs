@@ -122,6 +122,15 @@ internal static class BladePageModel
 
     private static IEnumerable<BladeCaution> Cautions(BladeAdvice blade)
     {
+        if (blade.State is not (BladeState.Broken or BladeState.Retired))
+        {
+            string means = string.Join(" ", MarkWords.Means(blade));
+            if (means.Length > 0)
+            {
+                yield return new(means, "Seen at a look; it stands until another look there. Common practice.");
+            }
+        }
+
         if (blade.State == BladeState.Hold)
         {
             yield return new("On hold: do not run it. Any crack that can be seen means hold, on every saw here, whatever its length and whatever the hours say.", "The tenth of the width that US law allows is for wide band head saws only: 29 CFR 1910.265(e)(2)(i).", Stop: true);

@@ -9,12 +9,17 @@ public sealed record ClearForm : PostedForm
 {
     public string? How { get; init; }
 
+    public string? Note { get; init; }
+
     public string? At { get; init; }
 }
 
 /// <summary>A hold is cleared by a person who may.</summary>
 internal static class Clear
 {
+    /// <summary>The way that needs a note.</summary>
+    public const string Other = "other";
+
     public static Task<IResult> Get(Desk desk, string tag) => Show(desk, tag, new ClearForm(), FormState.New);
 
     public static async Task<IResult> Post([FromForm] ClearForm? form, Desk desk, string tag)
@@ -26,8 +31,10 @@ internal static class Clear
         }
 
         var read = new FormReading(await desk.Units(), desk.Now);
-        read.RefuseUnless(!string.IsNullOrWhiteSpace(form.How), nameof(form.How), "Say how it was cleared: ground out, cut out, no crack found.");
-        var command = new ClearHold(tag, form.How?.Trim() ?? "", read.Time(nameof(form.At), form.At));
+        var (how, note) = (form.How?.Trim() ?? "", form.Note?.Trim() ?? "");
+        read.RefuseUnless(how.Length > 0, nameof(form.How), "Say how it was cleared: ground out, cut out, no crack found.");
+        read.RefuseUnless(how != Other || note.Length > 0, nameof(form.Note), "Write how it was cleared.");
+        var command = new ClearHold(tag, how == Other ? note : note.Length > 0 ? $"{how}: {note}" : how, read.Time(nameof(form.At), form.At));
         return read.IsGood
             ? await desk.Send(command, form, BladeForm.Of(tag), $"Hold of {Tags.Read(tag)} cleared", state => Show(desk, tag, form, state))
             : await Show(desk, tag, form, read.State);

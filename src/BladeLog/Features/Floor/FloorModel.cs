@@ -21,6 +21,9 @@ public sealed record BigFigure(string Number, string Unit, string Way, string St
 /// <summary>The next cut of a saw and what to do for it.</summary>
 public sealed record NextLine(string Number, string Wood, string Height, string Before, string Bold, string After);
 
+/// <summary>Start or stop of a saw's timer. Start: the entry it stops; null: none runs.</summary>
+public sealed record TileTimer(string Words, int? Start);
+
 /// <summary>One saw as it stands on the floor.</summary>
 public sealed record SawTile
 {
@@ -48,6 +51,12 @@ public sealed record SawTile
 
     public string? Small { get; init; }
 
+    /// <summary>What the last check found not right on the saw; null: nothing that was looked at.</summary>
+    public string? NotRight { get; init; }
+
+    /// <summary>The one-tap timer in the place of the hours; null: the saw has a meter, or does not run.</summary>
+    public TileTimer? Timer { get; init; }
+
     public NextLine? Next { get; init; }
 }
 
@@ -73,6 +82,8 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
             Under = Said.Wheels(saw.Setup, units),
             Shape = Drawn.Saw(saw.Setup),
             State = "empty",
+            NotRight = CheckWords.OnTile(saw.LastCheck),
+            Timer = saw.Timer is { } timer ? new($"Stop {Said.Clock(advice.Now.AsOf - timer.Entry.AtUtc)}", timer.EntryId) : null,
             Next = next is null ? null : Next(next, saw.Slack, advice.Words),
         };
         if (advice.Now.Blades.FirstOrDefault(b => b.Blade.Id == saw.MountedBladeId) is not { } file)
@@ -101,6 +112,7 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
                 BladeState.Look => "look",
                 _ => "runs",
             },
+            Timer = on.Timer ?? (saw.Saw.HasHourMeter ? null : new("Start timer", null)),
             Edge = Edge(blade, next, units),
             Limit = limit,
             Small = words,

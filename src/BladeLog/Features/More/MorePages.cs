@@ -9,6 +9,7 @@ internal static class MorePages
 {
     private static readonly MoreRow[] All =
     [
+        new("Checks", "Which saws were looked at today before they started", "/checks"),
         new("Breaks", "What broke, where, and whether it was due", "/breaks"),
         new("Stock", "What is left of each kind, and what to order", "/stock"),
         new("Record", "Everything entered, newest first", "/record"),

@@ -25,6 +25,7 @@ internal sealed class Audit(AuditFacts facts, DateTime from, DateTime to, DateTi
                 ("Inspections", Figures.Number(looks.Count)),
                 ("Inspections that found a crack", Figures.Number(looks.Count(l => l.Found == Found.Crack))),
                 ("Looks that came late or not at all", Figures.Number(gaps)),
+                ("Checks before starting", Figures.Number(facts.Checks.Count(In))),
                 ("Holds", Figures.Number(facts.Holds.Count(In))),
                 ("Holds cleared", Figures.Number(facts.Cleared.Count(In))),
                 ("Still on hold at the end", Figures.Number(open)),
@@ -73,9 +74,21 @@ internal sealed class Audit(AuditFacts facts, DateTime from, DateTime to, DateTi
             .. facts.Cleared.Where(c => In(c) && facts.SawOf(c.Hold.BladeId, c.Hold.Entry.AtUtc) == saw.Id).Select(c => Row(c, About.Saw)),
             .. facts.Breaks.Where(b => In(b) && (b.SawId ?? facts.SawOf(b.BladeId, b.Entry.AtUtc)) == saw.Id).Select(b => Row(b, About.Saw)),
             .. facts.Trainings.Where(t => In(t) && t.SawId == saw.Id).Select(t => Row(t, About.Saw)),
+            .. facts.Checks.Where(c => c.SawId == saw.Id && In(c) && CheckWords.NotRight(c, units).Count > 0).Select(c => Row(c, About.Saw)),
             .. gaps.Select(g => Row(g.Gap, $"{g.Blade.Tag}: {GapWords(g.Gap, g.Blade)}")),
         ];
-        return new AuditPart(saw.Name, $"ran {Hours(ran)}; its blades were inspected {Said.Count(looks, "time", "times")}; {Said.Count(gaps.Count, "look", "looks")} late or missing", [.. rows.OrderBy(r => r.At)]);
+        return new AuditPart(saw.Name, $"ran {Hours(ran)}; {DaysChecked(saw)}; its blades were inspected {Said.Count(looks, "time", "times")}; {Said.Count(gaps.Count, "look", "looks")} late or missing", [.. rows.OrderBy(r => r.At)]);
+    }
+
+    /// <summary>A day it ran is one on which running hours of it ended or a cut of it was made, on the shop's clock.</summary>
+    private string DaysChecked(Saw saw)
+    {
+        DateTime Day(DateTime utc) => Said.Local(utc, units).Date;
+        var ran = facts.SawRuns.Where(r => r.SawId == saw.Id && r.UntilUtc >= from && r.UntilUtc < to).Select(r => Day(r.UntilUtc))
+            .Concat(facts.Cuts.Where(c => c.SawId == saw.Id && c.AtUtc >= from && c.AtUtc < to).Select(c => Day(c.AtUtc))).ToHashSet();
+        var looked = facts.Checks.Where(c => c.SawId == saw.Id && In(c)).Select(c => Day(c.Entry.AtUtc)).ToHashSet();
+        looked.IntersectWith(ran);
+        return $"checked on {Figures.Number(looked.Count)} of {Said.Count(ran.Count, "day", "days")} it ran";
     }
 
     private bool In(Fact fact) => fact.Entry.AtUtc >= from && fact.Entry.AtUtc < to;

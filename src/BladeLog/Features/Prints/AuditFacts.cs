@@ -23,6 +23,11 @@ internal sealed record AuditFacts
 
     public required IReadOnlyList<Trained> Trainings { get; init; }
 
+    public required IReadOnlyList<StartCheck> Checks { get; init; }
+
+    /// <summary>When each cut ended, by saw: with the running it tells on which days a saw ran.</summary>
+    public required IReadOnlyList<(int SawId, DateTime AtUtc)> Cuts { get; init; }
+
     public required IReadOnlyList<(int BladeId, DateTime AtUtc, int SawId)> Mounts { get; init; }
 
     public required ILookup<int, RunUpTo> Runs { get; init; }
@@ -38,12 +43,12 @@ internal sealed record AuditFacts
         Trainings.Select(t => t.Entry.AtUtc).Append(DateTime.MaxValue).Min(),
     }.Min() is var first && first < DateTime.MaxValue ? first : null;
 
-    /// <summary>Of inspections, holds, their clearing, breaks and trainings.</summary>
+    /// <summary>Of inspections, holds, their clearing, breaks, trainings and checks.</summary>
     public required IReadOnlyList<DateTime> StruckOut { get; init; }
 
     public static async Task<AuditFacts> Read(ShopDb db)
     {
-        string[] kinds = [nameof(Inspection), nameof(Hold), nameof(HoldCleared), nameof(Break), nameof(Retirement), nameof(Trained)];
+        string[] kinds = [nameof(Inspection), nameof(Hold), nameof(HoldCleared), nameof(Break), nameof(Retirement), nameof(Trained), nameof(StartCheck)];
         var shares = await db.RunShares.AsNoTracking()
             .Join(db.Runs, s => s.RunId, r => r.EntryId, (s, r) => new { s.MountId, s.Ms, r.UntilUtc })
             .Join(db.Mounts, s => s.MountId, m => m.EntryId, (s, m) => new { m.BladeId, s.UntilUtc, s.Ms, m.SawId })
@@ -57,6 +62,8 @@ internal sealed record AuditFacts
             Cleared = await Past.Standing(db.HoldsCleared.Include(c => c.Hold.Entry)).ToListAsync(),
             Breaks = await Past.Standing(db.Breaks).ToListAsync(),
             Retirements = await Past.Standing(db.Retirements).ToListAsync(),
+            Checks = await Past.Standing(db.StartChecks).ToListAsync(),
+            Cuts = [.. (await db.CutsDone.AsNoTracking().Select(c => new { c.SawId, c.Entry.AtUtc }).ToListAsync()).Select(c => (c.SawId, c.AtUtc))],
             Trainings = await Past.Standing(db.Trainings.Include(t => t.Person).Include(t => t.By)).ToListAsync(),
             Mounts = [.. (await db.Mounts.AsNoTracking().Select(m => new { m.BladeId, m.Entry.AtUtc, m.SawId }).ToListAsync()).Select(m => (m.BladeId, m.AtUtc, m.SawId)).OrderBy(m => m.AtUtc)],
             Runs = shares.ToLookup(s => s.BladeId, s => new RunUpTo(s.UntilUtc, s.Ms, s.SawId)),

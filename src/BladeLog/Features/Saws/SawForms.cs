@@ -16,7 +16,12 @@ internal static class SawForms
         app.MapGet("/saws/{code}/hours", Hours.Get);
         app.MapPost("/saws/{code}/hours", Hours.Post);
         app.MapGet("/saws/{code}/timer", Timer.Get);
-        app.MapPost("/saws/{code}/timer", Timer.Post);
+        app.MapPost("/saws/{code}/timer", Timer.Stop);
+        app.MapPost("/saws/{code}/timer/start", Timer.Start);
+        app.MapPost("/saws/{code}/timer/never", Timer.Never);
+        app.MapGet("/saws/{code}/check", Check.Get);
+        app.MapPost("/saws/{code}/check", Check.Post);
+        app.MapGet("/checks", Checks.Get);
         app.MapGet("/saws/{code}/clicking", Clicking.Get);
         app.MapPost("/saws/{code}/clicking", Clicking.Post);
         app.MapGet("/saws/{code}/slack", Slack.Get);

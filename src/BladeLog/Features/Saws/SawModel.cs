@@ -22,7 +22,12 @@ public sealed record CutLine(int Number, string Wood, string Use);
 /// <summary>A blade that fits, and how long it lasts here.</summary>
 public sealed record FittingRow(string Tag, string Section, ToothSpec Teeth, string State, string Where, string Lasts, SmallBand Band, Worked? Worked);
 
-public sealed record SawAction(string Words, string Href, bool Main = false, bool Alarm = false);
+/// <param name="Words">On the button.</param>
+/// <param name="Href">Where it leads, or where its form is sent.</param>
+/// <param name="Main">What is advised now.</param>
+/// <param name="Alarm">In alarm.</param>
+/// <param name="Timer">Null: a link. Else a form of one tap, with the start of the timer it stops, 0 to start one.</param>
+public sealed record SawAction(string Words, string Href, bool Main = false, bool Alarm = false, int? Timer = null);
 
 /// <summary>Everything the page of one saw shows.</summary>
 public sealed record SawModel
@@ -51,6 +56,12 @@ public sealed record SawModel
     public MountedPart? Mounted { get; init; }
 
     public required string Hours { get; init; }
+
+    /// <summary>The last check before starting, in words; null: never checked.</summary>
+    public string? Checked { get; init; }
+
+    /// <summary>What it found not right, to be put right; null: nothing that was looked at.</summary>
+    public string? ToPutRight { get; init; }
 
     /// <summary>Hours run with no blade known, as a question; null: none.</summary>
     public string? Question { get; init; }

@@ -11,7 +11,7 @@ using BladeLog.Ui.Pictures;
 namespace BladeLog.Features.Saws;
 
 /// <summary>Puts the page of one saw together.</summary>
-internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits units, IdleShare idle, DateTime? heard = null)
+internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits units, IdleShare idle, DateTime? heard = null, string? checker = null)
 {
     private readonly SawSetup setup = saw.Setup;
     private readonly BladeAdvice? on = advice.Now.Blades.FirstOrDefault(b => b.Blade.Id == saw.MountedBladeId) is { } file ? advice.On(file, saw) : null;
@@ -38,6 +38,8 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
             Facts = [.. Facts()],
             Mounted = Mounted(),
             Hours = $"{Hours(saw.RunningMs)} run since this record began.{(idle.Accounted is { } share ? $" The cuts logged account for {Wording.Number(share * 100, 0)} %." : "")}",
+            Checked = saw.LastCheck is { } check ? $"Looked at {Said.When(check.Entry.AtUtc, advice.Now.AsOf, units)}{(checker is null ? "" : $" by {checker}")}: {CheckWords.Says(check, units)}." : null,
+            ToPutRight = CheckWords.ToPutRight(saw.LastCheck) is { Length: > 0 } wrong ? $"Found not right, and to be put right: {wrong}. This stands until the next check finds it right." : null,
             Question = saw.NoBladeKnownMs > 0 ? $"{Hours(saw.NoBladeKnownMs)} of them with no blade known. Say which was on, and the hours go to it." : null,
             Heard = heard is { } last ? $"Last heard from the logger: {Said.When(last, advice.Now.AsOf, units)}." : null,
             Wheels = [.. setup.Wheels.OrderBy(w => w.Position).Select(Wheel)],
@@ -79,7 +81,8 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
             { ChangeBefore: true } change => $"{name}: put {change.Choice.Tag} on for {cut}",
             _ => $"{name}: {tag} stays on for {cut}",
         };
-        return (state, title, saw.Slack ? $"Its {advice.Words.Tension} is off: put it on before it runs." : $"{tag} is on it. {string.Join(" ", on.Advice.Because.Take(1))}".Trim());
+        string since = saw.Timer is { } timer ? $" Timer since {Said.When(timer.Entry.AtUtc, advice.Now.AsOf, units)}." : "";
+        return (state, title, (saw.Slack ? $"Its {advice.Words.Tension} is off: put it on before it runs." : $"{tag} is on it. {string.Join(" ", on.Advice.Because.Take(1))}".Trim()) + since);
     }
 
     private CaptionPart Caption(PlannedCut cut, double? span, double? thrust)
@@ -223,11 +226,22 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
             yield return new("Clicking", At("clicking"), Alarm: true);
         }
 
+        if (saw.Timer is { } timer)
+        {
+            yield return new($"Stop {Said.Clock(advice.Now.AsOf - timer.Entry.AtUtc)}", At("timer"), Timer: timer.EntryId);
+        }
+        else if (!saw.Saw.HasHourMeter)
+        {
+            yield return new("Start timer", At("timer/start"), Timer: 0);
+        }
+
         yield return new("Hours", At("hours"));
+        yield return new("Check", At("check"));
         yield return new("Cut done", At("cut"));
         if (on is not null)
         {
             yield return new(Said.Capital($"{advice.Words.Tension} {(saw.Slack ? "on" : "off")}"), At("slack"));
+            yield return new(Said.Capital($"{advice.Words.Tension} measured"), $"/blades/{on.File.Blade.Tag}/tension");
         }
 
         yield return new("What if", At("what-if"));

@@ -26,7 +26,8 @@ internal static class SawPages
         PastPage past = await Past.OfSaw(desk.Db, saw.Saw.Id, all is null ? Shown : Most);
         var cuts = await desk.Db.CutsDone.AsNoTracking().Where(c => c.SawId == saw.Saw.Id).Select(c => new { c.LengthM, c.Pieces, c.FeedMps }).ToListAsync();
         IdleShare idle = IdleShare.Of(saw.RunningMs, cuts.Select(c => (c.LengthM, c.Pieces, c.FeedMps)));
-        SawPageModel page = new(saw, await desk.Advice(), await desk.Units(), idle, await Heard(desk.Db, saw.Saw.Id));
+        string? checker = saw.LastCheck?.Entry.PersonId is { } id ? await desk.Db.People.Where(p => p.Id == id).Select(p => p.Initials).FirstOrDefaultAsync() : null;
+        SawPageModel page = new(saw, await desk.Advice(), await desk.Units(), idle, await Heard(desk.Db, saw.Saw.Id), checker);
         return await desk.Page<SawPage, SawModel>(page.Model(past, await Story.Of(desk), all is null));
     }
 

@@ -85,6 +85,8 @@ internal static class HandOverPages
         Say("Dull, no further grind", free.Where(b => Dull(b) && !b.Grind.Pays).Select(b => b.File.Blade.Tag + Where(b.File, advice.Now)));
         Say("To look at", free.Where(b => !Dull(b) && (b.InspectionOverdue || b.State == BladeState.Look)).Select(b => b.File.Blade.Tag + Where(b.File, advice.Now)));
         Say(advice.Words.Tension == "strain" ? "Strain off" : "Tension off", advice.Now.Saws.Where(s => s.Slack).Select(s => s.Saw.Name));
+        Say("Timer runs", advice.Now.Saws.Where(s => s.Timer is not null).Select(s => s.Saw.Name));
+        Say("Found not right at the last check", advice.Now.Saws.Where(s => s.Saw.Active && s.LastCheck?.SawNotRight == true).Select(s => $"{s.Saw.Name}, {CheckWords.ToPutRight(s.LastCheck)}"));
         Say("No blade on", advice.Now.Saws.Where(s => s.Saw.Active && s.MountedBladeId is null).Select(s => s.Saw.Name));
         Say("Stock low", advice.Now.Saws.Where(s => s.Saw.Active).Select(s => Low(s, advice)).OfType<string>());
         Say("At the sharpener", advice.Now.Blades.Where(b => b.Away is not null).GroupBy(b => b.Away!.BatchNumber).OrderBy(g => g.Key, NaturalOrder.Instance)

@@ -34,6 +34,9 @@ public static class Facts
         Refers(mount, m => m.Blade, m => m.BladeId);
         Refers(Fact<Dismount>(model), d => d.Mount, d => d.MountId);
         Refers(Fact<Slack>(model), s => s.Saw, s => s.SawId);
+        var check = Fact<StartCheck>(model);
+        Refers(check, c => c.Saw, c => c.SawId);
+        check.Ignore(c => c.SawNotRight);
 
         Refers<MeterEpoch, Saw>(Fact<MeterEpoch>(model), null, e => e.SawId);
         var reading = Fact<MeterReading>(model);
@@ -43,6 +46,8 @@ public static class Facts
         var run = Fact<Run>(model);
         Refers(run, r => r.Saw, r => r.SawId);
         Refers<Run, MeterReading>(run, null, r => r.ReadingId);
+        Refers<Run, TimerStarted>(run, null, r => r.TimerId);
+        Refers(Fact<TimerStarted>(model), t => t.Saw, t => t.SawId);
 
         // By its end first: what is entered is mostly recent, so few runs end after a window begins.
         run.HasIndex(r => new { r.SawId, r.UntilUtc, r.FromUtc });

@@ -136,6 +136,9 @@ public sealed class Run : Fact
     public RunSource Source { get; set; }
 
     public int? ReadingId { get; set; }
+
+    /// <summary>The start of the timer these hours were stopped from.</summary>
+    public int? TimerId { get; set; }
 }
 
 public enum FeedGrade

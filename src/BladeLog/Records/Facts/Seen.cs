@@ -51,6 +51,42 @@ public enum Found
     Other,
 }
 
+/// <summary>What of a blade was looked at.</summary>
+[Flags]
+public enum LookedAt
+{
+    Nothing = 0,
+    Teeth = 1,
+    Gullets = 2,
+    Weld = 4,
+    Body = 8,
+    BackEdge = 16,
+    HeatMarks = 32,
+
+    /// <summary>Twist, and whether it lies level.</summary>
+    Level = 64,
+    WholeLoop = Teeth | Gullets | Weld | Body | BackEdge | HeatMarks | Level,
+}
+
+/// <summary>What was seen beside a crack.</summary>
+[Flags]
+public enum BladeMarks
+{
+    None = 0,
+
+    /// <summary>Rust in the gullets.</summary>
+    Rust = 1,
+
+    /// <summary>Burrs left in the gullets.</summary>
+    Burrs = 2,
+
+    /// <summary>Gullets turned blue by the grinding.</summary>
+    BurnedGullets = 4,
+    KinkOrTwist = 8,
+    TeethMissing = 16,
+    InGullets = Rust | Burrs | BurnedGullets,
+}
+
 public sealed class Inspection : Fact
 {
     public int BladeId { get; set; }
@@ -58,6 +94,14 @@ public sealed class Inspection : Fact
     public Blade Blade { get; set; } = null!;
 
     public Found Found { get; set; }
+
+    /// <summary>Null: not said, as in entries from before this was asked.</summary>
+    public LookedAt? LookedAt { get; set; }
+
+    /// <summary>Null: not said.</summary>
+    public BladeMarks? Marks { get; set; }
+
+    public int? TeethMissing { get; set; }
 
     public double? CrackLengthM { get; set; }
 

@@ -8,6 +8,8 @@ public static class WhoMay
         [nameof(HoldCleared)] = new(Role.ClearHolds, Enforced: true),
         [nameof(Sharpening)] = new(Role.Sharpen, Enforced: false),
         [nameof(Joint)] = new(Role.Weld, Enforced: false),
+        [nameof(StartCheck)] = new(null, Enforced: false),
+        [nameof(TimerStarted)] = new(null, Enforced: false),
         // Anyone with a caliper may measure; only setting the teeth is a sharpener's work.
         [nameof(KerfReading)] = new(null, Enforced: false),
         [nameof(HandOver)] = new(null, Enforced: false),

@@ -745,6 +745,14 @@ namespace BladeLog.Records.Migrations
                         .HasColumnType("TEXT")
                         .HasColumnName("found");
 
+                    b.Property<string>("LookedAt")
+                        .HasColumnType("TEXT")
+                        .HasColumnName("looked_at");
+
+                    b.Property<string>("Marks")
+                        .HasColumnType("TEXT")
+                        .HasColumnName("marks");
+
                     b.Property<string>("Note")
                         .HasColumnType("TEXT")
                         .HasColumnName("note");
@@ -753,6 +761,10 @@ namespace BladeLog.Records.Migrations
                         .HasColumnType("TEXT")
                         .HasColumnName("place");
 
+                    b.Property<int?>("TeethMissing")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("teeth_missing");
+
                     b.HasKey("EntryId");
 
                     b.HasIndex("BladeId");
@@ -760,6 +772,8 @@ namespace BladeLog.Records.Migrations
                     b.ToTable("inspection", t =>
                         {
                             t.HasCheckConstraint("ck_inspection_crack_length_m", "\"crack_length_m\" >= 0 and \"crack_length_m\" < 1e300");
+
+                            t.HasCheckConstraint("ck_inspection_teeth_missing", "\"teeth_missing\" >= 0");
                         });
                 });
 
@@ -1424,6 +1438,10 @@ namespace BladeLog.Records.Migrations
                         .HasColumnType("REAL")
                         .HasColumnName("speed_mps");
 
+                    b.Property<int?>("TimerId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("timer_id");
+
                     b.Property<DateTime>("UntilUtc")
                         .HasColumnType("TEXT")
                         .HasColumnName("until_utc");
@@ -1431,6 +1449,8 @@ namespace BladeLog.Records.Migrations
                     b.HasKey("EntryId");
 
                     b.HasIndex("ReadingId");
+
+                    b.HasIndex("TimerId");
 
                     b.HasIndex("SawId", "UntilUtc", "FromUtc");
 
@@ -2199,6 +2219,47 @@ namespace BladeLog.Records.Migrations
                         });
                 });
 
+            modelBuilder.Entity("BladeLog.Records.StartCheck", b =>
+                {
+                    b.Property<int>("EntryId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("entry_id");
+
+                    b.Property<bool>("BrakeRight")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("brake_right");
+
+                    b.Property<bool>("GuardsRight")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("guards_right");
+
+                    b.Property<string>("Note")
+                        .HasColumnType("TEXT")
+                        .HasColumnName("note");
+
+                    b.Property<bool?>("QuietRight")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("quiet_right");
+
+                    b.Property<int>("SawId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("saw_id");
+
+                    b.Property<bool?>("TensionRight")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("tension_right");
+
+                    b.Property<bool>("UnderTableRight")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("under_table_right");
+
+                    b.HasKey("EntryId");
+
+                    b.HasIndex("SawId");
+
+                    b.ToTable("start_check");
+                });
+
             modelBuilder.Entity("BladeLog.Records.StockMove", b =>
                 {
                     b.Property<int>("EntryId")
@@ -2325,6 +2386,30 @@ namespace BladeLog.Records.Migrations
                     b.ToTable("thing_history", t =>
                         {
                             t.HasCheckConstraint("ck_thing_history_version", "\"version\" > 0");
+                        });
+                });
+
+            modelBuilder.Entity("BladeLog.Records.TimerStarted", b =>
+                {
+                    b.Property<int>("EntryId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("entry_id");
+
+                    b.Property<int>("SawId")
+                        .HasColumnType("INTEGER")
+                        .HasColumnName("saw_id");
+
+                    b.Property<double?>("SpeedMps")
+                        .HasColumnType("REAL")
+                        .HasColumnName("speed_mps");
+
+                    b.HasKey("EntryId");
+
+                    b.HasIndex("SawId");
+
+                    b.ToTable("timer_started", t =>
+                        {
+                            t.HasCheckConstraint("ck_timer_started_speed_mps", "\"speed_mps\" > 0 and \"speed_mps\" < 1e300");
                         });
                 });
 
@@ -3010,6 +3095,11 @@ namespace BladeLog.Records.Migrations
                         .OnDelete(DeleteBehavior.Restrict)
                         .IsRequired();
 
+                    b.HasOne("BladeLog.Records.TimerStarted", null)
+                        .WithMany()
+                        .HasForeignKey("TimerId")
+                        .OnDelete(DeleteBehavior.Restrict);
+
                     b.Navigation("Entry");
 
                     b.Navigation("Saw");
@@ -3138,6 +3228,25 @@ namespace BladeLog.Records.Migrations
                     b.Navigation("Entry");
                 });
 
+            modelBuilder.Entity("BladeLog.Records.StartCheck", b =>
+                {
+                    b.HasOne("BladeLog.Records.Entry", "Entry")
+                        .WithOne()
+                        .HasForeignKey("BladeLog.Records.StartCheck", "EntryId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.HasOne("BladeLog.Records.Saw", "Saw")
+                        .WithMany()
+                        .HasForeignKey("SawId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.Navigation("Entry");
+
+                    b.Navigation("Saw");
+                });
+
             modelBuilder.Entity("BladeLog.Records.StockMove", b =>
                 {
                     b.HasOne("BladeLog.Records.Entry", "Entry")
@@ -3193,6 +3302,25 @@ namespace BladeLog.Records.Migrations
                         .WithMany()
                         .HasForeignKey("PersonId")
                         .OnDelete(DeleteBehavior.Restrict);
+                });
+
+            modelBuilder.Entity("BladeLog.Records.TimerStarted", b =>
+                {
+                    b.HasOne("BladeLog.Records.Entry", "Entry")
+                        .WithOne()
+                        .HasForeignKey("BladeLog.Records.TimerStarted", "EntryId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.HasOne("BladeLog.Records.Saw", "Saw")
+                        .WithMany()
+                        .HasForeignKey("SawId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.Navigation("Entry");
+
+                    b.Navigation("Saw");
                 });
 
             modelBuilder.Entity("BladeLog.Records.Trained", b =>

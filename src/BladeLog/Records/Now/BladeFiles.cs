@@ -34,6 +34,7 @@ internal sealed class BladeFiles
         var last = sharpenings.LastOrDefault();
         var inspection = _rows.LastInspections.GetValueOrDefault(blade.Id);
         var broke = _rows.Breaks[blade.Id].LastOrDefault();
+        var (marks, missing) = MarksAt(line, DateTime.MaxValue);
         return new BladeFile
         {
             Blade = blade,
@@ -67,11 +68,36 @@ internal sealed class BladeFiles
             Break = broke is not null && joint is not null && joint.Entry.AtUtc >= broke.LatestUtc ? null : broke,
             Retirement = _rows.Retirements.GetValueOrDefault(blade.Id),
             LastInspection = inspection,
+            Marks = marks,
+            TeethMissing = missing,
             LastInspectedUtc = inspection?.Entry.AtUtc,
             MsSinceInspection = own.Sum(s => RunningSince(s, inspection?.Entry.AtUtc, shares)),
             MountedSinceInspection = own.Exists(s => inspection is null || s.From >= inspection.Entry.AtUtc),
             MountedSinceUtc = open?.From,
         };
+    }
+
+    /// <summary>
+    /// What stood by a time: gullets as the last look at gullets saw them, the rest as the last look that said anything.
+    /// A full-profile grind after it takes burrs away.
+    /// </summary>
+    private (BladeMarks Marks, int? TeethMissing) MarksAt(List<(Blade Blade, DateTime Until, bool Ancestor)> line, DateTime at)
+    {
+        if (!line.Exists(a => _rows.Marked[a.Blade.Id].Any()))
+        {
+            return (BladeMarks.None, null);
+        }
+
+        var looks = line.SelectMany(a => _rows.Marked[a.Blade.Id].Where(i => i.Entry.AtUtc <= a.Until && i.Entry.AtUtc <= at)).OrderBy(i => i.Entry.AtUtc).ThenBy(i => i.EntryId).ToList();
+        var gullets = looks.LastOrDefault(i => i.LookedAt?.HasFlag(LookedAt.Gullets) == true);
+        var level = looks.LastOrDefault(i => i.LookedAt?.HasFlag(LookedAt.Level) == true);
+        var teeth = looks.LastOrDefault(i => i.LookedAt?.HasFlag(LookedAt.Teeth) == true);
+        var marks = ((gullets?.Marks ?? default) & BladeMarks.InGullets)
+            | ((level?.Marks ?? default) & BladeMarks.KinkOrTwist)
+            | ((teeth?.Marks ?? default) & BladeMarks.TeethMissing);
+        var ground = gullets is not null && line.Exists(a => _rows.Sharpenings[a.Blade.Id]
+            .Any(s => s.Kind == GrindKind.FullProfile && s.Entry.AtUtc >= gullets.Entry.AtUtc && s.Entry.AtUtc <= a.Until && s.Entry.AtUtc <= at));
+        return (ground ? marks & ~BladeMarks.Burrs : marks, marks.HasFlag(BladeMarks.TeethMissing) ? teeth!.TeethMissing : null);
     }
 
     /// <summary>A loop comes with its first weld; one made up from coil here has its first joint before it ever ran.</summary>
@@ -114,13 +140,14 @@ internal sealed class BladeFiles
         {
             foreach (var spell in SpellsOf(a))
             {
+                var marks = MarksAt(line, spell.End).Marks;
                 var onThisWeld = !a.Ancestor && (joint is null ? blade.ParentId is null : spell.From >= joint.Entry.AtUtc);
                 var tension = MeasuredIn(spell) ?? LastMeasuredBefore(spell);
                 foreach (var e in _rows.Exposures[spell.MountId])
                 {
                     var setup = _rows.Setups[e.SetupId];
                     var loop = _rows.Loops.At(a.Blade.Id, spell.From) ?? setup.LoopM;
-                    found.Add(new ExposureLine(setup, e.SpeedMps, e.RunningMs, tension, loop, spell.InsideOut, onThisWeld, a.Ancestor) { FromUtc = spell.From });
+                    found.Add(new ExposureLine(setup, e.SpeedMps, e.RunningMs, tension, loop, spell.InsideOut, onThisWeld, a.Ancestor) { FromUtc = spell.From, Marks = marks });
                 }
             }
         }

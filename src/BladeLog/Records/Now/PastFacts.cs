@@ -11,6 +11,8 @@ internal static class PastFacts
         nameof(Mount) => Of(db.Mounts, ids),
         nameof(Dismount) => Of(db.Dismounts.Include(f => f.Mount), ids),
         nameof(Slack) => Of(db.Slacks, ids),
+        nameof(StartCheck) => Of(db.StartChecks, ids),
+        nameof(TimerStarted) => Of(db.TimersStarted, ids),
         nameof(MeterEpoch) => Of(db.MeterEpochs, ids),
         nameof(MeterReading) => Of(db.MeterReadings, ids),
         nameof(Run) => Of(db.Runs, ids),

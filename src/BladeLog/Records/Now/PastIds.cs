@@ -28,6 +28,8 @@ internal static class PastIds
         .Concat(Ids(db.Mounts.Where(f => f.SawId == id)))
         .Concat(Ids(db.Dismounts.Where(f => f.Mount.SawId == id)))
         .Concat(Ids(db.Slacks.Where(f => f.SawId == id)))
+        .Concat(Ids(db.StartChecks.Where(f => f.SawId == id)))
+        .Concat(Ids(db.TimersStarted.Where(f => f.SawId == id && !db.Runs.Any(r => r.TimerId == f.EntryId))))
         .Concat(Ids(db.MeterEpochs.Where(f => f.SawId == id)))
         .Concat(Ids(db.MeterReadings.Where(f => f.SawId == id)))
         .Concat(Ids(db.Runs.Where(f => f.SawId == id && f.ReadingId == null)))

@@ -21,6 +21,12 @@ public sealed record SawNow(Saw Saw, SawSetup Setup, int? MountedBladeId, DateTi
 {
     /// <summary>The tension is let off.</summary>
     public bool Slack { get; init; }
+
+    /// <summary>The last start-of-shift check; null: never checked.</summary>
+    public StartCheck? LastCheck { get; init; }
+
+    /// <summary>The start of the timer that runs now; null: none runs.</summary>
+    public TimerStarted? Timer { get; init; }
 }
 
 /// <summary>
@@ -32,6 +38,9 @@ public sealed record ExposureLine(SawSetup Setup, double SpeedMps, long RunningM
 {
     /// <summary>When the spell began.</summary>
     public DateTime FromUtc { get; init; }
+
+    /// <summary>What was seen in the gullets by the end of the spell.</summary>
+    public BladeMarks Marks { get; init; }
 
     public double Hours => RunningMs / 3_600_000.0;
 }
@@ -109,6 +118,12 @@ public sealed record BladeFile
     public Retirement? Retirement { get; init; }
 
     public Inspection? LastInspection { get; init; }
+
+    /// <summary>What the last looks saw that stands still: a full-profile grind takes burrs away.</summary>
+    public BladeMarks Marks { get; init; }
+
+    /// <summary>Teeth that were missing at that look, where they were counted.</summary>
+    public int? TeethMissing { get; init; }
 
     public DateTime? LastInspectedUtc { get; init; }
 

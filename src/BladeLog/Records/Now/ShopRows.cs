@@ -54,12 +54,21 @@ internal sealed class ShopRows
 
     public required IReadOnlyDictionary<int, Slack> Slacks { get; init; }
 
+    /// <summary>Looks that said what they saw.</summary>
+    public required ILookup<int, Inspection> Marked { get; init; }
+
+    public required IReadOnlyDictionary<int, StartCheck> Checks { get; init; }
+
+    /// <summary>Timers that run, by saw.</summary>
+    public required IReadOnlyDictionary<int, TimerStarted> Timers { get; init; }
+
     public required LoopsThen Loops { get; init; }
 
     public static async Task<ShopRows> Read(ShopDb db)
     {
         var blades = await db.Blades.AsNoTracking().Include(b => b.Spec).OrderBy(b => b.Id).ToListAsync();
         ShareSpecs(blades);
+        var looks = await db.Inspections.AsNoTracking().Include(i => i.Entry).ToListAsync();
         var joints = await db.Joints.AsNoTracking().Include(j => j.Entry).ToListAsync();
         var setups = await db.SawSetups.AsNoTracking().Include(s => s.Entry).Include(s => s.Wheels.OrderBy(x => x.Position)).Include(s => s.Speeds.OrderBy(x => x.Position)).AsSplitQuery().ToListAsync();
         return new ShopRows
@@ -89,9 +98,12 @@ internal sealed class ShopRows
             Away = await ReadAway(db),
             Breaks = (await db.Breaks.AsNoTracking().Include(b => b.Entry).ToListAsync()).OrderBy(b => b.LatestUtc).ThenBy(b => b.EntryId).ToLookup(b => b.BladeId),
             Retirements = Last(await db.Retirements.AsNoTracking().Include(r => r.Entry).ToListAsync(), r => r.BladeId),
-            LastInspections = Last(await db.Inspections.AsNoTracking().Include(i => i.Entry).ToListAsync(), i => i.BladeId),
+            LastInspections = Last(looks, i => i.BladeId),
+            Marked = looks.Where(i => i.Marks is not null).OrderBy(i => i.Entry.AtUtc).ThenBy(i => i.EntryId).ToLookup(i => i.BladeId),
             Running = await ReadRunning(db),
             Slacks = Last(await db.Slacks.AsNoTracking().Include(s => s.Entry).ToListAsync(), s => s.SawId),
+            Checks = Last(await db.StartChecks.AsNoTracking().Include(c => c.Entry).ToListAsync(), c => c.SawId),
+            Timers = await RunningTimers(db).ToDictionaryAsync(t => t.SawId),
             Loops = new LoopsThen(
                 blades.ToDictionary(b => b.Id, b => b.ParentId is null ? b.Spec.NewLoopM : null),
                 joints.Select(j => new LoopFrom(j.BladeId, j.Entry.AtUtc, j.EntryId, j.LoopM))),
@@ -128,6 +140,10 @@ internal sealed class ShopRows
                 .ToListAsync();
         return rows.ToLookup(r => r.MountId);
     }
+
+    /// <summary>Of each saw the newest start, where it has no run.</summary>
+    internal static IQueryable<TimerStarted> RunningTimers(ShopDb db) => db.TimersStarted.AsNoTracking().Include(t => t.Entry)
+        .Where(t => !db.TimersStarted.Any(o => o.SawId == t.SawId && o.EntryId > t.EntryId) && !db.Runs.Any(r => r.TimerId == t.EntryId));
 
     private static async Task<List<SpellRow>> ReadSpells(ShopDb db)
     {

@@ -20,6 +20,8 @@ internal static class Handlers
         RetagBlade c => RetagBladeHandler.Handle(w, c),
         Swap c => SwapHandler.Handle(w, c),
         MoveSpell c => MoveSpellHandler.Handle(w, c),
+        CheckSaw c => CheckSawHandler.Handle(w, c),
+        StartTimer c => TimerHandler.Handle(w, c),
         SlackTension c => SlackTensionHandler.Handle(w, c),
         ReadMeter c => ReadMeterHandler.Handle(w, c),
         RecordHours c => RecordHoursHandler.Handle(w, c),

@@ -70,6 +70,7 @@ public static class Fields
     public static TypedField Seconds { get; } = new("a time", 0, 10_000 * 3600.0) { Bare = "s" };
 
     public static TypedField Pieces { get; } = new("a number of pieces", 1, 1e6);
+    public static TypedField TeethMissing { get; } = new("a number of teeth", 1, 500);
     public static TypedField Count { get; } = new("a whole number", 0, 1e9);
     public static TypedField Stock { get; } = new("a number of blades", 0, 1000);
     public static TypedField Revolutions { get; } = new("a wheel speed", 1, 20_000);

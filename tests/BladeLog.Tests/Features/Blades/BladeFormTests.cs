@@ -45,7 +45,7 @@ public sealed class BladeFormTests
     public async Task A_crack_found_is_a_hold_at_once()
     {
         using var app = await ShopApp.Sample();
-        (await app.Fill("/blades/Q-11/inspect", ("Found", "Crack"), ("Place", "Gullet"), ("CrackLength", "1.2"))).LeadsTo("/blades/Q-11");
+        (await app.Fill("/blades/Q-11/inspect", ("Found", "Crack"), ("LookedAt", "part"), ("Parts", "Gullets"), ("Place", "Gullet"), ("CrackLength", "1.2"))).LeadsTo("/blades/Q-11");
         Assert.True(await app.IsHeld("Q-11"));
     }
 

@@ -101,6 +101,13 @@ public sealed record ClearHold(string Tag, string How, DateTime? At = null) : Co
 /// <summary>A crack found puts the blade on hold in the same group.</summary>
 public sealed record RecordInspection(string Tag, Found Found) : Command
 {
+    /// <summary>Null: not said.</summary>
+    public LookedAt? LookedAt { get; init; }
+
+    public BladeMarks? Marks { get; init; }
+
+    public int? TeethMissing { get; init; }
+
     public double? CrackLengthM { get; init; }
 
     public string? CrackTyped { get; init; }

@@ -84,7 +84,13 @@ public sealed record RecordHours(string Saw, DateTime FromUtc, DateTime UntilUtc
 
     /// <summary>Null: by the source.</summary>
     public HoursGrade? Grade { get; init; }
+
+    /// <summary>Stopped from the saw's timer: its start, which must still run.</summary>
+    public int? TimerId { get; init; }
 }
+
+/// <summary>The wheels start now; the hours come with the stop.</summary>
+public sealed record StartTimer(string Saw, double? SpeedMps = null) : Command;
 
 /// <summary>A cut that was made, from the list or not. Its time is when it ended.</summary>
 public sealed record RecordCut(string Saw) : Command

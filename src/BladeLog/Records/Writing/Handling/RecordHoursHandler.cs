@@ -16,6 +16,11 @@ internal static class RecordHoursHandler
             return;
         }
 
+        if (c.TimerId is { } timer && !await TimerHandler.StillRuns(w, saw, timer))
+        {
+            return;
+        }
+
         var setup = await w.SetupAt(saw.Id, until);
         var run = new Run
         {
@@ -26,6 +31,7 @@ internal static class RecordHoursHandler
             RunningTyped = c.RunningTyped,
             SpeedMps = c.SpeedMps ?? setup.UsualSpeedMps,
             Source = c.Source,
+            TimerId = c.TimerId,
             Grade = c.Grade ?? (c.Source == RunSource.Typed ? HoursGrade.D : HoursGrade.B),
         };
         w.Add(run, until);

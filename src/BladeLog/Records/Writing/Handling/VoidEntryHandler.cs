@@ -53,7 +53,7 @@ internal static class VoidEntryHandler
         var ends = await w.Db.Dismounts.AsNoTracking().Where(d => ids.Contains(d.EntryId) && ids.Contains(d.MountId)).Select(d => d.EntryId).ToListAsync();
         var order = plain.OrderBy(e => ends.Contains(e.Id)
             ? 2
-            : e.Kind is nameof(MeterReading) or nameof(Break) or nameof(BatchReturn) or nameof(Batch) or nameof(CutDone) or nameof(Split) ? 0 : 1);
+            : e.Kind is nameof(MeterReading) or nameof(Break) or nameof(BatchReturn) or nameof(Batch) or nameof(CutDone) or nameof(Split) or nameof(StartCheck) ? 0 : 1);
         foreach (var one in order)
         {
             await w.Save();
@@ -93,6 +93,8 @@ internal static class VoidEntryHandler
         nameof(Inspection) => VoidBladeWork.Plain<Inspection>(w, entry, c.Reason, f => f.BladeId),
         nameof(TensionReading) => VoidBladeWork.Plain<TensionReading>(w, entry, c.Reason, f => f.BladeId),
         nameof(Drift) => VoidBladeWork.Plain<Drift>(w, entry, c.Reason, f => f.BladeId),
+        nameof(StartCheck) => CheckSawHandler.Void(w, entry, c.Reason),
+        nameof(TimerStarted) => TimerHandler.Void(w, entry, c.Reason),
         nameof(KerfReading) => VoidBladeWork.Plain<KerfReading>(w, entry, c.Reason, f => f.BladeId),
         nameof(Trained) => TrainingHandler.Void(w, entry, c.Reason),
         nameof(HandOver) => HandOverHandler.Void(w, entry, c.Reason),
