@@ -7,7 +7,7 @@ namespace BladeLog.Tests.House;
 /// <summary>Walks the sample shop from the Floor through every link and every form that only asks.</summary>
 public sealed partial class CrawlerTests(SampleShopApp shop) : IClassFixture<SampleShopApp>
 {
-    private const int MostPages = 1500;
+    private const int MostPages = 2500;
 
     /// <summary>Of each working: its address for every blade, saw and cut goes on for thousands, all of one kind.</summary>
     private const int MostOfAWorking = 40;
