@@ -1,6 +1,5 @@
 using BladeLog.Records;
 using BladeLog.Ui;
-using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Features.Saws;
 
@@ -13,11 +12,6 @@ public sealed record SawFormModel<TForm>(TForm Form, FormState State, SawNow Saw
     public string Name => Saw.Saw.Name;
 
     public string? Tag => On?.Blade.Tag;
-
-    /// <summary>Who is at this tablet; null: nobody has said.</summary>
-    public string? Who { get; init; }
-
-    public IReadOnlyList<string> People { get; init; } = [];
 
     /// <summary>What this form says of how the saw stood before: the last reading, the last speed.</summary>
     public string? Hint { get; init; }
