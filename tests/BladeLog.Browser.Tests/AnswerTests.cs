@@ -38,7 +38,7 @@ public sealed partial class AnswerTests(Workbench bench) : IClassFixture<Workben
             await Expect(tablet.Title).ToBeFocusedAsync();
             Assert.Equal(0, await tablet.Page.EvaluateAsync<int>("scrollY"));
 
-            var reading = tablet.Page.GetByLabel("The meter shows");
+            var reading = tablet.Field("The meter shows");
             await reading.FillAsync("a lot");
             await reading.PressAsync("Enter");
             await Expect(tablet.Page.GetByRole(AriaRole.Alert)).ToBeFocusedAsync();
@@ -156,14 +156,14 @@ public sealed partial class AnswerTests(Workbench bench) : IClassFixture<Workben
             await tablet.Tap(tablet.Choice("Weld"));
             await tablet.Fill("How long", "1.4");
             await tablet.Page.ReloadAsync();
-            await Expect(tablet.Page.GetByLabel("How long")).ToHaveValueAsync("1.4");
+            await Expect(tablet.Field("How long")).ToHaveValueAsync("1.4");
             await Expect(tablet.Page.GetByRole(AriaRole.Radio, new() { Name = "Weld" })).ToBeCheckedAsync();
             Assert.DoesNotContain("Token", await tablet.Page.EvaluateAsync<string>("JSON.stringify(localStorage)"), StringComparison.OrdinalIgnoreCase);
 
             // Away to another page and back: still there.
             await tablet.Open("/rack");
             await tablet.Open("/blades/Q-18/inspect");
-            await Expect(tablet.Page.GetByLabel("How long")).ToHaveValueAsync("1.4");
+            await Expect(tablet.Field("How long")).ToHaveValueAsync("1.4");
             await tablet.Tap(tablet.Button("Record the look"));
             await tablet.IsAt("/blades/Q-18");
             await tablet.Open("/blades/Q-18/inspect");

@@ -91,7 +91,7 @@ public sealed class FirstDayTests(Workbench bench) : IClassFixture<Workbench>
     private static async Task WriteHours(Tablet tablet)
     {
         await tablet.Tap(tablet.OnTile("S1", "Hours"));
-        await tablet.Page.GetByLabel("The wheels turned for").FillAsync("1.5");
+        await tablet.Field("The wheels turned for").FillAsync("1.5");
         await tablet.Tap(tablet.Button("Record"));
         await tablet.IsAt("/saws/S1");
     }

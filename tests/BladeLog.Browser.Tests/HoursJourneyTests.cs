@@ -20,7 +20,7 @@ public sealed class HoursJourneyTests(Workbench bench) : IClassFixture<Workbench
         {
             await tablet.Open("/");
             await tablet.Tap(tablet.OnTile("S1", "Hours"));
-            await tablet.Page.GetByLabel("The meter shows").FillAsync(Typed(TimeSpan.FromMilliseconds(reading) + Added));
+            await tablet.Field("The meter shows").FillAsync(Typed(TimeSpan.FromMilliseconds(reading) + Added));
             await tablet.Tap(tablet.Button("Record"));
             await tablet.IsAt("/saws/S1");
             await Expect(tablet.Foot.GetByRole(AriaRole.Button, new() { Name = "Undo" })).ToContainTextAsync("Old Heron");
@@ -40,7 +40,7 @@ public sealed class HoursJourneyTests(Workbench bench) : IClassFixture<Workbench
         {
             await tablet.Open("/");
             await tablet.Tap(tablet.OnTile("S4", "Hours"));
-            await tablet.Page.GetByLabel("The wheels turned for").FillAsync("1:30");
+            await tablet.Field("The wheels turned for").FillAsync("1:30");
             await tablet.Tap(tablet.Button("Record"));
             await tablet.IsAt("/saws/S4");
             Assert.Equal(2, tablet.Taps);
@@ -57,7 +57,7 @@ public sealed class HoursJourneyTests(Workbench bench) : IClassFixture<Workbench
         await bench.At(shop, Screen.Lying, async tablet =>
         {
             await tablet.Open("/saws/S4/hours");
-            await tablet.Page.GetByLabel("The wheels turned for").FillAsync("1.5");
+            await tablet.Field("The wheels turned for").FillAsync("1.5");
             await tablet.DoubleTap(tablet.Button("Record"));
             await tablet.IsAt("/saws/S4");
             Assert.Equal((long)Added.TotalMilliseconds, await RunningMs(shop, "S4") - before);
@@ -77,7 +77,7 @@ public sealed class HoursJourneyTests(Workbench bench) : IClassFixture<Workbench
         {
             tablet.Expects(422);
             await tablet.Open("/saws/S1/hours");
-            var field = tablet.Page.GetByLabel("The meter shows");
+            var field = tablet.Field("The meter shows");
             await field.FillAsync("a lot");
             await tablet.Tap(tablet.Button("Record"));
             await Expect(tablet.Page.GetByRole(AriaRole.Alert)).ToBeVisibleAsync();

@@ -34,7 +34,7 @@ public sealed class SwapJourneyTests(Workbench bench) : IClassFixture<Workbench>
         await bench.At(shop, Screen.Of(screen), async tablet =>
         {
             await tablet.Open("/saws/S3/swap");
-            var scan = tablet.Page.GetByLabel("Scan or type");
+            var scan = tablet.Field("Scan or type");
             // A scanner at hand types the label and ends with Enter.
             await scan.FillAsync("http://shop.local/b/q-18");
             await scan.PressAsync("Enter");

@@ -75,7 +75,10 @@ public sealed partial class Tablet
         await Task.WhenAll(Page.Touchscreen.TapAsync(x, y), Page.Touchscreen.TapAsync(x, y));
     }
 
-    public Task Fill(string label, string text) => Page.GetByLabel(label, new() { Exact = true }).FillAsync(text);
+    /// <summary>A field by its label; the keys beside it carry the label and more.</summary>
+    public ILocator Field(string label) => Page.GetByLabel(label, new() { Exact = true });
+
+    public Task Fill(string label, string text) => Field(label).FillAsync(text);
 
     /// <summary>A box to tick; the whole line is the target.</summary>
     public ILocator Box(string name) => Page.Locator("label.tick", new() { HasText = name });

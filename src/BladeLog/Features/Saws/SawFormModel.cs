@@ -16,11 +16,6 @@ public sealed record SawFormModel<TForm>(TForm Form, FormState State, SawNow Saw
     /// <summary>What this form says of how the saw stood before: the last reading, the last speed.</summary>
     public string? Hint { get; init; }
 
-    /// <summary>Who is at this tablet; null: nobody has said.</summary>
-    public string? Who { get; init; }
-
-    public IReadOnlyList<string> People { get; init; } = [];
-
     /// <summary>The last reading as it is typed, to step up from.</summary>
     public string? Last { get; init; }
 }

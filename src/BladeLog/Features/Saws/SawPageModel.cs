@@ -241,6 +241,7 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
         if (on is not null)
         {
             yield return new(Said.Capital($"{advice.Words.Tension} {(saw.Slack ? "on" : "off")}"), At("slack"));
+            yield return new(Said.Capital($"{advice.Words.Tension} measured"), $"/blades/{on.File.Blade.Tag}/tension");
         }
 
         yield return new("What if", At("what-if"));

@@ -44,6 +44,19 @@ internal static class SplitLabelHandler
         await Move<Hang>(w, blade, from, c.Reason, f => new Hang { BladeId = other.Id, Place = f.Place, Hook = f.Hook });
         await Move<TensionReading>(w, blade, from, c.Reason, f => new TensionReading { BladeId = other.Id, SawId = f.SawId, TensionPa = f.TensionPa, Typed = f.Typed, How = f.How });
         await Move<Drift>(w, blade, from, c.Reason, f => new Drift { BladeId = other.Id, SawId = f.SawId, AngleRad = f.AngleRad });
+        await Move<KerfReading>(w, blade, from, c.Reason, f => new KerfReading
+        {
+            BladeId = other.Id,
+            SawId = f.SawId,
+            How = f.How,
+            KerfM = f.KerfM,
+            KerfTyped = f.KerfTyped,
+            SetLeftM = f.SetLeftM,
+            SetRightM = f.SetRightM,
+            SetBothM = f.SetBothM,
+            SetTyped = f.SetTyped,
+            Note = f.Note,
+        });
         w.RefuseUnless(w.Moved, nameof(c.FromUtc), $"Nothing is written of {blade.Tag} from {w.Say(from)} on.");
         other.Folded = false;
         w.Touched.Blades.Add(blade.Id);
