@@ -13,6 +13,11 @@ public sealed record SawFormModel<TForm>(TForm Form, FormState State, SawNow Saw
 
     public string? Tag => On?.Blade.Tag;
 
+    /// <summary>Who is at this tablet; null: nobody has said.</summary>
+    public string? Who { get; init; }
+
+    public IReadOnlyList<string> People { get; init; } = [];
+
     /// <summary>What this form says of how the saw stood before: the last reading, the last speed.</summary>
     public string? Hint { get; init; }
 
