@@ -88,10 +88,10 @@ internal sealed class Desk(TimeProvider clock, ShopDb db, ShopWriter writer, IHt
         where TView : View<TModel> => Html.View<TView, TModel>(model, await Chrome(), status);
 
     /// <summary>Records a form's command. A form without an op, or with one that is no GUID, gets a new one: it cannot be sent twice then.</summary>
-    public async Task<WriteResult> Write(Command command, string? op, string? answerPath, string? typedAt = null, string? device = null) =>
+    public async Task<WriteResult> Write(Command command, string? op, string? answerPath, string? typedAt = null, string? device = null, string? form = null) =>
         await writer.Write(
             command,
-            new Sent(Guid.TryParse(op, out var id) ? id : Guid.NewGuid(), Now, (await Who())?.Id, device, typedAt, answerPath),
+            new Sent(Guid.TryParse(op, out var id) ? id : Guid.NewGuid(), Now, (await Who())?.Id, device, typedAt, answerPath) { Form = form },
             Http.RequestAborted);
 
     /// <summary>Where a recorded form leads: to its page, with an undo for a minute.</summary>

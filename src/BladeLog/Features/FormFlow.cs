@@ -1,3 +1,4 @@
+using System.Text.Json;
 using BladeLog.Records.Writing;
 
 namespace BladeLog.Features;
@@ -23,7 +24,7 @@ internal static class FormFlow
             return await again(new([new(nameof(form.Who), $"Nobody here is called {form.Who}.")], Status: StatusCodes.Status422UnprocessableEntity));
         }
 
-        return await desk.Write(command, form.Op, leadsTo) switch
+        return await desk.Write(command, form.Op, leadsTo, form: JsonSerializer.Serialize(form)) switch
         {
             WriteResult.Done done => desk.Saved(done, what, canUndo),
             WriteResult.Refused refused => await again(State<TForm>(refused.Problems, null)),

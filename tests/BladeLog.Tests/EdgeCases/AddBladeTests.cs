@@ -63,7 +63,7 @@ public sealed class AddBladeTests
         await shop.Do(SwapTests.On("S1", "Q-1", 1));
         await shop.Do(RunningTests.Typed(1, 2, 1));
         var file = await Now(shop, "Q-1");
-        
+
         // Welded here before it ever ran: that is its first weld, not its second.
         Assert.Equal((3.99, 3.99, 1), (file.LoopM, Assert.Single(file.Exposures).LoopM, file.Welds));
     }

@@ -66,7 +66,7 @@ public static class ShopNowReader
             var on = open.TryGetValue(saw.Id, out var spell) ? spell : (SpellRow?)null;
             var (known, unknown) = rows.Running.GetValueOrDefault(saw.Id);
             var slack = rows.Slacks.GetValueOrDefault(saw.Id) is { LetOff: true } off && (on is null || off.Entry.AtUtc >= on.Value.From);
-            return new SawNow(saw, setup, on?.BladeId, on?.From, known, unknown) 
+            return new SawNow(saw, setup, on?.BladeId, on?.From, known, unknown)
             {
                 Slack = slack,
                 LastCheck = rows.Checks.GetValueOrDefault(saw.Id),

@@ -109,7 +109,7 @@ public sealed class ShopWriter(IDbContextFactory<ShopDb> contexts) : IDisposable
 
     private static byte[] BodyHash(Command command, Sent sent)
     {
-        var json = JsonSerializer.Serialize(command, command.GetType(), Canonical);
+        var json = sent.Form ?? JsonSerializer.Serialize(command, command.GetType(), Canonical);
         return SHA256.HashData(Encoding.UTF8.GetBytes($"{command.GetType().Name}\n{sent.PersonId}\n{json}"));
     }
 }

@@ -27,7 +27,11 @@ public abstract record WriteResult
 /// A form as it was sent. The op is made with the form, so that a form sent twice is recorded once; the answer path is
 /// where its sender is to be taken, the handler's own where it is null.
 /// </summary>
-public sealed record Sent(Guid Op, DateTime Now, int? PersonId = null, string? Device = null, string? TypedAt = null, string? AnswerPath = null);
+public sealed record Sent(Guid Op, DateTime Now, int? PersonId = null, string? Device = null, string? TypedAt = null, string? AnswerPath = null)
+{
+    /// <summary>The form as it was typed, by which it is known again; null: by the command. "Now" and "20 min ago" mean another moment when it is sent again.</summary>
+    public string? Form { get; init; }
+}
 
 /// <summary>What is to be recorded. A time left out means now.</summary>
 public abstract record Command;

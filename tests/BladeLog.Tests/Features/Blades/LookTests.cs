@@ -1,3 +1,4 @@
+using AngleSharp.Dom;
 using BladeLog.Records;
 using Microsoft.EntityFrameworkCore;
 
