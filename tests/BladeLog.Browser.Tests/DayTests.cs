@@ -149,8 +149,8 @@ public sealed partial class DayTests(Workbench bench) : IClassFixture<Workbench>
             await Within(4, "inspection with a crack, task 7", "/bench", async () =>
             {
                 await tablet.Tap(Row("Q-20"));
-                await tablet.Tap(tablet.Choice("Crack"));
-                await tablet.Tap(tablet.Choice("Gullet"));
+                await tablet.Tap(tablet.Answer("Found", "Crack"));
+                await tablet.Tap(tablet.Answer("Place", "Gullet"));
                 await tablet.Fill("How long", "2.6");
                 await tablet.Tap(tablet.Button("Record the look"));
                 await tablet.IsAt("/blades/Q-20");
