@@ -60,6 +60,9 @@ public sealed record BladeAdvice
         BladeBody body = BladeBody.Of(file, settings);
         LifeOfBlade life = LifeOfBlade.Of(file, body, on, damage, level, settings);
         Sharpness edge = Sharpness.Of(file, body, settings);
+
+        // Whoever took it off as dull saw what no path of wood tells.
+        edge = edge with { Due = edge.Due || file.OffAsDull };
         if (on is not null)
         {
             (double depth, double feed) = Sharpness.Reference(on.Setup, settings);

@@ -58,6 +58,11 @@ internal static class Refusals
             }
         }
 
+        if (blade.File.OffAsDull)
+        {
+            return new CutReason(ReasonKind.Dull, CutWords.OffAsDull());
+        }
+
         return blade.Edge.RadiusM >= work.EdgeLimit.Value
             ? new CutReason(ReasonKind.Dull, CutWords.Dull(blade.Edge.RadiusM, work.EdgeLimit.Value))
             : null;

@@ -94,7 +94,11 @@ public static class LifeWords
             yield break;
         }
 
-        if (blade.Edge.Due)
+        if (blade.File.OffAsDull)
+        {
+            yield return "It came off as dull.";
+        }
+        else if (blade.Edge.Due)
         {
             yield return $"Edge {Wording.Edge(blade.Edge.RadiusM)}; dull is {Wording.Number(settings[LifeSettings.Dull], 0)} µm.";
         }

@@ -14,10 +14,9 @@ public sealed record BatchRow(string Number, string Service, string Sent, string
 
 public sealed record BenchModel(IReadOnlyList<BenchRow> Sharpen, IReadOnlyList<BenchRow> Look, IReadOnlyList<BenchRow> Held, IReadOnlyList<BenchRow> Broken, IReadOnlyList<BatchRow> Out)
 {
-    public static BenchModel Of(ShopAdvice advice, IReadOnlySet<int> offAsDull, ShopUnits units)
+    public static BenchModel Of(ShopAdvice advice, ShopUnits units)
     {
         ArgumentNullException.ThrowIfNull(advice);
-        ArgumentNullException.ThrowIfNull(offAsDull);
         List<BenchRow> sharpen = [], look = [], held = [], broken = [];
         foreach (BladeFile file in advice.Now.Blades.Where(b => b.Place is not (Place.Gone or Place.AtSharpener)).OrderBy(b => b.Blade.Tag, StringComparer.Ordinal))
         {
@@ -30,9 +29,9 @@ public sealed record BenchModel(IReadOnlyList<BenchRow> Sharpen, IReadOnlyList<B
             {
                 held.Add(Row(blade, advice, Said.Capital(LifeWords.Hold(hold, advice.Words)) + ".", "clear", "Clear"));
             }
-            else if (blade.State == BladeState.Sharpen || offAsDull.Contains(file.Blade.Id))
+            else if (blade.State == BladeState.Sharpen)
             {
-                string why = blade.State == BladeState.Sharpen ? $"Edge {Wording.Edge(blade.Edge.RadiusM)}." : "Came off as dull.";
+                string why = file.OffAsDull ? "Came off as dull." : $"Edge {Wording.Edge(blade.Edge.RadiusM)}.";
                 sharpen.Add(Row(blade, advice, blade.Grind.Pays ? why : $"{why} {LifeWords.NoGrind(blade, advice.Settings, advice.Words)}", "sharpen", blade.Grind.Pays ? "Sharpen" : "No grind"));
             }
             else if (blade.InspectionOverdue || blade.State == BladeState.Look)

@@ -13,5 +13,5 @@ internal static class BenchPages
     }
 
     private static async Task<IResult> Get(Desk desk) =>
-        await desk.Page<BenchPage, BenchModel>(BenchModel.Of(await desk.Advice(), await DullBlades.OffAsDull(desk.Db), await desk.Units()));
+        await desk.Page<BenchPage, BenchModel>(BenchModel.Of(await desk.Advice(), await desk.Units()));
 }

@@ -56,13 +56,13 @@ internal static class SendOut
     private static async Task<IResult> Show(Desk desk, SendOutForm form, FormState state)
     {
         var advice = await desk.Advice();
-        var dull = await DullBlades.OffAsDull(desk.Db);
         var rows = advice.Now.Blades.Where(b => b.Place is Place.Rack or Place.Bench && b.Hold is null).Select(advice.Of)
-            .Where(b => b.State == BladeState.Sharpen || dull.Contains(b.File.Blade.Id) || form.Pick?.Contains(b.File.Blade.Tag) == true)
+            .Where(b => b.State == BladeState.Sharpen || form.Pick?.Contains(b.File.Blade.Tag) == true)
             .OrderBy(b => b.File.Blade.Tag, StringComparer.Ordinal)
             .Select(b => new SendOutRow(
                 b.File.Blade.Tag,
-                b.Grind.Pays ? $"edge {Wording.Edge(b.Edge.RadiusM)}" : LifeWords.NoGrind(b, advice.Settings, advice.Words),
+                b.Grind.Pays && b.File.OffAsDull ? "came off as dull"
+                    : b.Grind.Pays ? $"edge {Wording.Edge(b.Edge.RadiusM)}" : LifeWords.NoGrind(b, advice.Settings, advice.Words),
                 !b.Grind.Pays));
         var services = await desk.Db.Batches.AsNoTracking().Select(b => b.Service).Distinct().ToListAsync();
         return await desk.Page<SendOutPage, SendOutModel>(new(form, state, [.. rows], services), state.Status);

@@ -59,13 +59,13 @@ internal static class HandOverPages
             [.. reads[n.EntryId].Select(r => r.Entry.Person?.Initials ?? "somebody")],
             who is null || (n.Entry.PersonId != who.Id && !reads[n.EntryId].Any(r => r.Entry.PersonId == who.Id))));
         var people = await db.People.AsNoTracking().Where(p => p.Active).OrderBy(p => p.Initials).Select(p => p.Initials).ToListAsync();
-        var draft = form.Text ?? string.Join('\n', Draft(await desk.Advice(), await DullBlades.OffAsDull(db)));
+        var draft = form.Text ?? string.Join('\n', Draft(await desk.Advice()));
         return await desk.Page<HandOverPage, HandOverModel>(
             new(form with { Text = draft }, state, rows, people, who?.Initials), state.Status);
     }
 
     /// <summary>One line for each thing the next shift would ask; nothing to tell is told too.</summary>
-    internal static IReadOnlyList<string> Draft(ShopAdvice advice, IReadOnlySet<int> offAsDull)
+    internal static IReadOnlyList<string> Draft(ShopAdvice advice)
     {
         var here = advice.Now.Blades.Where(b => b.Place is not (Place.Gone or Place.AtSharpener)).OrderBy(b => b.Blade.Tag, NaturalOrder.Instance).Select(advice.Of)
             .Where(b => b.State is not (BladeState.Broken or BladeState.Retired)).ToList();
@@ -80,7 +80,7 @@ internal static class HandOverPages
         }
 
         var free = here.Where(b => b.File.Hold is null).ToList();
-        bool Dull(BladeAdvice b) => b.State == BladeState.Sharpen || offAsDull.Contains(b.File.Blade.Id);
+        bool Dull(BladeAdvice b) => b.State == BladeState.Sharpen;
         Say("To sharpen", free.Where(b => Dull(b) && b.Grind.Pays).Select(b => b.File.Blade.Tag + Where(b.File, advice.Now)));
         Say("Dull, no further grind", free.Where(b => Dull(b) && !b.Grind.Pays).Select(b => b.File.Blade.Tag + Where(b.File, advice.Now)));
         Say("To look at", free.Where(b => !Dull(b) && (b.InspectionOverdue || b.State == BladeState.Look)).Select(b => b.File.Blade.Tag + Where(b.File, advice.Now)));

@@ -74,6 +74,7 @@ internal sealed class BladeFiles
             MsSinceInspection = own.Sum(s => RunningSince(s, inspection?.Entry.AtUtc, shares)),
             MountedSinceInspection = own.Exists(s => inspection is null || s.From >= inspection.Entry.AtUtc),
             MountedSinceUtc = open?.From,
+            OffAsDull = now.Place is Place.Rack or Place.Bench && own.Count > 0 && own[^1] is { Off: OffReason.Dull, Until: { } off } && !(last?.Entry.AtUtc >= off),
         };
     }
 

@@ -135,6 +135,9 @@ public sealed record BladeFile
 
     public DateTime? MountedSinceUtc { get; init; }
 
+    /// <summary>Lies here as the person at the saw took it off: dull, and neither ground nor put on again since.</summary>
+    public bool OffAsDull { get; init; }
+
     public double Hours => Exposures.Sum(e => e.Hours);
 
     public double ThicknessM => Blade.MeasuredThicknessM ?? Spec.ThicknessM;

@@ -147,7 +147,7 @@ internal sealed class ShopRows
 
     private static async Task<List<SpellRow>> ReadSpells(ShopDb db)
     {
-        var off = await db.Dismounts.AsNoTracking().Select(d => new { d.MountId, d.Entry.AtUtc }).ToDictionaryAsync(d => d.MountId, d => d.AtUtc);
+        var off = await db.Dismounts.AsNoTracking().Select(d => new { d.MountId, d.Entry.AtUtc, d.Reason }).ToDictionaryAsync(d => d.MountId);
         var rows = await db.Mounts.AsNoTracking()
             .Select(m => new { m.EntryId, m.SawId, m.BladeId, m.Entry.AtUtc, m.TensionPa, m.TensionKnown, m.InsideOut })
             .ToListAsync();
@@ -155,8 +155,8 @@ internal sealed class ShopRows
         [
             .. rows
                 .Select(m => new SpellRow(
-                    m.EntryId, m.SawId, m.BladeId, m.AtUtc, off.TryGetValue(m.EntryId, out var at) ? at : null,
-                    m.TensionKnown == TensionKnown.Measured ? m.TensionPa : null, m.InsideOut))
+                    m.EntryId, m.SawId, m.BladeId, m.AtUtc, off.GetValueOrDefault(m.EntryId)?.AtUtc,
+                    m.TensionKnown == TensionKnown.Measured ? m.TensionPa : null, m.InsideOut, off.GetValueOrDefault(m.EntryId)?.Reason))
                 .OrderBy(s => s.From).ThenBy(s => s.MountId),
         ];
     }
@@ -198,7 +198,7 @@ internal sealed class ShopRows
         facts.OrderBy(f => f.Entry.AtUtc).ThenBy(f => f.EntryId).GroupBy(of).ToDictionary(g => g.Key, g => g.Last());
 }
 
-internal readonly record struct SpellRow(int MountId, int SawId, int BladeId, DateTime From, DateTime? Until, double? MeasuredPa, bool InsideOut)
+internal readonly record struct SpellRow(int MountId, int SawId, int BladeId, DateTime From, DateTime? Until, double? MeasuredPa, bool InsideOut, OffReason? Off)
 {
     public DateTime End => Until ?? DateTime.MaxValue;
 }
