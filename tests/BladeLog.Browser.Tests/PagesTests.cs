@@ -37,7 +37,7 @@ public abstract class PagesTests(Workbench bench, Screen screen, int ofEach) : I
 
 public sealed class PagesOnALyingTabletTests(Workbench bench) : PagesTests(bench, Screen.Lying, 2);
 
-public sealed class PagesOnAStandingTabletTests(Workbench bench) : PagesTests(bench, Screen.Standing, 3);
+public sealed class PagesOnAStandingTabletTests(Workbench bench) : PagesTests(bench, Screen.Standing, 2);
 
 public sealed class PagesOnAPhoneTests(Workbench bench) : PagesTests(bench, Screen.Phone, 2);
 
