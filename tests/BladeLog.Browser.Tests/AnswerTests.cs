@@ -152,12 +152,12 @@ public sealed partial class AnswerTests(Workbench bench) : IClassFixture<Workben
         await bench.At(shop, Screen.Standing, async tablet =>
         {
             await tablet.Open("/blades/Q-18/inspect");
-            await tablet.Tap(tablet.Choice("Crack"));
-            await tablet.Tap(tablet.Choice("Weld"));
+            await tablet.Tap(tablet.Answer("Found", "Crack"));
+            await tablet.Tap(tablet.Answer("Place", "Weld"));
             await tablet.Fill("How long", "1.4");
             await tablet.Page.ReloadAsync();
             await Expect(tablet.Field("How long")).ToHaveValueAsync("1.4");
-            await Expect(tablet.Page.GetByRole(AriaRole.Radio, new() { Name = "Weld" })).ToBeCheckedAsync();
+            await Expect(tablet.Page.Locator("input[name=Place][value=Weld]")).ToBeCheckedAsync();
             Assert.DoesNotContain("Token", await tablet.Page.EvaluateAsync<string>("JSON.stringify(localStorage)"), StringComparison.OrdinalIgnoreCase);
 
             // Away to another page and back: still there.

@@ -90,7 +90,8 @@ public sealed class FirstDayTests(Workbench bench) : IClassFixture<Workbench>
 
     private static async Task WriteHours(Tablet tablet)
     {
-        await tablet.Tap(tablet.OnTile("S1", "Hours"));
+        await tablet.Open("/saws/S1");
+        await tablet.Tap(tablet.Link("Hours"));
         await tablet.Field("The wheels turned for").FillAsync("1.5");
         await tablet.Tap(tablet.Button("Record"));
         await tablet.IsAt("/saws/S1");

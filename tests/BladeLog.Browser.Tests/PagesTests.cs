@@ -35,7 +35,7 @@ public abstract class PagesTests(Workbench bench, Screen screen, int ofEach) : I
     }
 }
 
-public sealed class PagesOnALyingTabletTests(Workbench bench) : PagesTests(bench, Screen.Lying, 3);
+public sealed class PagesOnALyingTabletTests(Workbench bench) : PagesTests(bench, Screen.Lying, 2);
 
 public sealed class PagesOnAStandingTabletTests(Workbench bench) : PagesTests(bench, Screen.Standing, 3);
 

@@ -96,6 +96,9 @@ public sealed partial class Tablet
     /// <summary>The box of a choice; the whole label is the target.</summary>
     public ILocator Choice(string name) => Page.Locator("label.opt", new() { HasText = name });
 
+    /// <summary>The box of one answer to a question, by what it sends: for words that stand in several.</summary>
+    public ILocator Answer(string name, string value) => Page.Locator($"label.opt:has(input[name={name}][value={value}])");
+
     public async Task IsAt(string path) => await Expect(Page).ToHaveURLAsync(new Regex(Regex.Escape(path) + "$", RegexOptions.IgnoreCase));
 
     public void MustBeQuiet() => Assert.True(_complaints.IsEmpty, "The browser complained:\n" + string.Join('\n', _complaints));

@@ -18,11 +18,11 @@ public sealed class UndoTests(Workbench bench) : IClassFixture<Workbench>
         ("cut of the list", "/cuts/7/done?blade=Q-01&saw=S1", ["press:It is cut"]),
         ("cut at the saw", "/saws/S2/cut", ["first:Again"]),
         ("look", "/blades/Q-18/inspect", ["choose:Nothing seen", "choose:The whole loop", "press:Record the look"]),
-        ("crack", "/blades/Q-18/inspect", ["choose:Crack", "choose:Gullet", "press:Record the look"]),
+        ("crack", "/blades/Q-18/inspect", ["choose:Crack", "is:Place=Gullet", "press:Record the look"]),
         ("grind", "/blades/Q-18/sharpen", ["choose:the tooth faces only", "press:Record the grind"]),
         ("start check", "/saws/S1/check", ["yes:Guards", "yes:Tension", "yes:UnderTable", "yes:Quiet", "yes:Brake", "choose:RU", "press:Record the check"]),
         ("place", "/blades/Q-18/hang", ["choose:Bench", "press:Record it"]),
-        ("lead", "/blades/Q-08/drift", ["choose:RU", "fill:It leads by=0.5", "choose:Left", "press:Record it"]),
+        ("lead", "/blades/Q-08/drift", ["fill:It leads by=0.5", "choose:Left", "press:Record it"]),
         ("hand-over", "/handover", ["press:Hand over"]),
     ];
 
@@ -69,6 +69,9 @@ public sealed class UndoTests(Workbench bench) : IClassFixture<Workbench>
                 break;
             case "yes":
                 await tablet.Tap(tablet.Page.Locator($"label.opt:has(input[name={what}][value=yes])"));
+                break;
+            case "is":
+                await tablet.Tap(tablet.Answer(what.Split('=')[0], what.Split('=')[1]));
                 break;
             case "fill":
                 await tablet.Field(what.Split('=')[0]).FillAsync(what.Split('=')[1]);

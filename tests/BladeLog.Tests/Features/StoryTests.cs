@@ -72,6 +72,9 @@ public sealed class StoryTests
         await shop.Do(new ReadHandOver(await shop.Do(new SaveHandOver("Q-3 hangs on H-1."), await shop.Person("OT"))), await shop.Person("JP"));
         await shop.Do(new RecordTraining("JP", TrainedTask.Sharpen, "OT"));
         await shop.Do(new RecordLabels(["Q-3"]));
+        await shop.Do(new RecordKerf("Q-3", KerfHow.TestCut) { KerfM = 0.0013 });
+        await shop.Do(new CheckSaw("S1", Guards: true, Tension: null, UnderTable: true, Quiet: null, Brake: false));
+        await shop.Do(new StartTimer("S1"));
         return shop;
     }
 }

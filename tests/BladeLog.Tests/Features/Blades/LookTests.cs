@@ -1,3 +1,4 @@
+using AngleSharp.Dom;
 using BladeLog.Records;
 using Microsoft.EntityFrameworkCore;
 
@@ -62,9 +63,11 @@ public sealed class LookTests
         (await app.Fill("/blades/Q-18/inspect", ("Found", "Worn"), ("LookedAt", "whole"), ("Marks", "Rust"))).LeadsTo("/blades/Q-18");
         var page = await app.GetPage("/blades/Q-18");
         Assert.Matches(@"Rust in the gullets: pits start cracks\. Life ×0\.\d\d, engineering default\.", SampleApp.Text(page.Body));
-        Assert.Matches(@"Rust in the gullets: life ×0\.\d\d", SampleApp.Text(page.QuerySelector(".because .work")));
+        Assert.Matches(@"Rust in the gullets: life ?×? ?0\.\d", Work(page));
         (await app.Fill("/blades/Q-18/inspect", ("Found", "NothingSeen"), ("LookedAt", "whole"), ("At", ""))).LeadsTo("/blades/Q-18");
-        Assert.DoesNotContain("Rust in the gullets", SampleApp.Text((await app.GetPage("/blades/Q-18")).QuerySelector(".because .work")), StringComparison.Ordinal);
+        Assert.DoesNotContain("Rust in the gullets", Work(await app.GetPage("/blades/Q-18")), StringComparison.Ordinal);
+
+        static string Work(IDocument page) => string.Join(' ', page.QuerySelectorAll(".because .work").Select(SampleApp.Text));
     }
 
     [Fact]
