@@ -80,9 +80,12 @@ public sealed partial record ShopUnits
 
         if (WholeTeeth(pitch.Coarse) is { } few && WholeTeeth(pitch.Fine) is { } many)
             return pitch.IsVariable ? $"{Num(few, 1)}-{With(many, 1, "TPI")}" : With(few, 1, "TPI");
-        return pitch.IsVariable
-            ? $"{Num(Exact.Inch / pitch.Coarse.Metres, 3)}-{With(Exact.Inch / pitch.Fine.Metres, 3, "TPI")}"
-            : Show(pitch.Fine, Fields.Pitch);
+        if (pitch.IsVariable)
+            return $"{Num(Exact.Inch / pitch.Coarse.Metres, 3)}-{With(Exact.Inch / pitch.Fine.Metres, 3, "TPI")}";
+
+        // A part of an inch only where it is that part, as near as whole teeth are taken.
+        var parts = pitch.Fine.Metres / Exact.Inch * 64;
+        return Math.Abs(Math.Round(parts) - parts) < 0.002 * parts ? Show(pitch.Fine, Fields.Pitch) : With(Exact.Inch / pitch.Fine.Metres, 3, "TPI");
     }
 
     private Parsed<ToothPitch>? AskOrInch(string bare, string typed)
