@@ -51,9 +51,9 @@
     const dx = Math.max(a.left - b.right, b.left - a.right), dy = Math.max(a.top - b.bottom, b.top - a.bottom);
     if (Math.max(dx, dy) < 111.5) say('risky too near', `${name(e)} is ${Math.max(dx, dy).toFixed(0)} from ${name(f)}`);
   }
-  // And never in a corner, where thumbs go: in the middle half of the screen on every page, so that none lies where a frequent one lies on another.
+  // And never in a corner, where thumbs go: in the middle three fifths of the screen on every page, so that none lies where a frequent one lies on another.
   for (const [e, a] of boxes.filter(([t]) => risky(t))) {
-    if (a.left < width / 4 - 1 || a.right > width * 3 / 4 + 1) say('risky in a corner', `${name(e)} reaches from ${a.left.toFixed(0)} to ${a.right.toFixed(0)} of ${width}`);
+    if (a.left < width / 5 - 1 || a.right > width * 4 / 5 + 1) say('risky in a corner', `${name(e)} reaches from ${a.left.toFixed(0)} to ${a.right.toFixed(0)} of ${width}`);
   }
   for (const e of document.querySelectorAll('form:is([action$="/retire"],[action$="/void"],[action$="/restore"]) button[type=submit]')) {
     if (e.closest('.block') || !shown(e)) continue;

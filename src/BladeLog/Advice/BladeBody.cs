@@ -41,6 +41,9 @@ public sealed record BladeBody
 
     public required Known Gullet { get; init; }
 
+    /// <summary>Measured on a gullet of this kind; null: reckoned from its form.</summary>
+    public double? GulletAreaM2 { get; init; }
+
     public required Known Kerf { get; init; }
 
     public required Known Rake { get; init; }
@@ -90,6 +93,8 @@ public sealed record BladeBody
             Thickness = Known.Yours(t, file.Blade.MeasuredThicknessM is null ? Box : "measured"),
             Gullet = Given(file.GulletM, "measured") ?? Given(spec.GulletDepthM, Box)
                 ?? share with { Value = Math.Min(share.Value * spec.PitchCoarseM, settings[BladeSettings.GulletOfWidth] * spec.WidthM) },
+            // A gullet since ground to another depth has an area in proportion.
+            GulletAreaM2 = spec.GulletAreaM2 * (file.GulletM is { } deep && spec.GulletDepthM is { } box ? deep / box : 1),
             Kerf = Given(file.KerfM, "measured") ?? Given(t + file.Kerf.Set?.BothM, "body and set, both measured") ?? Given(spec.KerfM, Box) ?? kerf with { Value = kerf.Value * t },
             Rake = Given(spec.RakeRad, Box)
                 ?? (spec.ToothForm == ToothForm.Hook

@@ -6,7 +6,7 @@ namespace BladeLog.Features;
 /// <summary>The one way from a form to the records and on: saved and away, or the same page again with what stands against it.</summary>
 internal static class FormFlow
 {
-    private static readonly string[] Units = ["M", "Ms", "Utc", "Pa", "Mps", "Minor", "H", "Rad", "N", "W"];
+    private static readonly string[] Units = ["M", "M2", "Ms", "Utc", "Pa", "Mps", "Minor", "H", "Rad", "N", "W"];
 
     /// <param name="desk">The request's desk.</param>
     /// <param name="command">What is to be recorded.</param>

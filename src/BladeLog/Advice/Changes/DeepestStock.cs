@@ -1,7 +1,6 @@
 using BladeLog.Advice.Cuts;
 using BladeLog.Handbook.BeamStrength;
 using BladeLog.Handbook.Cutting;
-using BladeLog.Handbook.Quantities;
 using BladeLog.Records;
 
 namespace BladeLog.Advice.Changes;
@@ -125,23 +124,6 @@ public sealed record DeepestStock(double HeightM, StockStop Stop, StockStop? Beh
 
         ThrustLimits Thrust(double H) => beams.Of(body, tension, setup, v, H);
 
-        CutCase Case(double H) => new()
-        {
-            Thickness = new Length(body.Thickness.Value),
-            Kerf = new Length(body.Kerf.Value),
-            Pitch = new Length(body.PitchMean),
-            GulletDepth = new Length(body.Gullet.Value),
-            Form = body.Form,
-            Rake = new Angle(body.Rake.Value),
-            Tip = body.Tip,
-            EdgeRadius = new Length(edgeM),
-            BandSpeed = new Speed(v),
-            CutHeight = new Length(H),
-            Density12 = new Density(work.Density12.Value),
-            MoisturePercent = work.Moisture.Value,
-            Direction = work.Cut.Direction,
-            Frozen = work.Cut.Frozen,
-            Model = settings.Force,
-        };
+        CutCase Case(double H) => (work with { HeightM = H }).Case(body, edgeM, v, settings);
     }
 }

@@ -54,7 +54,7 @@ internal sealed class CutDesk(Shop shop, AdviceSettings settings, DamageTable da
             return choice with { Reasons = [refused] };
         }
 
-        CutCase cut = Case(work, body, blade.Edge.RadiusM, speed);
+        CutCase cut = work.Case(body, blade.Edge.RadiusM, speed, settings);
         ThrustLimits thrust = beams.Of(body, tension, saw.Setup, speed, work.HeightM);
         Gate gate = Gate.Of(cut, FeedLimits.Of(cut, work, saw.Setup, thrust, settings), thrust, settings);
         choice = choice with { Case = cut, Gate = gate };
@@ -74,25 +74,6 @@ internal sealed class CutDesk(Shop shop, AdviceSettings settings, DamageTable da
             Cautions = [.. Cautions(choice)],
         };
     }
-
-    internal CutCase Case(CutWork work, BladeBody body, double edgeM, double speed) => new()
-    {
-        Thickness = Of(body.Thickness),
-        Kerf = Of(body.Kerf),
-        Pitch = new Length(body.PitchMean),
-        GulletDepth = Of(body.Gullet),
-        Form = body.Form,
-        Rake = new Angle(body.Rake.Value),
-        Tip = body.Tip,
-        EdgeRadius = new Length(edgeM),
-        BandSpeed = new Speed(speed),
-        CutHeight = new Length(work.HeightM),
-        Density12 = new Density(work.Density12.Value),
-        MoisturePercent = work.Moisture.Value,
-        Direction = work.Cut.Direction,
-        Frozen = work.Cut.Frozen,
-        Model = settings.Force,
-    };
 
     internal static AtFeed At(CutCase cut, Speed feed, ThrustLimits thrust)
     {

@@ -1,3 +1,4 @@
+using BladeLog.Handbook.Cutting;
 using BladeLog.Handbook.Quantities;
 using BladeLog.Records;
 using Material = BladeLog.Handbook.Tables.Material;
@@ -87,6 +88,32 @@ public sealed record CutWork
     {
         ArgumentOutOfRangeException.ThrowIfLessThan(pieces, 1);
         return this with { HeightM = HeightM * pieces, Stack = pieces, Cuts = (Pieces + pieces - 1) / pieces };
+    }
+
+    /// <summary>This cut with a blade at a speed, for the handbook.</summary>
+    public CutCase Case(BladeBody body, double edgeM, double speedMps, AdviceSettings settings)
+    {
+        ArgumentNullException.ThrowIfNull(body);
+        ArgumentNullException.ThrowIfNull(settings);
+        return new CutCase
+        {
+            Thickness = new Length(body.Thickness.Value),
+            Kerf = new Length(body.Kerf.Value),
+            Pitch = new Length(body.PitchMean),
+            GulletDepth = new Length(body.Gullet.Value),
+            MeasuredGulletArea = body.GulletAreaM2 is { } area ? new Area(area) : null,
+            Form = body.Form,
+            Rake = new Angle(body.Rake.Value),
+            Tip = body.Tip,
+            EdgeRadius = new Length(edgeM),
+            BandSpeed = new Speed(speedMps),
+            CutHeight = new Length(HeightM),
+            Density12 = new Density(Density12.Value),
+            MoisturePercent = Moisture.Value,
+            Direction = Cut.Direction,
+            Frozen = Cut.Frozen,
+            Model = settings.Force,
+        };
     }
 
     /// <summary>Fed with the saw's feeder: straight cuts on a saw that has one.</summary>

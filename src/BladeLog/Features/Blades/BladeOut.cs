@@ -56,6 +56,9 @@ internal sealed record BladeOut
     [JsonPropertyName("gullet_mm")]
     public required double Gullet { get; init; }
 
+    [JsonPropertyName("gullet_area_mm2")]
+    public double? GulletArea { get; init; }
+
     [JsonPropertyName("kerf_mm")]
     public required double Kerf { get; init; }
 
@@ -155,6 +158,7 @@ internal sealed record BladeOut
             Form = body.Form,
             Rake = new Angle(body.Rake.Value).Degrees,
             Gullet = body.Gullet.Value * 1e3,
+            GulletArea = body.GulletAreaM2 * 1e6,
             Kerf = body.Kerf.Value * 1e3,
             SetPattern = file.Spec.SetPattern,
             Tip = body.Tip,

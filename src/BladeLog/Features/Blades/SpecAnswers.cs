@@ -10,6 +10,8 @@ internal static class SpecAnswers
 
     public static IReadOnlyList<Answer> Tips { get; } = [new(nameof(TipKind.Set), "Set", "bent left and right"), new(nameof(TipKind.Swaged), "Swaged", "upset wider"), new(nameof(TipKind.Tipped), "Tipped", "brazed or welded on")];
 
+    public static IReadOnlyList<Answer> Patterns { get; } = [new(nameof(SetPattern.Alternate), "Left, right"), new(nameof(SetPattern.Raker), "Raker", "left, right, straight")];
+
     public static IReadOnlyList<Answer> Materials { get; } =
     [
         new(nameof(TipMaterial.HardenedCarbon), "Carbon steel, hardened tips"),

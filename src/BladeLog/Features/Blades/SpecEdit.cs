@@ -84,7 +84,7 @@ internal static class SpecEdit
         typed.RakeRad = Same(form.Rake, shown.Rake) ? was.RakeRad : typed.RakeRad;
         typed.GulletDepthM = Same(form.GulletDepth, shown.GulletDepth) ? was.GulletDepthM : typed.GulletDepthM;
         typed.LeastWidthM = Same(form.LeastWidth, shown.LeastWidth) ? was.LeastWidthM : typed.LeastWidthM;
-        typed.SetPattern = typed.TipKind == was.TipKind ? was.SetPattern : typed.SetPattern;
+        typed.GulletAreaM2 = Same(form.GulletArea, shown.GulletArea) ? was.GulletAreaM2 : typed.GulletAreaM2;
         (typed.GulletRadiusM, typed.EdgeFreshM) = (was.GulletRadiusM, was.EdgeFreshM);
     }
 
@@ -105,6 +105,8 @@ internal static class SpecEdit
             BodyHrc = s.BodyHrc?.ToString(CultureInfo.InvariantCulture),
             Rake = s.RakeRad is { } rake ? units.Show(new Angle(rake)) : null,
             GulletDepth = Metres(s.GulletDepthM, Fields.GulletDepth),
+            GulletArea = (s.GulletAreaM2 * 1e6)?.ToString("0.##", CultureInfo.InvariantCulture),
+            SetPattern = s.SetPattern == Handbook.Quantities.SetPattern.Raker ? nameof(Handbook.Quantities.SetPattern.Raker) : nameof(Handbook.Quantities.SetPattern.Alternate),
             Kerf = Metres(s.KerfM, Fields.Kerf),
             Tension = s.TensionPa is { } pa ? units.Show(new Stress(pa)) : null,
             LeastWidth = Metres(s.LeastWidthM, Fields.BladeWidth),

@@ -31,6 +31,10 @@ public abstract record SpecFields : PostedForm
 
     public string? GulletDepth { get; init; }
 
+    public string? GulletArea { get; init; }
+
+    public string? SetPattern { get; init; }
+
     public string? Kerf { get; init; }
 
     public string? Tension { get; init; }
@@ -70,12 +74,13 @@ internal static class SpecReading
             PitchTyped = form.Pitch?.Trim(),
             ToothForm = tooth,
             TipKind = tip,
-            SetPattern = tip == Handbook.Quantities.TipKind.Set ? SetPattern.Alternate : SetPattern.None,
+            SetPattern = tip == Handbook.Quantities.TipKind.Set ? read.Choice<SetPattern>(nameof(form.SetPattern), form.SetPattern, null) ?? SetPattern.Alternate : SetPattern.None,
             TipMaterial = teeth,
             BodySteel = read.Choice<BodySteel>(nameof(form.BodySteel), form.BodySteel, null) ?? UsualBody(teeth),
             BodyHrc = read.Number(nameof(form.BodyHrc), form.BodyHrc, "a hardness such as 46"),
             RakeRad = read.Angle(nameof(form.Rake), form.Rake, Fields.Hook),
             GulletDepthM = read.Length(nameof(form.GulletDepth), form.GulletDepth, Fields.GulletDepth),
+            GulletAreaM2 = Area(read, form),
             KerfM = read.Length(nameof(form.Kerf), form.Kerf, Fields.Kerf),
             KerfTyped = form.Kerf?.Trim(),
             NewLoopM = read.Length(nameof(form.NewLoop), form.NewLoop, Fields.Loop),
@@ -90,8 +95,20 @@ internal static class SpecReading
         };
     }
 
+    /// <summary>In mm², as it is counted on squared paper.</summary>
+    private static double? Area(FormReading read, SpecFields form)
+    {
+        double? area = read.Number(nameof(form.GulletArea), form.GulletArea, "an area in mm² such as 18");
+        if (area is < 0.1 or > 5000)
+        {
+            read.Refuse(nameof(form.GulletArea), $"{form.GulletArea!.Trim()} mm² is no area of a gullet. It lies between 0.1 and 5,000 mm².");
+        }
+
+        return area * 1e-6;
+    }
+
     /// <summary>The form's field for a field of the specification.</summary>
-    public static string FieldOf(string field) => field.EndsWith('M') ? field[..^1] switch { "PitchFine" or "PitchCoarse" => "Pitch", var f => f } : field;
+    public static string FieldOf(string field) => field == nameof(Spec.GulletAreaM2) ? nameof(SpecFields.GulletArea) : field.EndsWith('M') ? field[..^1] switch { "PitchFine" or "PitchCoarse" => "Pitch", var f => f } : field;
 
     private static BodySteel UsualBody(TipMaterial teeth) => teeth switch
     {

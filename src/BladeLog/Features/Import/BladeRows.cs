@@ -38,6 +38,7 @@ internal sealed class BladeRows(IReadOnlySet<string> tagsUsed, IReadOnlyDictiona
         new("hook", "Hook", false, "angle", "hook angle", "rake", "rake angle"),
         new("gullet", "Gullet depth", false, "", "gullet_depth"),
         new("kerf", "Kerf", false, "", "kerf width"),
+        new("set_pattern", "Set pattern", false, "alternate or raker", "pattern of set"),
         new("tip", "Tip", false, "set, swaged, tipped", "tip_kind", "set"),
         new("tip_material", "Tooth material", false, "plain, hardened, bi-metal, cobalt alloy, carbide", "teeth material", "tip material"),
         new("steel", "Body steel", false, "flexible back, spring, bi-metal, carbide tipped, wide strip", "body_steel", "back", "material"),
@@ -45,6 +46,7 @@ internal sealed class BladeRows(IReadOnlySet<string> tagsUsed, IReadOnlyDictiona
         new("least_width", "Least width", false, "scrap below", "minimum width", "min width"),
         new("sharpening_price", "Sharpening price", false, "", "sharpening cost", "price of sharpening"),
         new("most_sharpenings", "Most sharpenings", false, "0: not worth it", "max sharpenings", "sharpenings"),
+        new("least_stock", "Least at hand", false, "blades of the kind", "least stock", "minimum stock", "min stock"),
         new("price", "Price", false, "", "cost", "purchase price"),
         new("folded", "Folded", false, "still as it came, yes or no"),
         new("inspect", "Inspect every", false, "running hours", "inspect_every", "inspection interval"),
@@ -148,6 +150,7 @@ internal sealed class BladeRows(IReadOnlySet<string> tagsUsed, IReadOnlyDictiona
         double coarse = Math.Max(pitch.Coarse.Metres, fine.Coarse.Metres);
         ToothForm? form = row.OneOf("form", (ToothForm.Regular, ["regular", "standard", "raker tooth"]), (ToothForm.Skip, ["skip"]), (ToothForm.Hook, ["hook", "claw"]));
         TipKind? tip = row.OneOf("tip", (TipKind.Set, ["set"]), (TipKind.Swaged, ["swaged", "swage"]), (TipKind.Tipped, ["tipped", "carbide", "tip"]));
+        SetPattern? pattern = row.OneOf("set_pattern", (SetPattern.Alternate, ["alternate", "left right"]), (SetPattern.Raker, ["raker"]));
         TipMaterial? material = row.OneOf(
             "tip_material", (TipMaterial.PlainSteel, ["plain", "plain steel"]), (TipMaterial.HardenedCarbon, ["hardened", "hardened carbon", "carbon"]),
             (TipMaterial.Bimetal, ["bi-metal"]), (TipMaterial.CobaltAlloy, ["cobalt alloy", "cobalt"]), (TipMaterial.Carbide, ["carbide"]));
@@ -166,7 +169,7 @@ internal sealed class BladeRows(IReadOnlySet<string> tagsUsed, IReadOnlyDictiona
             PitchTyped = row.Understood.GetValueOrDefault("pitch"),
             ToothForm = form ?? (coarse >= 6e-3 ? ToothForm.Hook : ToothForm.Regular),
             TipKind = tip ?? TipKind.Set,
-            SetPattern = tip is null or TipKind.Set ? SetPattern.Alternate : SetPattern.None,
+            SetPattern = tip is null or TipKind.Set ? pattern ?? SetPattern.Alternate : SetPattern.None,
             TipMaterial = material ?? (tip == TipKind.Tipped ? TipMaterial.Carbide : TipMaterial.HardenedCarbon),
             BodySteel = steel ?? (tip == TipKind.Tipped ? BodySteel.CarbideTipped : BodySteel.FlexibleBack),
             NewLoopM = loop,
@@ -179,6 +182,7 @@ internal sealed class BladeRows(IReadOnlySet<string> tagsUsed, IReadOnlyDictiona
             SharpeningPriceMinor = row.Money("sharpening_price"),
             MostSharpenings = row.Count("most_sharpenings", Fields.Count),
             PriceMinor = row.Money("price"),
+            LeastStock = row.Count("least_stock", Fields.Stock),
         };
         Possible(row, spec);
         return spec;

@@ -33,7 +33,7 @@ internal static class CutPage
         SetPattern pattern = tip == TipKind.Set
             ? form.Choose("set", "Set", from.Blade?.File.Spec.SetPattern is SetPattern.Raker ? SetPattern.Raker : SetPattern.Alternate, Mark(body), (SetPattern.Alternate, "alternate", "left, right"), (SetPattern.Raker, "raker", "left, right, straight"))
             : SetPattern.None;
-        double? area = form.Number("area", "Gullet area, where it was measured", "a gullet area", 0.1, 5000, "mm²", Given.None, optional: true);
+        double? area = form.Number("area", "Gullet area, where it was measured", "a gullet area", 0.1, 5000, "mm²", Given.Of(body?.GulletAreaM2 * 1e6, "specification", null), optional: true);
         double? r = form.Length("edge", "Edge radius", Fields.EdgeRadius, Given.Of(from.Blade?.Edge.RadiusM, "from its path since the last sharpening", 20e-6));
         double? L = form.Length("loop", "Loop", Fields.Loop, Given.Of(from.Blade?.File.LoopM ?? setup?.LoopM, "of the blade", 3.4));
         double? v = form.BandSpeed("speed", "Band speed", from.Speed(16));

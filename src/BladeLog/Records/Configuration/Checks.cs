@@ -14,7 +14,7 @@ public static class Checks
         "lower_guide_m", "clearance_m", "idle_w", "crack_length_m", "angle_rad", "bevel_rad", "set_left_m", "set_right_m",
     ];
 
-    private static readonly string[] AboveZero = ["_m", "_mps", "_pa", "_w", "_n", "_n_per_m", "_hrc", "_h"];
+    private static readonly string[] AboveZero = ["_m", "_m2", "_mps", "_pa", "_w", "_n", "_n_per_m", "_hrc", "_h"];
 
     private static readonly HashSet<string> AnySign = ["rake_rad", "angle_rad", "value", "start_reading_ms", "count"];
 

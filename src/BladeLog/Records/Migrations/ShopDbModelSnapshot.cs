@@ -2018,6 +2018,10 @@ namespace BladeLog.Records.Migrations
                         .HasColumnType("REAL")
                         .HasColumnName("edge_fresh_m");
 
+                    b.Property<double?>("GulletAreaM2")
+                        .HasColumnType("REAL")
+                        .HasColumnName("gullet_area_m2");
+
                     b.Property<double?>("GulletDepthM")
                         .HasColumnType("REAL")
                         .HasColumnName("gullet_depth_m");
@@ -2146,6 +2150,8 @@ namespace BladeLog.Records.Migrations
                             t.HasCheckConstraint("ck_spec_body_in_width", "thickness_m < width_m");
 
                             t.HasCheckConstraint("ck_spec_edge_fresh_m", "\"edge_fresh_m\" > 0 and \"edge_fresh_m\" < 1e300");
+
+                            t.HasCheckConstraint("ck_spec_gullet_area_m2", "\"gullet_area_m2\" > 0 and \"gullet_area_m2\" < 1e300");
 
                             t.HasCheckConstraint("ck_spec_gullet_depth_m", "\"gullet_depth_m\" > 0 and \"gullet_depth_m\" < 1e300");
 

@@ -28,6 +28,9 @@ public sealed class Spec : Thing
 
     public double? GulletDepthM { get; set; }
 
+    /// <summary>Measured; null: reckoned from the tooth form, pitch and depth.</summary>
+    public double? GulletAreaM2 { get; set; }
+
     public double? GulletRadiusM { get; set; }
 
     public double? KerfM { get; set; }

@@ -53,12 +53,45 @@ public sealed class SpecEditTests
         Assert.True(await Median() < before);
     }
 
+    /// <summary>Chip room is in proportion to the area: capacity of the gullet (gullet-capacity-note).</summary>
+    [Fact]
+    public async Task A_measured_gullet_and_a_raker_set_go_into_every_answer_of_the_kind()
+    {
+        using var app = await ShopApp.Sample();
+        async Task<(double Room, double Area, string Outer)> At()
+        {
+            var cut = await app.GetPage("/workings/cut?blade=Q-09&saw=S2&height=150+mm&feed=2+m/min&wood=Scots+pine");
+            string Line(string what) => SampleApp.Text(cut.QuerySelectorAll(".work > div").First(d => SampleApp.Text(d.QuerySelector("dt")) == what).QuerySelector("dd b"));
+            static double Figure(string text) => double.Parse(text.Split(' ')[0], System.Globalization.CultureInfo.InvariantCulture);
+            return (Figure(Line("Chip room")), Figure(Line("Gullet area")), SampleApp.Text(cut.QuerySelectorAll(".work > div").First(d => SampleApp.Text(d.QuerySelector("dt")) == "Bite in the outer lanes of the kerf")));
+        }
+
+        var reckoned = await At();
+        Assert.Contains("every second tooth", reckoned.Outer, StringComparison.Ordinal);
+        (await app.Fill("/specs/B3/edit", ("GulletArea", "12,5"), ("SetPattern", "Raker"), ("Who", "MI"))).LeadsTo("/stock");
+        var spec = await Spec(app, "B3");
+        Assert.Equal(12.5e-6, spec.GulletAreaM2!.Value, 12);
+        Assert.Equal(BladeLog.Handbook.Quantities.SetPattern.Raker, spec.SetPattern);
+        var measured = await At();
+        Assert.Equal(12.5, measured.Area, 1);
+        Assert.Equal(reckoned.Room * 12.5 / reckoned.Area, measured.Room, 0.02 * measured.Room);
+        Assert.Contains("every third tooth", measured.Outer, StringComparison.Ordinal);
+        Assert.Equal(12.5, (await app.GetJson("/api/v1/blades/Q-09")).GetProperty("gullet_area_mm2").GetDouble(), 6);
+
+        // Opened and saved again it stays, and so does the raker set.
+        (await app.Fill("/specs/B3/edit", ("Price", "41.00"), ("Who", "MI"))).LeadsTo("/stock");
+        Assert.Equal((spec.GulletAreaM2, spec.SetPattern), ((await Spec(app, "B3")).GulletAreaM2, (await Spec(app, "B3")).SetPattern));
+    }
+
     [Theory]
     [InlineData("Width", "wide", "wide")]
     [InlineData("Width", "", "Write how wide it is.")]
     [InlineData("Kerf", "0.5", "wider than the body is thick")]
     [InlineData("GulletDepth", "40", "less deep than the blade is wide")]
     [InlineData("LeastWidth", "60", "not be more than the width when new")]
+    [InlineData("GulletArea", "round", "not a number")]
+    [InlineData("GulletArea", "9000", "no area of a gullet")]
+    [InlineData("GulletArea", "400", "less area than pitch times its depth")]
     [InlineData("LeastStock", "-2", "number of blades")]
     [InlineData("LeastStock", "a few", "a few")]
     [InlineData("Code", "E2", "There is a specification E2 already.")]

@@ -42,7 +42,7 @@ public sealed class ImportTests
         Assert.Equal("/cuts", cuts.Headers.Location?.OriginalString);
         string saws = "code,name,wheel_diameters_mm,speeds_m_s,loop_mm,greatest_blade_width_mm,greatest_cut_height_mm,motor_kw,takes,has_hour_meter\nT1,Trial saw,356|356,15.2|7.6,2667,19,300,1.1,board|resaw,no\n";
         (_, IDocument page) = await Look(app, saws);
-        Assert.Equal("1 saws understood", SampleApp.Text(page.QuerySelector("h1")));
+        Assert.Equal("1 saw understood", SampleApp.Text(page.QuerySelector("h1")));
         using HttpResponseMessage kept = await Keep(app, page);
         Assert.Equal(HttpStatusCode.Redirect, kept.StatusCode);
         await using ShopDb db = app.NewContext();
