@@ -11,7 +11,7 @@ public sealed class StepKeysTests(Workbench bench) : IClassFixture<Workbench>
         {
             await tablet.Open("/saws/S1/hours");
             var reading = tablet.Page.GetByLabel("The meter shows", new() { Exact = true });
-            await tablet.Tap(tablet.Button("7019.3"));
+            await tablet.Tap(tablet.Button("The meter shows: 7019.3 as last time"));
             await Expect(reading).ToHaveValueAsync("7019.3");
             await tablet.Tap(tablet.Button("The meter shows: +1"));
             await tablet.Tap(tablet.Button("The meter shows: +0.1"));
