@@ -27,6 +27,34 @@ public sealed class StepKeysTests(Workbench bench) : IClassFixture<Workbench>
     }
 
     [BrowserFact]
+    public async Task A_fraction_is_stepped_as_the_inches_it_is_and_never_as_millimetres()
+    {
+        await using var shop = await ServedShop.Sample();
+        await bench.At(shop, Screen.Standing, async tablet =>
+        {
+            await tablet.Open("/cuts/new");
+            var height = tablet.Page.GetByLabel("Height along the blade", new() { Exact = true });
+            await height.FillAsync("1/2");
+            await tablet.Tap(tablet.Button("Height along the blade: +1"));
+            await Expect(height).ToHaveValueAsync("1/2");
+            await height.FillAsync("1,200");
+            await tablet.Tap(tablet.Button("Height along the blade: +1"));
+            await Expect(height).ToHaveValueAsync("1,200");
+
+            await tablet.Open("/setup");
+            await tablet.Page.Locator("[name=Lengths][value=Inch]").CheckAsync(new() { Force = true });
+            await tablet.Page.Locator("form[action='/setup'] button[type=submit]").First.ClickAsync();
+            await tablet.Open("/cuts/new");
+            height = tablet.Page.GetByLabel("Height along the blade", new() { Exact = true });
+            await height.FillAsync("3 15/16");
+            await tablet.Tap(tablet.Button("Height along the blade: +0.1"));
+            await Expect(height).ToHaveValueAsync("4.0375");
+            await tablet.Tap(tablet.Button("Height along the blade: −1"));
+            await Expect(height).ToHaveValueAsync("3.0375");
+        });
+    }
+
+    [BrowserFact]
     public async Task Without_script_no_key_stands_there_that_does_nothing()
     {
         await using var shop = await ServedShop.Sample();
