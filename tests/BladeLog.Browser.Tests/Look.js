@@ -51,6 +51,10 @@
     const dx = Math.max(a.left - b.right, b.left - a.right), dy = Math.max(a.top - b.bottom, b.top - a.bottom);
     if (Math.max(dx, dy) < 111.5) say('risky too near', `${name(e)} is ${Math.max(dx, dy).toFixed(0)} from ${name(f)}`);
   }
+  // And never in a corner, where thumbs go: in the middle half of the screen on every page, so that none lies where a frequent one lies on another.
+  for (const [e, a] of boxes.filter(([t]) => risky(t))) {
+    if (a.left < width / 4 - 1 || a.right > width * 3 / 4 + 1) say('risky in a corner', `${name(e)} reaches from ${a.left.toFixed(0)} to ${a.right.toFixed(0)} of ${width}`);
+  }
   for (const e of document.querySelectorAll('form:is([action$="/retire"],[action$="/void"],[action$="/restore"]) button[type=submit]')) {
     if (e.closest('.block') || !shown(e)) continue;
     const above = [...e.form.querySelectorAll('input:not([type=hidden]),select,textarea')].map(f => (f.closest('.opt') ?? f).getBoundingClientRect().bottom);
@@ -71,8 +75,8 @@
     if (shown(e) && px < 19.9) say('text', `${name(e)} is typed at ${px.toFixed(1)} px`);
   }
 
-  // Key data 24 px, a tag in a list 29, a figure on the floor 96, one of four signs 70.
-  for (const [which, least] of [['.key,.why,.btn,.frow>label,.frow>legend', 24], ['.hang .t,.choice .tag', 29], ['.fig p:not(.long) b', 96], ['.fig p.long b', 70]]) {
+  // Key data 24 px, a tag in a list 29, a figure on the floor 96.
+  for (const [which, least] of [['.key,.why,.btn,.frow>label,.frow>legend', 24], ['.hang .t,.choice .tag', 29], ['.fig p b', 96]]) {
     for (const e of document.querySelectorAll(which)) {
       const px = parseFloat(getComputedStyle(e).fontSize);
       if (shown(e) && !e.closest('.vh') && px < least - 0.1) say('key data', `${name(e)} is ${px.toFixed(1)} px, not ${least}`);

@@ -1,5 +1,4 @@
 using BladeLog.Advice;
-using BladeLog.Advice.Changes;
 using BladeLog.Advice.Cuts;
 using BladeLog.Advice.Life;
 using BladeLog.Records;
@@ -12,6 +11,9 @@ namespace BladeLog.Features;
 /// <param name="Href">Its address.</param>
 /// <param name="Verb">What the row does.</param>
 public sealed record Worked(string What, string Gives, string Href, string Verb = "worked out");
+
+/// <summary>A figure and the way to its working; none where nothing is told.</summary>
+public sealed record Led(string Text, Worked? Worked);
 
 /// <summary>The workings that answer for the figures of a page. Null where nothing is told of a blade: then nothing leads there.</summary>
 internal static class WorkedOut
@@ -90,18 +92,6 @@ internal static class WorkedOut
         return shown.Worn is not null
             ? blade.Limits.Shares is [{ Kind: LimitKind.Edge }, ..] ? Edge(blade, saw) : Grinding(blade)
             : shown.Life is not null || shown.Range is not null ? Life(blade, saw) : null;
-    }
-
-    /// <summary>A blade as it might be: what differs from the record is typed into the address.</summary>
-    public static Worked Changed(BladeStand then)
-    {
-        ArgumentNullException.ThrowIfNull(then);
-        string Typed(string name, double value, string unit) => $"&{name}={Uri.EscapeDataString(FormattableString.Invariant($"{value:0.####} {unit}"))}";
-        return new(
-            $"The life then, on {then.Saw.Saw.Name}", "bending, bends an hour, half of such blades broken",
-            FormattableString.Invariant($"/workings/band-life?blade={Uri.EscapeDataString(then.File.Blade.Tag)}&saw={Uri.EscapeDataString(then.Saw.Saw.Code)}")
-            + Typed("thickness", then.Body.Thickness.Value * 1e3, "mm") + Typed("loop", then.LoopM * 1e3, "mm") + Typed("body", then.Body.BodyWidth * 1e3, "mm")
-            + Typed("tension", then.Tension.Stress.Value / 1e6, "MPa") + FormattableString.Invariant($"&hrc={then.Body.Hrc.Value:0.##}&weld={then.File.Weld.ToString().ToLowerInvariant()}"));
     }
 
     public static IReadOnlyList<Worked> Rows(params Worked?[] rows) => [.. rows.OfType<Worked>()];

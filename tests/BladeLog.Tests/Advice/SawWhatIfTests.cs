@@ -92,7 +92,7 @@ public sealed class SawWhatIfTests(DemoShopFixture shop) : IClassFixture<DemoSho
         foreach (BladeDepth d in asked.Of(All(saw)).Where(d => d.Deepest.HeightM > 0))
         {
             IReadOnlyList<SawVariant> told = asked.Variants(d, [("pull", new SetupChange(StrandForceMostN: 1.25 * saw.Setup.StrandForceMostN))]);
-            Assert.InRange(told[1].TensionPa, told[0].TensionPa, Math.Max(told[0].TensionPa, SawWhatIf.CeilingPa));
+            Assert.InRange(told[1].Tension.Stress.Value, told[0].Tension.Stress.Value, Math.Max(told[0].Tension.Stress.Value, SawWhatIf.CeilingPa));
             Assert.True(told[1].AtDepth!.Allowed.Newtons > told[0].AtDepth!.Allowed.Newtons);
             Assert.True(told[1].Life.Result.MedianBends < told[0].Life.Result.MedianBends);
         }

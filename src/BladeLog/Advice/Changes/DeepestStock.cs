@@ -30,10 +30,22 @@ public enum StockStop
 /// <param name="Stop">What stops it.</param>
 /// <param name="Behind">What stops it at the feed it must be given, where that is more than was asked.</param>
 /// <param name="FeedMps">The feed reckoned with: as asked, or the least at which it cuts instead of rubbing.</param>
-/// <param name="Thrust">Push the blade stands at that height.</param>
-public sealed record DeepestStock(double HeightM, StockStop Stop, StockStop? Behind, double FeedMps, ThrustLimits? Thrust)
+/// <param name="AskedM">That height, or the lowest asked about where it goes through nothing.</param>
+/// <param name="ThrustAsked">Push the blade stands at the height asked.</param>
+public sealed record DeepestStock(double HeightM, StockStop Stop, StockStop? Behind, double FeedMps, double AskedM, ThrustLimits ThrustAsked)
 {
-    private const double Close = 0.25e-3;
+    /// <summary>Push the blade stands at the deepest; null where there is none.</summary>
+    public ThrustLimits? Thrust => HeightM > 0 ? ThrustAsked : null;
+
+    private const double Close = 0.01e-3;
+
+    /// <summary>Lowest wood asked about: so many teeth must be in the cut.</summary>
+    public static double Least(BladeBody body, AdviceSettings settings)
+    {
+        ArgumentNullException.ThrowIfNull(body);
+        ArgumentNullException.ThrowIfNull(settings);
+        return Math.Max(1e-3, settings[CutSettings.LeastTeeth] * body.PitchCoarse);
+    }
 
     /// <summary>Finds it by halving: every limit of feed falls with the height.</summary>
     /// <param name="work">The wood; its height is varied.</param>
@@ -61,17 +73,23 @@ public sealed record DeepestStock(double HeightM, StockStop Stop, StockStop? Beh
         (double height, StockStop stop) = At(feedMps);
         if (rubbing <= feedMps)
         {
-            return new DeepestStock(height, stop, null, feedMps, Thrust(height));
+            return Told(height, stop, null, feedMps);
         }
 
         (double faster, StockStop behind) = At(rubbing);
         return faster < height - Close
-            ? new DeepestStock(faster, StockStop.Bite, behind, rubbing, Thrust(faster))
-            : new DeepestStock(faster, behind, null, rubbing, Thrust(faster));
+            ? Told(faster, StockStop.Bite, behind, rubbing)
+            : Told(faster, behind, null, rubbing);
+
+        DeepestStock Told(double H, StockStop what, StockStop? then, double feed)
+        {
+            double asked = H > 0 ? H : Least(body, settings);
+            return new DeepestStock(H, what, then, feed, asked, Thrust(asked));
+        }
 
         (double Height, StockStop Stop) At(double feed)
         {
-            double low = Math.Max(1e-3, settings[CutSettings.LeastTeeth] * body.PitchCoarse), high = setup.CutHeightMostM;
+            double low = Least(body, settings), high = setup.CutHeightMostM;
             if (low >= high || Stopping(high, feed) is null)
             {
                 return (high, StockStop.Guides);
@@ -93,7 +111,7 @@ public sealed record DeepestStock(double HeightM, StockStop Stop, StockStop? Beh
 
         StockStop? Stopping(double H, double feed)
         {
-            FeedLimit least = FeedLimits.Of(Case(H), work with { HeightM = H }, setup, Thrust(H)!, settings).MinBy(l => l.GreenMps)!;
+            FeedLimit least = FeedLimits.Of(Case(H), work with { HeightM = H }, setup, Thrust(H), settings).MinBy(l => l.GreenMps)!;
             return least.GreenMps >= feed * (1 - 1e-12) ? null : least.Kind switch
             {
                 FeedLimitKind.ChipRoom => StockStop.ChipRoom,
@@ -105,7 +123,7 @@ public sealed record DeepestStock(double HeightM, StockStop Stop, StockStop? Beh
             };
         }
 
-        ThrustLimits? Thrust(double H) => H > 0 ? beams.Of(body, tension, setup, v, H) : null;
+        ThrustLimits Thrust(double H) => beams.Of(body, tension, setup, v, H);
 
         CutCase Case(double H) => new()
         {

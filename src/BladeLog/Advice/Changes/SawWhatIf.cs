@@ -14,9 +14,9 @@ public sealed record BladeDepth(BladeAdvice Blade, BladeTension Tension, double 
 /// <param name="Saw">The saw as it would be.</param>
 /// <param name="Deepest">Deepest stock then.</param>
 /// <param name="AtDepth">Push the blade stands at the depth it reaches today.</param>
-/// <param name="TensionPa">Tension then.</param>
+/// <param name="Tension">Tension then.</param>
 /// <param name="Life">Life then; told only of a blade that is not held.</param>
-public sealed record SawVariant(string Name, SawNow Saw, DeepestStock Deepest, ThrustLimits? AtDepth, double TensionPa, Damage Life);
+public sealed record SawVariant(string Name, SawNow Saw, DeepestStock Deepest, ThrustLimits? AtDepth, BladeTension Tension, Damage Life);
 
 /// <summary>What a saw can do with the blades of the rack, and what a change of the saw would do.</summary>
 public sealed class SawWhatIf(SawNow saw, CutWork work, double feedMps, bool ground, AdviceSettings settings)
@@ -26,6 +26,12 @@ public sealed class SawWhatIf(SawNow saw, CutWork work, double feedMps, bool gro
 
     private readonly BeamTable beams = new(settings);
     private readonly DamageTable damage = new(settings);
+
+    public SawNow Saw => saw;
+
+    public CutWork Work => work;
+
+    public AdviceSettings Settings => settings;
 
     /// <summary>Each blade that fits the saw and may cut, the deepest first.</summary>
     public IReadOnlyList<BladeDepth> Of(IEnumerable<BladeAdvice> blades)
@@ -60,7 +66,7 @@ public sealed class SawWhatIf(SawNow saw, CutWork work, double feedMps, bool gro
             then,
             deepest,
             depth > 0 ? beams.Of(body, tension, then.Setup, v, depth) : null,
-            tension.Stress.Value,
+            tension,
             damage.Of(body, blade.Blade.File.Weld, then.Setup, v, tension.Stress.Value, blade.Blade.File.LoopM ?? then.Setup.LoopM));
     }
 

@@ -41,8 +41,7 @@ internal static class FeedLimits
 
     private static FeedLimit Motor(CutCase cut, SawSetup setup, double low, AdviceSettings settings)
     {
-        double idle = setup.IdleW ?? settings[CutSettings.Idle] * setup.MotorW, drive = settings[CutSettings.Drive];
-        double easy = drive * ((settings[CutSettings.LoadGreen] * setup.MotorW) - idle), most = drive * ((settings[CutSettings.LoadAmber] * setup.MotorW) - idle) / low;
+        double easy = BandPower.Easy(setup, settings), most = BandPower.Most(setup, settings) / low;
         double green = CuttingForce.FeedAtPower(cut, new Power(Math.Max(0, easy))).MetresPerSecond, amber = CuttingForce.FeedAtPower(cut, new Power(Math.Max(0, most))).MetresPerSecond;
         return new FeedLimit(
             FeedLimitKind.Power, green, amber,

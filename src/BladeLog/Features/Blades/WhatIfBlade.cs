@@ -94,11 +94,11 @@ internal static class WhatIfBlade
 
         BladeChange change = new(on, loop, weld, t, w, hard, tension, fresh == Fresh.New);
         return form.Try(() => BladeWhatIf.Compare(file, today, change, H, advice.Level, settings)) is { } compared
-            ? Filled(model, compared, units)
+            ? Filled(model, compared, units, advice.Words)
             : model with { Problems = form.Problems };
     }
 
-    private static WhatIfBladeModel Filled(WhatIfBladeModel model, BladeComparison compared, ShopUnits units)
+    private static WhatIfBladeModel Filled(WhatIfBladeModel model, BladeComparison compared, ShopUnits units, Wording words)
     {
         Shown shown = new(units);
         BladeStand then = compared.Then;
@@ -147,7 +147,7 @@ internal static class WhatIfBlade
             Rows = [.. Rows(compared, model.Held is not null, shown)],
             Stops = stops,
             Remarks = remarks,
-            Worked = model.Held is null ? [WorkedOut.Changed(then)] : [],
+            Worked = model.Held is null ? WorkedAsked.All(then, words) : [],
         };
     }
 

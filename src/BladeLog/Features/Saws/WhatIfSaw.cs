@@ -1,6 +1,7 @@
 using BladeLog.Advice;
 using BladeLog.Advice.Changes;
 using BladeLog.Advice.Cuts;
+using BladeLog.Handbook.BeamStrength;
 using BladeLog.Handbook.Fatigue;
 using BladeLog.Handbook.Quantities;
 using BladeLog.Handbook.Tables;
@@ -11,10 +12,10 @@ using BladeLog.Ui.Forms;
 namespace BladeLog.Features.Saws;
 
 /// <summary>A blade in the list of depths.</summary>
-public sealed record DepthRow(string Tag, string Section, string Depth, string Stop, string Feed, string Push, string Href, bool Chosen);
+public sealed record DepthRow(string Tag, string Section, string Teeth, string Away, Led Depth, string Stop, string Feed, Led Push, string Href, bool Chosen);
 
 /// <summary>A change of the saw in the table.</summary>
-public sealed record VariantRow(string Name, string Depth, string Stop, string Tension, string Push, string Life);
+public sealed record VariantRow(string Name, Led Depth, string Stop, Led Tension, Led Push, Led Life);
 
 /// <summary>How deep a saw can resaw, and what would make it deeper.</summary>
 public sealed record WhatIfSawModel
@@ -121,41 +122,47 @@ internal static class WhatIfSaw
         {
             Problems = form.Problems,
             Title = depths[0].Deepest.HeightM > 0 ? $"{saw.Saw.Name} resaws {wood.Name} to {deepest} with {depths[0].Blade.File.Blade.Tag}" : $"{saw.Saw.Name} resaws no {wood.Name} at {shown.FeedText(f)}",
-            Blades = [.. depths.Select(d => Row(d, d == chosen, query, shown))],
+            Blades = [.. depths.Select(d => Row(d, d == chosen, asked, query, shown))],
             With = chosen.Blade.File.Blade.Tag,
             PushAt = chosen.Deepest.HeightM > 0 ? $"push in {shown.SmallText(chosen.Deepest.HeightM, 0)}" : "push",
-            Changes = [.. variants.Select(v => Row(v, shown))],
+            Changes = [.. variants.Select(v => Row(v, chosen, asked, advice.Words, shown))],
             Lessons = [.. Lessons(variants, chosen, shown)],
         };
     }
 
-    private static DepthRow Row(BladeDepth d, bool chosen, IQueryCollection query, Shown shown)
+    private static DepthRow Row(BladeDepth d, bool chosen, SawWhatIf asked, IQueryCollection query, Shown shown)
     {
         string tag = d.Blade.File.Blade.Tag;
         IEnumerable<string> kept = query.Where(q => q.Key != "blade" && q.Value.ToString().Length > 0).Select(q => $"{Uri.EscapeDataString(q.Key)}={Uri.EscapeDataString(q.Value.ToString())}");
         return new DepthRow(
             tag,
-            $"{Said.Section(d.Blade.File, shown.Units)} {Said.Teeth(d.Blade.File.Spec)}{(d.Blade.File.Place == Place.AtSharpener ? ", at the sharpener" : "")}",
-            Depth(d.Deepest, shown),
+            Said.Section(d.Blade.File, shown.Units),
+            Said.Teeth(d.Blade.File.Spec),
+            d.Blade.File.Place == Place.AtSharpener ? ", at the sharpener" : "",
+            new Led(Depth(d.Deepest, shown), WorkedAsked.Depth(d, asked.Saw, d.Deepest, asked.Work, asked.Settings)),
             Stop(d.Deepest, shown),
             shown.FeedText(d.Deepest.FeedMps),
-            d.Deepest.Thrust is { } thrust ? shown.ForceText(thrust.Allowed.Newtons) : "-",
+            new Led(Push(d.Deepest.Thrust, shown), WorkedAsked.Push(d, asked.Saw, d.Tension, d.Deepest.HeightM)),
             "?" + string.Join('&', kept.Append($"blade={Uri.EscapeDataString(tag)}")),
             chosen);
     }
 
-    private static VariantRow Row(SawVariant v, Shown shown) => new(
+    private static VariantRow Row(SawVariant v, BladeDepth blade, SawWhatIf asked, Wording words, Shown shown) => new(
         v.Name,
-        Depth(v.Deepest, shown),
+        new Led(Depth(v.Deepest, shown), WorkedAsked.Depth(blade, v.Saw, v.Deepest, asked.Work, asked.Settings)),
         Stop(v.Deepest, shown),
-        shown.StressText(v.TensionPa),
-        v.AtDepth is { } push ? shown.ForceText(push.Allowed.Newtons) : "-",
-        v.Life.Result.Verdict switch
-        {
-            LifeVerdict.Unsuitable => "unsuitable",
-            LifeVerdict.NotLimiting => "flexing will not end it",
-            _ => Figures.With(Figures.Hours(v.Life.Result.MedianHours), "h"),
-        });
+        new Led(shown.StressText(v.Tension.Stress.Value), WorkedAsked.Tension(blade, v.Saw, v.Tension.Stress.Value, words)),
+        new Led(Push(v.AtDepth, shown), WorkedAsked.Push(blade, v.Saw, v.Tension, blade.Deepest.HeightM)),
+        new Led(Life(v.Life.Result), WorkedAsked.Life(blade, v.Saw, v.Tension.Stress.Value)));
+
+    private static string Life(BandLifeResult life) => life.Verdict switch
+    {
+        LifeVerdict.Unsuitable => "unsuitable",
+        LifeVerdict.NotLimiting => "flexing will not end it",
+        _ => Figures.With(Figures.Hours(life.MedianHours), "h"),
+    };
+
+    private static string Push(ThrustLimits? limits, Shown shown) => limits is null ? "-" : shown.ForceText(limits.Allowed.Newtons);
 
     private static IEnumerable<string> Lessons(IReadOnlyList<SawVariant> variants, BladeDepth chosen, Shown shown)
     {

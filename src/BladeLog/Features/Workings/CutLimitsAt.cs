@@ -31,6 +31,25 @@ internal sealed record CutLimitsAt(CutHeld Held, double ChipRoom, double? Power,
         Bite.RubbingFeed(cut).MetresPerSecond,
         Bite.NoChipFeed(cut).MetresPerSecond);
 
+    /// <summary>The greatest height at a feed, and what stops it there.</summary>
+    public (string Name, double HeightM) DeepestAt(CutCase cut, double feed, double? opens)
+    {
+        Speed at = new(feed);
+        double thrust = CuttingForce.Thrust(cut, at).Newtons, high = cut.CutHeight.Metres;
+        double? Pushed(double? n) => n is { } most ? thrust > 0 ? high * most / thrust : double.PositiveInfinity : null;
+        double? Paced(double? most) => most is { } m ? feed <= m * (1 + 1e-9) ? double.PositiveInfinity : 0 : null;
+        return new[]
+        {
+            ("chip room", high * ChipRoom / feed),
+            ("motor", Held.PowerW is { } w ? high * w / CuttingForce.CuttingPower(cut, at).Watts : null),
+            (Held.PowerFed ? "feeder" : "push", Pushed(Held.PushN)),
+            ("bending of the blade", Pushed(Held.ThrustN)),
+            ("practical feed", Paced(Held.MostMps)),
+            ("finish", Paced(Finish)),
+            ("what the saw opens to", opens),
+        }.Where(l => l.Item2 is not null).Select(l => (l.Item1, l.Item2!.Value)).MinBy(l => l.Value);
+    }
+
     /// <summary>The window: open, open with care, or only while it rubs.</summary>
     /// <param name="care">The same with every limit at its most.</param>
     /// <param name="shown">The shop's units.</param>

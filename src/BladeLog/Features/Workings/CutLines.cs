@@ -98,6 +98,18 @@ internal static class CutLines
         yield return Line("Cutting power", shown.Units.Show(CuttingForce.CuttingPower(cut, at)), "cutting force times band speed", "derived", Provenance.Derived);
     }
 
+    /// <summary>How deep it goes at this feed, and what stops it there.</summary>
+    public static BecauseLine Deepest(CutCase cut, CutLimitsAt limits, double feed, double? opens, double least, Shown shown)
+    {
+        (string name, double height) = limits.DeepestAt(cut, feed, opens);
+        return Line(
+            "At this feed it goes as deep as",
+            height < least ? "none" : shown.SmallText(height, 0),
+            $"{name} stops it: gullet fill, power and push grow as the height does; the push the blade stands is taken as at this height",
+            "derived",
+            Provenance.Derived);
+    }
+
     private static string Guide(Limit women, Limit men, Shown shown) => $"{shown.ForceText(women.Value)} and {shown.ForceText(men.Value)}";
 
     private static string Words(BiteRegime regime) => regime switch

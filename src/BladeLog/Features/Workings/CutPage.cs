@@ -1,4 +1,6 @@
 using BladeLog.Advice;
+using BladeLog.Advice.Changes;
+using BladeLog.Advice.Cuts;
 using BladeLog.Handbook.BeamStrength;
 using BladeLog.Handbook.Cutting;
 using BladeLog.Handbook.Quantities;
@@ -44,12 +46,13 @@ internal static class CutPage
         Choice? chosen = from.Choice;
         double? f = form.Feed("feed", "Feed", chosen?.Gate?.AdvisedMps is { } advised ? new Given(advised, "advised for the cut") : form.Example ? Given.Example(2.0 / 60) : Given.None, optional: true);
         double? fill = form.Number("fill", "Gullet fill allowed", "a gullet fill", 0.05, 1, "", Given.Of(from.Cut is { IsWood: true } && setup is not null ? from.Cut.Fill(setup, settings).Fill : settings.Known(CutSettings.FillDryHand), 0.4));
-        double? power = form.Power("power", "Power left for cutting, at the band", Given.Of(AtBand(setup, settings), "motor less idling and drive", 1200), optional: true);
-        bool feeder = from.Cut is { } cut && setup is not null && cut.WithFeeder(setup);
+        double? power = form.Power("power", "Power left for cutting, at the band", Given.Of(setup is null ? null : BandPower.Easy(setup, settings), "motor less idling and drive", 1200), optional: true);
+        bool feeder = setup?.FeederN is not null && from.Cut?.WithFeeder(setup) != false;
         double? push = form.Force("push", feeder ? "Push of the feeder" : "Push of a hand", feeder ? Given.Of(setup!.FeederN, "as the saw is set up", null) : Given.Of(settings.Known(CutSettings.PushGreen), 70), optional: true);
         double? most = form.Feed("most", "Greatest feed that can be guided", feeder ? Given.Of(setup!.FeederMostMps, "as the saw is set up", null)
             : Given.Of(settings.Known(from.Cut?.IsCurve(settings) == true ? CutSettings.FeedOnCurve : CutSettings.FeedByHand, 1 / 60.0), 4 / 60.0), optional: true);
         double? bite = form.Length("bite", "Greatest bite of the finish", Fields.Bite, from.Cut?.FinishBite is { } fine ? new Given(fine.Value, fine.From) : Given.None, optional: true);
+        double? opens = form.Length("opens", "What the saw opens to", Fields.CutHeight, Given.Of(setup?.CutHeightMostM, "as the saw is set up", null), optional: true);
         ThrustLimits? stands = from is { Blade: { } blade, Saw: { } saw, Tension: { } tension } && H is { } high ? form.Try(() => from.Advice.Beams.Of(blade.Body, tension, saw.Setup, v ?? saw.Setup.UsualSpeedMps, high)) : null;
         double? thrust = form.Force("thrust", "Push the blade stands", Given.Of(stands?.Allowed.Newtons, "from its section, tension and guides", 120), optional: true);
 
@@ -93,6 +96,11 @@ internal static class CutPage
             {
                 title = limits.Title(care, shown);
                 lines.AddRange(form.Try(() => CutLines.Of(asked, limits, care, pattern, f, shown).ToList()) ?? []);
+                if (f is { } at)
+                {
+                    lines.Add(CutLines.Deepest(asked, limits, at, opens, body is null ? 0 : DeepestStock.Least(body, settings), shown));
+                }
+
                 curves = form.Try(() => CutCurves.Of(asked, limits, shown)) ?? [];
                 cautions.AddRange(form.Try(() => CutChecks.Cautions(asked, f is { } feed ? new Speed(feed) : null)) ?? []);
                 if (Kerf.SetTooWide(Kerf.SetPerSide(asked.Kerf, asked.Thickness), asked.Thickness, pattern) && !cautions.Exists(c => c.Contains("core", StringComparison.Ordinal)))
@@ -127,9 +135,8 @@ internal static class CutPage
     /// <summary>The same limits at their most, as the choices reckon the amber edge.</summary>
     private static CutHeld AtMost(CutHeld held, SawSetup? setup, ThrustLimits? stands, AdviceSettings settings)
     {
-        double low = settings[CutSettings.LowEnd], drive = settings[CutSettings.Drive];
-        double idle = setup?.IdleW ?? settings[CutSettings.Idle] * (setup?.MotorW ?? 0);
-        double? motor = setup is null ? null : drive * ((settings[CutSettings.LoadAmber] * setup.MotorW) - idle);
+        double low = settings[CutSettings.LowEnd];
+        double? motor = setup is null ? null : BandPower.Most(setup, settings);
         return held with
         {
             Fill = Math.Max(held.Fill, settings[CutSettings.FillAmber]),
@@ -146,10 +153,6 @@ internal static class CutPage
     }
 
     private static string Mark(BladeBody? body) => body is null ? "example" : "specification";
-
-    private static double? AtBand(SawSetup? setup, AdviceSettings settings) => setup is null
-        ? null
-        : settings[CutSettings.Drive] * ((settings[CutSettings.LoadGreen] * setup.MotorW) - (setup.IdleW ?? settings[CutSettings.Idle] * setup.MotorW));
 
     private static (Material? Found, string? Understood, string? Error) Find(string typed)
     {
