@@ -44,6 +44,7 @@ public sealed class StepKeysTests(Workbench bench) : IClassFixture<Workbench>
             await tablet.Open("/setup");
             await tablet.Page.Locator("[name=Lengths][value=Inch]").CheckAsync(new() { Force = true });
             await tablet.Page.Locator("form[action='/setup'] button[type=submit]").First.ClickAsync();
+            await Expect(tablet.Page.Locator("#saved")).ToContainTextAsync("Saved");
             await tablet.Open("/cuts/new");
             height = tablet.Page.GetByLabel("Height along the blade", new() { Exact = true });
             await height.FillAsync("3 15/16");
