@@ -71,4 +71,27 @@ public sealed partial class KioskTests(Workbench bench) : IClassFixture<Workbenc
 
     [GeneratedRegex(@"\b(alert|confirm|prompt|showModal|print)\s*\(|window\.open|onbeforeunload|beforeunload")]
     private static partial Regex Box();
+
+    /// <summary>A lamp that went out between two people: what one left stands there, and says so.</summary>
+    [BrowserFact]
+    public async Task What_somebody_left_unsent_says_since_when_and_one_tap_clears_it()
+    {
+        await using var shop = await ServedShop.Sample();
+        await bench.At(shop, Screen.Standing, async tablet =>
+        {
+            await tablet.Open("/saws/S1/hours");
+            var reading = tablet.Page.GetByLabel("The meter shows", new() { Exact = true });
+            await Expect(tablet.Page.Locator(".draftnote")).ToHaveCountAsync(0);
+            await reading.FillAsync("8025");
+            await tablet.Open("/");
+            await tablet.Open("/saws/S1/hours");
+            await Expect(reading).ToHaveValueAsync("8025");
+            await Expect(tablet.Page.Locator(".draftnote")).ToContainTextAsync("Left from ");
+            await tablet.Tap(tablet.Button("Start clean"));
+            await Expect(reading).ToHaveValueAsync("");
+            await Expect(tablet.Page.Locator(".draftnote")).ToHaveCountAsync(0);
+            await tablet.Open("/saws/S1/hours");
+            await Expect(reading).ToHaveValueAsync("");
+        });
+    }
 }

@@ -43,13 +43,34 @@
     if (Date.now() - draft.at > DRAFT_DAYS * 864e5) { store.drop(key); return; }
     // A form that came back with errors already holds what was typed.
     if (document.querySelector('.problems')) return;
+    let differs = false;
     for (const [name, value, checked] of draft.values) {
       for (const field of form.elements) {
         if (field.name !== name || !keeps(field)) continue;
-        if (checked === undefined) field.value = value;
-        else if (field.value === value) field.checked = checked;
+        if (checked === undefined) {
+          differs ||= field.value !== value;
+          field.value = value;
+        } else if (field.value === value) {
+          differs ||= field.checked !== checked;
+          field.checked = checked;
+        }
       }
     }
+    if (differs) say(form, key, draft.at);
+  }
+
+  // Whoever comes next must see that what stands there was left by somebody.
+  function say(form, key, at) {
+    const note = document.createElement('div'), words = document.createElement('p'), clean = document.createElement('button');
+    note.className = 'draftnote';
+    words.className = 'key';
+    words.textContent = `Left from ${new Date(at).toTimeString().slice(0, 5)}, not sent yet.`;
+    clean.className = 'btn';
+    clean.type = 'button';
+    clean.textContent = 'Start clean';
+    clean.addEventListener('click', () => { store.drop(key); form.reset(); note.remove(); });
+    note.append(words, clean);
+    form.before(note);
   }
 
   document.addEventListener('input', event => { if (event.target.form) save(event.target.form); });

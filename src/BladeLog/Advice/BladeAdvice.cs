@@ -83,6 +83,7 @@ public sealed record BladeAdvice
             State = file.Retirement is not null ? BladeState.Retired
                 : file.Break is not null ? BladeState.Broken
                 : file.Hold is not null ? BladeState.Hold
+                : body.Doubt is not null || body.TooNarrow ? BladeState.Look
                 : edge.Due ? BladeState.Sharpen
                 : watched || byHours || byMount ? BladeState.Look
                 : BladeState.Ready,

@@ -74,6 +74,12 @@ public sealed record BladeBody
     public double? TargetPa { get; init; }
 
     /// <summary>Back edge to gullet bottom: what carries the tension.</summary>
+    /// <summary>What of the record cannot be; null: nothing.</summary>
+    public string? Doubt { get; init; }
+
+    /// <summary>Ground below its least width.</summary>
+    public bool TooNarrow => Width.Value < LeastWidth.Value - 1e-9;
+
     public double BodyWidth => Width.Value - Gullet.Value;
 
     public static BladeBody Of(BladeFile file, AdviceSettings settings)
@@ -84,6 +90,11 @@ public sealed record BladeBody
         double t = file.ThicknessM;
         bool set = spec.TipKind == TipKind.Set;
         Known share = settings.Known(spec.ToothForm == ToothForm.Skip ? BladeSettings.GulletShareSkip : BladeSettings.GulletShare);
+        Known gullet = Given(file.GulletM, "measured") ?? Given(spec.GulletDepthM, Box)
+            ?? share with { Value = Math.Min(share.Value * spec.PitchCoarseM, settings[BladeSettings.GulletOfWidth] * spec.WidthM) };
+
+        // Figures that cannot stand together are said, and reckoned without: one slip must not take down a page of all blades.
+        string? doubt = gullet.Value + t > file.WidthM ? "Its gullets, as recorded, leave no body in its width: measure both." : null;
         Known kerf = settings.Known(set ? BladeSettings.KerfSet : BladeSettings.KerfTipped);
         return new BladeBody
         {
@@ -91,8 +102,8 @@ public sealed record BladeBody
             NewWidth = Known.Yours(spec.WidthM, Box),
             LeastWidth = Given(spec.LeastWidthM, Box) ?? settings.Known(BladeSettings.LeastWidth, spec.WidthM),
             Thickness = Known.Yours(t, file.Blade.MeasuredThicknessM is null ? Box : "measured"),
-            Gullet = Given(file.GulletM, "measured") ?? Given(spec.GulletDepthM, Box)
-                ?? share with { Value = Math.Min(share.Value * spec.PitchCoarseM, settings[BladeSettings.GulletOfWidth] * spec.WidthM) },
+            Gullet = doubt is null ? gullet : new Known(settings[BladeSettings.GulletOfWidth] * file.WidthM, Provenance.EngineeringDefault, "cannot be as recorded"),
+            Doubt = doubt,
             // A gullet since ground to another depth has an area in proportion.
             GulletAreaM2 = spec.GulletAreaM2 * (file.GulletM is { } deep && spec.GulletDepthM is { } box ? deep / box : 1),
             Kerf = Given(file.KerfM, "measured") ?? Given(t + file.Kerf.Set?.BothM, "body and set, both measured") ?? Given(spec.KerfM, Box) ?? kerf with { Value = kerf.Value * t },

@@ -62,7 +62,7 @@ internal sealed class Desk(TimeProvider clock, ShopDb db, ShopWriter writer, IHt
         return _who = await db.People.AsNoTracking().Include(p => p.Roles).FirstOrDefaultAsync(p => p.Initials == initials && p.Active);
     }
 
-    /// <summary>The person said on a form itself, kept for this tablet; false where nobody is called so.</summary>
+    /// <summary>The person said on a form itself, kept for this tablet where it knew nobody; false where nobody is called so.</summary>
     public async Task<bool> SayWho(string initials)
     {
         var person = await db.People.AsNoTracking().Include(p => p.Roles).FirstOrDefaultAsync(p => p.Initials == initials && p.Active);
@@ -71,7 +71,14 @@ internal sealed class Desk(TimeProvider clock, ShopDb db, ShopWriter writer, IHt
             return false;
         }
 
+        // Somebody called to sign one entry does not take the tablet over from whoever works at it.
+        var alone = await Who() is null || Http.Request.Path == "/who";
         _who = person;
+        if (!alone)
+        {
+            return true;
+        }
+
         Http.Response.Cookies.Append(
             WhoCookie, person.Initials, new CookieOptions { HttpOnly = true, SameSite = SameSiteMode.Strict, MaxAge = TimeSpan.FromHours(12), IsEssential = true });
         return true;

@@ -56,7 +56,9 @@ public sealed class MovingAndWeldingTests
         await shop.Do(new RecordJoint("Q-1", 3.985, "3985", WeldQuality.Good, At: Day));
         await shop.Do(SwapTests.On("S1", "Q-1", 1));
         await shop.Do(new Swap("S1") { At = Day.AddHours(2) });
-        await shop.Do(new RecordJoint("Q-1", 3.97, "3970", WeldQuality.Good, At: Day.AddHours(3)));
+        var shorter = new RecordJoint("Q-1", 3.97, "3970", WeldQuality.Good, At: Day.AddHours(3));
+        Assert.Contains("No saw here takes a loop of 3,970 mm", await shop.Asked(shorter), StringComparison.Ordinal);
+        await shop.Do(shorter with { FitsNone = true });
         Assert.StartsWith("Q-1 is 3,970 mm long; S1 takes 3,980 mm to 4,020 mm.", await shop.Asked(SwapTests.On("S1", "Q-1", 4)), StringComparison.Ordinal);
     }
 

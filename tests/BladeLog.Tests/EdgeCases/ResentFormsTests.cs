@@ -58,7 +58,7 @@ public sealed class ResentFormsTests
         Form("/saws/new", "/saws/new", ("Code", "S9"), ("Name", "New saw"), ("Wheel1", "400"), ("Wheel2", "400"), ("Loop", "3400"), ("WidthLeast", "6"), ("WidthMost", "25"), ("Speed1", "15"), ("Board", "true"), ("CutHeight", "200"), ("Motor", "2 kW")),
         Form("/saws/{code}/clicking", "/saws/S2/clicking"),
         Form("/blades/{tag}/break", "/blades/Q-11/break", ("Site", "Weld")),
-        Form("/blades/{tag}/join", "/blades/Q-11/join", ("Loop", "5000"), ("Quality", "Good")),
+        Form("/blades/{tag}/join", "/blades/Q-11/join", ("Loop", "5060"), ("Quality", "Good")),
         Form("/blades/{tag}/retire", "/blades/Q-11/retire", ("Reason", "TooManyJoints")),
         Action("/record/{entry:int}/void", null, null, ("Reason", "typed wrongly")),
         Action("/breaks/{entry:int}", null, null, ("Site", "Weld"), ("MinutesLost", "20")),

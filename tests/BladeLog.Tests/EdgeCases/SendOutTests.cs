@@ -11,7 +11,7 @@ public sealed class SendOutTests
     public async Task One_blade_missing_keeps_the_batch_open()
     {
         using var app = await Sent();
-        (await Back(app, ("Lines[0].Outcome", "Sharpened"), ("Lines[0].Width", "24.6"))).LeadsTo("/bench");
+        (await Back(app, ("Lines[0].Outcome", "Sharpened"), ("Lines[0].Width", "12.6"))).LeadsTo("/bench");
         Assert.Contains("B-032", (await app.GetPage("/bench")).Body!.TextContent, StringComparison.Ordinal);
         Assert.Equal(Place.AtSharpener, await PlaceOf(app, "Q-13"));
         Assert.Equal(Place.Rack, await PlaceOf(app, "Q-11"));
@@ -43,24 +43,24 @@ public sealed class SendOutTests
     }
 
     [Fact]
-    public async Task Returned_narrower_than_its_least_width_is_asked_about_and_then_ground_no_more()
+    public async Task Returned_narrower_than_its_least_width_is_asked_about_and_then_to_be_retired()
     {
         using var app = await Sent();
         var before = await app.EntryCount();
         var asked = (await Back(app, ("Lines[0].Outcome", "Sharpened"), ("Lines[0].Width", "9"))).Refused();
         Assert.Contains("its least width is", asked.Page.GetElementById("f-Lines-0-Width-err")!.TextContent, StringComparison.Ordinal);
         Assert.Equal(before, await app.EntryCount());
-        (await app.SendForm(asked.Page, "/bench/batches/B-032", ("NarrowMeant", "1"))).LeadsTo("/bench");
+        (await app.SendForm(asked.Page, "/bench/batches/B-032", ("AsMeasured", "1"))).LeadsTo("/bench");
         Assert.Equal(Place.Rack, await PlaceOf(app, "Q-11"));
-        Assert.Contains("do not pay for another grind", SampleApp.Text((await app.GetPage("/blades/Q-11")).QuerySelector("h1")), StringComparison.Ordinal);
+        Assert.Contains("retire it", SampleApp.Text((await app.GetPage("/blades/Q-11")).QuerySelector("h1")), StringComparison.Ordinal);
     }
 
     [Fact]
     public async Task Came_back_with_another_set_the_measured_kerf_wins()
     {
         using var app = await Sent();
-        (await Back(app, ("Lines[0].Outcome", "Sharpened"), ("Lines[0].Kerf", "1.93"))).LeadsTo("/bench");
-        Assert.Contains("1.93", SampleApp.Text((await app.GetPage("/blades/Q-11")).Body), StringComparison.Ordinal);
+        (await Back(app, ("Lines[0].Outcome", "Sharpened"), ("Lines[0].Kerf", "1.85"))).LeadsTo("/bench");
+        Assert.Contains("1.85", SampleApp.Text((await app.GetPage("/blades/Q-11")).Body), StringComparison.Ordinal);
     }
 
     [Fact]
@@ -88,7 +88,7 @@ public sealed class SendOutTests
 
         app.Clock.Advance(TimeSpan.FromDays(20));
         Assert.Contains("Q-11, written as lost", SampleApp.Text((await app.GetPage("/bench/batches/B-032")).Body), StringComparison.Ordinal);
-        (await Back(app, ("Lines[1].Outcome", "Sharpened"), ("Lines[1].Width", "24.5"))).LeadsTo("/bench");
+        (await Back(app, ("Lines[1].Outcome", "Sharpened"), ("Lines[1].Width", "12.6"))).LeadsTo("/bench");
         Assert.Equal(Place.Rack, await PlaceOf(app, "Q-11"));
         await using var after = app.NewContext();
         Assert.False(await after.Retirements.AnyAsync(r => r.Blade.Tag == "Q-11"));

@@ -165,7 +165,7 @@ public class RandomHistoryTests(ITestOutputHelper output)
                 10 or 11 or 12 => Cut(saw, s, at),
                 13 => new NewSetup(saw, TempShop.Setup(), at),
                 14 => await ReplaceSetup(db, saw) ?? new NewSetup(saw, TempShop.Setup(), at),
-                15 => new RecordSharpening(blade, GrindKind.Face) { At = at, WidthM = 0.025 - s.Pick * 1e-6, WiderMeant = true },
+                15 => new RecordSharpening(blade, GrindKind.Face) { At = at, WidthM = 0.025 - s.Pick * 1e-6, AsMeasured = true },
                 16 => (s.Pick % 3) switch
                 {
                     0 => new RecordHold(blade, HoldKind.Crack) { At = at },

@@ -49,7 +49,7 @@ public class ShiftTests
     public async Task Training_never_shortens_a_right()
     {
         using var shop = await TempShop.WithSaws();
-        await shop.Do(new AddPerson("MI", "Manager", [Role.ClearHolds]));
+        await shop.Do(new AddPerson("MI", "Manager", [Role.ClearHolds]), await shop.Person("OT"));
         await shop.Do(new RecordTraining("OT", TrainedTask.ClearHold, "MI") { RefresherUtc = shop.Now.AddDays(1) }, await shop.Person("MI"));
         shop.Now = shop.Now.AddDays(5);
         await shop.Do(new RecordHold("Q-1", HoldKind.Clicking));

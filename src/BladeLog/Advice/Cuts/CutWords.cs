@@ -59,6 +59,15 @@ public static class CutWords
 
     public static string KerfTooNarrow() => "its kerf is entered narrower than its body: measure both";
 
+    public static string Doubtful() => "its gullets are entered too deep for its width: measure both";
+
+    public static string TooNarrow(BladeBody body, Wording words)
+    {
+        ArgumentNullException.ThrowIfNull(body);
+        ArgumentNullException.ThrowIfNull(words);
+        return $"{words.Width(body.Width.Value)} wide, its least width is {words.Width(body.LeastWidth.Value)}: retire it";
+    }
+
     public static string Unsuitable() => "the wheels are too small for its body: hours or less";
 
     public static string Teeth(double teeth, double least) => $"{Wording.Number(teeth, 1)} teeth in the cut ({Wording.Number(least, 0)} needed)";

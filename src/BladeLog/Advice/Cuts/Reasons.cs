@@ -9,6 +9,9 @@ public enum ReasonKind
 
     /// <summary>Figures of the blade that cannot be.</summary>
     Figures,
+
+    /// <summary>Ground below its least width.</summary>
+    Width,
     WorkKind,
     TooHigh,
     TooLong,

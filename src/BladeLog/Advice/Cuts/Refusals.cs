@@ -17,6 +17,8 @@ internal static class Refusals
     private static CutReason? OfBlade(BladeAdvice blade, Wording words) =>
         blade.File.Hold is { } hold ? new CutReason(ReasonKind.Hold, Life.LifeWords.Hold(hold, words))
         : blade.File.Place == Place.AtSharpener ? new CutReason(ReasonKind.Away, Life.LifeWords.Away(blade.File.Away))
+        : blade.Body.Doubt is not null ? new CutReason(ReasonKind.Figures, CutWords.Doubtful())
+        : blade.Body.TooNarrow ? new CutReason(ReasonKind.Width, CutWords.TooNarrow(blade.Body, words))
         : blade.Body.Kerf.Value < blade.Body.Thickness.Value ? new CutReason(ReasonKind.Figures, CutWords.KerfTooNarrow())
         : null;
 

@@ -73,7 +73,11 @@ public static class LifeWords
         return new Advised(step, blade.State is BladeState.Retired or BladeState.Broken ? [] : [.. Because(blade, settings, words)]);
     }
 
-    private static string Usable(BladeAdvice blade) => (blade.File.Place, blade.Grind.Pays, blade.Edge.Due) switch
+    private static string Usable(BladeAdvice blade) => blade.Body.Doubt is not null ? "Measure it before it cuts."
+        : blade.Body.TooNarrow ? "Retire it."
+        : ByEdge(blade);
+
+    private static string ByEdge(BladeAdvice blade) => (blade.File.Place, blade.Grind.Pays, blade.Edge.Due) switch
     {
         (Place.AtSharpener, false, _) => "Do not pay for another grind: ask for it back unground.",
         (Place.AtSharpener, true, _) => "Wait for it.",
@@ -95,6 +99,16 @@ public static class LifeWords
             yield return char.ToUpperInvariant(said[0]) + said[1..] + ".";
             yield return "Any crack that can be seen means hold, whatever the hours say.";
             yield break;
+        }
+
+        if (blade.Body.Doubt is { } doubt)
+        {
+            yield return doubt;
+        }
+
+        if (blade.Body.TooNarrow)
+        {
+            yield return $"It is {words.Width(blade.Body.Width.Value)} wide; its least width is {words.Width(blade.Body.LeastWidth.Value)}.";
         }
 
         if (blade.File.OffAsDull)

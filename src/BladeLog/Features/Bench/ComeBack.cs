@@ -29,8 +29,8 @@ public sealed record ComeBackForm : PostedForm
 
     public string? At { get; init; }
 
-    /// <summary>One more tap: narrower than the least width, and meant.</summary>
-    public string? NarrowMeant { get; init; }
+    /// <summary>One more tap: hardly so, and yet measured.</summary>
+    public string? AsMeasured { get; init; }
 }
 
 /// <summary>A blade of the batch that came back before.</summary>
@@ -92,7 +92,7 @@ internal static class ComeBack
                 PriceMinor = read.Money($"Lines[{i}].Price", sent[i].Price),
                 Kind = GrindKind.FullProfile,
                 Retire = sent[i].Retire is not null,
-                NarrowMeant = form.NarrowMeant is not null,
+                AsMeasured = form.AsMeasured is not null,
                 LeastWidthM = advice.Now.Blade(sent[i].Tag ?? "") is { } file ? advice.Of(file).Body.LeastWidth.Value : null,
             });
         }

@@ -65,6 +65,12 @@ internal static class BladePageModel
         BladeFile file = blade.File;
         string tag = file.Blade.Tag;
         SawNow? on = advice.Now.Saws.FirstOrDefault(s => s.MountedBladeId == file.Blade.Id);
+        bool dull = blade.State == BladeState.Sharpen && on is null && file.Place != Place.AtSharpener;
+        if (dull)
+        {
+            yield return new("Sharpened", At(blade, "sharpen"), Main: true);
+        }
+
         if (blade.State == BladeState.Hold)
         {
             yield return new("Clear the hold", At(blade, "clear"), Main: true);
@@ -80,7 +86,7 @@ internal static class BladePageModel
         else if (blade.State != BladeState.Retired && on is null && file.Place != Place.AtSharpener
             && (blade.Record.On is { } saw && ShopAdvice.Fits(file, saw) ? saw : advice.Fitting(file).FirstOrDefault()) is { } fits)
         {
-            yield return new($"Put on {fits.Saw.Name}", $"/saws/{fits.Saw.Code}/swap?on={tag}", Main: true);
+            yield return new($"Put on {fits.Saw.Name}", $"/saws/{fits.Saw.Code}/swap?on={tag}", Main: !dull);
         }
 
         if (on is not null)
@@ -91,7 +97,11 @@ internal static class BladePageModel
 
         if (blade.State is not (BladeState.Broken or BladeState.Retired))
         {
-            yield return new(file.Place == Place.AtSharpener ? "Came back sharp" : "Sharpened", At(blade, "sharpen"));
+            if (!dull)
+            {
+                yield return new(file.Place == Place.AtSharpener ? "Came back sharp" : "Sharpened", At(blade, "sharpen"));
+            }
+
             yield return new("Inspected", At(blade, "inspect"));
             if (blade.State != BladeState.Hold)
             {

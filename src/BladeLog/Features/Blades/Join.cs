@@ -16,6 +16,8 @@ public sealed record JoinForm : PostedForm
 
     public string? ChildTag { get; init; }
 
+    public string? FitsNone { get; init; }
+
     public string? At { get; init; }
 }
 
@@ -38,7 +40,7 @@ internal static class Join
         var quality = read.Choice<WeldQuality>(nameof(form.Quality), form.Quality, "Say how good the joint is.") ?? default;
         var at = read.Time(nameof(form.At), form.At);
         Command command = string.IsNullOrWhiteSpace(form.ChildTag)
-            ? new RecordJoint(tag, loop ?? 0, form.Loop?.Trim(), quality, form.Method?.Trim(), at)
+            ? new RecordJoint(tag, loop ?? 0, form.Loop?.Trim(), quality, form.Method?.Trim(), at) { FitsNone = form.FitsNone is not null }
             : new CutDown(tag, form.ChildTag.Trim(), loop ?? 0, form.Loop?.Trim(), quality) { Method = form.Method?.Trim(), At = at };
         return read.IsGood
             ? await desk.Send(command, form, BladeForm.Of(string.IsNullOrWhiteSpace(form.ChildTag) ? tag : form.ChildTag), $"Joint of {Tags.Read(tag)}", state => Show(desk, tag, form, state))

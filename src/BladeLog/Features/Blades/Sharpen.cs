@@ -24,7 +24,7 @@ public sealed record SharpenForm : PostedForm
 
     public string? At { get; init; }
 
-    public string? WiderMeant { get; init; }
+    public string? AsMeasured { get; init; }
 }
 
 /// <summary>A grind in the shop: it counts, and what it took is measured after it.</summary>
@@ -35,7 +35,8 @@ internal static class Sharpen
     public static async Task<IResult> Post([FromForm] SharpenForm? form, Desk desk, string tag)
     {
         form ??= new();
-        if ((await desk.Shop()).Blade(Tags.Read(tag)) is null)
+        var advice = await desk.Advice();
+        if (advice.Now.Blade(Tags.Read(tag)) is not { } file)
         {
             return Results.NotFound();
         }
@@ -52,7 +53,8 @@ internal static class Sharpen
             EdgeAfterM = read.Length(nameof(form.EdgeAfter), form.EdgeAfter, Fields.EdgeRadius),
             PriceMinor = read.Money(nameof(form.Price), form.Price),
             At = read.Time(nameof(form.At), form.At),
-            WiderMeant = form.WiderMeant is not null,
+            LeastWidthM = advice.Of(file).Body.LeastWidth.Value,
+            AsMeasured = form.AsMeasured is not null,
         };
         return read.IsGood
             ? await desk.Send(command, form, BladeForm.Of(tag), $"Grind of {Tags.Read(tag)}", state => Show(desk, tag, form, state))

@@ -73,7 +73,7 @@ internal static class CutLog
         string onwards = hit is not null ? $"/blades/{hit}/inspect?nail=1" : saw is not null ? $"/saws/{saw.Saw.Code}/cut" : "/cuts";
         WriteResult result = await desk.Write(command, form.Op, onwards, form.Ended, form: JsonSerializer.Serialize(form));
         string what = cut is null ? $"{command.SpeciesTyped} on {command.Saw}" : $"cut {cut.Number} done";
-        return result is WriteResult.Done done ? desk.Saved(done, what) : await Page(desk, cut, saw, form, Unwritten.Of(result, read.Units, Field));
+        return result is WriteResult.Done done ? desk.Saved(done, what) : await Page(desk, cut, saw, form, Unwritten.Of(result, read.Units, Field), oneMoreTap: (result as WriteResult.Ask)?.OneMoreTap);
     }
 
     /// <summary>The field of the page that a recorded figure came from.</summary>
@@ -95,13 +95,14 @@ internal static class CutLog
         .OrderByDescending(c => c.Entry.AtUtc).ThenByDescending(c => c.EntryId)
         .FirstOrDefaultAsync();
 
-    private static async Task<IResult> Page(Desk desk, QueuedCut? cut, SawNow? saw, LogForm form, IReadOnlyList<Problem> problems, string? blade = null)
+    private static async Task<IResult> Page(Desk desk, QueuedCut? cut, SawNow? saw, LogForm form, IReadOnlyList<Problem> problems, string? blade = null, string? oneMoreTap = null)
     {
         ShopUnits units = await desk.Units();
         CutDone? last = saw is null ? null : await Last(desk, saw);
         LogModel model = new(cut, saw, form, problems, await desk.Shop(), units)
         {
             BladeAsked = blade,
+            OneMoreTap = oneMoreTap,
             // A feed that was only assumed is no figure of last time.
             Before = cut is not null ? LogForm.Of(cut, null, null, null, units)
                 : last is not null ? LogForm.Of(last, saw!, units) with { Feed = last.FeedGrade == FeedGrade.Assumed ? null : units.BareFeed(last.FeedMps) }

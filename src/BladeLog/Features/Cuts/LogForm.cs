@@ -48,6 +48,9 @@ public sealed record LogForm
 
     public string? Unfinished { get; init; }
 
+    /// <summary>One more tap: hardly so, and yet cut.</summary>
+    public string? AsTyped { get; init; }
+
     internal static LogForm Of(QueuedCut cut, SawNow? saw, double? speed, double? feed, ShopUnits units) => new()
     {
         Op = Guid.NewGuid().ToString(),
@@ -160,6 +163,7 @@ public sealed record LogForm
             Frozen = Frozen == "true",
             Dirt = dirt!.Value,
             Nail = Nail == "true",
+            AsTyped = AsTyped is not null,
             HoursFromCuts = !saw.Saw.HasHourMeter,
         };
     }
@@ -180,6 +184,9 @@ public sealed record LogModel(QueuedCut? Cut, SawNow? AtSaw, LogForm Form, IRead
     public string? LastSays { get; init; }
 
     public string? BladeAsked { get; init; }
+
+    /// <summary>The words of the button that records it although; null where nothing is asked.</summary>
+    public string? OneMoreTap { get; init; }
 
     public string Action => Cut is { } cut ? $"/cuts/{cut.Number}/done" : $"/saws/{AtSaw!.Saw.Code}/cut";
 

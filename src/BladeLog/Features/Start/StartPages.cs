@@ -98,10 +98,10 @@ internal static class StartPages
 
     private static IResult Trouble(ShopGate gate, HttpContext context)
     {
-        var sentence = gate.Trouble ?? "Something went wrong here and nothing was saved. Go back and try again; what you typed is still in the form.";
+        var sentence = gate.Trouble ?? "Something went wrong on this page. What is recorded stands. If you had just sent a form, the record tells whether it was kept, and a wrong entry can be struck out there.";
         if (context.Features.Get<IExceptionHandlerPathFeature>()?.Path is { } asked && IsJson(asked))
         {
-            return Results.Problem(title: "Something went wrong here and nothing was saved.", detail: $"Reference {context.TraceIdentifier}", statusCode: 500);
+            return Results.Problem(title: "Something went wrong here.", detail: $"Reference {context.TraceIdentifier}", statusCode: 500);
         }
 
         return Html.View<TroublePage, TroubleModel>(new("That did not work", sentence, context.TraceIdentifier), Chrome.Bare, gate.Trouble is null ? 500 : 503);

@@ -65,9 +65,11 @@ internal static class CostPages
     private static IEnumerable<(string Code, string Teeth, double Minor)> Teeth(ShopNow shop, ShopAdvice advice, SawNow saw) => shop.Blades
         .Where(b => b.Spec is { MostSharpenings: > 0, PriceMinor: not null, SharpeningPriceMinor: not null } && b.Spec.NewLoopM is { } loop && loop >= saw.Setup.LoopLeastM && loop <= saw.Setup.LoopMostM)
         .GroupBy(b => b.Spec.Code)
+        .Select(g => (g.Key, One: advice.Of(g.First())))
+        .Where(g => g.One.Edge.PathToDullKm > 0)
         .Select(g =>
         {
-            BladeAdvice one = advice.Of(g.First());
+            BladeAdvice one = g.One;
             Spec spec = one.File.Spec;
             return (g.Key, Said.Teeth(spec), Costs.ToothCost(
                 spec.SharpeningPriceMinor!.Value, spec.PriceMinor!.Value, spec.MostSharpenings!.Value, one.Edge.PathToDullKm, new Speed(4 / 60.0), new Length(saw.Setup.LoopM), new Speed(saw.Setup.UsualSpeedMps)));

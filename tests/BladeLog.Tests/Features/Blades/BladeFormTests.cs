@@ -19,7 +19,7 @@ public sealed class BladeFormTests
         using var app = await ShopApp.Sample();
         var asked = (await app.Fill("/blades/Q-11/sharpen", ("Kind", "Face"), ("Width", "12.9"))).Refused();
         Assert.Contains("does not make it wider", asked.Beside("Width"), StringComparison.Ordinal);
-        (await app.SendForm(asked.Page, "/blades/Q-11/sharpen", ("WiderMeant", "1"))).LeadsTo("/blades/Q-11");
+        (await app.SendForm(asked.Page, "/blades/Q-11/sharpen", ("AsMeasured", "1"))).LeadsTo("/blades/Q-11");
     }
 
     [Theory]

@@ -51,7 +51,11 @@ public sealed record SplitLabel(string Tag, string OtherTag, DateTime FromUtc, s
 public sealed record RecordPriorUse(
     string Tag, double UsedLow, double UsedHigh, double? WidthM = null, int? Sharpenings = null, string? Source = null, DateTime? At = null) : Command;
 
-public sealed record RecordJoint(string Tag, double LoopM, string? LoopTyped, WeldQuality Quality, string? Method = null, DateTime? At = null) : Command;
+public sealed record RecordJoint(string Tag, double LoopM, string? LoopTyped, WeldQuality Quality, string? Method = null, DateTime? At = null) : Command
+{
+    /// <summary>One more tap: no saw here takes it, and yet it is that long.</summary>
+    public bool FitsNone { get; init; }
+}
 
 /// <summary>A blade shortened for a smaller saw: a new blade with its own tag and joint; the parent is gone.</summary>
 public sealed record CutDown(string ParentTag, string ChildTag, double LoopM, string? LoopTyped, WeldQuality Quality) : Command

@@ -20,8 +20,12 @@ public sealed record RecordSharpening(string Tag, GrindKind Kind) : Command
 
     public DateTime? At { get; init; }
 
-    /// <summary>One more tap: wider than last time, and meant.</summary>
-    public bool WiderMeant { get; init; }
+    /// <summary>One more tap: hardly so, and yet measured.</summary>
+    public bool AsMeasured { get; init; }
+
+    /// <summary>What the advice takes as its least width. Not part of what is recorded.</summary>
+    [JsonIgnore]
+    public double? LeastWidthM { get; init; }
 }
 
 /// <summary>Kerf and set as measured outside a sharpening. The set is of both sides, or of both together.</summary>
@@ -73,9 +77,9 @@ public sealed record BackLine(string Tag, ReturnOutcome Outcome)
 
     public bool Retire { get; init; }
 
-    /// <summary>One more tap: narrower than its least width, and meant.</summary>
+    /// <summary>One more tap: hardly so, and yet measured.</summary>
     [JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingDefault)]
-    public bool NarrowMeant { get; init; }
+    public bool AsMeasured { get; init; }
 
     /// <summary>What the advice takes as its least width. Not part of what is recorded.</summary>
     [JsonIgnore]

@@ -134,6 +134,9 @@ public sealed record RecordCut(string Saw) : Command
 
     public Dirt Dirt { get; init; }
 
+    /// <summary>One more tap: hardly so, and yet cut.</summary>
+    public bool AsTyped { get; init; }
+
     public bool Nail { get; init; }
 
     /// <summary>The saw's hours come from its cuts: a run is recorded for the part no other run covers.</summary>

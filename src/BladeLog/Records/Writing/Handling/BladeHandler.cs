@@ -16,6 +16,7 @@ internal static class BladeHandler
         }
 
         w.RefuseUnless(tags.Distinct().Count() == tags.Count, "Tags", "The same tag is there twice.");
+        Check(w, spec, c.MeasuredThicknessM, c.MeasuredHrc);
         if (spec is null || !w.Stands)
         {
             return;
@@ -42,11 +43,19 @@ internal static class BladeHandler
         }
     }
 
+    /// <summary>A body measured far from what is printed on the box is another blade, or a slip.</summary>
+    private static void Check(WriteSession w, Spec? spec, double? thickness, double? hrc)
+    {
+        w.RefuseUnless(hrc is null or (>= 20 and <= 58), "MeasuredHrc", "The body of a band has 20 to 58 HRC.");
+        w.RefuseUnless(spec is null || thickness is null || (thickness > spec.ThicknessM / 2 && thickness < spec.ThicknessM * 2), "MeasuredThicknessM", $"The box says {w.Say(spec?.ThicknessM ?? 0)}: {w.Say(thickness ?? 0)} is another kind of blade. Measure again, or give it that specification.");
+    }
+
     public static async Task Handle(WriteSession w, EditBlade c)
     {
         var blade = await w.FindBlade(c.Tag);
         var spec = await FindSpec(w, c.Spec);
-        if (blade is null || spec is null || !await Edits.Guard(w, blade, c.Version, blade.Tag))
+        Check(w, spec, c.MeasuredThicknessM, c.MeasuredHrc);
+        if (blade is null || spec is null || !w.Stands || !await Edits.Guard(w, blade, c.Version, blade.Tag))
         {
             return;
         }

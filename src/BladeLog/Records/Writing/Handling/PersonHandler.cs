@@ -8,6 +8,7 @@ internal static class PersonHandler
     {
         await Check(w, c.Initials, c.Name);
         w.RefuseUnless(!await w.Db.People.AnyAsync(p => p.Initials == c.Initials.Trim()), "Initials", $"{c.Initials} is somebody already.");
+        await MayGive(w, c.Roles, []);
         if (!w.Stands)
         {
             return;
@@ -30,6 +31,7 @@ internal static class PersonHandler
             return;
         }
 
+        await MayGive(w, c.Roles, person.Roles.Where(r => r.UntilUtc is null || r.UntilUtc > w.Now).Select(r => r.Role));
         if (!w.Stands || !await Edits.Guard(w, person, c.Version, person.Initials))
         {
             return;
@@ -48,6 +50,16 @@ internal static class PersonHandler
 
         var held = person.Roles.Where(r => r.UntilUtc is null || r.UntilUtc > w.Now).Select(r => r.Role).ToHashSet();
         person.Roles.AddRange(c.Roles.Distinct().Where(r => !held.Contains(r)).Select(r => new PersonRole { Role = r, FromUtc = w.Now }));
+    }
+
+    /// <summary>Who may clear holds is said by those who may; the first of a shop by anyone.</summary>
+    private static async Task MayGive(WriteSession w, IEnumerable<Role> given, IEnumerable<Role> held)
+    {
+        if (given.Contains(Role.ClearHolds) && !held.Contains(Role.ClearHolds)
+            && await w.Db.People.AnyAsync(p => p.Active && p.Roles.Any(r => r.Role == Role.ClearHolds && r.FromUtc <= w.Now && (r.UntilUtc == null || r.UntilUtc > w.Now))))
+        {
+            w.RefuseUnlessIn(Role.ClearHolds);
+        }
     }
 
     private static Task Check(WriteSession w, string initials, string name)

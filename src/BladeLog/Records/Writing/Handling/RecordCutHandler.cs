@@ -5,6 +5,12 @@ namespace BladeLog.Records.Writing;
 
 internal static class RecordCutHandler
 {
+    // Asked about beyond these: engineering defaults.
+    private const double Hair = 1e-6;
+    private const double ThinM = 1e-3;
+    private const double FastMps = 1;
+    private const long LongMs = 12 * 3_600_000L;
+
     public static async Task Handle(WriteSession w, RecordCut c)
     {
         var saw = await w.FindSaw(c.Saw);
@@ -31,6 +37,11 @@ internal static class RecordCutHandler
         w.AnswerPath = $"/saws/{saw.Code}";
         var setup = await w.SetupAt(saw.Id, at);
         var speed = c.SpeedMps ?? setup.UsualSpeedMps;
+        if (!c.AsTyped)
+        {
+            Ask(w, c, saw, setup);
+        }
+
         var cut = w.Add(
             new CutDone
             {
@@ -73,5 +84,34 @@ internal static class RecordCutHandler
 
         // A run that ends with the cut counts it, so the window reaches a millisecond to either side.
         w.Touched.Window(saw.Id, at.AddMilliseconds(-1), at.AddMilliseconds(1));
+    }
+
+    /// <summary>A slip of a finger wears an edge out on paper: what the saw can hardly have done is asked about.</summary>
+    private static void Ask(WriteSession w, RecordCut c, Saw saw, SawSetup setup)
+    {
+        const string Tap = "It was so: record it";
+        if (c.HeightM > setup.CutHeightMostM + Hair)
+        {
+            w.Ask(nameof(c.HeightM), $"{saw.Name} opens to {w.Say(setup.CutHeightMostM)}; that is {w.Say(c.HeightM)}.", Tap);
+        }
+        else if (c.HeightM < ThinM)
+        {
+            w.Ask(nameof(c.HeightM), $"That is {w.Say(c.HeightM)} of wood along the blade.", Tap);
+        }
+
+        if (c.LengthM > (setup.LongestPieceM ?? double.PositiveInfinity) + Hair)
+        {
+            w.Ask(nameof(c.LengthM), $"The longest piece that goes past {saw.Name} is {w.Say(setup.LongestPieceM!.Value)}; that is {w.Say(c.LengthM)}.", Tap);
+        }
+
+        if (c.FeedMps > FastMps)
+        {
+            w.Ask(nameof(c.FeedMps), $"That is {c.FeedMps * 60:0} m a minute.", Tap);
+        }
+
+        if (CutSums.Milliseconds(c.LengthM, c.Pieces, c.FeedMps) is var ms && ms > LongMs)
+        {
+            w.Ask(nameof(c.Pieces), $"So many pieces at that feed are {ms / 3_600_000.0:0} hours of sawing.", Tap);
+        }
     }
 }

@@ -3,9 +3,6 @@ namespace BladeLog.Records.Writing;
 /// <summary>Kerf and set measured outside a sharpening.</summary>
 internal static class RecordKerfHandler
 {
-    /// <summary>A kerf of more bodies than this is asked about: no set or tip is as wide.</summary>
-    private const double WideInBodies = 3;
-
     public static async Task Handle(WriteSession w, RecordKerf c)
     {
         var blade = await w.FindBlade(c.Tag);
@@ -24,7 +21,7 @@ internal static class RecordKerfHandler
 
         var thickness = blade.MeasuredThicknessM ?? blade.Spec.ThicknessM;
         w.RefuseUnless(c.KerfM is null || c.KerfM > thickness, nameof(c.KerfM), $"The kerf must be wider than the body is thick, {w.Say(thickness)}.");
-        if (w.Stands && !c.WideMeant && (c.KerfM ?? thickness + both!.Value) > WideInBodies * thickness)
+        if (w.Stands && !c.WideMeant && (c.KerfM ?? thickness + both!.Value) > GrindRules.WideInBodies * thickness)
         {
             w.Ask(c.KerfM is null ? nameof(c.SetBothM) : nameof(c.KerfM), $"That is a kerf of {w.Say(c.KerfM ?? thickness + both!.Value)} by a body of {w.Say(thickness)}.", "It is as wide as that: record it");
         }

@@ -12,10 +12,11 @@ internal static class RecordSharpeningHandler
         }
 
         var now = await w.NowOf(blade);
-        Check(w, blade, now, c.WidthM, c.GulletM, c.KerfM, "");
-        if (c.WidthM > now.WidthM && !c.WiderMeant)
+        var ground = new Ground(c.WidthM, c.GulletM, c.KerfM, c.EdgeAfterM, c.LeastWidthM ?? blade.Spec.LeastWidthM);
+        await GrindRules.Refuse(w, blade, now, ground, "");
+        if (w.Stands && !c.AsMeasured)
         {
-            w.Ask(nameof(c.WidthM), $"{blade.Tag} was {w.Say(now.WidthM)} wide before; grinding does not make it wider.", "It was measured wrongly before: record it");
+            GrindRules.Ask(w, blade, now, ground, "");
         }
 
         w.Add(
@@ -34,15 +35,5 @@ internal static class RecordSharpeningHandler
             at);
         w.Touched.Blades.Add(blade.Id);
         w.AnswerPath = $"/b/{blade.Tag}";
-    }
-
-    /// <summary>What cannot be after a grind.</summary>
-    public static void Check(WriteSession w, Blade blade, BladeNow now, double? widthM, double? gulletM, double? kerfM, string line)
-    {
-        var width = widthM ?? now.WidthM;
-        w.RefuseUnless(widthM is null or > 0, $"{line}WidthM", "The width must be above zero.");
-        w.RefuseUnless(gulletM is null || gulletM < width, $"{line}GulletM", "The gullet must be less deep than the blade is wide.");
-        var thickness = blade.MeasuredThicknessM ?? blade.Spec.ThicknessM;
-        w.RefuseUnless(kerfM is null || kerfM > thickness, $"{line}KerfM", "The kerf must be wider than the body is thick.");
     }
 }

@@ -50,6 +50,7 @@ internal static class SpecHandler
         w.RefuseUnless(s.Code.Length > 0, "Code", "Give the specification a code.");
         w.RefuseUnless(s.GulletDepthM is null || s.GulletDepthM < s.WidthM, "GulletDepthM", "The gullet must be less deep than the blade is wide.");
         w.RefuseUnless(s.GulletAreaM2 is null || s.GulletDepthM is null || s.GulletAreaM2 < s.PitchCoarseM * s.GulletDepthM, "GulletAreaM2", "A gullet has less area than pitch times its depth. Check all three.");
+        w.RefuseUnless(s.BodyHrc is null or (>= 20 and <= 58), "BodyHrc", "The body of a band has 20 to 58 HRC.");
         w.RefuseUnless(s.ThicknessM < s.WidthM, "ThicknessM", "The blade must be wider than it is thick.");
         w.RefuseUnless(s.KerfM is null || s.KerfM > s.ThicknessM, "KerfM", "The kerf must be wider than the body is thick.");
         w.RefuseUnless(s.LeastWidthM is null || s.LeastWidthM <= s.WidthM, "LeastWidthM", "The least width must not be more than the width when new.");

@@ -49,15 +49,16 @@ internal static class TakeBackHandler
 
         await HereAfterAll(w, c, blade, before, batch);
         var now = await w.NowOf(blade);
-        RecordSharpeningHandler.Check(w, blade, now, c.WidthM, c.GulletM, c.KerfM, field);
+        var ground = new Ground(c.WidthM, c.GulletM, c.KerfM, c.EdgeAfterM, c.Retire ? null : c.LeastWidthM ?? blade.Spec.LeastWidthM);
+        await GrindRules.Refuse(w, blade, now, ground, field);
         if (!w.Stands)
         {
             return;
         }
 
-        if (c.Outcome == ReturnOutcome.Sharpened && !c.Retire && !c.NarrowMeant && (c.LeastWidthM ?? blade.Spec.LeastWidthM) is { } least && c.WidthM < least)
+        if (c.Outcome != ReturnOutcome.Lost && !c.AsMeasured)
         {
-            w.Ask($"{field}WidthM", $"{blade.Tag} came back {w.Say(c.WidthM.Value)} wide; its least width is {w.Say(least)}. Retire it with this, or record it as it is: it may use up this edge and is ground no more.", "It is that narrow: record it");
+            GrindRules.Ask(w, blade, now, ground, field);
         }
 
         w.Add(new BatchReturn { LineId = line.EntryId, Outcome = c.Outcome, WidthM = c.WidthM }, at);
