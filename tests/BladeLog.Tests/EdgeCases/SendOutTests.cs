@@ -17,6 +17,17 @@ public sealed class SendOutTests
         Assert.Equal(Place.Rack, await PlaceOf(app, "Q-11"));
     }
 
+    [Fact]
+    public async Task A_whole_bundle_comes_back_in_one_tap_but_for_what_is_said_otherwise()
+    {
+        using var app = await Sent();
+        (await Back(app, ("Lines[1].Outcome", "Rejected"), ("Lines[0].Width", "12.5"), ("All", "1"))).LeadsTo("/bench");
+        await using var db = app.NewContext();
+        Assert.Equal(ReturnOutcome.Sharpened, (await db.BatchReturns.SingleAsync(r => r.Line.Blade.Tag == "Q-11" && r.Line.Batch.Number == "B-032")).Outcome);
+        Assert.Equal(ReturnOutcome.Rejected, (await db.BatchReturns.SingleAsync(r => r.Line.Blade.Tag == "Q-13" && r.Line.Batch.Number == "B-032")).Outcome);
+        Assert.Equal(0.0125, (await db.BladesNow.SingleAsync(n => db.Blades.Any(b => b.Id == n.BladeId && b.Tag == "Q-11"))).WidthM, 9);
+    }
+
     [Theory]
     [InlineData("Z-77", "Z-77 is no blade of this shop. Lay it aside")]
     [InlineData("q-09", "Q-09 was not sent out, so far as is written.")]

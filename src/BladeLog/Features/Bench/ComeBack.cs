@@ -29,6 +29,9 @@ public sealed record ComeBackForm : PostedForm
 
     public string? At { get; init; }
 
+    /// <summary>Of which nothing is said came back sharpened.</summary>
+    public string? All { get; init; }
+
     /// <summary>One more tap: hardly so, and yet measured.</summary>
     public string? AsMeasured { get; init; }
 }
@@ -77,6 +80,11 @@ internal static class ComeBack
         var read = new FormReading(await desk.Units(), desk.Now);
         var advice = await desk.Advice();
         var lines = new List<BackLine>();
+        if (form.All is not null)
+        {
+            form = form with { Lines = [.. (form.Lines ?? []).Select(l => string.IsNullOrEmpty(l.Outcome) ? l with { Outcome = nameof(ReturnOutcome.Sharpened) } : l)], All = null };
+        }
+
         var sent = form.Lines ?? [];
         for (var i = 0; i < sent.Count; i++)
         {
