@@ -57,7 +57,7 @@ public sealed class MovingAndWeldingTests
         await shop.Do(SwapTests.On("S1", "Q-1", 1));
         await shop.Do(new Swap("S1") { At = Day.AddHours(2) });
         await shop.Do(new RecordJoint("Q-1", 3.97, "3970", WeldQuality.Good, At: Day.AddHours(3)));
-        Assert.StartsWith("Q-1 is 3,970 mm long; S1 takes 3,980 mm to 4,020 mm.", await shop.Asked(SwapTests.On("S1", "Q-1", 4)), StringComparison.Ordinal);
+        Assert.StartsWith("Q-1 is 3,970 mm long; First takes 3,980 mm to 4,020 mm.", await shop.Asked(SwapTests.On("S1", "Q-1", 4)), StringComparison.Ordinal);
     }
 
     [Fact]
