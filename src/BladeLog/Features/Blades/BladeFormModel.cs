@@ -39,6 +39,11 @@ public sealed record BladeFormModel<TForm>(TForm Form, FormState State, BladeFil
     /// <summary>Saws to choose from where it is on none: those it fits, else all.</summary>
     public IReadOnlyList<Answer> Saws { get; init; } = [];
 
+    /// <summary>What each field was told last time, as it is typed there; none where nothing is known.</summary>
+    public IReadOnlyDictionary<string, string?> LastTime { get; init; } = new Dictionary<string, string?>();
+
+    public string? Last(string field) => LastTime.GetValueOrDefault(field);
+
     private string Where => File.Place switch
     {
         Place.OnSaw => "on a saw",

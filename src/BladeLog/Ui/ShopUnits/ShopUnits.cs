@@ -129,12 +129,8 @@ public sealed partial record ShopUnits
 
     private static string Quote(string typed) => $"\"{(typed.Length > 40 ? typed[..40] + "…" : typed)}\"";
 
-    /// <summary>A number with at most so many decimals, no zeros behind, no grouping: it reads back as itself.</summary>
-    private static string Num(double value, int decimals)
-    {
-        var rounded = Math.Round(value, decimals, MidpointRounding.AwayFromZero);
-        return (rounded == 0 ? 0 : rounded).ToString("0." + new string('#', decimals), CultureInfo.InvariantCulture);
-    }
+    private static string Num(double value, int decimals) =>
+        double.IsFinite(value) ? Figures.Plain(value, decimals) : value.ToString(CultureInfo.InvariantCulture);
 
     private static string With(double value, int decimals, string unit) => Num(value, decimals) + Gap + unit;
 }
