@@ -32,6 +32,10 @@ public sealed class SettingDefinition(
     /// <summary>The chapter of the Setup page: the part of the key before the full stop.</summary>
     public string Chapter => Key[..Key.IndexOf('.', StringComparison.Ordinal)];
 
+    /// <summary>"14 days", "1 blade": a value with its unit.</summary>
+    public string Say(double value) => string.Create(
+        CultureInfo.InvariantCulture, $"{value:0.######} {(value == 1 && Unit is "blades" or "days" or "weeks" ? Unit[..^1] : Unit)}").Trim();
+
     /// <summary>Why a value cannot be taken; null when it can.</summary>
     public string? Refuse(double value) => value >= Low && value <= High
         ? null

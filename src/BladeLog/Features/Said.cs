@@ -73,7 +73,16 @@ internal static class Said
     {
         ArgumentNullException.ThrowIfNull(cut);
         ArgumentNullException.ThrowIfNull(words);
-        return $"{cut.SpeciesTyped} {words.Length(cut.HeightM).Replace(' ', Figures.Glue)}";
+        return $"{cut.SpeciesTyped} {Height(cut, words)}";
+    }
+
+    /// <summary>"50 mm"; of a bevel "50 mm, 54 mm along the blade at this bevel", where that reads otherwise.</summary>
+    public static string Height(QueuedCut cut, Wording words)
+    {
+        ArgumentNullException.ThrowIfNull(cut);
+        ArgumentNullException.ThrowIfNull(words);
+        string thick = words.Length(cut.HeightM).Replace(' ', Figures.Glue), along = words.Length(cut.HeightM / Math.Cos(cut.BevelRad)).Replace(' ', Figures.Glue);
+        return along == thick ? thick : $"{thick}, {along} along the blade at this bevel";
     }
 
     public static string When(DateTime utc, DateTime now, ShopUnits units)

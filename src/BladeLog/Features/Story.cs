@@ -43,7 +43,7 @@ internal sealed class Story(ShopNow shop, ShopUnits units, IReadOnlyDictionary<i
     /// <summary>What a fact says, without its full stop.</summary>
     public string Says(Fact fact, About about) => fact switch
     {
-        Mount m => $"{On(m, about)}{Tension(m.TensionPa)}{(m.InsideOut ? ", inside out" : "")}{After(", although ", m.Although)}",
+        Mount m => $"{On(m, about)}{Tension(m.TensionPa)}{(m.InsideOut ? ", inside out" : "")}{After(", against the advice: ", m.Although)}",
         Dismount d => $"{Off(d.Mount, about)}, {StoryWords.Off(d.Reason)}",
         Slack s => AtSaw(s.SawId, about, $"{words.Tension} {(s.LetOff ? "let off" : "put on")}"),
         StartCheck c => AtSaw(c.SawId, about, $"looked at before starting: {CheckWords.Says(c, units)}"),

@@ -75,7 +75,7 @@ public sealed class AddBladeTests
         Assert.Contains("more than 0", (await app.Fill("/blades/new", ("Tags", "U-1"), ("Spec", "B5"), ("UsedLow", "0"), ("UsedHigh", "0"))).Refused().Beside("UsedHigh"), StringComparison.Ordinal);
         (await app.Fill("/blades/new", ("Tags", "U-1"), ("Spec", "B5"), ("Used", "true"))).LeadsTo("/blades/U-1");
         var page = await app.GetPage("/blades/U-1");
-        Assert.Contains("Used 0.20 to 0.60 of the life", SampleApp.Text(page.Body), StringComparison.Ordinal);
+        Assert.Contains("it had used 0.20 to 0.60 of a life", SampleApp.Text(page.Body), StringComparison.Ordinal);
         Assert.Empty(page.QuerySelector("svg.life")!.QuerySelectorAll(".used"));
         Assert.Single(page.QuerySelector("svg.life")!.QuerySelectorAll(".hatched"));
     }

@@ -59,7 +59,7 @@ public sealed class MovingAndWeldingTests
         var shorter = new RecordJoint("Q-1", 3.97, "3970", WeldQuality.Good, At: Day.AddHours(3));
         Assert.Contains("No saw here takes a loop of 3,970 mm", await shop.Asked(shorter), StringComparison.Ordinal);
         await shop.Do(shorter with { FitsNone = true });
-        Assert.StartsWith("Q-1 is 3,970 mm long; S1 takes 3,980 mm to 4,020 mm.", await shop.Asked(SwapTests.On("S1", "Q-1", 4)), StringComparison.Ordinal);
+        Assert.StartsWith("Q-1 is 3,970 mm long; First takes 3,980 mm to 4,020 mm.", await shop.Asked(SwapTests.On("S1", "Q-1", 4)), StringComparison.Ordinal);
     }
 
     [Fact]

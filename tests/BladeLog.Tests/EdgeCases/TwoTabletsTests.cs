@@ -33,7 +33,7 @@ public sealed class TwoTabletsTests
             on = await Pair(
                 now,
                 n => new Swap("S1") { OnTag = waiting[n], SawVersion = saw, At = now },
-                n => $"put {waiting[n]} on S1",
+                n => $"put {waiting[n]} on First",
                 n => waiting[n]);
             var price = await Pair(
                 now.AddMinutes(1),

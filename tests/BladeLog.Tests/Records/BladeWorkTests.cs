@@ -37,7 +37,7 @@ public class BladeWorkTests
     {
         using var shop = await TempShop.WithSaws();
         await shop.Do(SwapTests.On("S1", "Q-3", 0));
-        Assert.Contains("Q-3 is on S1", await shop.Refused(new SendBatch("B-1", "a service", ["Q-1", "Q-3"], At: Day.AddHours(1))), StringComparison.Ordinal);
+        Assert.Contains("Q-3 is on First", await shop.Refused(new SendBatch("B-1", "a service", ["Q-1", "Q-3"], At: Day.AddHours(1))), StringComparison.Ordinal);
         await shop.Do(new SendBatch("B-1", "a service", ["Q-1", "Q-2"], At: Day.AddHours(1)));
         Assert.Equal("Q-1 is away in batch B-1 already.", await shop.Refused(new SendBatch("B-2", "another", ["Q-1"], At: Day.AddHours(2))));
         Assert.Equal("Q-3 was not in batch B-1: it is a stranger in the bundle.", await shop.Refused(new TakeBack("B-1", [new BackLine("Q-3", ReturnOutcome.Sharpened)])));
@@ -100,7 +100,7 @@ public class BladeWorkTests
         await shop.Do(SwapTests.On("S1", "Q-1", 0));
         var swap = await shop.Do(SwapTests.On("S1", "Q-2", 4));
         Assert.Equal(
-            $"Void first: entry {swap + 1}, Q-2 is on S1 since 2 Mar 2026 12:00 (entry {swap + 1}).",
+            $"Void first: entry {swap + 1}, Q-2 is on First since 2 Mar 2026 12:00 (entry {swap + 1}).",
             await shop.Refused(new VoidEntry(swap, "x")));
     }
 
@@ -118,7 +118,7 @@ public class BladeWorkTests
         // A v/(f L) = 0.1 · 12 · 20 / (0.01 · L).
         var paths = await shop.Ask(db => db.WoodPaths.OrderBy(p => p.MountId).Select(p => p.PathMm).ToListAsync());
         Assert.Equal([600_000, (long)Math.Round(2400 / 3.98 * 1000)], paths);
-        Assert.Equal("Q-1 is 3,980 mm long; a joint only makes it shorter. | Q-1 is on S1 since 2 Mar 2026 12:00 (entry " +
+        Assert.Equal("Q-1 is 3,980 mm long; a joint only makes it shorter. | Q-1 is on First since 2 Mar 2026 12:00 (entry " +
             $"{await shop.Ask(db => db.Mounts.MaxAsync(m => m.EntryId))}): take it off first.", await shop.Refused(new RecordJoint("Q-1", 3.99, null, WeldQuality.Good, At: Day.AddHours(6))));
     }
 

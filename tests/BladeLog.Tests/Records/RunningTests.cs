@@ -67,10 +67,10 @@ public class RunningTests
     public async Task Typed_hours_beyond_the_clock_are_refused_and_summed_with_others()
     {
         using var shop = await TempShop.WithSaws();
-        Assert.Equal("S1 would have run 5 h in the 4 h from 2 Mar 2026 08:00 to 2 Mar 2026 12:00.", await shop.Refused(Typed(0, 4, 5)));
+        Assert.Equal("First would have run 5 h in the 4 h from 2 Mar 2026 08:00 to 2 Mar 2026 12:00.", await shop.Refused(Typed(0, 4, 5)));
         var first = await shop.Do(Typed(0, 4, 2));
         await shop.Do(Typed(0, 4, 2));
-        Assert.StartsWith("S1 would have run 4.5 h in the 4 h", await shop.Refused(Typed(0, 4, 0.5)), StringComparison.Ordinal);
+        Assert.StartsWith("First would have run 4.5 h in the 4 h", await shop.Refused(Typed(0, 4, 0.5)), StringComparison.Ordinal);
         Assert.Contains($"entry {first}", await shop.Refused(Typed(0, 4, 0.5)), StringComparison.Ordinal);
     }
 
@@ -80,7 +80,7 @@ public class RunningTests
         using var shop = await TempShop.WithSaws();
         var timer = await shop.Do(Typed(0, 4, 1) with { Source = RunSource.Timer });
         Assert.Equal(
-            $"S1 has counted hours from 2 Mar 2026 08:00 to 2 Mar 2026 12:00 already (entry {timer}).",
+            $"First has counted hours from 2 Mar 2026 08:00 to 2 Mar 2026 12:00 already (entry {timer}).",
             await shop.Refused(Typed(3, 6, 1) with { Source = RunSource.Logger }));
     }
 

@@ -32,7 +32,7 @@ public class SwapTests
     {
         using var shop = await TempShop.WithSaws();
         var entry = await shop.Do(On("S1", "Q-1", 0));
-        Assert.Equal($"Q-1 is on S1 since 2 Mar 2026 08:00 (entry {entry}): put that right first.", await shop.Refused(On("S2", "Q-1", 2)));
+        Assert.Equal($"Q-1 is on First since 2 Mar 2026 08:00 (entry {entry}): put that right first.", await shop.Refused(On("S2", "Q-1", 2)));
     }
 
     [Fact]
@@ -40,7 +40,7 @@ public class SwapTests
     {
         using var shop = await TempShop.WithSaws();
         var entry = await shop.Do(On("S1", "Q-1", 4));
-        Assert.Equal($"Q-1 is on S1 since 2 Mar 2026 12:00 (entry {entry}): put that right first.", await shop.Refused(On("S1", "Q-2", 2)));
+        Assert.Equal($"Q-1 is on First since 2 Mar 2026 12:00 (entry {entry}): put that right first.", await shop.Refused(On("S1", "Q-2", 2)));
 
         await shop.Do(On("S1", "Q-2", 2) with { Until = TempShop.Day.AddHours(4) });
         Assert.Empty(await shop.Ask(Verify.Run));
@@ -51,8 +51,8 @@ public class SwapTests
     {
         using var shop = await TempShop.WithSaws();
         await shop.Do(On("S1", "Q-1", 0));
-        Assert.Equal("Q-1 is on S1 already.", await shop.Refused(On("S1", "Q-1", 2)));
-        Assert.Equal("No blade was on S2 at 2 Mar 2026 10:00.", await shop.Refused(new Swap("S2") { At = TempShop.Day.AddHours(2) }));
+        Assert.Equal("Q-1 is on First already.", await shop.Refused(On("S1", "Q-1", 2)));
+        Assert.Equal("No blade was on Second at 2 Mar 2026 10:00.", await shop.Refused(new Swap("S2") { At = TempShop.Day.AddHours(2) }));
     }
 
     [Fact]
@@ -70,7 +70,7 @@ public class SwapTests
         using var shop = await TempShop.WithSaws();
         await shop.Do(new AddSaw("S3", "Small", false, TempShop.Setup(2.6), TempShop.Day.AddDays(-1)));
         var swap = On("S3", "Q-1", 0);
-        Assert.Equal("Q-1 is 4,000 mm long; S3 takes 2,580 mm to 2,620 mm. -> It is on the saw: record it", await shop.Asked(swap));
+        Assert.Equal("Q-1 is 4,000 mm long; Small takes 2,580 mm to 2,620 mm. -> It is on the saw: record it", await shop.Asked(swap));
         Assert.Equal(0, await shop.Ask(db => db.Mounts.CountAsync()));
 
         var said = swap with { Although = "measured with the take-up packed" };
@@ -107,7 +107,7 @@ public class SwapTests
         Assert.Single(both.OfType<WriteResult.Done>());
         var clash = Assert.Single(both.OfType<WriteResult.Clash>());
         var first = both[0] is WriteResult.Done;
-        Assert.Equal((first ? "OT" : "JP", shop.Now, first ? "put Q-1 on S1" : "put Q-2 on S1"), (clash.Who, clash.When, clash.What));
+        Assert.Equal((first ? "OT" : "JP", shop.Now, first ? "put Q-1 on First" : "put Q-2 on First"), (clash.Who, clash.When, clash.What));
         Assert.Equal(1, await shop.Ask(db => db.OnSaws.CountAsync()));
     }
 

@@ -30,6 +30,14 @@ public static class LifeWords
         _ => "Flexing will not end it.",
     };
 
+    /// <summary>Why a chance is not the mark's: the mark is of the median life with the scatter between blades, the chance of all that is not known.</summary>
+    public static string ChanceCounts(LevelPrior level)
+    {
+        ArgumentNullException.ThrowIfNull(level);
+        string factor = Math.Exp(level.LnLevelSd).ToString("0.#", System.Globalization.CultureInfo.InvariantCulture);
+        return $"This chance also counts that the handbook may be off in this shop, by a factor of {factor}; the 1-in-10 mark counts only how blades differ.";
+    }
+
     public static string ThicknessToWheel(double ratio) => $"Its body is 1/{Wording.Number(1 / ratio, 0)} of the smallest wheel.";
 
     /// <summary>"on hold: crack 2.6 mm at a gullet".</summary>
@@ -65,6 +73,7 @@ public static class LifeWords
         ArgumentNullException.ThrowIfNull(words);
         string step = blade.State switch
         {
+            BladeState.Retired or BladeState.Broken when blade.File.CutDownTo is { } child => $"Nothing: it was cut down as {child}.",
             BladeState.Retired => "Nothing: it is retired.",
             BladeState.Broken => "Scrap it, or cut it down and weld it.",
             BladeState.Hold => "Do not use it until a named person clears it.",
@@ -122,7 +131,7 @@ public static class LifeWords
 
         if (life.UnknownHistory)
         {
-            yield return $"Its history is unknown: used {Wording.Share(life.UsedLow)} to {Wording.Share(life.UsedHigh)} of the life half of such blades reach.";
+            yield return $"Its history is unknown: it has used {Wording.Share(life.UsedLow)} to {Wording.Share(life.UsedHigh)} of a life. 1 is where half of such blades have broken.";
         }
         else if (blade.PastRetireMark)
         {

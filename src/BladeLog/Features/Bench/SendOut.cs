@@ -26,7 +26,7 @@ public sealed record SendOutForm : PostedForm
 /// <summary>A blade that may go, with what speaks against paying for it.</summary>
 public sealed record SendOutRow(string Tag, string Why, bool NoGrind);
 
-public sealed record SendOutModel(SendOutForm Form, FormState State, IReadOnlyList<SendOutRow> Rows, IReadOnlyList<string> Services);
+public sealed record SendOutModel(SendOutForm Form, FormState State, IReadOnlyList<SendOutRow> Rows, IReadOnlyList<string> Services, IReadOnlyList<string> OnSaws);
 
 /// <summary>Blades go to the sharpening service in one batch.</summary>
 internal static class SendOut
@@ -65,7 +65,9 @@ internal static class SendOut
                     : b.Grind.Pays ? $"edge {Wording.Edge(b.Edge.RadiusM)}" : LifeWords.NoGrind(b, advice.Settings, advice.Words),
                 !b.Grind.Pays));
         var services = await desk.Db.Batches.AsNoTracking().Select(b => b.Service).Distinct().ToListAsync();
-        return await desk.Page<SendOutPage, SendOutModel>(new(form, state, [.. rows], services), state.Status);
+        var onSaws = advice.Now.Blades.Where(b => b.Place == Place.OnSaw).Select(advice.Of).Where(b => b.State == BladeState.Sharpen).OrderBy(b => b.File.Blade.Tag, StringComparer.Ordinal)
+            .Select(b => $"{b.File.Blade.Tag} on {advice.Now.Saws.First(s => s.Saw.Id == b.File.SawId).Saw.Name}");
+        return await desk.Page<SendOutPage, SendOutModel>(new(form, state, [.. rows], services, [.. onSaws]), state.Status);
     }
 
     /// <summary>B-031 is followed by B-032.</summary>

@@ -36,6 +36,9 @@ public sealed record BladeFormModel<TForm>(TForm Form, FormState State, BladeFil
     /// <summary>Further words a page needs: names to call, codes to choose from.</summary>
     public IReadOnlyList<string> Names { get; init; } = [];
 
+    /// <summary>Saws to choose from where it is on none: those it fits, else all.</summary>
+    public IReadOnlyList<Answer> Saws { get; init; } = [];
+
     /// <summary>What each field was told last time, as it is typed there; none where nothing is known.</summary>
     public IReadOnlyDictionary<string, string?> LastTime { get; init; } = new Dictionary<string, string?>();
 
@@ -71,6 +74,7 @@ internal static class BladeForm
             Who = (await desk.Who())?.Initials,
             People = await desk.Db.People.AsNoTracking().Where(p => p.Active).OrderBy(p => p.Initials).Select(p => p.Initials).ToListAsync(),
             KerfSays = KerfWords.Of(file, advice.Settings, advice.Words),
+            Saws = [.. (advice.Fitting(file).Any() ? advice.Fitting(file) : shop.Saws.Where(s => s.Saw.Active)).Select(s => new Answer(s.Saw.Code, s.Saw.Name))],
             NoGrind = blade.Grind.Pays ? null : LifeWords.NoGrind(blade, advice.Settings, advice.Words),
         };
         return await desk.Page<TView, BladeFormModel<TForm>>(with is null ? model : await with(model), state.Status);

@@ -17,7 +17,7 @@ internal static class BladePageModel
         return new BladeModel
         {
             Tag = file.Blade.Tag,
-            Title = $"{LowerFirst(blade.Advice.Do).TrimEnd('.')}",
+            Title = file.CutDownTo is { } child && blade.State is BladeState.Broken or BladeState.Retired ? $"cut down as {child}" : blade.State == BladeState.Retired ? "retired" : LowerFirst(blade.Advice.Do).TrimEnd('.'),
             Lede = blade.State == BladeState.Hold ? [.. blade.Advice.Because.Take(1)] : blade.Advice.Because,
             State = StateOf(blade),
             Teeth = Drawn.Teeth(blade.Body, file.Spec),
@@ -43,7 +43,7 @@ internal static class BladePageModel
             WorkedLimits = WorkedOut.Rows(WorkedOut.Grinding(blade)),
             Worked = WorkedOut.Rows(WorkedOut.Tension(blade, null, advice.Words), WorkedOut.Push(blade, null)),
             Actions = [.. Actions(blade, advice)],
-            Last = blade.State == BladeState.Retired ? null : new BladeAction($"Retire {file.Blade.Tag}", At(blade, "retire")),
+            Last = blade.State == BladeState.Retired || file.CutDownTo is not null ? null : new BladeAction($"Retire {file.Blade.Tag}", At(blade, "retire")),
             Cautions = [.. Cautions(blade)],
             Story = [.. past.Lines.Select(p => story.Line(p, About.Blade))],
             More = past.More,
@@ -74,6 +74,10 @@ internal static class BladePageModel
         if (blade.State == BladeState.Hold)
         {
             yield return new("Clear the hold", At(blade, "clear"), Main: true);
+        }
+        else if (file.CutDownTo is { } child)
+        {
+            yield return new($"Go to {child}", $"/blades/{child}", Main: true);
         }
         else if (blade.State == BladeState.Broken)
         {
@@ -147,7 +151,7 @@ internal static class BladePageModel
         }
         else if (blade.State is BladeState.Broken or BladeState.Retired)
         {
-            if (blade.File.Retirement?.CutUp != true)
+            if (blade.File.Retirement?.CutUp != true && blade.File.CutDownTo is null)
             {
                 yield return new("Cut it up and throw it away as sharp scrap; a wide one with two people.", "Common practice.");
             }

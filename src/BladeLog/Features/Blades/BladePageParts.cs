@@ -46,14 +46,14 @@ internal sealed class BladeParts(BladeAdvice blade, ShopAdvice advice, ShopUnits
             return new LifePart(
                 "Life: its history is unknown",
                 null,
-                [$"Used {Wording.Share(file.PriorUse!.UsedLow)} to {Wording.Share(file.PriorUse.UsedHigh)} of the life half of such blades reach when it came. Here it has run {Figures.With(Figures.Hours(file.Hours), "h")} since.", "It is looked at before each mount and left out of what your shop learns."],
+                [$"When it came it had used {Wording.Share(file.PriorUse!.UsedLow)} to {Wording.Share(file.PriorUse.UsedHigh)} of a life; 1 is where half of such blades have broken. Here it has run {Figures.With(Figures.Hours(file.Hours), "h")} since.", "It is looked at before each mount and left out of what your shop learns."],
                 "As it was told, not measured.")
             {
                 Range = (Math.Min(1, life.UsedLow), Math.Min(1, life.UsedHigh), advice.Settings.WatchMark),
             };
         }
 
-        string? under = life is { On: { } on, Rate: { } rate } ? $"Hours as run on {on.Saw.Name}, {Figures.Number(rate.Result.BendsPerHour)} bends an hour" : null;
+        string? under = life is { On: { } on, Rate: { } rate } ? $"Hours as run on {on.Saw.Name}, {Figures.Number(rate.Result.BendsPerHour)} bends an hour{Worth(on)}" : null;
         List<string> sentences = [];
         if (life.Verdict is { } verdict && verdict != LifeVerdict.Finite)
         {
@@ -67,12 +67,12 @@ internal sealed class BladeParts(BladeAdvice blade, ShopAdvice advice, ShopUnits
 
         if (life.Used.Blade > 0 && life.HoursShown)
         {
-            sentences.Add($"Used {Figures.Used(life.Used.Blade, life.UsedLow, life.UsedHigh)} of the life half of such blades reach.");
+            sentences.Add($"Used {Figures.Used(life.Used.Blade, life.UsedLow, life.UsedHigh)} of a life; 1 is where half of such blades have broken.");
         }
 
         if (Usable && life is { HoursShown: true, BreakChance: { } chance })
         {
-            sentences.Add($"{Figures.ChanceSentence(chance)} to break in the next {Wording.Hours(advice.Settings[LifeSettings.ChanceHours]).Replace(' ', Figures.Glue)}.");
+            sentences.Add($"{Figures.ChanceSentence(chance)} to break in the next {Wording.Hours(advice.Settings[LifeSettings.ChanceHours]).Replace(' ', Figures.Glue)}. {LifeWords.ChanceCounts(advice.Level)}");
         }
 
         if (Usable && blade.PastRetireMark is false && life.HoursToRetire is { } retire && life.Reckoned.Blade >= advice.Settings.WatchMark)
@@ -81,6 +81,15 @@ internal sealed class BladeParts(BladeAdvice blade, ShopAdvice advice, ShopUnits
         }
 
         return new LifePart(LifeTitle(life), under, sentences, source) { Band = Drawn.Life(blade) };
+    }
+
+    /// <summary>The picture is in hours on one saw as it runs now: told where what the blade really ran reads otherwise.</summary>
+    private string Worth(SawNow on)
+    {
+        string ran = Figures.With(Figures.Hours(file.Hours), "h");
+        return Drawn.Life(blade) is { } band && Figures.With(Figures.Hours(band.Used), "h") is var worth && worth != ran
+            ? $". The {ran} it ran count as {worth} there"
+            : "";
     }
 
     private string LifeTitle(LifeOfBlade life)
@@ -144,6 +153,9 @@ internal sealed class BladeParts(BladeAdvice blade, ShopAdvice advice, ShopUnits
     {
         string title = blade.Limits.GovernedBy switch
         {
+            _ when blade.State == BladeState.Retired && file.Retirement is { } end => $"What ended it: {StoryWords.Retired(end.Reason)}",
+            _ when blade.State == BladeState.Broken && file.Break is { } broke => $"What ended it: {(broke.Site == BreakSite.TeethStripped ? "" : "it ")}{StoryWords.Broke(broke.Site)}",
+            LimitKind.Crack when file.Hold is { Kind: not HoldKind.Crack } hold => $"What holds it: {LifeWords.HoldReason(hold, advice.Words) ?? "on hold, no reason told"}",
             LimitKind.New => "What will end it: nothing used yet",
             LimitKind.Crack => "What ends it: the crack, until it is cleared",
             LimitKind.UnknownHistory => "What ends it: unknown, since its history is",
@@ -219,7 +231,7 @@ internal sealed class BladeParts(BladeAdvice blade, ShopAdvice advice, ShopUnits
         Place.AtSharpener => file.Away is { } away
             ? $"At the sharpener, {away.BatchNumber}{(away.PromisedUtc is { } back ? $", promised {Said.When(back, advice.Now.AsOf, units)}" : "")}"
             : "At the sharpener",
-        _ => "Gone",
+        _ => file.CutDownTo is { } child ? $"It lives on as {child}" : "Gone",
     };
 
     /// <summary>Where the kerf reckoned with comes from, and since when.</summary>

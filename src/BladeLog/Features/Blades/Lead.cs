@@ -44,5 +44,5 @@ internal static class Lead
     }
 
     private static Task<IResult> Show(Desk desk, string tag, LeadForm form, FormState state) =>
-        BladeForm.Show<LeadPage, LeadForm>(desk, tag, form, state, async model => model with { Names = [.. (await desk.Shop()).Saws.Select(s => s.Saw.Code)] });
+        BladeForm.Show<LeadPage, LeadForm>(desk, tag, form, state);
 }

@@ -97,7 +97,6 @@ internal static class Pull
             var found = PullReading.Of(form, new FormReading(model.Units, desk.Now), model.Advice.Body, settings, model.Units);
             return model with
             {
-                Names = [.. shop.Saws.Select(s => s.Saw.Code)],
                 LastTime = await PullReading.LastTime(desk.Db, form, model, settings),
                 Lines = found?.Lines(Saw(shop, model.File, form), model.Advice.Body) ?? [],
             };

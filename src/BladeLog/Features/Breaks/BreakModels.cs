@@ -5,7 +5,7 @@ using BladeLog.Ui.Pictures.Geometry;
 namespace BladeLog.Features.Breaks;
 
 /// <summary>One break in the list.</summary>
-public sealed record BreakRow(int Entry, string Tag, string When, string Saw, string Site, string Hours, string Used, string Bending, string Thickness, string Cost, bool ToComplete, Worked? Worked);
+public sealed record BreakRow(int Entry, string Tag, string When, string Saw, string Site, string Hours, string Used, string Bending, string Cost, bool ToComplete, Worked? Worked);
 
 /// <summary>Breaks that gather.</summary>
 public sealed record ClusterPart(string Title, string Says, string Tags);

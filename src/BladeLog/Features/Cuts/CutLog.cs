@@ -72,7 +72,7 @@ internal static class CutLog
         string? hit = command.Nail && (await desk.Shop()).Saw(command.Saw)?.MountedBladeId is { } on ? (await desk.Shop()).Blades.First(b => b.Blade.Id == on).Blade.Tag : null;
         string onwards = hit is not null ? $"/blades/{hit}/inspect?nail=1" : saw is not null ? $"/saws/{saw.Saw.Code}/cut" : "/cuts";
         WriteResult result = await desk.Write(command, form.Op, onwards, form.Ended, form: JsonSerializer.Serialize(form));
-        string what = cut is null ? $"{command.SpeciesTyped} on {command.Saw}" : $"cut {cut.Number} done";
+        string what = cut is null ? $"{command.SpeciesTyped} on {(await desk.Shop()).Saw(command.Saw)?.Saw.Name ?? command.Saw}" : $"cut {cut.Number} done";
         return result is WriteResult.Done done ? desk.Saved(done, what) : await Page(desk, cut, saw, form, Unwritten.Of(result, read.Units, Field), oneMoreTap: (result as WriteResult.Ask)?.OneMoreTap);
     }
 

@@ -65,9 +65,16 @@ internal static class CutSays
         ArgumentNullException.ThrowIfNull(cut);
         ArgumentNullException.ThrowIfNull(work);
         ArgumentNullException.ThrowIfNull(words);
-        string bevel = cut.BevelRad > 0 ? $" ({words.Length(cut.HeightM)} at {Figures.Number(double.RadiansToDegrees(cut.BevelRad))}°)" : "";
+        string bevel = cut.BevelRad > 0 ? $" ({Figures.Number(double.RadiansToDegrees(cut.BevelRad))}°)" : "";
         string shape = cut.RadiusM is { } r ? $"tightest curve {words.Length(r)}" : "straight";
-        return $"Cut {cut.Number}, {cut.Job}: {Wood(cut)}, {words.Length(work.HeightM)} deep{bevel}, {Said.Count(cut.Pieces, "piece", "pieces")} of {Piece(cut.LengthM, units)}, {shape}.";
+        return $"Cut {cut.Number}, {cut.Job}: {Wood(cut)}, {Deep(cut, words)}{bevel}, {Said.Count(cut.Pieces, "piece", "pieces")} of {Piece(cut.LengthM, units)}, {shape}.";
+    }
+
+    /// <summary>"200 mm deep"; of a bevel both heights.</summary>
+    public static string Deep(QueuedCut cut, Wording words)
+    {
+        string height = Said.Height(cut, words);
+        return height.Contains(',', StringComparison.Ordinal) ? height : height + " deep";
     }
 
     /// <summary>"beech, taken as European beech".</summary>

@@ -48,7 +48,7 @@ public sealed record QueueModel(QueueView View, IReadOnlyList<CutAnswer> Answers
         ArgumentNullException.ThrowIfNull(answer);
         QueuedCut cut = answer.Work.Cut;
         string due = cut.Due is { } date ? $", due {Units.Show(date)}" : "";
-        return $"{CutSays.Wood(cut)}, {Advice.Words.Length(answer.Work.HeightM)} deep, {Said.Count(cut.Pieces, "piece", "pieces")} of {CutSays.Piece(cut.LengthM, Units)}{due}";
+        return $"{CutSays.Wood(cut)}, {CutSays.Deep(cut, Advice.Words)}, {Said.Count(cut.Pieces, "piece", "pieces")} of {CutSays.Piece(cut.LengthM, Units)}{due}";
     }
 
     /// <summary>"Q-08 on Osprey, 1.8 to 4.8 m/min", or what to do where nothing fits.</summary>

@@ -59,7 +59,7 @@ internal static class WhyThis
         [
             (b.Timber - a.Timber, $"A kerf of {Mm(best.Blade.Body.Kerf, units)} against {Mm(next.Blade.Body.Kerf, units)}: {CutSays.Money(b.Timber - a.Timber, units)} of timber saved."),
             (b.Nail - a.Nail, $"A nail would spoil less: {CutSays.Money(a.Nail, units)} at risk against {CutSays.Money(b.Nail, units)} with {next.Tag}."),
-            (b.Labour - a.Labour, $"{Figures.Number(other.Minutes - best.Job.Minutes, 1)} minutes less than with {next.Tag}: {CutSays.Money(b.Labour - a.Labour, units)}."),
+            (b.Labour - a.Labour, $"{Figures.Number(other.Minutes - best.Job.Minutes, 1)} minutes less than with {next.Tag}: {CutSays.Money(b.Labour - a.Labour, units)} of labour saved."),
             (b.Wear + b.Life - a.Wear - a.Life, $"It takes {CutSays.Money(a.Wear + a.Life, units)} out of the blade, {next.Tag} {CutSays.Money(b.Wear + b.Life, units)}."),
         ];
         return lines.Where(l => l.Saved > Small * a.Total && l.Saved >= 0.5).OrderByDescending(l => l.Saved).Select(l => l.Sentence);

@@ -208,10 +208,14 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
         ? hours.ToString("0.#", System.Globalization.CultureInfo.InvariantCulture)
         : Figures.Floor(hours);
 
+    /// <summary>Two lines are all a tile has: the saw's page and the list tell the height along the blade.</summary>
+    private static string Short(QueuedCut cut, Wording words) =>
+        words.Length(cut.HeightM).Replace(' ', Figures.Glue) + (Said.Height(cut, words).Contains(',', StringComparison.Ordinal) ? $"{Figures.Glue}bevel" : "");
+
     private static NextLine Next(PlannedCut next, bool slack, Wording words)
     {
         Choice c = next.Choice;
-        NextLine line = new($"Cut {next.Cut.Number}", next.Cut.SpeciesTyped, words.Length(next.Cut.HeightM).Replace(' ', Figures.Glue), "use ", c.Tag, "");
+        NextLine line = new($"Cut {next.Cut.Number}", next.Cut.SpeciesTyped, Short(next.Cut, words), "use ", c.Tag, "");
         return next.ChangeBefore || !slack
             ? c.Verdict == Verdict.WithCare ? line with { Before = "", After = " with care" }
                 : next.ChangeBefore ? line

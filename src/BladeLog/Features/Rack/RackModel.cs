@@ -37,10 +37,11 @@ public sealed record RackModel
         ("all", "All", (_, _) => true),
         ("saw", "On a saw", (b, _) => b.Place == Place.OnSaw),
         ("ready", "Ready", Free),
-        ("new", "New", (b, _) => b.Place != Place.Gone && IsNew(b)),
-        ("look", "Look", (b, a) => b.Place != Place.Gone && a.State == BladeState.Look),
-        ("sharpen", "Sharpen", (b, a) => b.Place is not (Place.Gone or Place.AtSharpener) && a.State == BladeState.Sharpen),
+        ("new", "New", (b, _) => Here(b) && IsNew(b)),
+        ("look", "Look", (b, a) => Here(b) && a.State == BladeState.Look),
+        ("sharpen", "Sharpen", (b, a) => Here(b) && a.State == BladeState.Sharpen),
         ("hold", "Hold", (_, a) => a.State == BladeState.Hold),
+        ("broken", "Broken", (b, a) => b.Place != Place.Gone && a.State == BladeState.Broken),
         ("away", "Away", (b, _) => b.Place == Place.AtSharpener),
         ("gone", "Gone", (b, _) => b.Place == Place.Gone),
     ];
@@ -92,6 +93,9 @@ public sealed record RackModel
     };
 
     private static bool Free(BladeFile blade, BladeAdvice advice) => blade.Place == Place.Rack && advice.State == BladeState.Ready;
+
+    /// <summary>Neither gone nor at the sharpener: a row of what is away says away, whatever else is to be done with it.</summary>
+    private static bool Here(BladeFile blade) => blade.Place is not (Place.Gone or Place.AtSharpener);
 
     private static bool IsNew(BladeFile blade) => blade.Hours == 0 && blade.MountedSinceUtc is null && blade.LastSawId is null && blade.PriorUse is null;
 
@@ -185,7 +189,7 @@ public sealed record RackModel
         _ when blade.InspectionOverdue => "inspection due",
         BladeState.Look => "inspect each mount",
         _ when IsNew(file) => "never on",
-        _ when file.Spec.MostSharpenings == 0 => "not worth sharpening",
+        _ when file.Spec.MostSharpenings == 0 => "still sharp; this kind is not ground",
         _ when blade.Limits.GovernedBy == LimitKind.Width => $"{Said.Width(file.WidthM, units)} left of {Said.Width(file.Spec.WidthM, units)}",
         _ => Run(file),
     };

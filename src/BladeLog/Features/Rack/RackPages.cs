@@ -14,7 +14,9 @@ internal static class RackPages
 
     private static async Task<IResult> Get(Desk desk, string? show, string? q)
     {
-        if (!string.IsNullOrWhiteSpace(q) && (await desk.Shop()).Blade(Tags.Read(q)) is { } exact)
+        // The number alone lists every tag it is part of; a whole tag, however typed, is its blade.
+        if (!string.IsNullOrWhiteSpace(q) && TypedTag.Find(q, await desk.Shop()) is [var exact]
+            && (!char.IsAsciiDigit(Tags.Read(q)[0]) || string.Equals(exact.Blade.Tag, Tags.Read(q), StringComparison.OrdinalIgnoreCase)))
         {
             return Results.Redirect($"/blades/{exact.Blade.Tag}");
         }

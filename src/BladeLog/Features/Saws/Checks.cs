@@ -36,7 +36,10 @@ internal static class Checks
             }
 
             string by = check.Entry.PersonId is { } id && people.TryGetValue(id, out var initials) ? $" by {initials}" : "";
-            string pull = tensions.TryGetValue(saw.Saw.Id, out var off) ? off ? $"; {units.PullName} was found off" : $"; {units.PullName} was off, now on" : "";
+            string pull = !tensions.TryGetValue(saw.Saw.Id, out var off) ? ""
+                : !off ? $"; {units.PullName} was off, now on"
+                : check.TensionRight == false ? ""
+                : $"; {units.PullName} was found off";
             rows.Add(new CheckRow(saw.Saw.Code, saw.Saw.Name, Said.When(check.Entry.AtUtc, desk.Now, units) + by, Said.Capital(CheckWords.Says(check, units)) + pull, CheckWords.NotRight(check, units).Count > 0));
         }
 

@@ -69,6 +69,11 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
             return ("hold", $"{name}: do not run it", $"{tag} is {LifeWords.Hold(hold, advice.Words)}. A named person clears it, or it comes off.");
         }
 
+        if (on.State is BladeState.Retired or BladeState.Broken)
+        {
+            return ("hold", $"{name}: do not run it", $"{tag} is written as {(on.State == BladeState.Broken ? "broken" : "retired")}. Take it off, or strike that entry out if it is wrong.");
+        }
+
         string state = saw.Slack ? "slack" : on.State switch
         {
             BladeState.Sharpen => "sharpen",
@@ -78,11 +83,13 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
         string title = next switch
         {
             null => saw.Slack ? $"{name}: its {advice.Words.Tension} is off" : $"{name}: no cut waits for it",
+            { ChangeBefore: true } change when saw.Slack => $"{name}: its {advice.Words.Tension} is off; put {change.Choice.Tag} on for {cut}",
+            _ when saw.Slack => $"{name}: {advice.Words.Tension} on first, then {tag} for {cut}",
             { ChangeBefore: true } change => $"{name}: put {change.Choice.Tag} on for {cut}",
             _ => $"{name}: {tag} stays on for {cut}",
         };
         string since = saw.Timer is { } timer ? $" Timer since {Said.When(timer.Entry.AtUtc, advice.Now.AsOf, units)}." : "";
-        return (state, title, (saw.Slack ? $"Its {advice.Words.Tension} is off: put it on before it runs." : $"{tag} is on it. {string.Join(" ", on.Advice.Because.Take(1))}".Trim()) + since);
+        return (state, title, (saw.Slack ? $"Its {advice.Words.Tension} is off: put the {advice.Words.Tension} on before it runs." : $"{tag} is on it. {string.Join(" ", on.Advice.Because.Take(1))}".Trim()) + since);
     }
 
     private CaptionPart Caption(PlannedCut cut, double? span, double? thrust)
@@ -90,7 +97,14 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
         string guides = span is { } s ? $"guides {units.Show(Length.FromMillimetres(s))} apart, " : "";
         string push = thrust is { } t ? $"thrust {units.Show(new Force(Math.Round(t)))}" : "thrust not reckoned";
         string feed = cut.Choice.Gate?.AdvisedMps is { } mps ? $" at {advice.Words.Feed(mps).Replace(' ', Figures.Glue)}" : "";
-        return new CaptionPart($"Cut {cut.Cut.Number}, {Said.Wood(cut.Cut, advice.Words)}: {guides}{push}", cut.Choice.Tag, feed);
+        // The picture writes what the mounted blade does at the wheel; the cut may want another.
+        string drawn = on is null || !cut.ChangeBefore ? "" : $"Body and bending are of {on.File.Blade.Tag}, {(on.State == BladeState.Hold ? "on hold here" : "on it now")}. ";
+        if (cut.ChangeBefore)
+        {
+            feed = " once it is on" + feed.Replace(" at ", ", at ", StringComparison.Ordinal);
+        }
+
+        return new CaptionPart($"{drawn}Cut {cut.Cut.Number}, {Said.Wood(cut.Cut, advice.Words)}: {guides}{push}", cut.Choice.Tag, feed);
     }
 
     private IEnumerable<SawFact> Facts()
@@ -128,9 +142,16 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
     private MountedPart? Mounted() => on is null ? null : new MountedPart(
         on.File.Blade.Tag,
         Drawn.Teeth(on.Body, on.File.Spec),
-        on.State == BladeState.Ready ? "runs" : on.State == BladeState.Hold ? "hold" : on.State == BladeState.Sharpen ? "sharpen" : "look",
+        on.State switch
+        {
+            BladeState.Hold or BladeState.Broken or BladeState.Retired => "hold",
+            _ when saw.Slack => "slack",
+            BladeState.Ready => "runs",
+            BladeState.Sharpen => "sharpen",
+            _ => "look",
+        },
         saw.MountedSince is { } since ? $"on since {Said.When(since, advice.Now.AsOf, units)}" : "on it",
-        on.Record.Tension is { } t ? $"{advice.Words.Tension} {units.Show(Stress.FromMegapascals(Math.Round(t.Stress.Value / 1e6)))} on the body, {t.Stress.From}" : "");
+        on.Record.Tension is { } t ? $"{advice.Words.Tension} {(saw.Slack ? "off now; when on, " : "")}{units.Show(Stress.FromMegapascals(Math.Round(t.Stress.Value / 1e6)))} on the body, {t.Stress.From}" : "");
 
     private WheelPart Wheel(SetupWheel wheel, int index)
     {

@@ -14,8 +14,14 @@ internal static class Swap
 
     public static async Task<IResult> Get(Desk desk, string code, string? on, string? found) =>
         (await desk.Shop()).Saw(code) is { } saw
-            ? await Show(desk, saw, new SwapForm { OnTag = on, Found = found }, OnState(await desk.Shop(), on))
+            ? await Asked(desk, saw, on, found)
             : Results.NotFound();
+
+    private static async Task<IResult> Asked(Desk desk, SawNow saw, string? on, string? found)
+    {
+        var blades = TypedTag.Find(on, await desk.Shop());
+        return await Show(desk, saw, new SwapForm { OnTag = blades is [var one] ? one.Blade.Tag : on, Found = found }, OnState(on, blades));
+    }
 
     public static async Task<IResult> Post([FromForm] SwapForm? form, Desk desk, string code)
     {
@@ -31,8 +37,9 @@ internal static class Swap
         var onlyOff = form.OnlyOff == "1";
         var tag = onlyOff ? "" : Tags.Read(form.OnTag ?? "");
         read.RefuseUnless(onlyOff || tag.Length > 0, nameof(form.OnTag), "Say which blade goes on: tap one, or type its tag.");
-        var on = shop.Blade(tag);
-        read.RefuseUnless(tag.Length == 0 || on is not null, nameof(form.OnTag), $"There is no blade {tag}.");
+        var meant = TypedTag.Find(tag, shop);
+        var on = meant is [var one] ? one : null;
+        read.RefuseUnless(tag.Length == 0 || on is not null, nameof(form.OnTag), TypedTag.Refusal(tag, meant));
         var reason = saw.MountedBladeId is null
             ? OffReason.OtherWork
             : form.Reason == Never
@@ -82,13 +89,13 @@ internal static class Swap
     public static Task<List<string>> Initials(Desk desk) =>
         desk.Db.People.AsNoTracking().Where(p => p.Active).OrderBy(p => p.Initials).Select(p => p.Initials).ToListAsync();
 
-    private static FormState OnState(ShopNow shop, string? on)
-    {
-        var tag = Tags.Read(on ?? "");
-        return tag.Length == 0 || shop.Blade(tag) is not null
-            ? FormState.New
-            : FormState.New with { Problems = [new(nameof(SwapForm.OnTag), $"There is no blade {tag}. Scan again, or tap one.")], Title = "That tag is not known" };
-    }
+    private static FormState OnState(string? on, IReadOnlyList<BladeFile> blades) => Tags.Read(on ?? "").Length == 0 || blades.Count == 1
+        ? FormState.New
+        : FormState.New with
+        {
+            Problems = [new(nameof(SwapForm.OnTag), TypedTag.Refusal(on, blades) + (blades.Count == 0 ? " Scan again, or tap one." : ""))],
+            Title = blades.Count > 1 ? "More than one blade is called so" : "That tag is not known",
+        };
 
     private static string Tag(ShopNow shop, SawNow saw) => shop.Blades.FirstOrDefault(b => b.Blade.Id == saw.MountedBladeId)?.Blade.Tag ?? "the blade";
 }

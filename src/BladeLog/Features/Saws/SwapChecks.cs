@@ -33,7 +33,7 @@ internal static class SwapChecks
     {
         BladeAdvice here = advice.On(blade, saw);
         return here.Record.Verdict == LifeVerdict.Unsuitable
-            ? [$"{blade.Blade.Tag} is too thick for {saw.Saw.Code}: {Lower(LifeWords.ThicknessToWheel(here.Record.ThicknessToWheel!.Value))} {LifeWords.Ladder(LifeVerdict.Unsuitable)}"]
+            ? [$"{blade.Blade.Tag} is too thick for {saw.Saw.Name}: {Lower(LifeWords.ThicknessToWheel(here.Record.ThicknessToWheel!.Value))} {LifeWords.Ladder(LifeVerdict.Unsuitable)}"]
             : [];
     }
 

@@ -77,7 +77,7 @@ internal static class WhatIfSaw
         double? moisture = form.Moisture("moisture", "Moisture", new Given(wood?.DefaultMoisture ?? 10, "default, not yours"));
         double? feed = form.Feed("feed", "Feed that is decent", new Given((setup.FeederN is null ? ByHand : WithFeeder) / 60, "default, not yours"));
         Edges edges = form.Choose("edges", "Edges", Edges.Now, "as the page begins", (Edges.Now, "now", "as they are now"), (Edges.Ground, "ground", "freshly ground"));
-        string with = form.Pick("blade", "Changes reckoned with", "", "", "the blade that goes deepest", [.. advice.Now.Blades.Where(b => b.Place != Place.Gone && ShopAdvice.Fits(b, saw)).Select(b => new Answer(b.Blade.Tag, b.Blade.Tag))]);
+        string with = form.Pick("blade", "Changes reckoned with", "", "", "the blade that goes deepest", [.. advice.Now.Blades.Where(b => b is { Place: not Place.Gone, Hold: null, Break: null, Retirement: null } && ShopAdvice.Fits(b, saw)).Select(b => new Answer(b.Blade.Tag, b.Blade.Tag))]);
         double smallest = setup.Wheels.Min(w => w.DiameterM);
         double? wheel = form.Length("wheel", "A bigger wheel", Fields.WheelDiameter, new Given(smallest + 0.1, "100 mm more than now"));
         double? pull = form.Force("pull", "More pull in one strand", Given.Of(1.25 * setup.StrandForceMostN, "a quarter more than now", null), optional: true);

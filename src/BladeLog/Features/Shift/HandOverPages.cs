@@ -59,13 +59,13 @@ internal static class HandOverPages
             [.. reads[n.EntryId].Select(r => r.Entry.Person?.Initials ?? "somebody")],
             who is null || (n.Entry.PersonId != who.Id && !reads[n.EntryId].Any(r => r.Entry.PersonId == who.Id))));
         var people = await db.People.AsNoTracking().Where(p => p.Active).OrderBy(p => p.Initials).Select(p => p.Initials).ToListAsync();
-        var draft = form.Text ?? string.Join('\n', Draft(await desk.Advice()));
+        var draft = form.Text ?? string.Join('\n', Draft(await desk.Advice(), await Orders(desk)));
         return await desk.Page<HandOverPage, HandOverModel>(
             new(form with { Text = draft }, state, rows, people, who?.Initials), state.Status);
     }
 
     /// <summary>One line for each thing the next shift would ask; nothing to tell is told too.</summary>
-    internal static IReadOnlyList<string> Draft(ShopAdvice advice)
+    internal static IReadOnlyList<string> Draft(ShopAdvice advice, IReadOnlyList<string> orders)
     {
         var here = advice.Now.Blades.Where(b => b.Place is not (Place.Gone or Place.AtSharpener)).OrderBy(b => b.Blade.Tag, NaturalOrder.Instance).Select(advice.Of)
             .Where(b => b.State is not (BladeState.Broken or BladeState.Retired)).ToList();
@@ -88,10 +88,19 @@ internal static class HandOverPages
         Say("Timer runs", advice.Now.Saws.Where(s => s.Timer is not null).Select(s => s.Saw.Name));
         Say("Found not right at the last check", advice.Now.Saws.Where(s => s.Saw.Active && s.LastCheck?.SawNotRight == true).Select(s => $"{s.Saw.Name}, {CheckWords.ToPutRight(s.LastCheck)}"));
         Say("No blade on", advice.Now.Saws.Where(s => s.Saw.Active && s.MountedBladeId is null).Select(s => s.Saw.Name));
-        Say("Stock low", advice.Now.Saws.Where(s => s.Saw.Active).Select(s => Low(s, advice)).OfType<string>());
+        Say("Stock", orders);
+        Say("Spares on the rack", advice.Now.Saws.Where(s => s.Saw.Active).Select(s => Low(s, advice)).OfType<string>());
         Say("At the sharpener", advice.Now.Blades.Where(b => b.Away is not null).GroupBy(b => b.Away!.BatchNumber).OrderBy(g => g.Key, NaturalOrder.Instance)
             .Select(g => $"{g.Key} ({string.Join(' ', g.Select(b => b.Blade.Tag).Order(NaturalOrder.Instance))}){(g.First().Away!.PromisedUtc < advice.Now.AsOf ? ", late" : "")}"));
         return lines.Count > 0 ? lines : ["Nothing on hold, nothing dull, nothing to look at."];
+    }
+
+    /// <summary>What the stock page asks to order now or soon, in its words.</summary>
+    private static async Task<IReadOnlyList<string>> Orders(Desk desk)
+    {
+        var units = await desk.Units();
+        var lead = (await desk.Advice()).Settings[StockSettings.LeadDays];
+        return [.. (await StockNow.Of(desk)).Where(l => l.OrderInDays <= lead).OrderBy(l => l.OrderInDays).Select(l => StockNow.Order(l, desk.Now, units)!).Select(o => "o" + o[1..])];
     }
 
     /// <summary>A saw with at most one sharp spare on the rack.</summary>

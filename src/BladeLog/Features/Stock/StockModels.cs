@@ -15,6 +15,9 @@ public sealed record StockRow
 
     public required string Counts { get; init; }
 
+    /// <summary>What is not at hand: at the sharpener, on hold; null: nothing.</summary>
+    public string? Besides { get; init; }
+
     public required int AtHand { get; init; }
 
     public required int Least { get; init; }

@@ -51,12 +51,8 @@ internal static class StockPages
         double leadDays = read.Number("lead", lead, "14") is { } l and >= 0 and <= 365 ? l : advice.Settings[StockSettings.LeadDays];
         double leastCount = read.Number("least", least, "1") is { } n and >= 0 and <= 100 ? Math.Floor(n) : advice.Settings[StockSettings.Least];
         double weeks = advice.Settings[StockSettings.RecentWeeks];
-        DateTime since = desk.Now.AddDays(-7 * weeks);
-        List<Spec> specs = await desk.Db.Specs.AsNoTracking().ToListAsync();
-        Dictionary<int, double> hours = await HoursPerWeek(desk, since, weeks);
-        Dictionary<int, int> moved = await desk.Db.StockMoves.AsNoTracking().GroupBy(m => m.SpecId).Select(g => new { g.Key, Sum = g.Sum(m => m.Count) }).ToDictionaryAsync(g => g.Key, g => g.Sum);
         bool canEdit = endpoints.Endpoints.OfType<RouteEndpoint>().Any(e => "/" + e.RoutePattern.RawText?.Trim('/') == EditAddress);
-        IReadOnlyList<StockLine> lines = StockCount.Of(specs.OrderBy(s => s.Code, NaturalOrder.Instance), advice, hours, moved, leadDays, (int)leastCount);
+        IReadOnlyList<StockLine> lines = await StockNow.Of(desk, leadDays, leastCount);
         string forAll = least is not null && leastCount != advice.Settings[StockSettings.Least] ? "as asked below"
             : advice.Settings.Known(StockSettings.Least).IsDefault ? "default, not yours"
             : "yours, for every kind";
@@ -83,23 +79,14 @@ internal static class StockPages
             state.Status);
     }
 
-    private static async Task<Dictionary<int, double>> HoursPerWeek(Desk desk, DateTime since, double weeks)
-    {
-        var shares = await desk.Db.RunShares.AsNoTracking().Where(s => s.MountId != null)
-            .Join(desk.Db.Runs.Where(r => r.UntilUtc > since), s => s.RunId, r => r.EntryId, (s, r) => new { s.MountId, s.Ms })
-            .Join(desk.Db.Mounts, s => s.MountId, m => m.EntryId, (s, m) => new { m.Blade.SpecId, s.Ms })
-            .GroupBy(s => s.SpecId).Select(g => new { g.Key, Ms = g.Sum(s => s.Ms) }).ToListAsync();
-        return shares.ToDictionary(s => s.Key, s => s.Ms / 3_600_000.0 / weeks);
-    }
-
     private static StockRow Row(StockLine s, ShopAdvice advice, ShopUnits units, DateTime now, bool canEdit, string forAll)
     {
-        List<string> counts = [];
-        void Add(int n, string words)
+        List<string> counts = [], besides = [];
+        void Add(int n, string words, bool atHand = true)
         {
             if (n > 0)
             {
-                counts.Add($"{n}{Figures.Glue}{words}");
+                (atHand ? counts : besides).Add($"{n}{Figures.Glue}{words}");
             }
         }
 
@@ -108,24 +95,24 @@ internal static class StockPages
         Add(s.Spare, s.Spare == 1 ? "new spare" : "new spares");
         Add(s.ToSharpen, "to sharpen");
         DateTime? back = s.Blades.Select(b => b.File.Away?.PromisedUtc).Min();
-        Add(s.Away, back is { } promised ? $"at the sharpener, promised {Day(promised, now, units)}" : "at the sharpener");
-        Add(s.OnHold, "on hold");
+        Add(s.Away, back is { } promised ? $"at the sharpener, promised {StockNow.Day(promised, now, units)}" : "at the sharpener", atHand: false);
+        Add(s.OnHold, "on hold", atHand: false);
         BladeFile drawn = s.Blades.Count > 0 ? s.Blades[0].File with { WidthM = s.Spec.WidthM, GulletM = null } : new BladeFile { Blade = new Blade { Tag = s.Spec.Code, Spec = s.Spec }, Spec = s.Spec, Place = Place.Rack, WidthM = s.Spec.WidthM };
-        string when = s.OrderInDays is 0 ? "now" : s.OrderInDays is { } days ? "by " + Day(now.AddDays(days), now, units) : "";
         return new StockRow
         {
             Code = s.Spec.Code,
             Section = Said.Section(drawn, units),
             Teeth = Said.Teeth(s.Spec),
             Strip = Drawn.Teeth(BladeBody.Of(drawn, advice.Settings), s.Spec),
-            Counts = counts.Count == 0 ? "none left" : string.Join(", ", counts),
+            Counts = counts.Count == 0 ? besides.Count == 0 ? "none left" : "none here" : string.Join(", ", counts),
+            Besides = besides.Count == 0 ? null : string.Join(", ", besides),
             AtHand = s.AtHand,
             Least = s.Least,
             LeastFrom = s.OwnLeast ? "yours" : forAll,
             Use = s.HoursPerWeek > 0
                 ? $"{Figures.With(Figures.Hours(s.HoursPerWeek), "h")} a week; {(s.GoneInLeadTime < 0.05 ? "none is" : $"about {Wording.Number(s.GoneInLeadTime, 1)} are")} expected to be gone before an order is here"
                 : "did not run lately",
-            Order = s.OrderInDays is null ? null : $"Order {s.Order} of {s.Spec.Code} {when}",
+            Order = StockNow.Order(s, now, units),
             Now = s.OrderInDays is 0,
             Blades = [.. s.Blades.Where(b => !StockCount.IsSpare(b)).OrderBy(b => b.File.Blade.Tag, NaturalOrder.Instance).Select(b => new StockBlade(b.File.Blade.Tag, Says(b, advice), WorkedOut.Life(b)))],
             Edit = canEdit ? $"/specs/{Uri.EscapeDataString(s.Spec.Code)}/edit" : null,
@@ -143,11 +130,5 @@ internal static class StockPages
             _ => blade.File.Hook ?? "rack",
         };
         return blade.Life is { UnknownHistory: false, HoursToRetire: { } left } ? $"{where}, {Figures.With(Figures.Hours(left), "h")} to retire" : where;
-    }
-
-    private static string Day(DateTime utc, DateTime now, ShopUnits units)
-    {
-        DateTime day = Said.Local(utc, units);
-        return day.ToString(day.Year == Said.Local(now, units).Year ? "d MMM" : "d MMM yyyy", CultureInfo.InvariantCulture);
     }
 }

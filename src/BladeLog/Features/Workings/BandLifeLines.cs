@@ -23,7 +23,7 @@ internal static class BandLifeLines
         if (hours)
         {
             yield return Line("Median life", Figures.With(Figures.Hours(life.MedianHours), "h"), "median bends over bends an hour", "derived", Provenance.EngineeringDefault);
-            yield return Line("1 in 10 broken", Figures.With(Figures.Hours(life.TenthPercentileBends / life.BendsPerHour), "h"), "from the scatter between blades alone", "engineering-default", settings.ProvenanceOf(LifeSettings.Shape));
+            yield return Line("1 in 10 broken", Figures.With(Figures.Hours(life.TenthPercentileBends / life.BendsPerHour), "h"), "from the scatter between blades alone, as if the handbook were right in this shop", "engineering-default", settings.ProvenanceOf(LifeSettings.Shape));
         }
     }
 

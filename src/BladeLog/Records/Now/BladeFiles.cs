@@ -9,12 +9,14 @@ internal sealed class BladeFiles
     private readonly ShopRows _rows;
     private readonly Dictionary<int, Blade> _blades;
     private readonly ILookup<int, SpellRow> _spells;
+    private readonly Dictionary<int, int> _cutDown;
 
     public BladeFiles(ShopRows rows)
     {
         _rows = rows;
         _blades = rows.Blades.ToDictionary(b => b.Id);
         _spells = rows.Spells.ToLookup(s => s.BladeId);
+        _cutDown = rows.SplitsByChild.Values.GroupBy(s => s.ParentId).ToDictionary(g => g.Key, g => g.MaxBy(s => s.EntryId)!.ChildId);
     }
 
     /// <summary>Spells in which a blade was sharpened: their path since then is summed from the cuts themselves.</summary>
@@ -67,6 +69,7 @@ internal sealed class BladeFiles
             // A break mended by a joint is history.
             Break = broke is not null && joint is not null && joint.Entry.AtUtc >= broke.LatestUtc ? null : broke,
             Retirement = _rows.Retirements.GetValueOrDefault(blade.Id),
+            CutDownTo = _cutDown.TryGetValue(blade.Id, out var child) ? _blades[child].Tag : null,
             LastInspection = inspection,
             Marks = marks,
             TeethMissing = missing,

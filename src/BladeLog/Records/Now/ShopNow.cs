@@ -117,6 +117,9 @@ public sealed record BladeFile
 
     public Retirement? Retirement { get; init; }
 
+    /// <summary>The blade this one was cut down to; null: it was not.</summary>
+    public string? CutDownTo { get; init; }
+
     public Inspection? LastInspection { get; init; }
 
     /// <summary>What the last looks saw that stands still: a full-profile grind takes burrs away.</summary>

@@ -16,6 +16,37 @@ public sealed class BenchTests
     }
 
     [Fact]
+    public async Task The_title_of_the_bench_counts_holds_too()
+    {
+        using var app = await ShopApp.Sample();
+        Assert.StartsWith("Bench: 1 on hold, ", SampleApp.Text((await app.GetPage("/bench")).QuerySelector("h1")), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task A_dull_blade_on_a_saw_is_named_where_a_batch_is_put_together()
+    {
+        using var app = await ShopApp.Sample();
+        Assert.Contains("Q-32", SampleApp.Text((await app.GetPage("/bench")).Body), StringComparison.Ordinal);
+        var text = SampleApp.Text((await app.GetPage("/bench/batches/new")).Body);
+        Assert.Contains("Dull and still on a saw: Q-32 on Longreach. Take it off first.", text, StringComparison.Ordinal);
+        Assert.DoesNotContain("None is dull.", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task What_to_do_with_a_blade_on_the_bench_reads_as_something_to_tap()
+    {
+        using var app = await ShopApp.Sample();
+        Assert.All((await app.GetPage("/bench")).QuerySelectorAll(".chapter .hang .t"), t => Assert.NotNull(t.QuerySelector(".act")));
+    }
+
+    [Fact]
+    public async Task A_docket_says_that_it_prints_where_no_sheet_is_shown()
+    {
+        using var app = await ShopApp.Sample();
+        Assert.Contains("On a tablet the sheet is not shown; it prints all the same.", SampleApp.Text((await app.GetPage("/bench/batches/B-031/docket")).QuerySelector(".ask")), StringComparison.Ordinal);
+    }
+
+    [Fact]
     public async Task A_blade_that_came_off_dull_is_on_the_list_until_it_is_ground()
     {
         using var app = await ShopApp.Sample();

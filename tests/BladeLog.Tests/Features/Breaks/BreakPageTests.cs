@@ -28,12 +28,23 @@ public sealed class BreakPageTests(SampleApp sample) : IClassFixture<SampleApp>
         Assert.Contains("1/323", first, StringComparison.Ordinal);
     }
 
+    [Fact]
+    public async Task A_break_off_every_saw_is_told_in_words_and_leaves_no_lone_comma()
+    {
+        await using ShopApp app = await ShopApp.Sample();
+        (await app.Fill("/blades/Q-25/break", ("Site", "Weld"))).LeadsTo("/blades/Q-25");
+        string text = SampleApp.Text((await app.GetPage("/breaks")).Body);
+        Assert.Contains("no saw known, at the weld", text, StringComparison.Ordinal);
+        Assert.DoesNotContain("on not known", text, StringComparison.Ordinal);
+        Assert.All((await app.GetPage("/breaks")).QuerySelectorAll("tbody td"), c => Assert.NotEqual(",", SampleApp.Text(c)));
+    }
+
     /// <summary>15.2 to 16.4 h of 15.91 h: used 0.955 to 1.031, divided and multiplied by 4.766.</summary>
     [Fact]
     public async Task Hours_known_between_two_readings_stay_a_range()
     {
         string row = SampleApp.Text((await sample.Page("/breaks")).QuerySelectorAll("table tbody tr")[1]);
-        Assert.Contains("15.2 to 16.4 h of 16 h", row, StringComparison.Ordinal);
+        Assert.Contains("15.2 to 16.4 h; half of such by 16 h", row, StringComparison.Ordinal);
         Assert.Contains("0.96 to 1.03 (band 0.20 to 4.91)", row, StringComparison.Ordinal);
     }
 

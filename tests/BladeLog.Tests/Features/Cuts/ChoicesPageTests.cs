@@ -51,6 +51,11 @@ public sealed class ChoicesPageTests(SampleApp sample) : IClassFixture<SampleApp
         Assert.Contains(sentence, SampleApp.Text(row), StringComparison.Ordinal);
     }
 
+    /// <summary>3.83 m/min is four fifths of the upper edge of 4.79, as the invented shop's own table has it.</summary>
+    [Fact]
+    public async Task The_advised_feed_stands_right_below_the_answer() =>
+        Assert.Contains("Feed it at 3.8 m/min.", SampleApp.Text((await Cut(2)).QuerySelector(".best .say")), StringComparison.Ordinal);
+
     [Fact]
     public async Task Every_blade_of_the_shop_is_told_of_once_or_counted()
     {

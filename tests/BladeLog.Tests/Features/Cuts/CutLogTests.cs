@@ -25,6 +25,15 @@ public sealed class CutLogTests
     }
 
     [Fact]
+    public async Task What_can_be_undone_names_the_saw_and_not_its_code()
+    {
+        using ShopApp app = await ShopApp.Sample();
+        IDocument form = await app.GetPage("/saws/S2/cut");
+        (await app.SendForm(form, "/saws/S2/cut", ("Species", "black cherry"), ("Height", "100"), ("Length", "1.2"), ("Pieces", "2"), ("Feed", "3"))).LeadsTo("/saws/S2/cut");
+        Assert.Contains("black cherry on Osprey", SampleApp.Text((await app.GetPage("/saws/S2/cut")).QuerySelector(".undo")), StringComparison.Ordinal);
+    }
+
+    [Fact]
     public async Task A_blade_that_is_not_on_the_saw_is_said_before_the_cut_is_counted_for_another()
     {
         using ShopApp app = await ShopApp.Sample();

@@ -39,6 +39,35 @@ public sealed class RackPageTests(SampleApp sample) : IClassFixture<SampleApp>
         }
     }
 
+    [Theory]
+    [InlineData("look", "look")]
+    [InlineData("broken", "broken")]
+    [InlineData("new", "new")]
+    [InlineData("sharpen", "sharpen")]
+    public async Task A_chip_opens_only_blades_marked_with_its_word(string chip, string word)
+    {
+        IDocument page = await sample.Page($"/rack?show={chip}");
+        Assert.True(page.QuerySelectorAll(".hang").Length > 0);
+        Assert.All(page.QuerySelectorAll(".hang .state"), s => Assert.Equal(word, SampleApp.Text(s)));
+    }
+
+    [Fact]
+    public async Task The_chip_to_look_at_counts_what_the_bench_counts()
+    {
+        IDocument bench = await sample.Page("/bench");
+        string look = SampleApp.Text(bench.QuerySelectorAll("h2").First(h => h.TextContent.StartsWith("To look at", StringComparison.Ordinal))).Split(' ')[^1];
+        Assert.Equal($"Look {look}", SampleApp.Text((await sample.Page("/rack")).QuerySelector("a[href='/rack?show=look']")));
+    }
+
+    [Fact]
+    public async Task A_sharp_blade_of_a_kind_that_is_not_ground_is_said_to_be_sharp()
+    {
+        foreach (IElement row in (await sample.Page("/rack?show=ready")).QuerySelectorAll(".hang"))
+        {
+            Assert.DoesNotContain("not worth", SampleApp.Text(row), StringComparison.Ordinal);
+        }
+    }
+
     [Fact]
     public async Task The_cracked_blade_has_no_band_and_the_unknown_one_a_range()
     {

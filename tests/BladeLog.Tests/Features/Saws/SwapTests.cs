@@ -75,7 +75,7 @@ public sealed class SwapTests
 
         var answer = await app.SendForm(slow, "/saws/S2/swap", ("Reason", "StillSharp"), ("Tension", "140"));
         Assert.Equal(HttpStatusCode.Conflict, answer.Status);
-        Assert.Contains("JP put Q-11 on S2 at 10:30", answer.Text, StringComparison.Ordinal);
+        Assert.Contains("JP put Q-11 on Osprey at 10:30", answer.Text, StringComparison.Ordinal);
         Assert.Equal("140", answer.Typed("Tension"));
         Assert.Equal(before, await app.EntryCount());
 
@@ -92,7 +92,7 @@ public sealed class SwapTests
         (await app.Fill(Scanned, ("Reason", "Dull"), ("At", "20 min ago"))).LeadsTo("/saws/S2");
         var before = await app.EntryCount();
         var answer = (await app.Fill("/saws/S2/swap?on=Q-13", ("Reason", "Dull"), ("At", "1 h ago"))).Refused();
-        Assert.Matches(@"Q-11 is on S2 since .* \(entry \d+\)", answer.Text);
+        Assert.Matches(@"Q-11 is on Osprey since .* \(entry \d+\)", answer.Text);
         Assert.Equal(before, await app.EntryCount());
     }
 
@@ -113,6 +113,7 @@ public sealed class SwapTests
         (await app.SendForm(asked.Page, "/saws/S2/swap", ("Although", "put on by mistake"), ("Who", "JP"))).LeadsTo("/saws/S2");
         Assert.Equal("Q-14", await app.TagOn("S2"));
         Assert.True(await app.IsHeld("Q-14"));
+        Assert.Contains("against the advice: put on by mistake", SampleApp.Text((await app.GetPage("/saws/S2")).Body), StringComparison.Ordinal);
         var floor = await app.GetPage("/");
         Assert.Contains(floor.QuerySelectorAll(".tile"), t => t.TextContent.Contains("Osprey", StringComparison.Ordinal) && t.QuerySelector(".s-hold") is not null);
     }

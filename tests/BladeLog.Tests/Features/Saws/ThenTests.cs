@@ -49,7 +49,7 @@ public sealed class ThenTests
         var open = (await app.SendForm(then, "/saws/S2/then", ("OnTag", "Q-08"), ("Until", ""))).Refused();
         Assert.Contains("Another blade is on now", open.Beside("Until"), StringComparison.Ordinal);
         var late = (await app.SendForm(then, "/saws/S2/then", ("OnTag", "Q-08"), ("Until", "10:00"))).Refused();
-        Assert.Contains("Q-11 is on S2 since", late.Text, StringComparison.Ordinal);
+        Assert.Contains("Q-11 is on Osprey since", late.Text, StringComparison.Ordinal);
         Assert.Equal("10:00", late.Typed("Until"));
         (await app.SendForm(late.Page, "/saws/S2/then", ("Until", "9:45"))).LeadsTo("/saws/S2");
         Assert.Equal(0, await Unknown(app));

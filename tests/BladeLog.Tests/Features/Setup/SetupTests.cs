@@ -45,6 +45,8 @@ public sealed class SetupTests
         using var app = await ShopApp.Sample();
         var page = await app.GetPage("/setup");
         Assert.All(SettingList.All, d => Assert.NotNull(page.QuerySelector($"a[href='/setup/{d.Key}']")));
+        Assert.Contains("1 blade", SampleApp.Text(page.QuerySelector("a[href='/setup/stock.least']")), StringComparison.Ordinal);
+        Assert.DoesNotContain("1 blades", SampleApp.Text(page.Body), StringComparison.Ordinal);
         Assert.Contains("1 in 4", (await app.GetPage("/setup/life.retire_mark")).Body!.TextContent, StringComparison.Ordinal);
     }
 

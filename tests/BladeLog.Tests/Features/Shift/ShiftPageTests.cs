@@ -19,6 +19,16 @@ public sealed class ShiftPageTests(SampleApp sample) : IClassFixture<SampleApp>
     }
 
     [Fact]
+    public async Task The_note_orders_what_the_stock_page_orders_in_its_words()
+    {
+        var draft = (await sample.Page("/handover")).QuerySelector("textarea")!.TextContent.Split('\n').Single(l => l.StartsWith("Stock: ", StringComparison.Ordinal));
+        string[] noted = [.. draft["Stock: ".Length..].TrimEnd('.').Split(", ")];
+        string[] now = [.. (await sample.Page("/stock")).QuerySelectorAll("section .state").Select(s => SampleApp.Text(s)).Where(s => s.StartsWith("Order ", StringComparison.Ordinal))];
+        Assert.Equal(now.Count(n => n.EndsWith(" now", StringComparison.Ordinal)), noted.Count(n => n.EndsWith(" now", StringComparison.Ordinal)));
+        Assert.All(noted, n => Assert.Contains("O" + n[1..], now));
+    }
+
+    [Fact]
     public async Task The_sample_shop_has_eleven_notes_and_the_last_was_read_by_JP()
     {
         var notes = (await sample.Page("/handover")).QuerySelectorAll(".list>li");

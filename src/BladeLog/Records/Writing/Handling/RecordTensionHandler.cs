@@ -41,7 +41,7 @@ internal static class RecordTensionHandler
         }
 
         var spell = (await FactReader.ReadSpells(w.Db, saw.Id, from: at, until: at)).Cast<Spell?>().FirstOrDefault(s => s!.Value.From <= at && at < s.Value.End);
-        w.RefuseUnless(spell is not null, "Tag", $"No blade was on {saw.Code} at {w.Say(at)}: say which blade.");
+        w.RefuseUnless(spell is not null, "Tag", $"No blade was on {saw.Name} at {w.Say(at)}: say which blade.");
         return spell is { } on ? (saw, on.BladeId, at) : null;
     }
 }

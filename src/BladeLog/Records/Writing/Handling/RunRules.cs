@@ -15,7 +15,7 @@ internal static class RunRules
         var others = await Overlapping(w, saw, run.FromUtc, run.UntilUtc, without);
         if (IsCounted(run.Source) && others.FirstOrDefault(o => IsCounted(o.Source)) is { } same)
         {
-            w.Refuse(field, $"{saw.Code} has counted hours from {w.Say(same.FromUtc)} to {w.Say(same.UntilUtc)} already (entry {same.EntryId}).");
+            w.Refuse(field, $"{saw.Name} has counted hours from {w.Say(same.FromUtc)} to {w.Say(same.UntilUtc)} already (entry {same.EntryId}).");
             return;
         }
 
@@ -25,7 +25,7 @@ internal static class RunRules
         if (sum > elapsed * (metered ? 1 + MeterTolerance : 1))
         {
             var and = others.Count == 0 ? "" : $" together with entry {string.Join(", ", others.Select(o => o.EntryId))}";
-            w.Refuse(field, $"{saw.Code} would have run {Hours(sum)} in the {Hours(elapsed)} from {w.Say(run.FromUtc)} to {w.Say(run.UntilUtc)}{and}.");
+            w.Refuse(field, $"{saw.Name} would have run {Hours(sum)} in the {Hours(elapsed)} from {w.Say(run.FromUtc)} to {w.Say(run.UntilUtc)}{and}.");
         }
     }
 

@@ -35,7 +35,7 @@ internal static class SawHandler
         if (c.Replaces is { } old)
         {
             var replaced = await w.Db.SawSetups.AsNoTracking().Include(s => s.Entry).SingleOrDefaultAsync(s => s.EntryId == old && s.SawId == saw.Id);
-            w.RefuseUnless(replaced is not null, "Replaces", $"Entry {old} is no standing setup of {saw.Code}.");
+            w.RefuseUnless(replaced is not null, "Replaces", $"Entry {old} is no standing setup of {saw.Name}.");
             w.RefuseUnless(!string.IsNullOrWhiteSpace(c.Reason), "Reason", "Say what was wrong.");
             if (!w.Stands)
             {

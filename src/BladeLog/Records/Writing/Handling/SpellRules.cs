@@ -17,11 +17,11 @@ internal static class SpellRules
         }
     }
 
-    /// <summary>"Q-02 is on S1 since 2 Mar 2026 08:00 (entry 12)".</summary>
+    /// <summary>"Q-02 is on Osprey since 2 Mar 2026 08:00 (entry 12)".</summary>
     public static async Task<string> Words(WriteSession w, Spell spell)
     {
         var tag = await w.Db.Blades.Where(b => b.Id == spell.BladeId).Select(b => b.Tag).SingleAsync();
-        var saw = await w.Db.Saws.Where(s => s.Id == spell.SawId).Select(s => s.Code).SingleAsync();
+        var saw = await w.Db.Saws.Where(s => s.Id == spell.SawId).Select(s => s.Name).SingleAsync();
         return spell.Until is { } until
             ? $"{tag} was on {saw} from {w.Say(spell.From)} to {w.Say(until)} (entry {spell.MountId})"
             : $"{tag} is on {saw} since {w.Say(spell.From)} (entry {spell.MountId})";

@@ -27,7 +27,7 @@ internal static class SwapHandler
         }
         else if (blade is null)
         {
-            w.Refuse(nameof(c.Saw), $"No blade was on {saw.Code} at {w.Say(at)}.");
+            w.Refuse(nameof(c.Saw), $"No blade was on {saw.Name} at {w.Say(at)}.");
         }
 
         if (blade is not null && w.Stands)
@@ -52,13 +52,13 @@ internal static class SwapHandler
             .Select(d => new { d.EntryId, d.Mount.Blade.Tag, d.Entry.EnteredUtc, d.Entry.PersonId }).FirstOrDefaultAsync();
         if (mounts is null && dismounts is null)
         {
-            return !await Edits.Guard(w, saw, version, saw.Code);
+            return !await Edits.Guard(w, saw, version, saw.Name);
         }
 
         var on = mounts is not null && mounts.EntryId > (dismounts?.EntryId ?? 0);
         var last = on ? mounts : dismounts;
         w.ClashWith = new WriteResult.Clash(
-            await w.Who(last!.PersonId), last.EnteredUtc, on ? $"put {last.Tag} on {saw.Code}" : $"took {last.Tag} off {saw.Code}");
+            await w.Who(last!.PersonId), last.EnteredUtc, on ? $"put {last.Tag} on {saw.Name}" : $"took {last.Tag} off {saw.Name}");
         return true;
     }
 
@@ -66,7 +66,7 @@ internal static class SwapHandler
     {
         if (blade is not null && blade.Id == closing.BladeId)
         {
-            w.Refuse(nameof(c.OnTag), $"{blade.Tag} is on {saw.Code} already.");
+            w.Refuse(nameof(c.OnTag), $"{blade.Tag} is on {saw.Name} already.");
             return;
         }
 

@@ -15,13 +15,13 @@ internal static class UnfitRules
         var now = await w.NowOf(blade);
         if (now.LoopM is { } loop && (loop < setup.LoopLeastM - Hair || loop > setup.LoopMostM + Hair))
         {
-            found.Add($"{blade.Tag} is {w.Say(loop)} long; {saw.Code} takes {w.Say(setup.LoopLeastM)} to {w.Say(setup.LoopMostM)}.");
+            found.Add($"{blade.Tag} is {w.Say(loop)} long; {saw.Name} takes {w.Say(setup.LoopLeastM)} to {w.Say(setup.LoopMostM)}.");
         }
 
         // A ground blade is let off the lower end by what grinding takes away: the saw's range speaks of the width it was sold as.
         if (blade.Spec.WidthM < setup.WidthLeastM - Hair || now.WidthM > setup.WidthMostM + Hair)
         {
-            found.Add($"{blade.Tag} is {w.Say(now.WidthM)} wide; {saw.Code} takes {w.Say(setup.WidthLeastM)} to {w.Say(setup.WidthMostM)}.");
+            found.Add($"{blade.Tag} is {w.Say(now.WidthM)} wide; {saw.Name} takes {w.Say(setup.WidthLeastM)} to {w.Say(setup.WidthMostM)}.");
         }
 
         if (now.HoldId is { } holdId)
