@@ -63,24 +63,24 @@ public sealed record CutForm
     internal static CutForm Of(QueuedCut cut, ShopUnits units) => new()
     {
         Op = Guid.NewGuid().ToString(),
-        Version = units.Show(cut.Version),
+        Version = units.Typing.Show(cut.Version),
         Job = cut.Job,
         Species = cut.SpeciesTyped,
-        Height = CutSays.Bare(units.Show(new Length(cut.HeightM), Fields.CutHeight)),
-        Length = CutSays.Bare(units.Show(new Length(cut.LengthM), Fields.Board)),
-        Pieces = units.Show(cut.Pieces),
+        Height = CutSays.Bare(units.Typing.Show(new Length(cut.HeightM), Fields.CutHeight)),
+        Length = CutSays.Bare(units.Typing.Show(new Length(cut.LengthM), Fields.Board)),
+        Pieces = units.Typing.Show(cut.Pieces),
         Kind = cut.Kind.ToString(),
         Finish = cut.Finish.ToString(),
-        Radius = cut.RadiusM is { } r ? CutSays.Bare(units.Show(new Length(r), Fields.CurveRadius)) : null,
-        Bevel = cut.BevelRad > 0 ? units.Show(new Angle(cut.BevelRad)) : null,
-        Moisture = cut.MoisturePct is { } m ? CutSays.Bare(units.ShowPercent(m)) : null,
+        Radius = cut.RadiusM is { } r ? CutSays.Bare(units.Typing.Show(new Length(r), Fields.CurveRadius)) : null,
+        Bevel = cut.BevelRad > 0 ? units.Typing.Show(new Angle(cut.BevelRad)) : null,
+        Moisture = cut.MoisturePct is { } m ? CutSays.Bare(units.Typing.ShowPercent(m)) : null,
         Frozen = cut.Frozen ? "true" : null,
         Dirt = cut.Dirt.ToString(),
         Direction = cut.Direction.ToString(),
         ClassWork = cut.ClassWork ? "true" : null,
-        Nail = cut.NailChance > 0 ? CutSays.Bare(units.ShowPercent(cut.NailChance * 100)) : null,
-        Timber = cut.TimberMinorPerM3 is { } t ? units.ShowMoney(t) : null,
-        Due = cut.Due is { } due ? units.Show(due) : null,
+        Nail = cut.NailChance > 0 ? CutSays.Bare(units.Typing.ShowPercent(cut.NailChance * 100)) : null,
+        Timber = cut.TimberMinorPerM3 is { } t ? units.Typing.ShowMoney(t) : null,
+        Due = cut.Due is { } due ? units.Typing.Show(due) : null,
     };
 
     /// <summary>The cut it says, or null with the sentences in the reader.</summary>
@@ -93,7 +93,7 @@ public sealed record CutForm
         }
 
         Wood? wood = read.Wood(Species, nameof(Species));
-        double? height = read.NeedLength(Height, nameof(Height), Fields.CutHeight), length = read.NeedLength(Length, nameof(Length), Fields.Board);
+        double? height = read.NeedLength(Height, nameof(Height), Fields.CutHeight), length = read.NeedLength(Length, nameof(Length), Fields.CutLength);
         int? pieces = read.NeedPieces(Pieces, nameof(Pieces));
         CutKind? kind = read.OneOf<CutKind>(Kind, nameof(Kind), "Choose what kind of work it is.");
         Finish? finish = read.OneOf<Finish>(Finish, nameof(Finish), "Choose how fine the cut must be.");
@@ -139,7 +139,7 @@ public sealed record CutForm
 
 public sealed record CutFormModel(int? Number, CutForm Form, IReadOnlyList<Problem> Problems, ShopUnits Units, string MoistureDefault)
 {
-    public string Action => Number is { } n ? $"/cuts/{Units.Show(n)}/edit" : "/cuts/new";
+    public string Action => Number is { } n ? $"/cuts/{n}/edit" : "/cuts/new";
 
     /// <summary>Names to tap in place of an unknown one.</summary>
     public IReadOnlyList<string> Offers => Wood.Offers(Form.Species);

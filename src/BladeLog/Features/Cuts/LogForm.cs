@@ -51,15 +51,15 @@ public sealed record LogForm
     internal static LogForm Of(QueuedCut cut, SawNow? saw, double? speed, double? feed, ShopUnits units) => new()
     {
         Op = Guid.NewGuid().ToString(),
-        Version = units.Show(cut.Version),
+        Version = units.Typing.Show(cut.Version),
         Saw = saw?.Saw.Code,
         Speed = Plain(speed ?? saw?.Setup.UsualSpeedMps),
         Species = cut.SpeciesTyped,
-        Height = CutSays.Bare(units.Show(new Length(cut.HeightM / Math.Cos(cut.BevelRad)), Fields.CutHeight)),
-        Length = CutSays.Bare(units.Show(new Length(cut.LengthM), Fields.Board)),
-        Pieces = units.Show(cut.Pieces),
+        Height = CutSays.Bare(units.Typing.Show(new Length(cut.HeightM / Math.Cos(cut.BevelRad)), Fields.CutHeight)),
+        Length = CutSays.Bare(units.Typing.Show(new Length(cut.LengthM), Fields.Board)),
+        Pieces = units.Typing.Show(cut.Pieces),
         Assumed = Plain(feed),
-        Moisture = cut.MoisturePct is { } m ? CutSays.Bare(units.ShowPercent(m)) : null,
+        Moisture = cut.MoisturePct is { } m ? CutSays.Bare(units.Typing.ShowPercent(m)) : null,
         Frozen = cut.Frozen ? "true" : null,
         Dirt = cut.Dirt.ToString(),
     };
@@ -70,11 +70,11 @@ public sealed record LogForm
         Saw = saw.Saw.Code,
         Speed = Plain(last.SpeedMps),
         Species = last.SpeciesTyped,
-        Height = CutSays.Bare(units.Show(new Length(last.HeightM), Fields.CutHeight)),
-        Length = CutSays.Bare(units.Show(new Length(last.LengthM), Fields.Board)),
-        Pieces = units.Show(last.Pieces),
+        Height = CutSays.Bare(units.Typing.Show(new Length(last.HeightM), Fields.CutHeight)),
+        Length = CutSays.Bare(units.Typing.Show(new Length(last.LengthM), Fields.Board)),
+        Pieces = units.Typing.Show(last.Pieces),
         Assumed = Plain(last.FeedMps),
-        Moisture = last.MoisturePct is { } m ? CutSays.Bare(units.ShowPercent(m)) : null,
+        Moisture = last.MoisturePct is { } m ? CutSays.Bare(units.Typing.ShowPercent(m)) : null,
         Frozen = last.Frozen ? "true" : null,
         Dirt = last.Dirt.ToString(),
     };
@@ -109,7 +109,7 @@ public sealed record LogForm
             read.Refuse(nameof(Species), $"{wood.Typed} is not wood: its wear on an edge is not known here, so such a cut is not counted.");
         }
 
-        double? height = read.NeedLength(Height, nameof(Height), Fields.CutHeight), length = read.NeedLength(Length, nameof(Length), Fields.Board);
+        double? height = read.NeedLength(Height, nameof(Height), Fields.CutHeight), length = read.NeedLength(Length, nameof(Length), Fields.CutLength);
         int? pieces = read.NeedPieces(Pieces, nameof(Pieces));
         double? typed = read.Feed(Feed, nameof(Feed)), minutes = read.Minutes(Minutes, nameof(Minutes)), assumed = Si(Assumed), moisture = read.Moisture(Moisture, nameof(Moisture));
         Dirt? dirt = read.OneOf<Dirt>(Dirt, nameof(Dirt), "Choose how clean the wood was.");

@@ -39,7 +39,7 @@ internal static class CostPages
             Specs = [.. ran.GroupBy(b => b.Spec.Code).OrderBy(g => g.Key, NaturalOrder.Instance).Select(g => Row(Costs.Together(g.Key, g.Select(b => costs[b.Blade.Id])), null))],
             Blades = [.. ran.Select(b => Row(costs[b.Blade.Id], $"/blades/{b.Blade.Tag}"))],
             Grinds = [.. Costs.Grinds(sharpenings, shop.Blades).Select(g => (g.InHouse ? "Ground in the shop" : "Ground by a service", Money(g.Each, 2), $"{Said.Count(g.Count, "sharpening", "sharpenings")}, {units.ShowMoney(g.Spent)} together"))],
-            Teeth = saw is null ? [] : [.. Teeth(shop, advice, saw).OrderBy(t => t.Minor).Select(t => (t.Code, t.Teeth, Money(t.Minor, 3)))],
+            Teeth = saw is null ? [] : [.. Teeth(shop, advice, saw, units).OrderBy(t => t.Minor).Select(t => (t.Code, t.Teeth, Money(units.Units == UnitSystem.Inch ? t.Minor * 0.3048 * 0.3048 : t.Minor, 3)))],
             TeethOn = saw is null ? "" : $"On {saw.Saw.Name}, {units.ShowFeed(new Speed(4 / 60.0))}, clean medium wood: a sharpening and the share of the price that goes with each edge, over the metres an edge lasts.",
             Tags = [.. shop.Blades.Where(b => b.Break is null && b.Retirement is null && b.Place != Place.Gone).Select(b => b.Blade.Tag).Order(NaturalOrder.Instance)],
             Tag = asked?.File.Blade.Tag,
@@ -62,14 +62,14 @@ internal static class CostPages
     }
 
     /// <summary>Kinds that can be sharpened and fit the saw, at reference feed.</summary>
-    private static IEnumerable<(string Code, string Teeth, double Minor)> Teeth(ShopNow shop, ShopAdvice advice, SawNow saw) => shop.Blades
+    private static IEnumerable<(string Code, string Teeth, double Minor)> Teeth(ShopNow shop, ShopAdvice advice, SawNow saw, ShopUnits units) => shop.Blades
         .Where(b => b.Spec is { MostSharpenings: > 0, PriceMinor: not null, SharpeningPriceMinor: not null } && b.Spec.NewLoopM is { } loop && loop >= saw.Setup.LoopLeastM && loop <= saw.Setup.LoopMostM)
         .GroupBy(b => b.Spec.Code)
         .Select(g =>
         {
             BladeAdvice one = advice.Of(g.First());
             Spec spec = one.File.Spec;
-            return (g.Key, Said.Teeth(spec), Costs.ToothCost(
+            return (g.Key, Said.Teeth(spec, units), Costs.ToothCost(
                 spec.SharpeningPriceMinor!.Value, spec.PriceMinor!.Value, spec.MostSharpenings!.Value, one.Edge.PathToDullKm, new Speed(4 / 60.0), new Length(saw.Setup.LoopM), new Speed(saw.Setup.UsualSpeedMps)));
         });
 }
