@@ -42,11 +42,6 @@ public static class Figures
         return v > 999 ? ">999" : v.ToString("0", Plain);
     }
 
-    /// <summary>The same for a length of cut. A foot is so short that three digits would say ">999" of nearly every edge: feet go on, by the hundred, to 9,900.</summary>
-    public static string Floor(double value, string unit) => unit != "ft" || Half(Checked(value), 0) <= 999 ? Floor(value)
-        : value > 9_900 ? ">9,900"
-        : (Math.Floor(value / 100) * 100).ToString("#,##0", Plain);
-
     /// <summary>The used part of a life with its band: "0.6 (0.15 to 2.5)"; nothing used has none.</summary>
     public static string Used(double used, double low, double high) => used == 0 && low == 0 && high == 0
         ? "0"

@@ -151,11 +151,12 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
             return null;
         }
 
-        (double value, string unit) = Said.Cut(left.Metres, units);
+        // A foot is so short that three digits would say ">999" of nearly every edge: yards tell it as far as metres do.
+        (double value, string unit) = units.Units == UnitSystem.Inch ? (left.Metres / (3 * Handbook.Units.Exact.Foot), "yd") : (left.Metres, "m");
         string depth = left.CutNumber is { } n ? $"in cut {n}" : $"in clean wood {words.Length(left.DepthM)} deep at {words.Feed(left.FeedMps)}";
         // An edge that will not be ground again runs into the scrap, not into the grinder.
         string stop = blade.Grind.Pays ? "grind" : "scrap";
-        return new BigFigure(Figures.Floor(value, unit), unit, "to", stop, $"Sharpness: {Figures.Number(value)} {unit} left {depth}") { Worn = blade.Edge.Used, Worked = WorkedOut.Edge(blade, null, left.CutNumber) };
+        return new BigFigure(Figures.Floor(value), unit, "to", stop, $"Sharpness: {Figures.Number(value)} {unit} left {depth}") { Worn = blade.Edge.Used, Worked = WorkedOut.Edge(blade, null, left.CutNumber) };
     }
 
     private static (BigFigure? Figure, string? Words) Limit(BladeAdvice blade, ShopAdvice advice, ShopUnits units)

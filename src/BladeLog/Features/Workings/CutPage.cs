@@ -84,7 +84,7 @@ internal static class CutPage
                 Model = settings.Force,
             }
             : null;
-        List<BecauseLine> lines = [.. CutLines.OfGeometry(p, v, H, f, L)];
+        List<BecauseLine> lines = [.. CutLines.OfGeometry(p, v, H, f, L, shown)];
         string title = "Which feeds work in this cut?";
         IReadOnlyList<CurveFigure> curves = [];
         List<string> cautions = [];

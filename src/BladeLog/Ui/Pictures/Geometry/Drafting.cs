@@ -17,11 +17,14 @@ public sealed record Drafting(bool Inch)
         return new(units.Units == UnitSystem.Inch);
     }
 
-    /// <summary>On a drawing in mm the unit is left away, as drawings do; inches say so.</summary>
-    public string Length(double mm, int decimals) => Inch ? Figures.With(Inches(mm, decimals), "in") : Figures.Number(mm, decimals);
+    /// <summary>On a drawing the unit is left away, as drawings do: the line under it names the unit of all of them.</summary>
+    public string Length(double mm, int decimals) => Inch ? Inches(mm, decimals) : Figures.Number(mm, decimals);
 
     /// <summary>The same for those who hear it.</summary>
-    public string Said(double mm, int decimals) => Inch ? Length(mm, decimals) : $"{Figures.Number(mm, decimals)} mm";
+    public string Said(double mm, int decimals) => Length(mm, decimals) + (Inch ? " in" : " mm");
+
+    /// <summary>"millimetres" or "inches": for the line under a drawing.</summary>
+    public string Unit => Inch ? "inches" : "millimetres";
 
     public string FeedUnit => Inch ? "ft/min" : "m/min";
 
