@@ -16,7 +16,7 @@ public sealed partial class InchPagesTests
         // Typed by people, kept as it was said.
         ("", "face veneers 4 mm"), ("/handover", ""),
         // Other people's figures, as their source has them, and the range over which a published formula was checked.
-        ("/cautions", ""), ("/saws/S3/check", "3 to 13 mm"), ("/saws/S3/check", "within 6 mm"), ("/workings", "4.25 HB + 225 MPa"), ("/workings", "Bite 0.003 to 1.5 mm"),
+        ("/cautions", ""), ("/saws/S3/check", "3 to 13 mm"), ("/saws/S3/check", "within 6 mm"), ("/workings", "4.25 HB + 225 MPa"), ("/workings", "Bite 0.003 to 1.5 mm, band speed 3 to 60 m/s, pitch 1 to 75 mm"),
         ("/workings", "up to a bite of 0.1 mm"), ("/workings", "a bite over 0.1 mm"), ("/workings", "blades of 3 to 32 mm"), ("/workings", "0.05 to 0.25 mm, common practice"), ("/workings", "from 40 mm of width on"),
         ("/workings", "at least 150 mm long"), ("/workings/crack", "MPa√m"),
         // A setting keeps the unit its value is kept in; the choice of units names both.

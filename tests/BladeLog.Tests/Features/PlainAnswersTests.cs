@@ -52,7 +52,8 @@ public sealed class PlainAnswersTests(SampleShopApp shop) : IClassFixture<Sample
     public async Task From_when_on_it_was_the_other_blade_takes_a_date_alone()
     {
         Answered answer = await shop.App.Fill("/blades/Q-13/two", ("OtherTag", "Q-99"), ("From", "2026-11-25"));
-        Assert.Null(answer.Beside("From"));
+        // It is taken for that day's beginning, after which this label was on no saw.
+        Assert.Contains("from 25 Nov 2026 00:00", answer.Refused().Beside("From"), StringComparison.Ordinal);
     }
 
     [Fact]

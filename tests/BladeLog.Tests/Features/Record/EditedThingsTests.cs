@@ -11,6 +11,7 @@ public sealed class EditedThingsTests
         using ShopApp app = await ShopApp.Sample();
         await app.Be("MI");
         Done(await app.Fill("/specs/C1/edit", ("Kerf", "1.15 mm")));
+        app.Clock.Advance(TimeSpan.FromMinutes(1));
         Done(await app.Fill("/specs/C1/edit", ("Kerf", "1.2 mm")));
         string[] lines = await Lines(app);
         Assert.Contains(lines, l => l.StartsWith("A specification was changed: C1, kerf 1.1 mm to 1.15 mm", StringComparison.Ordinal));
