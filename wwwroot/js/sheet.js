@@ -67,15 +67,26 @@
   addEventListener('pagehide', () => { if (sent) sessionStorage.setItem('sent', sent); });
 
   // Keys beside a number: the figure of last time, and steps up and down from it. What is typed otherwise stays as it is.
+  // A fraction or a leading mark is inches: in a field of mm it is no number to step. A comma before three digits may be thousands.
+  function plain(text, unit) {
+    const part = /^(?:(\d+)[\s-]+)?(\d+)\/(\d+)$/.exec(text);
+    if (unit === 'mm' && (part || /^[.,]/.test(text))) return NaN;
+    if (part) return +(Number(part[1] ?? 0) + part[2] / part[3]).toFixed(4);
+    return /^[1-9]\d{0,2},\d{3}$/.test(text) ? NaN : Number(text.replace(',', '.'));
+  }
   document.documentElement.classList.add('scripted');
   document.addEventListener('click', event => {
     const key = event.target.closest('.steps button');
     if (!key) return;
-    const keys = key.closest('.steps'), field = document.getElementById(keys.dataset.steps);
-    const from = field.value.trim() || keys.querySelector('[data-set]')?.dataset.set || '0';
-    const now = Number(from.replace(',', '.')), places = t => (t.split('.')[1] ?? '').length;
+    const keys = key.closest('.steps'), field = document.getElementById(keys.dataset.steps), places = t => (t.split(/[.,]/)[1] ?? '').length;
     if (key.dataset.set !== undefined) field.value = key.dataset.set;
-    else if (Number.isFinite(now)) field.value = Math.max(0, now + Number(key.dataset.add)).toFixed(Math.max(places(key.dataset.add), places(from.replace(',', '.'))));
+    else {
+      const from = field.value.trim() || keys.querySelector('[data-set]')?.dataset.set || keys.dataset.from || '0';
+      const now = plain(from, field.parentElement.querySelector('.unit')?.textContent);
+      if (!Number.isFinite(now)) return;
+      const most = Math.max(places(key.dataset.add), places(from.includes('/') ? String(now) : from));
+      field.value = Math.max(0, now + Number(key.dataset.add)).toFixed(most);
+    }
     field.dispatchEvent(new Event('input', { bubbles: true }));
   });
 

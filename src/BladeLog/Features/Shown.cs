@@ -13,19 +13,19 @@ internal sealed class Shown(ShopUnits units)
 
     public ShopUnits Units => units;
 
-    public string SmallUnit => Inch ? "in" : "mm";
+    public string SmallUnit => units.SmallLengthUnit;
 
     public double Small(double metres) => Inch ? metres / Exact.Inch : metres * 1e3;
 
-    public string StressUnit => Inch ? "psi" : "MPa";
+    public string StressUnit => units.StressUnit;
 
     public double Stress(double pascals) => Inch ? pascals / Exact.Psi : pascals * 1e-6;
 
-    public string ForceUnit => Inch ? "lbf" : "N";
+    public string ForceUnit => units.ForceUnit;
 
     public double Force(double newtons) => Inch ? newtons / Exact.PoundForce : newtons;
 
-    public string FeedUnit => Inch ? "ft/min" : "m/min";
+    public string FeedUnit => units.FeedUnit;
 
     public double Feed(double metresPerSecond) => metresPerSecond * 60 / (Inch ? Exact.Foot : 1);
 

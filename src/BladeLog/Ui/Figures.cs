@@ -9,28 +9,35 @@ public static class Figures
     /// <summary>No-break space: a number and its unit stay on one line.</summary>
     public const char Glue = '\u00a0';
 
-    private static readonly CultureInfo Plain = CultureInfo.InvariantCulture;
+    private static readonly CultureInfo Invariant = CultureInfo.InvariantCulture;
 
     /// <summary>Feed: two figures below 1, one decimal below 10, none above.</summary>
     public static string Feed(double metresPerMinute)
     {
         var v = Checked(metresPerMinute);
         // Decided on the rounded number, so that 0.996 is written 1.0 and 9.96 is written 10.
-        return TwoFigures(v) < 1 ? TwoFigures(v).ToString("0.##########", Plain)
-            : Half(v, 1) < 10 ? Half(v, 1).ToString("0.0", Plain)
-            : Half(v, 0).ToString("#,##0", Plain);
+        return TwoFigures(v) < 1 ? TwoFigures(v).ToString("0.##########", Invariant)
+            : Half(v, 1) < 10 ? Half(v, 1).ToString("0.0", Invariant)
+            : Half(v, 0).ToString("#,##0", Invariant);
     }
 
     /// <summary>Hours, and bends or metres on a life band: one decimal below 10, none above.</summary>
     public static string Hours(double hours)
     {
         var v = Checked(hours);
-        return Half(v, 1) < 10 ? Half(v, 1).ToString("0.#", Plain) : Half(v, 0).ToString("#,##0", Plain);
+        return Half(v, 1) < 10 ? Half(v, 1).ToString("0.#", Invariant) : Half(v, 0).ToString("#,##0", Invariant);
     }
 
     /// <summary>A number with so many decimals and a comma between thousands.</summary>
     public static string Number(double value, int decimals = 0) =>
-        Half(Checked(value), decimals).ToString("N" + decimals.ToString(Plain), Plain);
+        Half(Checked(value), decimals).ToString("N" + decimals.ToString(Invariant), Invariant);
+
+    /// <summary>A number as it is typed: no comma between thousands, no zeros behind, so that it reads back as itself.</summary>
+    public static string Plain(double value, int decimals)
+    {
+        var rounded = Half(Checked(value), decimals);
+        return (rounded == 0 ? 0 : rounded).ToString("0." + new string('#', decimals), Invariant);
+    }
 
     /// <summary>A number and its unit, glued.</summary>
     public static string With(string figure, string unit) => $"{figure}{Glue}{unit}";
@@ -39,7 +46,7 @@ public static class Figures
     public static string Floor(double value)
     {
         var v = Half(Checked(value), 0);
-        return v > 999 ? ">999" : v.ToString("0", Plain);
+        return v > 999 ? ">999" : v.ToString("0", Invariant);
     }
 
     /// <summary>The used part of a life with its band: "0.6 (0.15 to 2.5)"; nothing used has none.</summary>
@@ -73,7 +80,7 @@ public static class Figures
             crowd *= 10;
         }
 
-        return $"about {Half(p * crowd, 0).ToString("0", Plain)} in {crowd.ToString("#,##0", Plain)}";
+        return $"about {Half(p * crowd, 0).ToString("0", Invariant)} in {crowd.ToString("#,##0", Invariant)}";
     }
 
     /// <summary>The same at the head of a sentence: "About 4 in 1,000".</summary>
@@ -96,7 +103,7 @@ public static class Figures
     };
 
     private static string TwoFigureText(double v) =>
-        Checked(v) == 0 ? "0" : TwoFigures(v).ToString("#,##0.############", Plain);
+        Checked(v) == 0 ? "0" : TwoFigures(v).ToString("#,##0.############", Invariant);
 
     private static double TwoFigures(double v)
     {

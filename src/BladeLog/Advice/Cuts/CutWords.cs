@@ -1,3 +1,4 @@
+using BladeLog.Advice.Life;
 using BladeLog.Handbook.BeamStrength;
 using BladeLog.Records;
 
@@ -66,7 +67,7 @@ public static class CutWords
 
     public static string Dull(double radius, double limit) => $"edge {Wording.Edge(radius)}, too dull for this ({Wording.Edge(limit)})";
 
-    public static string OffAsDull() => "came off as dull: sharpen it first";
+    public static string OffAsDull() => $"{LifeWords.OffAsDull}: sharpen it first";
 
     /// <summary>The limit that shuts the gate: the feed it allows lies below the first chip.</summary>
     public static string Shut(FeedLimitKind kind) => kind switch

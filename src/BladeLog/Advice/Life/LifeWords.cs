@@ -18,6 +18,9 @@ public static class LifeWords
         _ => "welds",
     };
 
+    /// <summary>What the person at the saw said of it.</summary>
+    public const string OffAsDull = "came off as dull";
+
     /// <summary>The rung of the ladder beside thickness and wheel.</summary>
     public static string Ladder(LifeVerdict verdict) => verdict switch
     {
@@ -96,7 +99,7 @@ public static class LifeWords
 
         if (blade.File.OffAsDull)
         {
-            yield return "It came off as dull.";
+            yield return $"It {OffAsDull}.";
         }
         else if (blade.Edge.Due)
         {

@@ -31,7 +31,7 @@ public sealed record BenchModel(IReadOnlyList<BenchRow> Sharpen, IReadOnlyList<B
             }
             else if (blade.State == BladeState.Sharpen)
             {
-                string why = file.OffAsDull ? "Came off as dull." : $"Edge {Wording.Edge(blade.Edge.RadiusM)}.";
+                string why = file.OffAsDull ? Said.Capital(LifeWords.OffAsDull) + "." : $"Edge {Wording.Edge(blade.Edge.RadiusM)}.";
                 sharpen.Add(Row(blade, advice, blade.Grind.Pays ? why : $"{why} {LifeWords.NoGrind(blade, advice.Settings, advice.Words)}", "sharpen", blade.Grind.Pays ? "Sharpen" : "No grind"));
             }
             else if (blade.InspectionOverdue || blade.State == BladeState.Look)

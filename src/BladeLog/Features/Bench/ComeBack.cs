@@ -36,8 +36,25 @@ public sealed record ComeBackForm : PostedForm
 /// <summary>A blade of the batch that came back before.</summary>
 public sealed record BackRow(string Tag, string Words);
 
+/// <summary>Of one blade as it went, each figure as it is typed: width and what was measured last; what is reckoned with where nothing was.</summary>
+public sealed record BeforeSent
+{
+    public string? Width { get; init; }
+
+    public string? Kerf { get; init; }
+
+    public string? KerfFrom { get; init; }
+
+    public string? Price { get; init; }
+
+    public string? PriceFrom { get; init; }
+}
+
 public sealed record ComeBackModel(ComeBackForm Form, FormState State, string Number, string Service, string Sent, IReadOnlyList<BackRow> Back, ShopUnits Units)
 {
+    /// <summary>What was known of each before it went, by tag.</summary>
+    public IReadOnlyDictionary<string, BeforeSent> Before { get; init; } = new Dictionary<string, BeforeSent>();
+
     /// <summary>Tags of those written as lost: they can come back after all.</summary>
     public IReadOnlyList<string> Lost { get; init; } = [];
 
@@ -119,11 +136,27 @@ internal static class ComeBack
         return await desk.Page<ComeBackPage, ComeBackModel>(
             new(form with { Lines = away }, state, batch.Number, batch.Service, Said.When(batch.Entry.AtUtc, desk.Now, units), [.. rows], units)
             {
+                Before = await Before(desk, [.. lines.Select(l => l.Tag)], units),
                 Lost = [.. lines.Where(l => IsLost(l.EntryId)).Select(l => l.Tag)],
                 Stranger = stranger?.Trim(),
                 StrangerWords = string.IsNullOrWhiteSpace(stranger) ? null : await Of(desk, batch, Tags.Read(stranger)),
             },
             state.Status);
+    }
+
+    private static async Task<Dictionary<string, BeforeSent>> Before(Desk desk, string[] tags, ShopUnits units)
+    {
+        var advice = await desk.Advice();
+        var paid = (await desk.Db.Sharpenings.AsNoTracking().Where(s => s.PriceMinor != null && tags.Contains(s.Blade.Tag))
+            .OrderBy(s => s.Entry.AtUtc).ThenBy(s => s.EntryId).Select(s => new { s.BladeId, s.PriceMinor }).ToListAsync()).ToLookup(s => s.BladeId, s => s.PriceMinor);
+        return advice.Now.Blades.Where(b => tags.Contains(b.Blade.Tag)).ToDictionary(b => b.Blade.Tag, b => new BeforeSent
+        {
+            Width = units.BareLength(b.WidthM, Fields.BladeWidth),
+            Kerf = units.BareLength(b.KerfM, Fields.Kerf),
+            KerfFrom = units.BareLength(advice.Of(b).Body.Kerf.Value, Fields.Kerf),
+            Price = units.BareMoney(paid[b.Blade.Id].LastOrDefault()),
+            PriceFrom = units.BareMoney(b.Spec.SharpeningPriceMinor),
+        });
     }
 
     /// <summary>A blade in the bundle that the docket does not name. Nothing is recorded of it before somebody knows whose it is.</summary>

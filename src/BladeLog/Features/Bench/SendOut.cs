@@ -61,7 +61,7 @@ internal static class SendOut
             .OrderBy(b => b.File.Blade.Tag, StringComparer.Ordinal)
             .Select(b => new SendOutRow(
                 b.File.Blade.Tag,
-                b.Grind.Pays && b.File.OffAsDull ? "came off as dull"
+                b.Grind.Pays && b.File.OffAsDull ? LifeWords.OffAsDull
                     : b.Grind.Pays ? $"edge {Wording.Edge(b.Edge.RadiusM)}" : LifeWords.NoGrind(b, advice.Settings, advice.Words),
                 !b.Grind.Pays));
         var services = await desk.Db.Batches.AsNoTracking().Select(b => b.Service).Distinct().ToListAsync();

@@ -36,6 +36,11 @@ public sealed record BladeFormModel<TForm>(TForm Form, FormState State, BladeFil
     /// <summary>Further words a page needs: names to call, codes to choose from.</summary>
     public IReadOnlyList<string> Names { get; init; } = [];
 
+    /// <summary>What each field was told last time, as it is typed there; none where nothing is known.</summary>
+    public IReadOnlyDictionary<string, string?> LastTime { get; init; } = new Dictionary<string, string?>();
+
+    public string? Last(string field) => LastTime.GetValueOrDefault(field);
+
     private string Where => File.Place switch
     {
         Place.OnSaw => "on a saw",

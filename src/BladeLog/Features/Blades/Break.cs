@@ -2,6 +2,7 @@ using BladeLog.Records;
 using BladeLog.Records.Writing;
 using BladeLog.Ui;
 using Microsoft.AspNetCore.Mvc;
+using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Features.Blades;
 
@@ -55,5 +56,18 @@ internal static class Break
     }
 
     private static Task<IResult> Show(Desk desk, string tag, BreakForm form, FormState state) =>
-        BladeForm.Show<BreakPage, BreakForm>(desk, tag, form, state);
+        BladeForm.Show<BreakPage, BreakForm>(desk, tag, form, state, async model => model with { LastTime = await LastTime(desk, model.Units) });
+
+    /// <summary>What the shop's last break cost, of which that was told.</summary>
+    private static async Task<IReadOnlyDictionary<string, string?>> LastTime(Desk desk, ShopUnits units)
+    {
+        var told = desk.Db.Breaks.AsNoTracking().OrderByDescending(b => b.LatestUtc).ThenByDescending(b => b.EntryId);
+        var minutes = await told.Where(b => b.MinutesLost != null).Select(b => b.MinutesLost).FirstOrDefaultAsync();
+        var cost = await told.Where(b => b.CostMinor != null).Select(b => b.CostMinor).FirstOrDefaultAsync();
+        return new Dictionary<string, string?>
+        {
+            [nameof(BreakForm.MinutesLost)] = minutes is { } m ? Figures.Plain(m, 1) : null,
+            [nameof(BreakForm.Cost)] = units.BareMoney(cost),
+        };
+    }
 }

@@ -68,9 +68,9 @@ internal static class Change
     {
         Spec = file.Spec.Code,
         Folded = file.Blade.Folded ? "true" : null,
-        MeasuredThickness = file.Blade.MeasuredThicknessM is { } t ? units.Typing.Show(new Handbook.Quantities.Length(t), Fields.Thickness) : null,
+        MeasuredThickness = units.BareLength(file.Blade.MeasuredThicknessM, Fields.Thickness),
         MeasuredHrc = file.Blade.MeasuredHrc?.ToString(System.Globalization.CultureInfo.InvariantCulture),
-        InspectEvery = file.Blade.InspectEveryH is { } h ? units.Typing.Show(TimeSpan.FromHours(h)) : null,
+        InspectEvery = file.Blade.InspectEveryH is { } h ? Figures.Plain(h, 4) : null,
         InspectEachMount = file.Blade.InspectEachMount ? "true" : null,
     };
 

@@ -26,6 +26,15 @@ internal static class CrackFacts
         return facts;
     }
 
+    /// <summary>How long the blade's crack was when it was measured last, for the field that asks it again.</summary>
+    public static async Task<IReadOnlyDictionary<string, string?>> LastTime(ShopDb db, int bladeId, ShopUnits units)
+    {
+        var looks = db.Inspections.Where(f => f.BladeId == bladeId && f.CrackLengthM > 0).Select(f => new { f.EntryId, f.Entry.AtUtc, f.CrackLengthM });
+        var holds = db.Holds.Where(f => f.BladeId == bladeId && f.CrackLengthM > 0).Select(f => new { f.EntryId, f.Entry.AtUtc, f.CrackLengthM });
+        var last = await looks.Concat(holds).OrderByDescending(f => f.AtUtc).ThenByDescending(f => f.EntryId).Select(f => f.CrackLengthM).FirstOrDefaultAsync();
+        return new Dictionary<string, string?> { [nameof(CrackForm.CrackLength)] = units.BareLength(last, Fields.CrackLength) };
+    }
+
     /// <summary>What a crack grew by between two measurements. No life is reckoned from it: any crack that can be seen is a hold.</summary>
     public static IEnumerable<BladeFact> Of(BladeFile file, IReadOnlyList<Fact> facts, Wording words)
     {

@@ -39,5 +39,5 @@ internal static class Hold
     }
 
     private static Task<IResult> Show(Desk desk, string tag, HoldForm form, FormState state) =>
-        BladeForm.Show<HoldPage, HoldForm>(desk, tag, form, state);
+        BladeForm.Show<HoldPage, HoldForm>(desk, tag, form, state, async model => model with { LastTime = await CrackFacts.LastTime(desk.Db, model.File.Blade.Id, model.Units) });
 }

@@ -65,5 +65,5 @@ internal static class Inspect
         where T : struct, Enum => Enum.TryParse<T>(string.Join(',', (names ?? []).Where(Enum.GetNames<T>().Contains)), out var flags) ? flags : default;
 
     private static Task<IResult> Show(Desk desk, string tag, InspectForm form, FormState state) =>
-        BladeForm.Show<InspectPage, InspectForm>(desk, tag, form, state);
+        BladeForm.Show<InspectPage, InspectForm>(desk, tag, form, state, async model => model with { LastTime = await CrackFacts.LastTime(desk.Db, model.File.Blade.Id, model.Units) });
 }

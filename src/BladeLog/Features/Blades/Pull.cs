@@ -98,6 +98,7 @@ internal static class Pull
             return model with
             {
                 Names = [.. shop.Saws.Select(s => s.Saw.Code)],
+                LastTime = await PullReading.LastTime(desk.Db, form, model, settings),
                 Lines = found?.Lines(Saw(shop, model.File, form), model.Advice.Body) ?? [],
             };
         });

@@ -4,6 +4,7 @@ using BladeLog.Handbook.Quantities;
 using BladeLog.Records;
 using BladeLog.Ui;
 using BladeLog.Ui.Forms;
+using Microsoft.EntityFrameworkCore;
 using static BladeLog.Features.Shown;
 using TensionReading = BladeLog.Handbook.Band.TensionReading;
 
@@ -96,6 +97,38 @@ internal sealed class PullReading
         return setup.StrandForceMostN is { } most && low.Newtons > most
             ? (units.Show(Tension.StrandForce(Reading.Value, Thickness, Width)), units.Show(new Force(most)))
             : null;
+    }
+
+    /// <summary>The last reading of this blade, as each way of measuring would have it.</summary>
+    public static async Task<IReadOnlyDictionary<string, string?>> LastTime(ShopDb db, PullForm form, BladeFormModel<PullForm> model, AdviceSettings settings)
+    {
+        var (body, units) = (model.Advice.Body, model.Units);
+        Length t = new(body.Thickness.Value), b = new(body.BodyWidth);
+        string? Load(double? pascals) => pascals is { } pa
+            ? units.BareForce((form.How == "wheel" ? 2 : 1) * Tension.StrandForce(new Stress(pa), t, b).Newtons)
+            : null;
+        var readings = db.TensionReadings.AsNoTracking().Where(r => r.BladeId == model.File.Blade.Id).OrderByDescending(r => r.Entry.AtUtc).ThenByDescending(r => r.EntryId);
+        var last = await readings.Select(r => (double?)r.TensionPa).FirstOrDefaultAsync();
+        var lasts = new Dictionary<string, string?>
+        {
+            [nameof(form.Tension)] = units.BareStress(last),
+            [nameof(form.Force)] = Load(last),
+            ["FromForce"] = Load(body.TargetPa),
+        };
+        if (form.How is "stretch" or "pluck" && await readings.FirstOrDefaultAsync(r => r.How == form.How) is { } same
+            && same.Typed.Split(" over ") is [var figure, var length])
+        {
+            figure = figure.Replace(" Hz", "", StringComparison.Ordinal);
+            PullForm again = form.How == "stretch" ? new() { How = form.How, Stretch = figure, Over = length } : new() { How = form.How, Note = figure, Span = length };
+
+            // Typed while the shop measured in other units, or before the blade was ground, it would now mean another tension.
+            if (Of(again, new FormReading(units, model.Now), body, settings, units) is { } read && Math.Abs(read.Reading.Value.Pascals / same.TensionPa - 1) < 0.1)
+            {
+                (lasts[nameof(form.Stretch)], lasts[nameof(form.Over)], lasts[nameof(form.Note)], lasts[nameof(form.Span)]) = (again.Stretch, again.Over, again.Note, again.Span);
+            }
+        }
+
+        return lasts;
     }
 
     public IReadOnlyList<BecauseLine> Lines(SawNow? saw, BladeBody of)

@@ -2,6 +2,7 @@ using BladeLog.Records;
 using BladeLog.Records.Writing;
 using BladeLog.Ui;
 using Microsoft.AspNetCore.Mvc;
+using Microsoft.EntityFrameworkCore;
 
 namespace BladeLog.Features.Blades;
 
@@ -59,5 +60,12 @@ internal static class Sharpen
     }
 
     private static Task<IResult> Show(Desk desk, string tag, SharpenForm form, FormState state) =>
-        BladeForm.Show<SharpenPage, SharpenForm>(desk, tag, form, state);
+        BladeForm.Show<SharpenPage, SharpenForm>(desk, tag, form, state, async model => model with
+        {
+            LastTime = new Dictionary<string, string?>
+            {
+                [nameof(form.Price)] = model.Units.BareMoney(await desk.Db.Sharpenings.AsNoTracking().Where(f => f.BladeId == model.File.Blade.Id && f.PriceMinor != null)
+                    .OrderByDescending(f => f.Entry.AtUtc).ThenByDescending(f => f.EntryId).Select(f => f.PriceMinor).FirstOrDefaultAsync()),
+            },
+        });
 }

@@ -61,6 +61,12 @@ public sealed record BreakModel
 
     public required CompleteForm Form { get; init; }
 
+    /// <summary>What was told of it before.</summary>
+    public CompleteForm Told { get; init; } = new();
+
+    /// <summary>Its run hours by the saws, as they are typed.</summary>
+    public string? HoursKnown { get; init; }
+
     public required FormState State { get; init; }
 
     public required bool ToComplete { get; init; }

@@ -51,9 +51,12 @@ internal static class BreakPages
 
         var units = await desk.Units();
         var words = new BreakSays(await desk.Advice(), units, desk.Now);
+        var told = AsTold(broken.Break, units);
         return await desk.Page<BreakPage, BreakModel>(
-            words.One(broken, form ?? AsTold(broken.Break, units), state) with
+            words.One(broken, form ?? told, state) with
             {
+                Told = told,
+                HoursKnown = Figures.Plain(broken.Blade.File.Hours, 1),
                 Who = (await desk.Who())?.Initials,
                 People = await desk.Db.People.AsNoTracking().Where(p => p.Active).OrderBy(p => p.Initials).Select(p => p.Initials).ToListAsync(),
             },
@@ -66,11 +69,11 @@ internal static class BreakPages
         HoursLow = Plain(broke.HoursLow),
         HoursHigh = Plain(broke.HoursHigh),
         MinutesLost = Plain(broke.MinutesLost),
-        Cost = broke.CostMinor is { } cost ? units.ShowMoney(cost) : null,
+        Cost = units.BareMoney(broke.CostMinor),
         Note = broke.Note,
     };
 
-    private static string? Plain(double? value) => value?.ToString("0.##", System.Globalization.CultureInfo.InvariantCulture);
+    private static string? Plain(double? value) => value is { } v ? Figures.Plain(v, 2) : null;
 
     /// <summary>Newest first.</summary>
     private static async Task<IReadOnlyList<BrokenBlade>> Broken(Desk desk, int? entry)

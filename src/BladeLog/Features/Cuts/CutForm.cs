@@ -4,6 +4,7 @@ using BladeLog.Records;
 using BladeLog.Records.Writing;
 using BladeLog.Ui;
 using Microsoft.AspNetCore.Mvc;
+using Microsoft.EntityFrameworkCore;
 using Problem = BladeLog.Ui.Forms.Problem;
 
 namespace BladeLog.Features.Cuts;
@@ -66,20 +67,20 @@ public sealed record CutForm
         Version = units.Typing.Show(cut.Version),
         Job = cut.Job,
         Species = cut.SpeciesTyped,
-        Height = CutSays.Bare(units.Typing.Show(new Length(cut.HeightM), Fields.CutHeight)),
-        Length = CutSays.Bare(units.Typing.Show(new Length(cut.LengthM), Fields.Board)),
+        Height = units.BareLength(cut.HeightM, Fields.CutHeight),
+        Length = units.BareLength(cut.LengthM, Fields.Board),
         Pieces = units.Typing.Show(cut.Pieces),
         Kind = cut.Kind.ToString(),
         Finish = cut.Finish.ToString(),
-        Radius = cut.RadiusM is { } r ? CutSays.Bare(units.Typing.Show(new Length(r), Fields.CurveRadius)) : null,
-        Bevel = cut.BevelRad > 0 ? units.Typing.Show(new Angle(cut.BevelRad)) : null,
-        Moisture = cut.MoisturePct is { } m ? CutSays.Bare(units.Typing.ShowPercent(m)) : null,
+        Radius = units.BareLength(cut.RadiusM, Fields.CurveRadius),
+        Bevel = cut.BevelRad > 0 ? units.BareAngle(cut.BevelRad) : null,
+        Moisture = cut.MoisturePct is { } m ? Figures.Plain(m, 1) : null,
         Frozen = cut.Frozen ? "true" : null,
         Dirt = cut.Dirt.ToString(),
         Direction = cut.Direction.ToString(),
         ClassWork = cut.ClassWork ? "true" : null,
-        Nail = cut.NailChance > 0 ? CutSays.Bare(units.Typing.ShowPercent(cut.NailChance * 100)) : null,
-        Timber = cut.TimberMinorPerM3 is { } t ? units.Typing.ShowMoney(t) : null,
+        Nail = cut.NailChance > 0 ? Figures.Plain(cut.NailChance * 100, 1) : null,
+        Timber = units.BareMoney(cut.TimberMinorPerM3),
         Due = cut.Due is { } due ? units.Typing.Show(due) : null,
     };
 
@@ -139,6 +140,15 @@ public sealed record CutForm
 
 public sealed record CutFormModel(int? Number, CutForm Form, IReadOnlyList<Problem> Problems, ShopUnits Units, string MoistureDefault)
 {
+    /// <summary>The cut as it stands, or the one put on the list before: what the keys of last time say.</summary>
+    public CutForm? Before { get; init; }
+
+    /// <summary>Moisture reckoned with where none is typed, in percent.</summary>
+    public string? MoistureReckoned { get; init; }
+
+    /// <summary>The shop's own value of a cubic metre.</summary>
+    public string? TimberReckoned { get; init; }
+
     public string Action => Number is { } n ? $"/cuts/{n}/edit" : "/cuts/new";
 
     /// <summary>Names to tap in place of an unknown one.</summary>
@@ -195,8 +205,18 @@ internal static class CutForms
     {
         AdviceSettings settings = (await desk.Advice()).Settings;
         string moisture = $"{Figures.Number(settings[CutSettings.Moisture])} % where nothing is typed: {settings.Known(CutSettings.Moisture).From}";
+        ShopUnits units = await desk.Units();
+        QueuedCut? before = number is { } n
+            ? await CutsPages.Find(desk, n)
+            : await desk.Db.QueuedCuts.AsNoTracking().OrderByDescending(c => c.Number).FirstOrDefaultAsync();
+        long timber = (await desk.Shop()).Shop.TimberMinorPerM3;
         return await desk.Page<CutFormPage, CutFormModel>(
-            new(number, form, problems, await desk.Units(), moisture),
+            new(number, form, problems, units, moisture)
+            {
+                Before = before is null ? null : CutForm.Of(before, units),
+                MoistureReckoned = Figures.Plain(settings[CutSettings.Moisture], 1),
+                TimberReckoned = timber > 0 ? units.BareMoney(timber) : null,
+            },
             problems.Count > 0 ? StatusCodes.Status422UnprocessableEntity : StatusCodes.Status200OK);
     }
 }

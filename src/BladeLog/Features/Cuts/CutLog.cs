@@ -102,6 +102,11 @@ internal static class CutLog
         LogModel model = new(cut, saw, form, problems, await desk.Shop(), units)
         {
             BladeAsked = blade,
+            // A feed that was only assumed is no figure of last time.
+            Before = cut is not null ? LogForm.Of(cut, null, null, null, units)
+                : last is not null ? LogForm.Of(last, saw!, units) with { Feed = last.FeedGrade == FeedGrade.Assumed ? null : units.BareFeed(last.FeedMps) }
+                : null,
+            MoistureReckoned = Figures.Plain((await desk.Advice()).Settings[CutSettings.Moisture], 1),
             Last = last is null ? null : LogForm.Of(last, saw!, units),
             LastSays = last is null ? null : $"{last.SpeciesTyped} {units.Show(new Handbook.Quantities.Length(last.HeightM), Fields.CutHeight)}, {CutSays.Piece(last.LengthM, units)} × {last.Pieces} at {CutSays.Feed(last.FeedMps, units)}",
         };

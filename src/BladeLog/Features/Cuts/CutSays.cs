@@ -133,13 +133,5 @@ internal static class CutSays
         return units.ShowMoney((long)Math.Round(minor, MidpointRounding.AwayFromZero));
     }
 
-    /// <summary>A figure for a field that names its unit: "190" of "190 mm".</summary>
-    public static string Bare(string figure)
-    {
-        ArgumentNullException.ThrowIfNull(figure);
-        int unit = figure.LastIndexOf(Figures.Glue);
-        return unit > 0 ? figure[..unit] : figure;
-    }
-
     public static string Few(int n) => n switch { 2 => "two", 3 => "three", 4 => "four", 5 => "five", _ => Figures.Number(n) };
 }

@@ -55,11 +55,11 @@ public sealed record LogForm
         Saw = saw?.Saw.Code,
         Speed = Plain(speed ?? saw?.Setup.UsualSpeedMps),
         Species = cut.SpeciesTyped,
-        Height = CutSays.Bare(units.Typing.Show(new Length(cut.HeightM / Math.Cos(cut.BevelRad)), Fields.CutHeight)),
-        Length = CutSays.Bare(units.Typing.Show(new Length(cut.LengthM), Fields.Board)),
+        Height = units.BareLength(cut.HeightM / Math.Cos(cut.BevelRad), Fields.CutHeight),
+        Length = units.BareLength(cut.LengthM, Fields.Board),
         Pieces = units.Typing.Show(cut.Pieces),
         Assumed = Plain(feed),
-        Moisture = cut.MoisturePct is { } m ? CutSays.Bare(units.Typing.ShowPercent(m)) : null,
+        Moisture = cut.MoisturePct is { } m ? Figures.Plain(m, 1) : null,
         Frozen = cut.Frozen ? "true" : null,
         Dirt = cut.Dirt.ToString(),
     };
@@ -70,11 +70,11 @@ public sealed record LogForm
         Saw = saw.Saw.Code,
         Speed = Plain(last.SpeedMps),
         Species = last.SpeciesTyped,
-        Height = CutSays.Bare(units.Typing.Show(new Length(last.HeightM), Fields.CutHeight)),
-        Length = CutSays.Bare(units.Typing.Show(new Length(last.LengthM), Fields.Board)),
+        Height = units.BareLength(last.HeightM, Fields.CutHeight),
+        Length = units.BareLength(last.LengthM, Fields.Board),
         Pieces = units.Typing.Show(last.Pieces),
         Assumed = Plain(last.FeedMps),
-        Moisture = last.MoisturePct is { } m ? CutSays.Bare(units.Typing.ShowPercent(m)) : null,
+        Moisture = last.MoisturePct is { } m ? Figures.Plain(m, 1) : null,
         Frozen = last.Frozen ? "true" : null,
         Dirt = last.Dirt.ToString(),
     };
@@ -168,6 +168,12 @@ public sealed record LogForm
 /// <summary>The page on which a cut is logged.</summary>
 public sealed record LogModel(QueuedCut? Cut, SawNow? AtSaw, LogForm Form, IReadOnlyList<Problem> Problems, ShopNow Shop, ShopUnits Units)
 {
+    /// <summary>The cut as it was planned, or the one before it on this saw: what the keys of last time say.</summary>
+    public LogForm? Before { get; init; }
+
+    /// <summary>Moisture reckoned with where none is typed, in percent.</summary>
+    public string? MoistureReckoned { get; init; }
+
     /// <summary>The last cut on this saw, to be repeated in one tap.</summary>
     public LogForm? Last { get; init; }
 

@@ -179,7 +179,7 @@ public sealed record RackModel
         _ when blade.Record.UnknownHistory => "history unknown: inspect",
         _ when file.Place == Place.AtSharpener && !blade.Grind.Pays => "no further grind",
         _ when file.Place == Place.AtSharpener => Run(file),
-        BladeState.Sharpen when file.OffAsDull => "came off as dull",
+        BladeState.Sharpen when file.OffAsDull => LifeWords.OffAsDull,
         BladeState.Sharpen => $"edge {Wording.Edge(blade.Edge.RadiusM)}",
         _ when blade.PastRetireMark => "rough work, then scrap",
         _ when blade.InspectionOverdue => "inspection due",

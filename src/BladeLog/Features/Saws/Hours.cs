@@ -136,7 +136,7 @@ internal static class Hours
             shown = form with { Speed = saw.Setup.Speeds.FirstOrDefault(s => s.SpeedMps == last)?.Position.ToString(System.Globalization.CultureInfo.InvariantCulture) };
         }
 
-        var (hint, stood) = form.Kind == "meter" ? await LastReading(desk, saw, units) : (await LastRun(desk, saw, units), null);
+        var (hint, stood) = form.Kind == "meter" ? await LastReading(desk, saw, units) : (await LastRun(desk, saw, units), await LastRunning(desk, saw));
         return await SawForm.Show<HoursPage, HoursForm>(desk, code, shown, state, hint, stood);
     }
 
@@ -147,8 +147,13 @@ internal static class Hours
         return last is null
             ? ("Its first reading.", null)
             : ($"It stood at {Figures.With(Figures.Number(last.ReadingMs / 3_600_000.0, 1), "h")} on {Said.When(last.AtUtc, desk.Now, units)}.",
-                (last.ReadingMs / 3_600_000.0).ToString("0.0", System.Globalization.CultureInfo.InvariantCulture));
+                Figures.Plain(last.ReadingMs / 3_600_000.0, 3));
     }
+
+    /// <summary>How long it ran the last time that hours were typed or timed.</summary>
+    public static async Task<string?> LastRunning(Desk desk, SawNow saw) =>
+        await desk.Db.Runs.AsNoTracking().Where(r => r.SawId == saw.Saw.Id && (r.Source == RunSource.Typed || r.Source == RunSource.Timer)).OrderByDescending(r => r.UntilUtc)
+            .Select(r => (long?)r.RunningMs).FirstOrDefaultAsync() is { } ms ? Figures.Plain(ms / 3_600_000.0, 1) : null;
 
     private static async Task<string> LastRun(Desk desk, SawNow saw, ShopUnits units) => await LastUntil(desk, saw) is { } until
         ? $"Empty is since the last hours entered: {Said.When(until, desk.Now, units)}."

@@ -76,6 +76,14 @@ public sealed record SwapModel
 
     public required string PullUnit { get; init; }
 
+    public required decimal PullStep { get; init; }
+
+    /// <summary>As it was measured last of the blade that goes on, on this saw.</summary>
+    public string? PullLast { get; init; }
+
+    /// <summary>What its specification wants.</summary>
+    public string? PullUsual { get; init; }
+
     public string? Who { get; init; }
 
     public required IReadOnlyList<string> People { get; init; }
@@ -118,7 +126,10 @@ public sealed record SwapModel
             Offers = [.. offers.Take(4)],
             MoreOffers = [.. offers.Skip(4)],
             PullWord = units.PullName,
-            PullUnit = units.Units == UnitSystem.Inch ? "psi" : "MPa",
+            PullUnit = units.StressUnit,
+            PullStep = units.Step(Fields.Stress),
+            PullLast = on is not null && on.LastTensionPa.TryGetValue(saw.Saw.Id, out double pulled) ? units.BareStress(pulled) : null,
+            PullUsual = on is null ? null : units.BareStress(advice.Of(on).Body.TargetPa),
             People = [],
         };
     }

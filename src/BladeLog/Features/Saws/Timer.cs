@@ -116,7 +116,7 @@ internal static class Timer
             Speed = speed?.Position.ToString(CultureInfo.InvariantCulture),
             Until = over ? form.Until ?? Written(desk.Now) : null,
         };
-        return await SawForm.Show<TimerPage, TimerForm>(desk, code, shown, state, over ? OnTooLong(desk.Now - saw.Timer!.Entry.AtUtc) : null);
+        return await SawForm.Show<TimerPage, TimerForm>(desk, code, shown, state, over ? OnTooLong(desk.Now - saw.Timer!.Entry.AtUtc) : null, await Hours.LastRunning(desk, saw));
     }
 
     private static async Task<TimeSpan> Cap(Desk desk) => TimeSpan.FromHours((await desk.Advice()).Settings[StockSettings.TimerCap]);

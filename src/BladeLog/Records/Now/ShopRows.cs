@@ -154,9 +154,10 @@ internal sealed class ShopRows
         return
         [
             .. rows
+                .Select(m => (On: m, Off: off.GetValueOrDefault(m.EntryId)))
                 .Select(m => new SpellRow(
-                    m.EntryId, m.SawId, m.BladeId, m.AtUtc, off.GetValueOrDefault(m.EntryId)?.AtUtc,
-                    m.TensionKnown == TensionKnown.Measured ? m.TensionPa : null, m.InsideOut, off.GetValueOrDefault(m.EntryId)?.Reason))
+                    m.On.EntryId, m.On.SawId, m.On.BladeId, m.On.AtUtc, m.Off?.AtUtc,
+                    m.On.TensionKnown == TensionKnown.Measured ? m.On.TensionPa : null, m.On.InsideOut, m.Off?.Reason))
                 .OrderBy(s => s.From).ThenBy(s => s.MountId),
         ];
     }

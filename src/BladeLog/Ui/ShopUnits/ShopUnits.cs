@@ -138,6 +138,8 @@ public sealed partial record ShopUnits
     /// <summary>A number with at most so many decimals and no zeros behind; a comma between thousands except in a form field.</summary>
     private string Num(double value, int decimals)
     {
+        if (!double.IsFinite(value))
+            return value.ToString(CultureInfo.InvariantCulture);
         var rounded = Math.Round(value, decimals, MidpointRounding.AwayFromZero);
         return (rounded == 0 ? 0 : rounded).ToString((ForFields ? "0." : "#,##0.") + new string('#', decimals), CultureInfo.InvariantCulture);
     }
