@@ -44,14 +44,16 @@ internal sealed class NameIndex<T> where T : class
     {
         ArgumentNullException.ThrowIfNull(typed);
         string word = Plain(typed);
-        return direct.Concat(aliases)
+        var near = direct.Concat(aliases)
             .Select(entry => (Name: nameOf(entry.Value), Distance: EditDistance.Between(word, entry.Key)))
             .GroupBy(x => x.Name, StringComparer.Ordinal)
             .Select(g => (Name: g.Key, Distance: g.Min(x => x.Distance)))
             .OrderBy(x => x.Distance).ThenBy(x => x.Name, StringComparer.Ordinal)
             .Take(count)
-            .Select(x => x.Name)
             .ToList();
+
+        // A third of its letters wrong is a slip; more is another word.
+        return near.Count > 0 && near[0].Distance <= Math.Max(1, word.Length / 3) ? [.. near.Select(x => x.Name)] : [];
     }
 
     /// <summary>Lower case; hyphens, underscores, brackets and runs of blanks are one blank.</summary>

@@ -21,7 +21,7 @@ public static partial class WoodSpeciesTable
         ?? throw new ArgumentOutOfRangeException(nameof(key), key, $"There is no wood with the key \"{key}\".");
 
     /// <summary>The names most like an unknown word.</summary>
-    /// <remarks>By <see cref="EditDistance"/> to key, name or any alias; three by default, nearest first.</remarks>
+    /// <remarks>By <see cref="EditDistance"/> to key, name or any alias; three by default, nearest first; none where even the nearest differs in more than a third of the letters typed.</remarks>
     /// <source key="damerau-1964" where="errors of one letter: added, dropped, changed, swapped"/>
     public static IReadOnlyList<string> NearestNames(string typed, int count = 3) => Index.Nearest(typed, count);
 }

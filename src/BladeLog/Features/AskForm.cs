@@ -52,35 +52,35 @@ internal sealed class AskForm(IQueryCollection query, ShopUnits units, bool from
 
     /// <summary>A length in metres.</summary>
     public double? Length(string name, string label, TypedField kind, Given start, bool optional = false) =>
-        Read(name, label, start, optional, t => units.ReadLength(t, kind), l => l.Metres, v => units.Show(new Length(v), kind));
+        Read(name, label, start, optional, t => units.ReadLength(t, kind), l => l.Metres, v => units.Typing.Show(new Length(v), kind));
 
     public double? Stress(string name, string label, Given start, bool optional = false) =>
-        Read(name, label, start, optional, t => units.ReadStress(t), s => s.Pascals, v => units.Show(new Stress(v)));
+        Read(name, label, start, optional, t => units.ReadStress(t), s => s.Pascals, v => units.Typing.Show(new Stress(v)));
 
     public double? Force(string name, string label, Given start, bool optional = false) =>
-        Read(name, label, start, optional, t => units.ReadForce(t), f => f.Newtons, v => units.Show(new Force(v)));
+        Read(name, label, start, optional, t => units.ReadForce(t), f => f.Newtons, v => units.Typing.Show(new Force(v)));
 
     public double? BandSpeed(string name, string label, Given start) =>
-        Read(name, label, start, false, t => units.ReadBandSpeed(t), s => s.MetresPerSecond, v => units.ShowBandSpeed(new Speed(v)));
+        Read(name, label, start, false, t => units.ReadBandSpeed(t), s => s.MetresPerSecond, v => units.Typing.ShowBandSpeed(new Speed(v)));
 
     public double? Feed(string name, string label, Given start, bool optional = false) =>
-        Read(name, label, start, optional, t => units.ReadFeed(t), s => s.MetresPerSecond, v => units.ShowFeed(new Speed(v)));
+        Read(name, label, start, optional, t => units.ReadFeed(t), s => s.MetresPerSecond, v => units.Typing.ShowFeed(new Speed(v)));
 
     public double? Power(string name, string label, Given start, bool optional = false) =>
-        Read(name, label, start, optional, t => units.ReadPower(t, AtTheBand), p => p.Watts, v => units.Show(new Power(v)));
+        Read(name, label, start, optional, t => units.ReadPower(t, AtTheBand), p => p.Watts, v => units.Typing.Show(new Power(v)));
 
     public double? Density(string name, string label, Given start, bool optional = false) =>
-        Read(name, label, start, optional, t => units.ReadDensity(t), d => d.KilogramsPerCubicMetre, v => units.Show(new Density(v)));
+        Read(name, label, start, optional, t => units.ReadDensity(t), d => d.KilogramsPerCubicMetre, v => units.Typing.Show(new Density(v)));
 
     public double? Angle(string name, string label, Given start) =>
-        Read(name, label, start, false, t => units.ReadAngle(t, Ui.Fields.Hook), a => a.Radians, v => units.Show(new Angle(v)));
+        Read(name, label, start, false, t => units.ReadAngle(t, Ui.Fields.Hook), a => a.Radians, v => units.Typing.Show(new Angle(v)));
 
     /// <summary>The mean pitch in metres.</summary>
     public double? Pitch(string name, string label, Given start) =>
-        Read(name, label, start, false, units.ReadPitch, p => p.Mean.Metres, v => units.Show(ToothPitch.Between(v, v)));
+        Read(name, label, start, false, units.ReadPitch, p => p.Mean.Metres, v => units.Typing.Show(ToothPitch.Between(v, v)));
 
     public double? Moisture(string name, string label, Given start) =>
-        Read(name, label, start, false, units.ReadMoisture, m => m, units.ShowPercent);
+        Read(name, label, start, false, units.ReadMoisture, m => m, units.Typing.ShowPercent);
 
     /// <summary>A plain number within bounds, with the words of its unit behind it.</summary>
     public double? Number(string name, string label, string article, double least, double most, string unit, Given start, bool optional = false)
@@ -102,7 +102,7 @@ internal sealed class AskForm(IQueryCollection query, ShopUnits units, bool from
     /// <summary>One wheel diameter after the other, in metres.</summary>
     public IReadOnlyList<double>? Wheels(string name, string label, IReadOnlyList<double> start, string mark)
     {
-        string Show(IEnumerable<double> wheels) => string.Join("; ", wheels.Select(w => units.Show(new Length(w), Ui.Fields.WheelDiameter)));
+        string Show(IEnumerable<double> wheels) => string.Join("; ", wheels.Select(w => units.Typing.Show(new Length(w), Ui.Fields.WheelDiameter)));
         string typed = Typed(name);
         if (typed.Length == 0)
         {

@@ -22,6 +22,9 @@ internal sealed class Desk(TimeProvider clock, ShopDb db, ShopWriter writer, IHt
     /// <summary>What was just recorded and can be taken back: entry, words, time.</summary>
     private const string SavedCookie = "saved";
 
+    /// <summary>In the place of an entry that can be undone: it was.</summary>
+    private const int WasUndone = -1;
+
     private static readonly TimeSpan UndoFor = TimeSpan.FromSeconds(60);
 
     private ShopNow? _shop;
@@ -87,8 +90,8 @@ internal sealed class Desk(TimeProvider clock, ShopDb db, ShopWriter writer, IHt
     public async Task<Chrome> Chrome()
     {
         var shop = await Shop();
-        var (savedAt, undo) = LastSaved(Units(shop.Shop));
-        return new Chrome(shop.Shop.Name, (await Who())?.Initials, savedAt, undo);
+        var (savedAt, undo, undone) = LastSaved(Units(shop.Shop));
+        return new Chrome(shop.Shop.Name, (await Who())?.Initials, savedAt, undo) { Undone = undone };
     }
 
     public async Task<IResult> Page<TView, TModel>(TModel model, int status = StatusCodes.Status200OK)
@@ -102,22 +105,31 @@ internal sealed class Desk(TimeProvider clock, ShopDb db, ShopWriter writer, IHt
             Http.RequestAborted);
 
     /// <summary>Where a recorded form leads: to its page, with an undo for a minute.</summary>
-    public IResult Saved(WriteResult.Done done, string what, bool canUndo = true)
+    public IResult Saved(WriteResult.Done done, string what, bool canUndo = true) => Told(done, canUndo ? done.EntryId : 0, what);
+
+    /// <summary>Where an undo leads: the title block says that, and what, is undone.</summary>
+    public IResult Undone(WriteResult.Done done, string what) => Told(done, WasUndone, what);
+
+    /// <summary>What was done by the entry that is being undone, as its undo named it.</summary>
+    public string WhatWas(int entry) =>
+        Http.Request.Cookies[SavedCookie]?.Split('|', 3) is [var id, _, var what] && id == entry.ToString(CultureInfo.InvariantCulture) ? what : "";
+
+    private IResult Told(WriteResult.Done done, int entry, string what)
     {
         Http.Response.Cookies.Append(
             SavedCookie,
-            string.Create(CultureInfo.InvariantCulture, $"{(canUndo ? done.EntryId : 0)}|{new DateTimeOffset(Now).ToUnixTimeSeconds()}|{what}"),
+            string.Create(CultureInfo.InvariantCulture, $"{entry}|{new DateTimeOffset(Now).ToUnixTimeSeconds()}|{what}"),
             new CookieOptions { HttpOnly = true, SameSite = SameSiteMode.Strict, MaxAge = TimeSpan.FromHours(12), IsEssential = true });
         return Results.Redirect(done.AnswerPath);
     }
 
-    private (string? SavedAt, UndoOffer? Undo) LastSaved(ShopUnits units)
+    private (string? SavedAt, UndoOffer? Undo, string? Undone) LastSaved(ShopUnits units)
     {
         var parts = Http.Request.Cookies[SavedCookie]?.Split('|', 3);
         if (parts is not [var entry, var seconds, var what] || !int.TryParse(entry, out var id)
             || !long.TryParse(seconds, NumberStyles.None, CultureInfo.InvariantCulture, out var unix) || unix > 253_402_300_799)
         {
-            return (null, null);
+            return (null, null, null);
         }
 
         var at = DateTimeOffset.FromUnixTimeSeconds(unix).UtcDateTime;
@@ -125,6 +137,6 @@ internal sealed class Desk(TimeProvider clock, ShopDb db, ShopWriter writer, IHt
         var undo = id > 0 && Now - at is var age && age >= TimeSpan.Zero && age < UndoFor
             ? new UndoOffer(what, $"/record/{id.ToString(CultureInfo.InvariantCulture)}/void", Guid.NewGuid().ToString())
             : null;
-        return (local, undo);
+        return (local, undo, id == WasUndone ? what : null);
     }
 }

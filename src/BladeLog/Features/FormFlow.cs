@@ -15,8 +15,9 @@ internal static class FormFlow
     /// <param name="what">What was done, short, for the undo: "Q-17 on Wren".</param>
     /// <param name="again">The same page with the same texts.</param>
     /// <param name="canUndo">Whether one tap can take it back.</param>
+    /// <param name="undone">This takes back what was saved a moment ago.</param>
     public static async Task<IResult> Send<TForm>(
-        this Desk desk, Command command, TForm form, string leadsTo, string what, Func<FormState, Task<IResult>> again, bool canUndo = true)
+        this Desk desk, Command command, TForm form, string leadsTo, string what, Func<FormState, Task<IResult>> again, bool canUndo = true, bool undone = false)
         where TForm : PostedForm
     {
         if (!string.IsNullOrEmpty(form.Who) && !await desk.SayWho(form.Who))
@@ -26,7 +27,7 @@ internal static class FormFlow
 
         return await desk.Write(command, form.Op, leadsTo, form: JsonSerializer.Serialize(form)) switch
         {
-            WriteResult.Done done => desk.Saved(done, what, canUndo),
+            WriteResult.Done done => undone ? desk.Undone(done, what) : desk.Saved(done, what, canUndo),
             WriteResult.Refused refused => await again(State<TForm>(refused.Problems, null)),
             WriteResult.Ask ask => await again(State<TForm>(ask.Problems, ask.OneMoreTap)),
             WriteResult.Clash clash => await again(await Clashed(desk, clash)),

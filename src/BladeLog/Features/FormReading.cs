@@ -67,6 +67,36 @@ internal sealed class FormReading(ShopUnits units, DateTime now)
         return null;
     }
 
+    /// <summary>A day that lies ahead: the sentence offers none that is over.</summary>
+    public DateOnly? DayAhead(string field, string? text) => Read(field, text, t => units.ReadDate(t, now, ahead: true));
+
+    /// <summary>A moment where the hour may be forgotten: a date alone is its first moment, or its last that has been.</summary>
+    public DateTime? TimeOrDay(string field, string? text, bool ends = false)
+    {
+        if (string.IsNullOrWhiteSpace(text) || units.ReadTime(text, now).IsGood || !units.ReadDate(text, now).TryGet(out DateOnly day, out _))
+        {
+            return Time(field, text);
+        }
+
+        DateTime begins = FirstMoment(day), over = FirstMoment(day.AddDays(1)).AddMinutes(-1);
+        return !ends ? begins : over < now || begins > now ? over : now;
+    }
+
+    /// <summary>Midnight on the shop's clock, or the first minute after it where the clocks went forward over it.</summary>
+    private DateTime FirstMoment(DateOnly day)
+    {
+        DateTime at = day.ToDateTime(TimeOnly.MinValue);
+        while (units.Zone.IsInvalidTime(at))
+        {
+            at = at.AddMinutes(1);
+        }
+
+        // Of a midnight that came twice the earlier one.
+        return units.Zone.IsAmbiguousTime(at)
+            ? DateTime.SpecifyKind(at - units.Zone.GetAmbiguousTimeOffsets(at).Max(), DateTimeKind.Utc)
+            : TimeZoneInfo.ConvertTimeToUtc(at, units.Zone);
+    }
+
     /// <summary>A moment on the shop's clock; one that came twice that night is asked.</summary>
     public DateTime? Time(string field, string? text)
     {

@@ -10,9 +10,10 @@ namespace BladeLog.Features;
 internal static class Said
 {
     /// <summary>"3 TPI hook", "2-3 TPI tipped", "22 mm hook": how the trade calls a row of teeth.</summary>
-    public static string Teeth(Spec spec)
+    public static string Teeth(Spec spec, ShopUnits units)
     {
         ArgumentNullException.ThrowIfNull(spec);
+        ArgumentNullException.ThrowIfNull(units);
         string form = spec.TipKind switch
         {
             TipKind.Tipped => "tipped",
@@ -27,25 +28,38 @@ internal static class Said
         double few = Exact.Inch / spec.PitchCoarseM, many = Exact.Inch / spec.PitchFineM;
         string pitch = Whole(few) && Whole(many)
             ? spec.PitchCoarseM == spec.PitchFineM ? $"{few:0.#} TPI" : $"{few:0.#}-{many:0.#} TPI"
+            : units.Units == UnitSystem.Inch ? units.Show(new Length(spec.PitchMeanM), Fields.Pitch)
             : $"{Figures.Number(spec.PitchMeanM * 1e3, 1)} mm".Replace(".0 mm", " mm", StringComparison.Ordinal);
         return $"{pitch.Replace(' ', Figures.Glue)} {form}";
     }
 
-    /// <summary>"38 × 0.9": width now by thickness, in the shop's unit.</summary>
+    /// <summary>"38 × 0.9", "1.496 × 0.035": width when new by thickness, in the shop's unit.</summary>
     public static string Section(BladeFile blade, ShopUnits units)
     {
         ArgumentNullException.ThrowIfNull(blade);
         ArgumentNullException.ThrowIfNull(units);
         return units.Units == UnitSystem.Inch
-            ? $"{units.Show(new Length(blade.Spec.WidthM), Fields.BladeWidth)} × {units.Show(new Length(blade.ThicknessM), Fields.Thickness)}"
+            ? $"{Bare(units.Show(new Length(blade.Spec.WidthM), Fields.BladeWidth))} × {Bare(units.Show(new Length(blade.ThicknessM), Fields.Thickness))}"
             : $"{blade.Spec.WidthM * 1e3:0.###} × {blade.ThicknessM * 1e3:0.###}";
     }
+
+    /// <summary>A figure without the unit behind it.</summary>
+    private static string Bare(string figure) => figure[..figure.LastIndexOf(Figures.Glue)];
 
     public static string Width(double metres, ShopUnits units)
     {
         ArgumentNullException.ThrowIfNull(units);
-        return units.Units == UnitSystem.Inch ? Figures.With(Figures.Number(metres / Exact.Inch, 3), "in") : Figures.With(Figures.Number(metres * 1e3, 1), "mm");
+        return units.Units == UnitSystem.Inch ? units.Show(new Length(metres), Fields.BladeWidth) : Figures.With(Figures.Number(metres * 1e3, 1), "mm");
     }
+
+    /// <summary>A path of a tooth through wood: km, or miles.</summary>
+    public static string Path(double km, ShopUnits units, int decimals)
+    {
+        ArgumentNullException.ThrowIfNull(units);
+        return units.Units == UnitSystem.Inch ? Figures.With(Figures.Number(km * 1e3 / Mile, decimals), "miles") : Figures.With(Figures.Number(km, decimals), "km");
+    }
+
+    private const double Mile = 5280 * Exact.Foot;
 
     public static (double Value, string Unit) Cut(double metres, ShopUnits units)
     {
@@ -85,6 +99,10 @@ internal static class Said
         return along == thick ? thick : $"{thick}, {along} along the blade at this bevel";
     }
 
+    /// <summary>A day as people say it: "3 Dec", "4 Oct 2025".</summary>
+    public static string Day(DateOnly day, DateTime now, ShopUnits units) =>
+        day.ToString(day.Year == Local(now, units).Year ? "d MMM" : "d MMM yyyy", System.Globalization.CultureInfo.InvariantCulture);
+
     public static string When(DateTime utc, DateTime now, ShopUnits units)
     {
         ArgumentNullException.ThrowIfNull(units);
@@ -98,6 +116,9 @@ internal static class Said
             _ => at.ToString("d MMM yyyy", System.Globalization.CultureInfo.InvariantCulture),
         };
     }
+
+    /// <summary>"4 Oct 2025 10:42", where the hour matters and the day may be long ago.</summary>
+    public static string Moment(DateTime utc, ShopUnits units) => Local(utc, units).ToString("d MMM yyyy HH:mm", System.Globalization.CultureInfo.InvariantCulture);
 
     /// <summary>"1:25 h" of a time that has passed.</summary>
     public static string Clock(TimeSpan time) => Figures.With($"{Math.Floor(time.TotalHours):0}:{time.Minutes:00}", "h");

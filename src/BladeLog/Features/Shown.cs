@@ -35,6 +35,24 @@ internal sealed class Shown(ShopUnits units)
 
     public string FeedText(double metresPerSecond) => double.IsFinite(metresPerSecond) ? Figures.With(Figures.Feed(Feed(metresPerSecond)), FeedUnit) : "no limit";
 
+    public string PathUnit => Inch ? "miles" : "km";
+
+    /// <summary>A path of a tooth in km, as its axis has it.</summary>
+    public double? Path(double? km) => Inch ? km * 1e3 / (5280 * Exact.Foot) : km;
+
+    public string FarText(double metres) => Inch ? Figures.With(Figures.Number(metres / Exact.Foot, 0), "ft") : Figures.With(Figures.Number(metres, 1), "m");
+
+    public string GulletText(Area area) => Inch
+        ? Figures.With(Figures.Number(area.SquareMetres / (Exact.Inch * Exact.Inch), 4), "in²")
+        : Figures.With(Figures.Number(area.SquareMillimetres, 1), "mm²");
+
+    /// <summary>Push for each length of give.</summary>
+    public string StiffText(double newtonsPerMillimetre) => Inch
+        ? Figures.With(Figures.Number(newtonsPerMillimetre * 1e3 * Exact.Inch / Exact.PoundForce, 0), "lbf/in")
+        : Figures.With(Figures.Number(newtonsPerMillimetre, 1), "N/mm");
+
+    public string AreaText(double squareMetres) => Inch ? Figures.With(Figures.Number(squareMetres / (Exact.Foot * Exact.Foot), 0), "ft²") : Figures.With(Figures.Number(squareMetres, 1), "m²");
+
     public string SmallText(double metres, int decimals = 1) => Figures.With(Figures.Number(Small(metres), Inch ? decimals + 1 : decimals), SmallUnit);
 
     public static string Micrometres(double metres, int decimals = 1) => Figures.With(Figures.Number(metres * 1e6, decimals), "µm");

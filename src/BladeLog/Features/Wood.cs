@@ -32,7 +32,7 @@ internal sealed record Wood(string Key, string Typed, string? TakenAs, MaterialK
         IReadOnlyList<string> near = MaterialTable.NearestNames(typed);
         wrong = near.Count > 0
             ? $"\"{typed}\" is not a wood known here. The nearest names are: {string.Join(", ", near)}."
-            : $"\"{typed}\" is not a wood known here. Write its usual name, such as European oak.";
+            : $"\"{typed}\" is not a wood known here, nor near one. Write its usual name, such as European oak; the field Wood of a new cut lists them all.";
         return null;
     }
 
@@ -41,6 +41,13 @@ internal sealed record Wood(string Key, string Typed, string? TakenAs, MaterialK
     {
         string typed = (text ?? "").Trim();
         return typed.Length is 0 or > LongestName || MaterialTable.Find(typed, out _) is not null ? [] : MaterialTable.NearestNames(typed);
+    }
+
+    /// <summary>What is said beside a field that lists the woods.</summary>
+    public static string Unknown(string typed)
+    {
+        IReadOnlyList<string> near = MaterialTable.NearestNames(typed);
+        return $"\"{(typed.Length > 40 ? typed[..40] : typed)}\" is not in the handbook. {(near.Count > 0 ? $"Near it: {string.Join(", ", near)}." : "The field itself lists all that are.")}";
     }
 
     public static IReadOnlyList<string> Names { get; } = [.. MaterialTable.All.Select(m => m.Name)];

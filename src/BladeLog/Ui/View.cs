@@ -20,6 +20,9 @@ public abstract class View<TModel> : ComponentBase
 /// <param name="Undo">The entry that can still be taken back, if any.</param>
 public sealed record Chrome(string ShopName, string? Who, string? SavedAt, UndoOffer? Undo)
 {
+    /// <summary>What was undone last, where nothing was saved since; null: the last was saved and stands.</summary>
+    public string? Undone { get; init; }
+
     /// <summary>A sheet without a shop: first start, sign-in, a failure.</summary>
     public static Chrome Bare { get; } = new("", null, null, null);
 }

@@ -65,7 +65,7 @@ public class ShopUnitsLengthTests
         Assert.Equal(105.125 * 25.4, _metric.ReadLength("105,125 in", Fields.Loop).Value.Millimetres, 1e-9);
         Assert.Equal(5.69, _metric.ReadLength("5,690", Fields.BladeWidth).Value.Millimetres, 1e-9);
         Assert.Equal(4013.2, _metric.ReadLength("4013,2", Fields.Loop).Value.Millimetres, 1e-9);
-        Assert.Equal("5690\u00A0mm", _metric.ReadLength("5,690", Fields.Loop).Understood);
+        Assert.Equal("5,690\u00A0mm", _metric.ReadLength("5,690", Fields.Loop).Understood);
     }
 
     [Fact]
@@ -142,12 +142,15 @@ public class ShopUnitsLengthTests
     [InlineData(12.7, "12.7 mm", "1/2 in")]
     [InlineData(31.75, "31.8 mm", "1 1/4 in")]
     [InlineData(25.4, "25.4 mm", "1 in")]
-    [InlineData(13, "13 mm", "0.5118 in")]
-    [InlineData(12.74, "12.7 mm", "1/2 in")]
-    [InlineData(12.76, "12.8 mm", "0.5024 in")]
-    [InlineData(2667, "2667 mm", "105 in")]
-    [InlineData(4013.2, "4013.2 mm", "158 in")]
-    public void A_length_is_shown_in_the_unit_of_the_shop_and_in_64ths_within_a_twentieth_of_a_mm(double mm, string metric, string inch)
+    [InlineData(13, "13 mm", "0.512 in")]
+    [InlineData(12.74, "12.7 mm", "0.502 in")]
+    [InlineData(12.76, "12.8 mm", "0.502 in")]
+    [InlineData(25, "25 mm", "0.984 in")]
+    [InlineData(50, "50 mm", "1.97 in")]
+    [InlineData(900, "900 mm", "35.4 in")]
+    [InlineData(2667, "2,667 mm", "105 in")]
+    [InlineData(4013.2, "4,013.2 mm", "158 in")]
+    public void A_length_is_shown_in_the_unit_of_the_shop_and_as_a_fraction_only_where_it_is_one(double mm, string metric, string inch)
     {
         var length = Handbook.Quantities.Length.FromMillimetres(mm);
         Assert.Equal(metric.Replace(' ', '\u00A0'), _metric.Show(length));
@@ -155,11 +158,23 @@ public class ShopUnitsLengthTests
         Assert.Equal(_inch.Show(length), _metric.Other.Show(length));
     }
 
+    [Theory]
+    [InlineData(12.74, "12.7 mm", "1/2 in")]
+    [InlineData(12.76, "12.8 mm", "0.5024 in")]
+    [InlineData(2667, "2667 mm", "105 in")]
+    [InlineData(13, "13 mm", "0.5118 in")]
+    public void In_a_form_field_a_length_has_no_comma_and_every_digit_it_needs_to_be_read_back(double mm, string metric, string inch)
+    {
+        var length = Handbook.Quantities.Length.FromMillimetres(mm);
+        Assert.Equal(metric.Replace(' ', '\u00A0'), _metric.Typing.Show(length));
+        Assert.Equal(inch.Replace(' ', '\u00A0'), _inch.Typing.Show(length));
+    }
+
     [Fact]
     public void A_thickness_is_shown_in_thousandths_never_in_64ths()
     {
         var t = Handbook.Quantities.Length.FromMillimetres(0.8);
-        Assert.Equal("0.0315\u00A0in", _inch.Show(t, Fields.Thickness));
-        Assert.Equal("0.8\u00A0mm (0.0315\u00A0in)", _metric.ShowBoth(t, Fields.Thickness));
+        Assert.Equal("0.031\u00A0in", _inch.Show(t, Fields.Thickness));
+        Assert.Equal("0.8\u00A0mm (0.031\u00A0in)", _metric.ShowBoth(t, Fields.Thickness));
     }
 }

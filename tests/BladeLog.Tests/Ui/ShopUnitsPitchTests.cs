@@ -139,5 +139,5 @@ public class ShopUnitsPitchTests
 
     [Fact]
     public void A_blade_print_is_shown_back()
-        => Assert.Equal("12.7\u00A0mm × 0.635\u00A0mm × 8.467\u00A0mm × 2667\u00A0mm", _metric.ReadBladePrint("1/2 x .025 x 3 x 105").Understood);
+        => Assert.Equal("12.7\u00A0mm × 0.635\u00A0mm × 8.467\u00A0mm × 2,667\u00A0mm", _metric.ReadBladePrint("1/2 x .025 x 3 x 105").Understood);
 }

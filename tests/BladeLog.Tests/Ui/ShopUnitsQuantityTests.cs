@@ -83,7 +83,7 @@ public class ShopUnitsQuantityTests
         Assert.Equal(metric, Read(_metric, what, text).Si, metric * 1e-9);
         // 15 ft/min is no band speed, so the refusal is the right answer there.
         if (what == "band")
-            Assert.Equal("\"15\" cannot be right. A band speed lies between 20\u00A0ft/min and 19685\u00A0ft/min.", Read(_inch, what, text).Problem);
+            Assert.Equal("\"15\" cannot be right. A band speed lies between 20\u00A0ft/min and 19,685\u00A0ft/min.", Read(_inch, what, text).Problem);
         else
             Assert.Equal(inch, Read(_inch, what, text).Si, inch * 1e-9);
     }
@@ -172,15 +172,15 @@ public class ShopUnitsQuantityTests
     }
 
     [Theory]
-    [InlineData("stress", "15 ksi", "103.4 MPa", "15000 psi")]
-    [InlineData("force", "312.5 lbf", "1390 N", "312.5 lbf")]
-    [InlineData("band", "5000 fpm", "25.4 m/s", "5000 ft/min")]
+    [InlineData("stress", "15 ksi", "103.4 MPa", "15,000 psi")]
+    [InlineData("force", "312.5 lbf", "1,390 N", "312.5 lbf")]
+    [InlineData("band", "5000 fpm", "25.4 m/s", "5,000 ft/min")]
     [InlineData("feed", "3 m/min", "3 m/min", "9.8 ft/min")]
     [InlineData("power", "3 hp", "2.24 kW", "3 hp")]
     [InlineData("density", "650 kg/m3", "650 kg/m³", "40.6 lb/ft³")]
     [InlineData("hours", "1:30", "1 h 30 min", "1 h 30 min")]
     [InlineData("hours", "45 s", "45 s", "45 s")]
-    [InlineData("meter", "1234.5", "1234.5 h", "1234.5 h")]
+    [InlineData("meter", "1234.5", "1,234.5 h", "1,234.5 h")]
     public void A_quantity_is_shown_in_the_unit_of_the_shop(string what, string text, string metric, string inch)
     {
         Assert.Equal(metric.Replace(' ', '\u00A0'), Read(_metric, what, text).Shown);

@@ -64,7 +64,7 @@ internal static class Docket
         return new DocketLine(
             file.Blade.Tag,
             $"{loop} × {Said.Width(body.Width.Value, units)} × {units.Show(new Length(body.Thickness.Value), Fields.Thickness)}",
-            Said.Teeth(file.Spec),
+            Said.Teeth(file.Spec, units),
             $"{units.Show(new Angle(body.Rake.Value))}{Default(body.Rake)}",
             body.Tip switch
             {

@@ -44,7 +44,7 @@ internal static class SendOut
         var read = new FormReading(units, desk.Now);
         List<string> tags = [.. form.Pick ?? [], .. (form.Tags ?? "").Split([' ', ',', ';', '\n', '\r'], StringSplitOptions.RemoveEmptyEntries).Select(Records.Tags.Read)];
         read.RefuseUnless(tags.Count > 0, nameof(form.Tags), "Tick or type the blades that go.");
-        DateTime? promised = read.Date(nameof(form.Promised), form.Promised) is { } day
+        DateTime? promised = read.DayAhead(nameof(form.Promised), form.Promised) is { } day
             ? TimeZoneInfo.ConvertTimeToUtc(day.ToDateTime(new TimeOnly(12, 0)), units.Zone)
             : null;
         var command = new SendBatch(form.Number?.Trim() ?? "", form.Service?.Trim() ?? "", [.. tags.Distinct()], promised, read.Time(nameof(form.At), form.At));

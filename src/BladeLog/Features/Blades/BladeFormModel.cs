@@ -22,7 +22,7 @@ public sealed record BladeFormModel<TForm>(TForm Form, FormState State, BladeFil
     public IReadOnlyList<string> People { get; init; } = [];
 
     /// <summary>Where it is and what is said of it, in one line.</summary>
-    public string Line => $"{Said.Section(File, Units)}, {Said.Teeth(File.Spec)}; {Where}";
+    public string Line => $"{Said.Section(File, Units)}, {Said.Teeth(File.Spec, Units)}; {Where}";
 
     /// <summary>Why another grind is not worth its price; null: it is.</summary>
     public string? NoGrind { get; init; }

@@ -41,6 +41,9 @@ public sealed record BladeModel
 
     public required ToothSpec Teeth { get; init; }
 
+    /// <summary>What the figures on its drawings are written in.</summary>
+    public required Drafting In { get; init; }
+
     public required double NewWidth { get; init; }
 
     public required double LeastWidth { get; init; }

@@ -2,6 +2,7 @@ using BladeLog.Advice;
 using BladeLog.Advice.Life;
 using BladeLog.Records;
 using BladeLog.Ui;
+using BladeLog.Ui.Pictures.Geometry;
 
 namespace BladeLog.Features.Blades;
 
@@ -21,6 +22,7 @@ internal static class BladePageModel
             Lede = blade.State == BladeState.Hold ? [.. blade.Advice.Because.Take(1)] : blade.Advice.Because,
             State = StateOf(blade),
             Teeth = Drawn.Teeth(blade.Body, file.Spec),
+            In = Drafting.Of(units),
             NewWidth = blade.Body.NewWidth.Value * 1e3,
             LeastWidth = blade.Body.LeastWidth.Value * 1e3,
             Body = blade.Body.Thickness.Value * 1e3,

@@ -25,7 +25,7 @@ internal sealed class BladeParts(BladeAdvice blade, ShopAdvice advice, ShopUnits
             new("Width", Said.Width(file.WidthM, units), $"{Bare(file.Spec.WidthM)} new, {Bare(blade.Body.LeastWidth.Value)} least{Mark(blade.Body.LeastWidth)}, {ground}"),
             new("Body", units.Show(new Length(blade.Body.Thickness.Value), Fields.Thickness), life is { ThicknessToWheel: { } ratio, On: { } on } ? $"1/{Wording.Number(1 / ratio, 0)} of {Whose(on)} smallest wheel" : null),
             new("Kerf", units.Show(new Length(blade.Body.Kerf.Value), Fields.Kerf), KerfFrom()),
-            new("Teeth", Said.Teeth(file.Spec), $"{pitch}, {Figures.Number(double.RadiansToDegrees(blade.Body.Rake.Value))}°{Mark(blade.Body.Rake)}, {TipWords()}"),
+            new("Teeth", Said.Teeth(file.Spec, units), $"{pitch}, {Figures.Number(double.RadiansToDegrees(blade.Body.Rake.Value))}°{Mark(blade.Body.Rake)}, {TipWords()}"),
             new("Loop", file.LoopM is { } loop ? units.Show(new Length(loop), Fields.Loop) : "not welded yet", $"{Said.Count(file.Welds, "weld", "welds")}, {WeldWords()}"),
             new("Run", Figures.With(Figures.Hours(file.Hours), "h"), file.Hours > 0 ? $"{Millions(life.Bends)} bends" : "never on"),
             new("Where", Where(), file.LastInspectedUtc is { } seen ? $"inspected {Said.When(seen, advice.Now.AsOf, units)}" : "never inspected"),
@@ -202,7 +202,7 @@ internal sealed class BladeParts(BladeAdvice blade, ShopAdvice advice, ShopUnits
 
     private bool Usable => blade.State is not (BladeState.Broken or BladeState.Retired);
 
-    private static string Km(long mm) => mm == 0 ? "none" : Figures.With(Figures.Number(mm * 1e-6, mm < 9_950_000 ? 2 : 1), "km");
+    private string Km(long mm) => mm == 0 ? "none" : Said.Path(mm * 1e-6, units, mm < 9_950_000 ? 2 : 1);
 
     public static string Millions(double bends) => bends >= 1e6 ? Figures.With(Figures.Number(bends / 1e6, bends < 1e7 ? 2 : 1), "million") : Figures.Number(bends);
 

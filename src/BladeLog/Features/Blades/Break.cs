@@ -42,11 +42,11 @@ internal static class Break
         var site = read.Choice<BreakSite>(nameof(form.Site), form.Site, "Say where it broke; not known is an answer.");
         var command = new RecordBreak(tag, site ?? default)
         {
-            EarliestUtc = read.Time(nameof(form.Earliest), form.Earliest),
-            LatestUtc = read.Time(nameof(form.Latest), form.Latest),
+            EarliestUtc = read.TimeOrDay(nameof(form.Earliest), form.Earliest),
+            LatestUtc = read.TimeOrDay(nameof(form.Latest), form.Latest, ends: true),
             HoursLow = read.Duration(nameof(form.HoursLow), form.HoursLow, Fields.RunHours)?.TotalHours,
             HoursHigh = read.Duration(nameof(form.HoursHigh), form.HoursHigh, Fields.RunHours)?.TotalHours,
-            MinutesLost = read.Duration(nameof(form.MinutesLost), form.MinutesLost, Fields.Minutes)?.TotalMinutes,
+            MinutesLost = read.Duration(nameof(form.MinutesLost), form.MinutesLost, Fields.MinutesLost)?.TotalMinutes,
             CostMinor = read.Money(nameof(form.Cost), form.Cost),
             Note = string.IsNullOrWhiteSpace(form.Note) ? null : form.Note.Trim(),
         };

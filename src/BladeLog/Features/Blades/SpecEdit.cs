@@ -90,29 +90,29 @@ internal static class SpecEdit
 
     private static SpecEditForm FormOf(Spec s, ShopUnits units)
     {
-        string? Metres(double? metres, TypedField field) => metres is { } m ? units.Show(new Length(m), field) : null;
+        string? Metres(double? metres, TypedField field) => metres is { } m ? units.Typing.Show(new Length(m), field) : null;
         return new SpecEditForm
         {
             Code = s.Code,
             Width = Metres(s.WidthM, Fields.BladeWidth),
             Thickness = Metres(s.ThicknessM, Fields.Thickness),
-            Pitch = units.Show(new ToothPitch(new Length(s.PitchCoarseM), new Length(s.PitchFineM))),
+            Pitch = units.Typing.Show(new ToothPitch(new Length(s.PitchCoarseM), new Length(s.PitchFineM))),
             NewLoop = Metres(s.NewLoopM, Fields.Loop),
             ToothForm = s.ToothForm.ToString(),
             TipKind = s.TipKind.ToString(),
             TipMaterial = s.TipMaterial.ToString(),
             BodySteel = s.BodySteel.ToString(),
             BodyHrc = s.BodyHrc?.ToString(CultureInfo.InvariantCulture),
-            Rake = s.RakeRad is { } rake ? units.Show(new Angle(rake)) : null,
+            Rake = s.RakeRad is { } rake ? units.Typing.Show(new Angle(rake)) : null,
             GulletDepth = Metres(s.GulletDepthM, Fields.GulletDepth),
             GulletArea = (s.GulletAreaM2 * 1e6)?.ToString("0.##", CultureInfo.InvariantCulture),
             SetPattern = s.SetPattern == Handbook.Quantities.SetPattern.Raker ? nameof(Handbook.Quantities.SetPattern.Raker) : nameof(Handbook.Quantities.SetPattern.Alternate),
             Kerf = Metres(s.KerfM, Fields.Kerf),
-            Tension = s.TensionPa is { } pa ? units.Show(new Stress(pa)) : null,
+            Tension = s.TensionPa is { } pa ? units.Typing.Show(new Stress(pa)) : null,
             LeastWidth = Metres(s.LeastWidthM, Fields.BladeWidth),
-            SharpeningPrice = s.SharpeningPriceMinor is { } price ? units.ShowMoney(price) : null,
+            SharpeningPrice = s.SharpeningPriceMinor is { } price ? units.Typing.ShowMoney(price) : null,
             MostSharpenings = s.MostSharpenings?.ToString(CultureInfo.InvariantCulture),
-            Price = s.PriceMinor is { } costs ? units.ShowMoney(costs) : null,
+            Price = s.PriceMinor is { } costs ? units.Typing.ShowMoney(costs) : null,
             LeastStock = s.LeastStock?.ToString(CultureInfo.InvariantCulture),
         };
     }

@@ -44,8 +44,8 @@ internal static class TwoBlades
         var read = new FormReading(await desk.Units(), desk.Now);
         var other = Tags.Read(form.OtherTag ?? "");
         read.RefuseUnless(other.Length > 0, nameof(form.OtherTag), "Paint another tag on one of the two, and write it here.");
-        var from = read.Time(nameof(form.From), form.From);
-        read.RefuseUnless(from is not null || !string.IsNullOrWhiteSpace(form.From), nameof(form.From), "Say from when on it was the other blade, such as yesterday 7:15.");
+        var from = read.TimeOrDay(nameof(form.From), form.From);
+        read.RefuseUnless(from is not null || !string.IsNullOrWhiteSpace(form.From), nameof(form.From), "Say from when on it was the other blade, such as yesterday 7:15, or a date alone for that day's beginning.");
         var command = new SplitLabel(file.Blade.Tag, other, from ?? default, string.IsNullOrWhiteSpace(form.Reason) ? $"Two blades wore the label {file.Blade.Tag}." : form.Reason.Trim())
         {
             Spec = string.IsNullOrWhiteSpace(form.Spec) ? file.Spec.Code : form.Spec,
@@ -76,7 +76,7 @@ internal static class TwoBlades
             state.Status);
     }
 
-    private static string Of(Spec s, ShopUnits units) => $"{units.Show(new Length(s.WidthM), Fields.BladeWidth)} × {units.Show(new Length(s.ThicknessM), Fields.Thickness)}, {Said.Teeth(s)}";
+    private static string Of(Spec s, ShopUnits units) => $"{units.Show(new Length(s.WidthM), Fields.BladeWidth)} × {units.Show(new Length(s.ThicknessM), Fields.Thickness)}, {Said.Teeth(s, units)}";
 
     private static string Loop(double? loop, ShopUnits units) => loop is { } l ? $", loop {units.Show(new Length(l), Fields.Loop)}" : "";
 }

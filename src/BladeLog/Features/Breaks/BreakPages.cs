@@ -33,7 +33,7 @@ internal static class BreakPages
         {
             HoursLow = read.Duration(nameof(form.HoursLow), form.HoursLow, Fields.RunHours)?.TotalHours,
             HoursHigh = read.Duration(nameof(form.HoursHigh), form.HoursHigh, Fields.RunHours)?.TotalHours,
-            MinutesLost = read.Duration(nameof(form.MinutesLost), form.MinutesLost, Fields.Minutes)?.TotalMinutes,
+            MinutesLost = read.Duration(nameof(form.MinutesLost), form.MinutesLost, Fields.MinutesLost)?.TotalMinutes,
             CostMinor = read.Money(nameof(form.Cost), form.Cost),
             Note = form.Note,
         };

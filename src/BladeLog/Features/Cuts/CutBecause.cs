@@ -29,7 +29,7 @@ public sealed record CutBecause(IReadOnlyList<BecauseLine> Blade, IReadOnlyList<
     private static BecauseLine Line(Figure f, Wording words, ShopUnits units) => new(
         Said.Capital(f.Name == "tension" ? words.Tension : f.Name),
         Value(f, units),
-        f.How,
+        Reckoned.InWords(f.How, units),
         Reckoned.Source(f.Source),
         f.Provenance);
 
@@ -41,6 +41,7 @@ public sealed record CutBecause(IReadOnlyList<BecauseLine> Blade, IReadOnlyList<
         "MPa" => units.Show(new Stress(f.Value * 1e6)),
         "N" => units.Show(new Force(f.Value)),
         "W" => units.Show(new Power(f.Value)),
+        "km" or "m" or "mm²" => Reckoned.Far(f, units),
         "minor units" => CutSays.Money(f.Value, units),
         "" when f.Name == "chance of a break" => Figures.Chance(f.Value),
         "" => Digits(f.Value),

@@ -64,12 +64,12 @@ public sealed record CutForm
     internal static CutForm Of(QueuedCut cut, ShopUnits units) => new()
     {
         Op = Guid.NewGuid().ToString(),
-        Version = units.Show(cut.Version),
+        Version = units.Typing.Show(cut.Version),
         Job = cut.Job,
         Species = cut.SpeciesTyped,
         Height = units.BareLength(cut.HeightM, Fields.CutHeight),
         Length = units.BareLength(cut.LengthM, Fields.Board),
-        Pieces = units.Show(cut.Pieces),
+        Pieces = units.Typing.Show(cut.Pieces),
         Kind = cut.Kind.ToString(),
         Finish = cut.Finish.ToString(),
         Radius = units.BareLength(cut.RadiusM, Fields.CurveRadius),
@@ -81,7 +81,7 @@ public sealed record CutForm
         ClassWork = cut.ClassWork ? "true" : null,
         Nail = cut.NailChance > 0 ? Figures.Plain(cut.NailChance * 100, 1) : null,
         Timber = units.BareMoney(cut.TimberMinorPerM3),
-        Due = cut.Due is { } due ? units.Show(due) : null,
+        Due = cut.Due is { } due ? units.Typing.Show(due) : null,
     };
 
     /// <summary>The cut it says, or null with the sentences in the reader.</summary>
@@ -94,7 +94,7 @@ public sealed record CutForm
         }
 
         Wood? wood = read.Wood(Species, nameof(Species));
-        double? height = read.NeedLength(Height, nameof(Height), Fields.CutHeight), length = read.NeedLength(Length, nameof(Length), Fields.Board);
+        double? height = read.NeedLength(Height, nameof(Height), Fields.CutHeight), length = read.NeedLength(Length, nameof(Length), Fields.CutLength);
         int? pieces = read.NeedPieces(Pieces, nameof(Pieces));
         CutKind? kind = read.OneOf<CutKind>(Kind, nameof(Kind), "Choose what kind of work it is.");
         Finish? finish = read.OneOf<Finish>(Finish, nameof(Finish), "Choose how fine the cut must be.");
@@ -149,7 +149,7 @@ public sealed record CutFormModel(int? Number, CutForm Form, IReadOnlyList<Probl
     /// <summary>The shop's own value of a cubic metre.</summary>
     public string? TimberReckoned { get; init; }
 
-    public string Action => Number is { } n ? $"/cuts/{Units.Show(n)}/edit" : "/cuts/new";
+    public string Action => Number is { } n ? $"/cuts/{n}/edit" : "/cuts/new";
 
     /// <summary>Names to tap in place of an unknown one.</summary>
     public IReadOnlyList<string> Offers => Wood.Offers(Form.Species);

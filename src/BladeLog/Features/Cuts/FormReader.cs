@@ -39,7 +39,7 @@ internal sealed class FormReader(ShopUnits units, DateTime now)
 
     public long? Money(string? text, string field) => Read(text, field, t => units.ReadMoney(t));
 
-    public DateOnly? Date(string? text, string field) => Read(text, field, t => units.ReadDate(t, now));
+    public DateOnly? Date(string? text, string field) => Read(text, field, t => units.ReadDate(t, now, ahead: true));
 
     public double? Minutes(string? text, string field) => Read(text, field, t => units.ReadDuration(t, Fields.Minutes))?.TotalMinutes;
 
@@ -104,7 +104,7 @@ internal static class Unwritten
         {
             WriteResult.Refused refused => [.. refused.Problems.Select(p => new Problem(field(p.Field), p.Sentence))],
             WriteResult.Ask ask => [.. ask.Problems.Select(p => new Problem(field(p.Field), p.Sentence))],
-            WriteResult.Clash clash => [new Problem(null, $"{clash.Who} {clash.What} at {units.ShowTime(clash.When)}. Open it again and look before you save.")],
+            WriteResult.Clash clash => [new Problem(null, $"{clash.Who} {clash.What} at {Said.Moment(clash.When, units)}. Open it again and look before you save.")],
             _ => [],
         };
     }

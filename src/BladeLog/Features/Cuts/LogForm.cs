@@ -54,13 +54,13 @@ public sealed record LogForm
     internal static LogForm Of(QueuedCut cut, SawNow? saw, double? speed, double? feed, ShopUnits units) => new()
     {
         Op = Guid.NewGuid().ToString(),
-        Version = units.Show(cut.Version),
+        Version = units.Typing.Show(cut.Version),
         Saw = saw?.Saw.Code,
         Speed = Plain(speed ?? saw?.Setup.UsualSpeedMps),
         Species = cut.SpeciesTyped,
         Height = units.BareLength(cut.HeightM / Math.Cos(cut.BevelRad), Fields.CutHeight),
         Length = units.BareLength(cut.LengthM, Fields.Board),
-        Pieces = units.Show(cut.Pieces),
+        Pieces = units.Typing.Show(cut.Pieces),
         Assumed = Plain(feed),
         Moisture = cut.MoisturePct is { } m ? Figures.Plain(m, 1) : null,
         Frozen = cut.Frozen ? "true" : null,
@@ -75,7 +75,7 @@ public sealed record LogForm
         Species = last.SpeciesTyped,
         Height = units.BareLength(last.HeightM, Fields.CutHeight),
         Length = units.BareLength(last.LengthM, Fields.Board),
-        Pieces = units.Show(last.Pieces),
+        Pieces = units.Typing.Show(last.Pieces),
         Assumed = Plain(last.FeedMps),
         Moisture = last.MoisturePct is { } m ? Figures.Plain(m, 1) : null,
         Frozen = last.Frozen ? "true" : null,
@@ -112,7 +112,7 @@ public sealed record LogForm
             read.Refuse(nameof(Species), $"{wood.Typed} is not wood: its wear on an edge is not known here, so such a cut is not counted.");
         }
 
-        double? height = read.NeedLength(Height, nameof(Height), Fields.CutHeight), length = read.NeedLength(Length, nameof(Length), Fields.Board);
+        double? height = read.NeedLength(Height, nameof(Height), Fields.CutHeight), length = read.NeedLength(Length, nameof(Length), Fields.CutLength);
         int? pieces = read.NeedPieces(Pieces, nameof(Pieces));
         double? typed = read.Feed(Feed, nameof(Feed)), minutes = read.Minutes(Minutes, nameof(Minutes)), assumed = Si(Assumed), moisture = read.Moisture(Moisture, nameof(Moisture));
         Dirt? dirt = read.OneOf<Dirt>(Dirt, nameof(Dirt), "Choose how clean the wood was.");

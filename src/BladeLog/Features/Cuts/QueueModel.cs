@@ -47,7 +47,7 @@ public sealed record QueueModel(QueueView View, IReadOnlyList<CutAnswer> Answers
     {
         ArgumentNullException.ThrowIfNull(answer);
         QueuedCut cut = answer.Work.Cut;
-        string due = cut.Due is { } date ? $", due {Units.Show(date)}" : "";
+        string due = cut.Due is { } date ? $", due {Said.Day(date, Advice.Now.AsOf, Units)}" : "";
         return $"{CutSays.Wood(cut)}, {CutSays.Deep(cut, Advice.Words)}, {Said.Count(cut.Pieces, "piece", "pieces")} of {CutSays.Piece(cut.LengthM, Units)}{due}";
     }
 

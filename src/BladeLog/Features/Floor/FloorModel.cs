@@ -113,7 +113,7 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
                 _ => "runs",
             },
             Timer = on.Timer ?? (saw.Saw.HasHourMeter ? null : new("Start timer", null)),
-            Edge = Edge(blade, next, units),
+            Edge = Edge(blade, next, units, advice.Words),
             Limit = limit,
             Small = words,
         };
@@ -143,7 +143,7 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
         };
     }
 
-    private static BigFigure? Edge(BladeAdvice blade, PlannedCut? next, ShopUnits units)
+    private static BigFigure? Edge(BladeAdvice blade, PlannedCut? next, ShopUnits units, Wording words)
     {
         MetresLeft? left = (next is { Choice.Mounted: true } ? next.Choice.MetresLeft : null) ?? blade.Edge.Left;
         if (left is null)
@@ -151,8 +151,9 @@ public sealed record FloorModel(IReadOnlyList<SawTile> Tiles)
             return null;
         }
 
-        (double value, string unit) = Said.Cut(left.Metres, units);
-        string depth = left.CutNumber is { } n ? $"in cut {n}" : $"in clean wood {Wording.Number(left.DepthM * 1e3, 0)} mm deep at {Wording.Number(left.FeedMps * 60, 1)} m/min";
+        // A foot is so short that three digits would say ">999" of nearly every edge: yards tell it as far as metres do.
+        (double value, string unit) = units.Units == UnitSystem.Inch ? (left.Metres / (3 * Handbook.Units.Exact.Foot), "yd") : (left.Metres, "m");
+        string depth = left.CutNumber is { } n ? $"in cut {n}" : $"in clean wood {words.Length(left.DepthM)} deep at {words.Feed(left.FeedMps)}";
         // An edge that will not be ground again runs into the scrap, not into the grinder.
         string stop = blade.Grind.Pays ? "grind" : "scrap";
         return new BigFigure(Figures.Floor(value), unit, "to", stop, $"Sharpness: {Figures.Number(value)} {unit} left {depth}") { Worn = blade.Edge.Used, Worked = WorkedOut.Edge(blade, null, left.CutNumber) };

@@ -61,7 +61,7 @@ internal sealed class CutRows(ShopNow shop) : IImportKind
         }
 
         var species = Species(row);
-        double? height = row.Length("height", Fields.CutHeight), length = row.Length("length", Fields.Board);
+        double? height = row.Length("height", Fields.CutHeight), length = row.Length("length", Fields.CutLength);
         row.Need("height", "Say how much wood stands along the blade.");
         row.Need("length", "Say how long one cut is.");
         int? pieces = row.Count("pieces", Fields.Pieces);

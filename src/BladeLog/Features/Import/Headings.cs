@@ -33,7 +33,17 @@ internal static partial class Headings
             }
 
             (string name, string? unit) = Split(headings[i]);
-            if (!names.TryGetValue(Plain(headings[i]), out Column? column) && !names.TryGetValue(Plain(name), out column))
+            if (names.TryGetValue(Plain(headings[i]), out Column? column))
+            {
+                // The whole heading is a name: the end of "teeth per inch" is no unit of its own.
+                (name, unit) = (headings[i], null);
+            }
+            else
+            {
+                names.TryGetValue(Plain(name), out column);
+            }
+
+            if (column is null)
             {
                 ignored.Add(headings[i]);
             }
@@ -43,7 +53,7 @@ internal static partial class Headings
             }
             else
             {
-                found.Add(new Found(i, column, unit, headings[i]));
+                found.Add(new Found(i, column, OwnUnit(name) ?? unit, headings[i]));
             }
         }
 
@@ -64,6 +74,18 @@ internal static partial class Headings
             : (heading, null);
     }
 
+    /// <summary>A name that is a unit itself decides what its bare numbers mean: 3 under "TPI" is 3 TPI in every shop.</summary>
+    private static string? OwnUnit(string name) => Plain(name) switch
+    {
+        "tpi" or "teeth" or "teethperinch" or "finetpi" or "coarsetpi" => "tpi",
+        "ppi" or "points" or "pointsperinch" => "ppi",
+        "psi" => "psi",
+        "mpa" => "MPa",
+        "kw" => "kW",
+        "hp" => "hp",
+        _ => null,
+    };
+
     private static string Unit(string text) => text.Trim().ToLowerInvariant().Replace('_', '/') switch
     {
         "pct" or "percent" => "%",
@@ -71,6 +93,8 @@ internal static partial class Headings
         "minor/per/m3" or "cents" => "minor",
         "millimetres" or "millimeters" => "mm",
         "inch" or "inches" => "in",
+        "teeth per inch" or "teeth/inch" or "teeth/in" or "t/in" => "tpi",
+        "points per inch" or "points/in" => "ppi",
         var unit => unit,
     };
 
@@ -79,6 +103,6 @@ internal static partial class Headings
     [GeneratedRegex(@"^(?<name>.*?)\s*[\(\[](?<unit>[^)\]]{1,24})[\)\]]\s*$", RegexOptions.CultureInvariant)]
     private static partial Regex Bracketed();
 
-    [GeneratedRegex(@"^(?<name>.*?)(?:\s+in\s+|[_,\s]+)(?<unit>minor_per_m3|minor|cents|mm|cm|m|in|inch|inches|ft|um|µm|deg|degrees|°|%|pct|percent|mpa|n/mm2|psi|kpsi|ksi|n|kn|lbf|kw|w|hp|m[_/]min|ft[_/]min|fpm|m[_/]s|h|hours|min|minutes|tpi)$", RegexOptions.CultureInvariant | RegexOptions.IgnoreCase)]
+    [GeneratedRegex(@"^(?<name>.*?)(?:\s+in\s+|[_,\s]+)(?<unit>minor_per_m3|minor|cents|mm|cm|m|in|inch|inches|ft|um|µm|deg|degrees|°|%|pct|percent|mpa|n/mm2|psi|kpsi|ksi|n|kn|lbf|kw|w|hp|m[_/]min|ft[_/]min|fpm|m[_/]s|h|hours|min|minutes|tpi|teeth per inch|ppi|points per inch)$", RegexOptions.CultureInvariant | RegexOptions.IgnoreCase)]
     private static partial Regex Trailing();
 }

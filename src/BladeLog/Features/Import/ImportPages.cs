@@ -117,7 +117,7 @@ internal static class ImportPages
 
     private static async Task<string?> Before(Desk desk, string sha) =>
         await desk.Db.ImportFiles.AsNoTracking().Include(i => i.Entry).FirstOrDefaultAsync(i => i.Sha256 == sha) is { } known
-            ? $"This file was imported on {(await desk.Units()).ShowTime(known.Entry.EnteredUtc)} already, with {known.Rows} lines. Nothing is imported twice."
+            ? $"This file was imported on {Said.Moment(known.Entry.EnteredUtc, await desk.Units())} already, with {known.Rows} lines. Nothing is imported twice."
             : null;
 
     private static async Task<IReadOnlyList<IImportKind>> Kinds(Desk desk)

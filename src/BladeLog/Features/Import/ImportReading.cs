@@ -115,7 +115,7 @@ public sealed record Reading
                 continue;
             }
 
-            RowReader reader = new(row, found, units, now, wrongs);
+            RowReader reader = new(row, found, units.Typing, now, wrongs);
             commands.AddRange(kind.Read(reader, remarks).Select(c => new ImportRow(row.Line, c)));
             if (rows.Count < MostShown)
             {

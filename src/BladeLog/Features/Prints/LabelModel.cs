@@ -72,7 +72,7 @@ internal static partial class Labels
             file.Blade.Tag,
             Holds(shop, file.Blade.Tag),
             Said.Section(file, units) + (units.Units == UnitSystem.Inch ? "" : $"{Figures.Glue}mm"),
-            Said.Teeth(file.Spec),
+            Said.Teeth(file.Spec, units),
             Code(file.Blade.Tag),
             file.Hold is { } hold ? LifeWords.HoldReason(hold, words) ?? "" : null);
     }

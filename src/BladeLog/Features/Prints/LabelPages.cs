@@ -65,7 +65,7 @@ internal static class LabelPages
             new()
             {
                 Sheets = Labels.Sheets(chosen.Select(b => Labels.Row(advice.Of(b), shop, units, advice.Words))),
-                Blades = [.. here.Select(b => new LabelPick(b.Blade.Tag, $"{Said.Section(b, units)}, {Said.Teeth(b.Spec)}{(without.Contains(b) ? ", no label yet" : "")}", chosen.Contains(b)))],
+                Blades = [.. here.Select(b => new LabelPick(b.Blade.Tag, $"{Said.Section(b, units)}, {Said.Teeth(b.Spec, units)}{(without.Contains(b) ? ", no label yet" : "")}", chosen.Contains(b)))],
                 New = isNew.Count,
                 WithoutLabel = without.Count,
                 Show = tags.Count > 0 ? "tags" : show ?? "",

@@ -92,7 +92,7 @@ internal static class RackCard
     {
         var blade = advice.Of(file);
         var saw = advice.Fitting(file).FirstOrDefault();
-        var section = $"{Said.Section(file, units)}{(units.Units == UnitSystem.Inch ? "" : Figures.Glue + "mm")}, {Said.Teeth(file.Spec)}";
+        var section = $"{Said.Section(file, units)}{Figures.Glue}{(units.Units == UnitSystem.Inch ? "in" : "mm")}, {Said.Teeth(file.Spec, units)}";
         var hook = file.Hook!;
         if (file.Hold is { } hold)
         {

@@ -82,7 +82,7 @@ public sealed record RackModel
     private static string BySight(BladeFile file, ShopNow shop, ShopUnits units)
     {
         var saw = shop.Saws.FirstOrDefault(s => s.Saw.Id == (file.SawId ?? file.LastSawId));
-        return $"{saw?.Saw.Code} {saw?.Saw.Name} {Said.Section(file, units)} {Said.Width(file.WidthM, units)} {Said.Teeth(file.Spec)} {file.Hook} {file.Spec.Code}".Replace(Figures.Glue, ' ');
+        return $"{saw?.Saw.Code} {saw?.Saw.Name} {Said.Section(file, units)} {Said.Width(file.WidthM, units)} {Said.Teeth(file.Spec, units)} {file.Hook} {file.Spec.Code}".Replace(Figures.Glue, ' ');
     }
 
     private static string Found(int count, string sought) => count switch
@@ -170,7 +170,7 @@ public sealed record RackModel
             _ when IsNew(file) => ("new", null),
             _ => ("ready", null),
         };
-        string teeth = Said.Teeth(file.Spec), first = on is not null ? on.Saw.Name + ", " : file.Place == Place.Rack && file.Hook is { } hook ? hook + ", " : "";
+        string teeth = Said.Teeth(file.Spec, units), first = on is not null ? on.Saw.Name + ", " : file.Place == Place.Rack && file.Hook is { } hook ? hook + ", " : "";
         SmallBand band = SmallBand.Of(blade, advice.Settings);
         return new RackRow(file.Blade.Tag, Said.Section(file, units), Drawn.Teeth(blade.Body, file.Spec), state, word, $"{first}{teeth}, {Remark(file, blade, advice, units)}", band, WorkedOut.Band(blade, band));
     }

@@ -27,7 +27,7 @@ internal static class EntryWords
         [nameof(SaveLanName)] = "The shop's name on the network was changed",
     };
 
-    public static EntryLine Line(PastEntry past, Story story, DateTime now, ShopUnits units)
+    public static EntryLine Line(PastEntry past, Story story, EditedThings edited, DateTime now, ShopUnits units)
     {
         var entry = past.Entry;
         return new EntryLine(
@@ -35,7 +35,7 @@ internal static class EntryWords
             Said.When(entry.AtUtc, now, units),
             Said.When(entry.EnteredUtc, now, units),
             entry.Person?.Initials ?? "somebody",
-            past.Fact is { } fact ? story.Says(fact, About.Shop) : Edits.GetValueOrDefault(entry.Kind, entry.Kind),
+            past.Fact is { } fact ? story.Says(fact, About.Shop) : Edits.GetValueOrDefault(entry.Kind, entry.Kind) + edited.Of(entry.Id),
             entry.Void is { } v ? $"struck out by {v.Entry.Person?.Initials ?? "somebody"}, {Said.When(v.Entry.EnteredUtc, now, units)}: {v.Reason}" : null,
             entry.Void is null && past.Fact is not (null or Retag));
     }

@@ -38,8 +38,9 @@ internal static class RecordPages
         var skip = Math.Max(0, (page ?? 1) - 1) * Lines;
         var past = await Past.OfShop(desk.Db, Lines, skip);
         var (story, units) = (await Story.Of(desk), await desk.Units());
+        var edited = await EditedThings.Read(desk.Db, [.. past.Lines.Select(p => p.Entry)], units);
         return await desk.Page<RecordPage, RecordModel>(
-            new([.. past.Lines.Select(p => EntryWords.Line(p, story, desk.Now, units))], Math.Max(1, page ?? 1), past.More));
+            new([.. past.Lines.Select(p => EntryWords.Line(p, story, edited, desk.Now, units))], Math.Max(1, page ?? 1), past.More));
     }
 
     private static async Task<IResult> Strike([FromForm] VoidForm? form, Desk desk, int entry)
@@ -56,8 +57,8 @@ internal static class RecordPages
 
         var leads = atOnce ? await desk.Db.Entries.AsNoTracking().Where(e => e.Id == entry).Select(e => e.AnswerPath).FirstOrDefaultAsync() ?? "/record" : "/record";
         return await desk.Send(
-            new VoidEntry(entry, atOnce ? AtOnce : form.Reason!.Trim()) { Together = atOnce }, form, leads, "struck out",
-            state => Show(desk, entry, form, state), canUndo: false);
+            new VoidEntry(entry, atOnce ? AtOnce : form.Reason!.Trim()) { Together = atOnce }, form, leads, atOnce ? desk.WhatWas(entry) : "struck out",
+            state => Show(desk, entry, form, state), canUndo: false, undone: atOnce);
     }
 
     private static async Task<IResult> Show(Desk desk, int entry, VoidForm form, FormState state)
@@ -67,7 +68,8 @@ internal static class RecordPages
             return Results.NotFound();
         }
 
-        var line = EntryWords.Line(found, await Story.Of(desk), desk.Now, await desk.Units());
+        var units = await desk.Units();
+        var line = EntryWords.Line(found, await Story.Of(desk), await EditedThings.Read(desk.Db, [found.Entry], units), desk.Now, units);
         return await desk.Page<VoidPage, VoidModel>(new(form, state, line, !line.CanVoid), state.Status);
     }
 }

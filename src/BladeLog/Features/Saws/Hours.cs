@@ -80,7 +80,7 @@ internal static class Hours
         read.Need(nameof(form.Reading), reading, form.Reading, "Write what the meter shows, such as 1842.6.");
         var answer = form.Answer is null or TypingError ? MeterAnswer.NotAsked : read.Choice<MeterAnswer>(nameof(form.Answer), form.Answer, "Say what happened to the meter.") ?? default;
         var start = read.Duration(nameof(form.NewMeterStart), form.NewMeterStart, Fields.HourMeter);
-        var put = read.Time(nameof(form.NewMeterAt), form.NewMeterAt);
+        var put = read.TimeOrDay(nameof(form.NewMeterAt), form.NewMeterAt);
         var top = read.Duration(nameof(form.RollsOverAt), form.RollsOverAt, Fields.HourMeter);
         var other = saw.Setup.Speeds.FirstOrDefault(s => s.SpeedMps != speed);
         var atOther = speed is null || saw.Setup.Speeds.Count != 2 ? null : read.Duration(nameof(form.OtherSpeed), form.OtherSpeed, Fields.RunHours);

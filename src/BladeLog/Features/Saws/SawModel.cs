@@ -46,6 +46,9 @@ public sealed record SawModel
 
     public required SawFigures Figures { get; init; }
 
+    /// <summary>What they are written in.</summary>
+    public required Drafting In { get; init; }
+
     public double? Stock { get; init; }
 
     /// <summary>What guides and thrust are of; null: no cut waits.</summary>

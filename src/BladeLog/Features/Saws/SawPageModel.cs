@@ -7,6 +7,7 @@ using BladeLog.Handbook.Quantities;
 using BladeLog.Records;
 using BladeLog.Ui;
 using BladeLog.Ui.Pictures;
+using BladeLog.Ui.Pictures.Geometry;
 
 namespace BladeLog.Features.Saws;
 
@@ -33,6 +34,7 @@ internal sealed class SawPageModel(SawNow saw, ShopAdvice advice, ShopUnits unit
             Lede = lede,
             Shape = Drawn.Saw(setup),
             Figures = new SawFigures(on?.Body.Thickness.Value * 1e3, Bending(setup.Wheels.Min(w => w.DiameterM))?.Megapascals, span, thrust),
+            In = Drafting.Of(units),
             Stock = next?.Choice.Work.HeightM * 1e3,
             Caption = next is { } n ? Caption(n, span, thrust) : null,
             Facts = [.. Facts()],

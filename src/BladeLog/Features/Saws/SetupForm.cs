@@ -135,7 +135,7 @@ internal static class SetupReading
     public static SetupForm FormOf(SawNow saw, ShopUnits units)
     {
         SawSetup s = saw.Setup;
-        string L(double m, TypedField? field = null) => units.Show(new Length(m), field);
+        string L(double m, TypedField? field = null) => units.Typing.Show(new Length(m), field);
         string? Lo(double? m, TypedField? field = null) => m is { } v ? L(v, field) : null;
         string? Tick(Takes kind) => s.Takes.HasFlag(kind) ? "true" : null;
         string? Wheel(int i) => i < s.Wheels.Count ? L(s.Wheels[i].DiameterM, Fields.WheelDiameter) : null;
@@ -154,8 +154,8 @@ internal static class SetupReading
             LoopMost = L(s.LoopMostM, Fields.Loop),
             WidthLeast = L(s.WidthLeastM, Fields.BladeWidth),
             WidthMost = L(s.WidthMostM, Fields.BladeWidth),
-            Speed1 = units.ShowBandSpeed(new Speed(speeds[0].SpeedMps)),
-            Speed2 = speeds.Length > 1 ? units.ShowBandSpeed(new Speed(speeds[1].SpeedMps)) : null,
+            Speed1 = units.Typing.ShowBandSpeed(new Speed(speeds[0].SpeedMps)),
+            Speed2 = speeds.Length > 1 ? units.Typing.ShowBandSpeed(new Speed(speeds[1].SpeedMps)) : null,
             LowerGuide = L(s.LowerGuideM),
             Clearance = L(s.ClearanceM),
             CutHeight = L(s.CutHeightMostM, Fields.CutHeight),
@@ -165,16 +165,16 @@ internal static class SetupReading
             Beam = Tick(Takes.Beam),
             Log = Tick(Takes.Log),
             ClassWork = s.ClassWork.ToString(),
-            StrandForce = s.StrandForceMostN is { } n ? units.Show(new Force(n)) : null,
+            StrandForce = s.StrandForceMostN is { } n ? units.Typing.Show(new Force(n)) : null,
             TensionSystem = s.TensionSystem.ToString(),
-            Motor = units.Show(new Power(s.MotorW)),
-            Idle = s.IdleW is { } idle ? units.Show(new Power(idle)) : null,
-            Feeder = s.FeederN is { } feeder ? units.Show(new Force(feeder)) : null,
-            FeederLeast = s.FeederLeastMps is { } least ? units.ShowFeed(new Speed(least)) : null,
-            FeederMost = s.FeederMostMps is { } most ? units.ShowFeed(new Speed(most)) : null,
-            ChangeMinutes = units.Show(TimeSpan.FromMinutes(s.ChangeMinutes)),
-            BreakCost = units.ShowMoney(s.BreakCostMinor),
-            Tilt = s.TiltMostRad > 0 ? units.Show(new Angle(s.TiltMostRad)) : null,
+            Motor = units.Typing.Show(new Power(s.MotorW)),
+            Idle = s.IdleW is { } idle ? units.Typing.Show(new Power(idle)) : null,
+            Feeder = s.FeederN is { } feeder ? units.Typing.Show(new Force(feeder)) : null,
+            FeederLeast = s.FeederLeastMps is { } least ? units.Typing.ShowFeed(new Speed(least)) : null,
+            FeederMost = s.FeederMostMps is { } most ? units.Typing.ShowFeed(new Speed(most)) : null,
+            ChangeMinutes = units.Typing.Show(TimeSpan.FromMinutes(s.ChangeMinutes)),
+            BreakCost = units.Typing.ShowMoney(s.BreakCostMinor),
+            Tilt = s.TiltMostRad > 0 ? units.Typing.Show(new Angle(s.TiltMostRad)) : null,
             MeterFactor = s.MeterFactor.ToString(System.Globalization.CultureInfo.InvariantCulture),
         };
     }

@@ -61,7 +61,7 @@ internal static class SetupSaw
         }
 
         read.RefuseUnless(form.Do == "change", nameof(form.From), "Say whether the saw was changed or something was typed wrongly.");
-        return new NewSetup(saw.Saw.Code, setup, read.Time(nameof(form.From), form.From));
+        return new NewSetup(saw.Saw.Code, setup, read.TimeOrDay(nameof(form.From), form.From));
     }
 
     private static async Task<IResult> Show(Desk desk, SawNow? saw, SetupForm form, FormState state)

@@ -19,7 +19,7 @@ internal static class SwapChecks
         ArgumentNullException.ThrowIfNull(blade);
         ArgumentNullException.ThrowIfNull(units);
         BladeAdvice here = advice.On(blade, saw);
-        List<CheckLine> lines = [Size(saw, blade, units), Bending(here), Condition(here, saw, advice, units), Pull(here, units)];
+        List<CheckLine> lines = [Size(saw, blade, units), Bending(here, units), Condition(here, saw, advice, units), Pull(here, units)];
         if (Said.Leads(blade, saw.Saw.Id, units) is { } leads)
         {
             lines.Add(new("care", Said.Capital(leads)));
@@ -58,10 +58,10 @@ internal static class SwapChecks
             : new("care", $"Its length is not known: {saw.Saw.Name} takes {L(setup.LoopLeastM)} to {L(setup.LoopMostM)}");
     }
 
-    private static CheckLine Bending(BladeAdvice here)
+    private static CheckLine Bending(BladeAdvice here, ShopUnits units)
     {
         LifeOfBlade life = here.Record;
-        string ratio = $"Body {Figures.With(Figures.Number(here.Body.Thickness.Value * 1e3, 3).TrimEnd('0').TrimEnd('.'), "mm")} is 1/{Math.Round(1 / life.ThicknessToWheel!.Value)} of the wheel";
+        string ratio = $"Body {units.Show(new Length(here.Body.Thickness.Value), Fields.Thickness)} is 1/{Math.Round(1 / life.ThicknessToWheel!.Value)} of the wheel";
         return life.Verdict switch
         {
             LifeVerdict.Unsuitable => new("no", $"{ratio}: hours or less"),

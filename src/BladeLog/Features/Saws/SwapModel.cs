@@ -109,7 +109,7 @@ public sealed record SwapModel
         ArgumentNullException.ThrowIfNull(units);
         BladeFile? off = advice.Now.Blades.FirstOrDefault(b => b.Blade.Id == saw.MountedBladeId);
         BladeFile? on = string.IsNullOrWhiteSpace(form.OnTag) ? null : advice.Now.Blade(Tags.Read(form.OnTag));
-        List<SwapOffer> offers = on is null ? [.. Offered(advice, saw)] : [];
+        List<SwapOffer> offers = on is null ? [.. Offered(advice, saw, units)] : [];
         return new SwapModel
         {
             Form = form,
@@ -137,7 +137,7 @@ public sealed record SwapModel
     private static SwapBlade Picture(ShopAdvice advice, BladeFile file) => new(file.Blade.Tag, Drawn.Teeth(advice.Of(file).Body, file.Spec));
 
     /// <summary>Sharp blades at hand that fit, the best for this saw's next cut first.</summary>
-    private static IEnumerable<SwapOffer> Offered(ShopAdvice advice, SawNow saw)
+    private static IEnumerable<SwapOffer> Offered(ShopAdvice advice, SawNow saw, ShopUnits units)
     {
         PlannedCut? next = advice.NextCut(saw);
         string[] ranked = next is null
@@ -149,13 +149,13 @@ public sealed record SwapModel
             .Where(b => advice.On(b, saw).Record.Verdict != Handbook.Fatigue.LifeVerdict.Unsuitable)
             .OrderBy(b => Array.IndexOf(ranked, b.Blade.Tag) is >= 0 and var i ? i : int.MaxValue)
             .ThenBy(b => b.Blade.Tag, StringComparer.Ordinal)
-            .Select(b => new SwapOffer(b.Blade.Tag, Remark(b, next, ranked)));
+            .Select(b => new SwapOffer(b.Blade.Tag, Remark(b, next, ranked, units)));
     }
 
-    private static string Remark(BladeFile blade, PlannedCut? next, string[] ranked)
+    private static string Remark(BladeFile blade, PlannedCut? next, string[] ranked, ShopUnits units)
     {
-        string teeth = Said.Teeth(blade.Spec);
-        string kind = $"{blade.Spec.WidthM * 1e3:0.#} × {blade.ThicknessM * 1e3:0.##}, {teeth}";
+        string teeth = Said.Teeth(blade.Spec, units);
+        string kind = $"{Said.Section(blade, units)}, {teeth}";
         return next is not null && ranked.Length > 0 && ranked[0] == blade.Blade.Tag ? $"{kind}; first for cut {next.Cut.Number}" : kind;
     }
 }

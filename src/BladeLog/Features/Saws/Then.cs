@@ -145,7 +145,7 @@ internal static class Then
                 .Where(b => ShopAdvice.Fits(b, saw) && !away.Contains(b.Blade.Id) && b.Blade.AddedUtc < gap.Until)
                 .OrderBy(b => Array.IndexOf(near, b.Blade.Id) is >= 0 and var i ? i : int.MaxValue)
                 .ThenBy(b => b.Place == Place.Gone).ThenBy(b => b.Blade.Tag, NaturalOrder.Instance)
-                .Select(b => new SwapOffer(b.Blade.Tag, $"{Said.Section(b, Desk.Units(advice.Now.Shop))}, {Said.Teeth(b.Spec)}")),
+                .Select(b => new SwapOffer(b.Blade.Tag, $"{Said.Section(b, Desk.Units(advice.Now.Shop))}, {Said.Teeth(b.Spec, Desk.Units(advice.Now.Shop))}")),
         ];
     }
 }

@@ -38,6 +38,9 @@ public sealed record WhatIfSawModel
     /// <summary>The shop's word for it.</summary>
     public string Pull { get; init; } = "tension";
 
+    /// <summary>What more pull never goes beyond.</summary>
+    public string Ceiling { get; init; } = "";
+
     public string PushAt { get; init; } = "";
 
     public IReadOnlyList<VariantRow> Changes { get; init; } = [];
@@ -78,12 +81,14 @@ internal static class WhatIfSaw
         double? feed = form.Feed("feed", "Feed that is decent", new Given((setup.FeederN is null ? ByHand : WithFeeder) / 60, "default, not yours"));
         Edges edges = form.Choose("edges", "Edges", Edges.Now, "as the page begins", (Edges.Now, "now", "as they are now"), (Edges.Ground, "ground", "freshly ground"));
         string with = form.Pick("blade", "Changes reckoned with", "", "", "the blade that goes deepest", [.. advice.Now.Blades.Where(b => b is { Place: not Place.Gone, Hold: null, Break: null, Retirement: null } && ShopAdvice.Fits(b, saw)).Select(b => new Answer(b.Blade.Tag, b.Blade.Tag))]);
+        // A round step in the shop's own unit.
+        (double step, string more, string half) = units.Units == UnitSystem.Inch ? (4 * Handbook.Units.Exact.Inch, "4 in", "2 in") : (0.1, "100 mm", "50 mm");
         double smallest = setup.Wheels.Min(w => w.DiameterM);
-        double? wheel = form.Length("wheel", "A bigger wheel", Fields.WheelDiameter, new Given(smallest + 0.1, "100 mm more than now"));
+        double? wheel = form.Length("wheel", "A bigger wheel", Fields.WheelDiameter, new Given(smallest + step, $"{more} more than now"));
         double? pull = form.Force("pull", "More pull in one strand", Given.Of(1.25 * setup.StrandForceMostN, "a quarter more than now", null), optional: true);
         double? motor = form.Power("motor", "A stronger motor", new Given(1.5 * setup.MotorW, "half as much again"));
-        double? column = form.Length("column", "A taller column: opens to", Fields.CutHeight, new Given(setup.CutHeightMostM + 0.1, "100 mm more than now"));
-        double? guide = form.Length("guide", "Upper guide left over the wood", Fields.CutHeight, new Given(setup.ClearanceM + 0.05, "50 mm more than now"));
+        double? column = form.Length("column", "A taller column: opens to", Fields.CutHeight, new Given(setup.CutHeightMostM + step, $"{more} more than now"));
+        double? guide = form.Length("guide", "Upper guide left over the wood", Fields.CutHeight, new Given(setup.ClearanceM + (step / 2), $"{half} more than now"));
 
         WhatIfSawModel model = new()
         {
@@ -93,6 +98,7 @@ internal static class WhatIfSaw
             Fields = form.Fields,
             Problems = form.Problems,
             Pull = units.PullName,
+            Ceiling = units.Show(new Stress(SawWhatIf.CeilingPa)),
         };
         if (wood is null || moisture is not { } wet || feed is not { } f)
         {
@@ -137,7 +143,7 @@ internal static class WhatIfSaw
         return new DepthRow(
             tag,
             Said.Section(d.Blade.File, shown.Units),
-            Said.Teeth(d.Blade.File.Spec),
+            Said.Teeth(d.Blade.File.Spec, shown.Units),
             d.Blade.File.Place == Place.AtSharpener ? ", at the sharpener" : "",
             new Led(Depth(d.Deepest, shown), WorkedAsked.Depth(d, asked.Saw, d.Deepest, asked.Work, asked.Settings)),
             Stop(d.Deepest, shown),
@@ -221,7 +227,7 @@ internal static class WhatIfSaw
     private static (Material? Found, string? Understood, string? Error) Find(string typed)
     {
         Material? found = MaterialTable.Find(typed, out string? takenAs);
-        return found is null ? (null, null, $"\"{(typed.Length > 40 ? typed[..40] : typed)}\" is not in the handbook. Near it: {string.Join(", ", MaterialTable.NearestNames(typed))}.")
+        return found is null ? (null, null, Wood.Unknown(typed))
             : found.Density12 is null ? (null, null, $"{found.Name} is not sawn on these saws.")
             : (found, takenAs is null ? null : $"taken as {takenAs}", null);
     }

@@ -118,9 +118,9 @@ internal static class SetupPages
         Lengths = shop.Lengths.ToString(),
         Spelling = shop.Spelling.ToString(),
         PullWord = shop.PullWord.ToString(),
-        Rate = units.ShowMoney(shop.RateMinorPerHour),
+        Rate = units.Typing.ShowMoney(shop.RateMinorPerHour),
         CurrencyDigits = shop.CurrencyDigits.ToString(CultureInfo.InvariantCulture),
-        Timber = units.ShowMoney(shop.TimberMinorPerM3),
+        Timber = units.Typing.ShowMoney(shop.TimberMinorPerM3),
     };
 
     private static async Task<IResult> Show(Desk desk, ShopForm form, FormState state)

@@ -36,10 +36,10 @@ internal static class CostPages
         return await desk.Page<CostsPage, CostsModel>(new CostsModel
         {
             Title = all.PerSquareMetre is { } each ? $"Costs: {Money(units.Units == UnitSystem.Inch ? each * 0.3048 * 0.3048 : each, 3)} for each {(units.Units == UnitSystem.Inch ? "square foot" : "square metre")} sawn" : "Costs: no cut is logged yet",
-            Specs = [.. ran.GroupBy(b => b.Spec.Code).OrderBy(g => g.Key, NaturalOrder.Instance).Select(g => Row(Costs.Together($"{g.Key}: {Said.Section(g.First(), units)}, {Said.Teeth(g.First().Spec)}", g.Select(b => costs[b.Blade.Id])), null))],
+            Specs = [.. ran.GroupBy(b => b.Spec.Code).OrderBy(g => g.Key, NaturalOrder.Instance).Select(g => Row(Costs.Together($"{g.Key}: {Said.Section(g.First(), units)}, {Said.Teeth(g.First().Spec, units)}", g.Select(b => costs[b.Blade.Id])), null))],
             Blades = [.. ran.Select(b => Row(costs[b.Blade.Id], $"/blades/{b.Blade.Tag}"))],
             Grinds = [.. Costs.Grinds(sharpenings, shop.Blades).Select(g => (g.InHouse ? "Ground in the shop" : "Ground by a service", Money(g.Each, 2), $"{Said.Count(g.Count, "sharpening", "sharpenings")}, {units.ShowMoney(g.Spent)} together"))],
-            Teeth = saw is null ? [] : [.. Teeth(shop, advice, saw, units).OrderBy(t => t.Minor).Select(t => (t.Code, t.Teeth, Money(t.Minor, 3)))],
+            Teeth = saw is null ? [] : [.. Teeth(shop, advice, saw, units).OrderBy(t => t.Minor).Select(t => (t.Code, t.Teeth, Money(units.Units == UnitSystem.Inch ? t.Minor * 0.3048 * 0.3048 : t.Minor, 3)))],
             TeethOn = saw is null ? "" : $"On {saw.Saw.Name}, {units.ShowFeed(new Speed(4 / 60.0))}, clean medium wood: a sharpening and the share of the price that goes with each edge, over the metres an edge lasts.",
             Tags = [.. shop.Blades.Where(b => b.Break is null && b.Retirement is null && b.Place != Place.Gone).Select(b => b.Blade.Tag).Order(NaturalOrder.Instance)],
             Tag = asked?.File.Blade.Tag,
@@ -71,7 +71,7 @@ internal static class CostPages
         {
             BladeAdvice one = g.One;
             Spec spec = one.File.Spec;
-            return ($"{g.Key}: {Said.Section(g.First(), units)}", Said.Teeth(spec), Costs.ToothCost(
+            return ($"{g.Key}: {Said.Section(one.File, units)}", Said.Teeth(spec, units), Costs.ToothCost(
                 spec.SharpeningPriceMinor!.Value, spec.PriceMinor!.Value, spec.MostSharpenings!.Value, one.Edge.PathToDullKm, new Speed(4 / 60.0), new Length(saw.Setup.LoopM), new Speed(saw.Setup.UsualSpeedMps)));
         });
 }

@@ -102,7 +102,7 @@ internal static class StockPages
         {
             Code = s.Spec.Code,
             Section = Said.Section(drawn, units),
-            Teeth = Said.Teeth(s.Spec),
+            Teeth = Said.Teeth(s.Spec, units),
             Strip = Drawn.Teeth(BladeBody.Of(drawn, advice.Settings), s.Spec),
             Counts = counts.Count == 0 ? besides.Count == 0 ? "none left" : "none here" : string.Join(", ", counts),
             Besides = besides.Count == 0 ? null : string.Join(", ", besides),

@@ -11,7 +11,7 @@ namespace BladeLog.Features.Workings;
 internal static class CutLines
 {
     /// <summary>What needs neither wood nor edge.</summary>
-    public static IEnumerable<BecauseLine> OfGeometry(double? pitch, double? speed, double? height, double? feed, double? loop)
+    public static IEnumerable<BecauseLine> OfGeometry(double? pitch, double? speed, double? height, double? feed, double? loop, Shown shown)
     {
         if (pitch is { } p && height is { } H)
         {
@@ -25,7 +25,7 @@ internal static class CutLines
 
         if (speed is { } v2 && feed is { } f2 && loop is { } L)
         {
-            yield return Line("Wood path for a square metre", Figures.With(Figures.Number(v2 / (f2 * L), 1), "m"), "band speed over feed and loop: slow feeding wears the teeth more", "derived", Provenance.Derived);
+            yield return Line("Wood path for a square metre", shown.FarText(v2 / (f2 * L)), "band speed over feed and loop: slow feeding wears the teeth more", "derived", Provenance.Derived);
         }
     }
 
@@ -62,7 +62,7 @@ internal static class CutLines
         }
 
         yield return Line("With care up to", shown.FeedText(care.Least.Feed), $"{care.Least.Name}, every limit at its most and the force at the low end of its band", "engineering-default", Provenance.EngineeringDefault);
-        yield return Line("Resistance of the wood", $"{Figures.Number(CuttingForce.ShearFactor(cut).Megapascals, 1)} MPa", "density times the factors of hook, moisture, direction and frost", "ettelt-1987", Provenance.FromMemory);
+        yield return Line("Resistance of the wood", shown.Units.Show(CuttingForce.ShearFactor(cut)), "density times the factors of hook, moisture, direction and frost", "ettelt-1987", Provenance.FromMemory);
         yield return Line("Edge counts as", Micrometres(CuttingForce.ReferenceThickness(cut.Rake).Metres), "thickness of chip the splitting of a sharp edge is worth", "orlowski-2013", Provenance.FromMemory);
         if (feed is not { } f)
         {
@@ -72,7 +72,7 @@ internal static class CutLines
         Speed at = new(f);
         Length bite = Kinematics.BitePerTooth(at, cut.Pitch, cut.BandSpeed);
         yield return Line("Over its own edge a tooth bites", Micrometres(Bite.OverEdge(cut, bite).Metres), $"bite times kerf over the edge's width: {Words(Bite.RegimeOf(cut, at))}", "derived", Provenance.Derived);
-        yield return Line("Gullet area", $"{Figures.Number(Gullet.AreaOf(cut).SquareMillimetres, 1)} mm²", cut.MeasuredGulletArea is null ? "shape times pitch times gullet depth" : "as measured", "gullet-capacity-note", cut.MeasuredGulletArea is null ? Provenance.Published : Provenance.Yours);
+        yield return Line("Gullet area", shown.GulletText(Gullet.AreaOf(cut)), cut.MeasuredGulletArea is null ? "shape times pitch times gullet depth" : "as measured", "gullet-capacity-note", cut.MeasuredGulletArea is null ? Provenance.Published : Provenance.Yours);
         yield return Line("Gullet fill", Figures.Number(Gullet.Fill(bite, cut.CutHeight, Gullet.AreaOf(cut)), 2), "bite times height over gullet area", "gullet-capacity-note", Provenance.Published);
         if (limits.Held.PowerFed)
         {

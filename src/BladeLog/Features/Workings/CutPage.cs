@@ -84,7 +84,7 @@ internal static class CutPage
                 Model = settings.Force,
             }
             : null;
-        List<BecauseLine> lines = [.. CutLines.OfGeometry(p, v, H, f, L)];
+        List<BecauseLine> lines = [.. CutLines.OfGeometry(p, v, H, f, L, shown)];
         string title = "Which feeds work in this cut?";
         IReadOnlyList<CurveFigure> curves = [];
         List<string> cautions = [];
@@ -157,7 +157,7 @@ internal static class CutPage
     private static (Material? Found, string? Understood, string? Error) Find(string typed)
     {
         Material? found = MaterialTable.Find(typed, out string? takenAs);
-        return found is null ? (null, null, $"\"{(typed.Length > 40 ? typed[..40] : typed)}\" is not in the handbook. Near it: {string.Join(", ", MaterialTable.NearestNames(typed))}.")
+        return found is null ? (null, null, Wood.Unknown(typed))
             : found.Density12 is null ? (null, null, $"{found.Name} is not sawn on these saws.")
             : (found, takenAs is null ? null : $"taken as {takenAs}", null);
     }

@@ -117,7 +117,7 @@ internal static class ThrustLimitsPage
         yield return Line("Allowed", shown.ForceText(limits.Allowed.Newtons), $"the smaller of the first over {front:0.##} and the buckling push over {two:0.##}", "engineering-default", Provenance.EngineeringDefault);
         yield return Line("Stop at", shown.ForceText(limits.Stop.Newtons), $"the buckling push over {two:0.##}", "engineering-default", Provenance.EngineeringDefault);
         double k0 = TipStiffness.AtPoint(band, new Force(0)).NewtonsPerMillimetre, k = TipStiffness.AtPoint(band, limits.Allowed).NewtonsPerMillimetre;
-        yield return Line("Side stiffness at a tooth", $"{Figures.Number(k0, 1)} N/mm unloaded, {Figures.Number(k, 1)} N/mm at the allowed push", "give of the tensioned band sideways and in twist, in the middle of the cut", "lehmann-1993", Provenance.Derived);
+        yield return Line("Side stiffness at a tooth", $"{shown.StiffText(k0)} unloaded, {shown.StiffText(k)} at the allowed push", "give of the tensioned band sideways and in twist, in the middle of the cut", "lehmann-1993", Provenance.Derived);
         yield return Line("Own notes of the span", $"{Figures.Number(BandFrequency.Lateral(band).Hertz, 0)} Hz sideways, {Figures.Number(BandFrequency.Torsional(band).Hertz, 0)} Hz in twist", "moving band between its guides", "wickert-mote", Provenance.FromMemory);
     }
 

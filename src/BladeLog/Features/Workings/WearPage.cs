@@ -26,7 +26,8 @@ internal static class WearPage
         double? r0 = form.Length("fresh", "Edge radius after the last grind", Fields.EdgeRadius, Given.Of(blade?.Body.FreshEdge, tip == TipMaterial.Carbide ? 10e-6 : 8e-6));
         Known rate = settings.Wear(tip);
         double? wear = form.Number("wear", "Wear", "a wear rate", 0.01, 40, "µm/km", new Given(rate.Value, rate.From));
-        double? path = form.Number("path", "Path since the last grind, per tooth", "a path", 0, 1000, "km", Given.Of(blade?.Edge.PathKm, "from its cuts, wood and dirt counted in", 5));
+        Shown shown = new(form.Units);
+        double? path = form.Number("path", "Path since the last grind, per tooth", "a path", 0, 1000, shown.PathUnit, Given.Of(shown.Path(blade?.Edge.PathKm), "from its cuts, wood and dirt counted in", 5));
         double? dull = form.Length("dull", "Dull at", Fields.EdgeRadius, Given.Of(settings.Known(LifeSettings.Dull, 1e-6), 40e-6));
         (double depth, double referenceFeed) = setup is null ? (0.1, 2.0 / 60) : Sharpness.Reference(setup, settings);
         double? H = form.Length("height", "Height of the wood along the blade", Fields.CutHeight, Given.Of(from.Cut?.HeightM ?? (setup is null ? null : depth), from.Cut is null ? "depth for metres left" : "of the cut", 0.1));
@@ -35,7 +36,6 @@ internal static class WearPage
         double? L = form.Length("loop", "Loop", Fields.Loop, Given.Of(blade?.File.LoopM ?? setup?.LoopM, "of the blade", 3.4));
         double? factor = form.Number("factor", "Wear of the wood against a clean medium one, dirt counted in", "a wear factor", 0.1, 100, "", Given.Of(from.Cut is { } c ? c.WoodFactor with { Value = c.WoodFactor.Value * c.DirtFactor.Value } : null, 1));
 
-        Shown shown = new(form.Units);
         List<BecauseLine> lines = [];
         List<CurveFigure> curves = [];
         string title = "How round is the edge?";
@@ -44,20 +44,21 @@ internal static class WearPage
         {
             double S = Kinematics.WoodPathPerTooth(new Area(1), new Speed(F), new Length(loop), new Speed(V)).Metres;
             perSquareMetre = factor is { } m ? S * m / 1000 : null;
-            lines.Add(Line("Wood path for a square metre", Figures.With(Figures.Number(S, 1), "m"), "band speed over feed and loop; the pitch cancels", "derived", Provenance.Derived));
+            lines.Add(Line("Wood path for a square metre", shown.FarText(S), "band speed over feed and loop; the pitch cancels", "derived", Provenance.Derived));
         }
 
-        if (r0 is { } fresh && wear is { } w && path is { } x && dull is { } limit)
+        if (r0 is { } fresh && wear is { } w && path is { } typed && dull is { } limit)
         {
             RunIn run = settings.RunIn;
+            double each = shown.Path(1.0)!.Value, x = typed / each;
             double r = EdgeRadius.After(new Length(fresh), w, x, run).Metres, most = EdgeRadius.PathTo(new Length(limit), new Length(fresh), w, run), left = Math.Max(0, most - x);
-            title = left > 0 ? $"{Micrometres(r, 0)}: {Figures.With(Figures.Number(left, 1), "km")} of wood per tooth to dull" : $"{Micrometres(r, 0)}: dull";
+            title = left > 0 ? $"{Micrometres(r, 0)}: {Said.Path(left, form.Units, 1)} of wood per tooth to dull" : $"{Micrometres(r, 0)}: dull";
             lines.Insert(0, Line("Edge radius now", Micrometres(r), $"radius after the grind, running in by {run.Growth.Micrometres:0.#} µm, and wear times path", "engineering-default", rate.Provenance));
-            lines.Insert(1, Line("Path to dull", Figures.With(Figures.Number(most, 1), "km"), "the same solved for the dull radius", "derived", rate.Provenance));
+            lines.Insert(1, Line("Path to dull", Said.Path(most, form.Units, 1), "the same solved for the dull radius", "derived", rate.Provenance));
             if (perSquareMetre is { } km && km > 0)
             {
                 double area = left / km;
-                lines.Add(Line("Area left", Figures.With(Figures.Number(area, 1), "m²"), "path left over path for a square metre and the wood's factor", "derived", rate.Provenance));
+                lines.Add(Line("Area left", shown.AreaText(area), "path left over path for a square metre and the wood's factor", "derived", rate.Provenance));
                 if (H is { } height)
                 {
                     (double metres, string unit) = Said.Cut(area / height, form.Units);
@@ -65,16 +66,16 @@ internal static class WearPage
                 }
             }
 
-            AxisScale across = AxisScale.FromNought(Math.Max(0.1, 1.25 * Math.Max(most, x)));
+            AxisScale across = AxisScale.FromNought(Math.Max(0.1, 1.25 * each * Math.Max(most, x)));
             curves.Add(new CurveFigure(
-                "Edge radius against the wood path", across, "path per tooth, km", AxisScale.FromNought(1.25e6 * Math.Max(limit, r)), "edge radius, µm",
+                "Edge radius against the wood path", across, $"path per tooth, {shown.PathUnit}", AxisScale.FromNought(1.25e6 * Math.Max(limit, r)), "edge radius, µm",
                 [
-                    new CurveLine("edge radius", Points(across, d => EdgeRadius.After(new Length(fresh), w, d, run).Micrometres)),
+                    new CurveLine("edge radius", Points(across, d => EdgeRadius.After(new Length(fresh), w, d / each, run).Micrometres)),
                     new CurveLine("dull", Points(across, _ => limit * 1e6, 1)),
-                    new CurveLine("if it wore two and a half times as fast", Points(across, d => EdgeRadius.After(new Length(fresh), 2.5 * w, d, run).Micrometres)),
-                    new CurveLine("two and a half times as slow", Points(across, d => EdgeRadius.After(new Length(fresh), w / 2.5, d, run).Micrometres)),
+                    new CurveLine("if it wore two and a half times as fast", Points(across, d => EdgeRadius.After(new Length(fresh), 2.5 * w, d / each, run).Micrometres)),
+                    new CurveLine("two and a half times as slow", Points(across, d => EdgeRadius.After(new Length(fresh), w / 2.5, d / each, run).Micrometres)),
                 ],
-                new CurveHere(x, r * 1e6, $"{Figures.With(Figures.Number(x, 1), "km")}: {Micrometres(r, 0)}"))
+                new CurveHere(typed, r * 1e6, $"{Said.Path(x, form.Units, 1)}: {Micrometres(r, 0)}"))
             {
                 Lesson = "Wear rates are known within a factor of about 2.5 until your own sharpenings teach them.",
             });

@@ -5,9 +5,6 @@ namespace BladeLog.Ui;
 /// <content>What stands beside a field: its unit, the step of its keys, and a known figure as it would be typed there.</content>
 public sealed partial record ShopUnits
 {
-    // A figure goes into the field as what it is: a part of an inch only where it is that part, to the thousandth of a mm.
-    private const double SameAsTyped = Micrometre;
-
     /// <summary>mm, or in: of a bare number in a field for a length.</summary>
     public string SmallLengthUnit => IsInch ? "in" : "mm";
 
@@ -41,8 +38,7 @@ public sealed partial record ShopUnits
         if (!IsInch)
             return Figures.Plain(m / Millimetre, Math.Abs(m) < 0.01 ? 3 : 2);
         var inches = m / Exact.Inch;
-        var parts = inches * Sixtyfourths;
-        return !field.Thousandths && Math.Abs(parts - Math.Round(parts)) / Sixtyfourths * Exact.Inch <= SameAsTyped && Fraction(inches) is { } fraction
+        return !field.Thousandths && Fraction(inches, FractionExact) is { } fraction
             ? fraction
             : Figures.Plain(inches, Math.Abs(inches) < 1 ? 4 : 3);
     }
@@ -66,5 +62,5 @@ public sealed partial record ShopUnits
     public string? BareAngle(double? radians) => radians is { } r ? Figures.Plain(r * 180 / Math.PI, 2) : null;
 
     /// <summary>46.00 without the currency.</summary>
-    public string? BareMoney(long? minor) => minor is { } m ? ShowMajor(m) : null;
+    public string? BareMoney(long? minor) => minor is { } m ? Typing.ShowMajor(m) : null;
 }

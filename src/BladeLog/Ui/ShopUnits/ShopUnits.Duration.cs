@@ -38,10 +38,11 @@ public sealed partial record ShopUnits
     public Parsed<TimeSpan> ReadDuration(string? text, TypedField? field = null)
     {
         field ??= Fields.RunHours;
-        const string Examples = "1.5, 1:30 or 90 min";
+        string Examples = field.Large ? "what it shows, such as 7019.3" : field.Bare == "min" ? "25, 25 min or 1:30" : "1.5, 1:30 or 90 min";
         var typed = (text ?? "").Trim();
         var clean = Amount.Clean(text);
-        string Shown(double s) => ShowSeconds(s, field);
+        // A limit is told in the unit the field is typed in.
+        string Shown(double s) => field.Bare == "min" ? With(s / Minute, 0, "min") : ShowSeconds(s, field);
         if (Blank<TimeSpan>(typed, clean, field, Examples) is { } blank)
             return blank;
         if (Amount.IsNotFinite(clean))
@@ -54,7 +55,7 @@ public sealed partial record ShopUnits
     /// <summary>1 h 30 min; an hour meter is shown in hours and hundredths.</summary>
     public string Show(TimeSpan time, TypedField? field = null) => ShowSeconds(time.TotalSeconds, field ?? Fields.RunHours);
 
-    private static string ShowSeconds(double total, TypedField field)
+    private string ShowSeconds(double total, TypedField field)
     {
         if (field.Large)
             return With(total / Hour, 2, "h");

@@ -44,9 +44,9 @@ public sealed partial record ShopUnits
     public Parsed<Force> ReadForce(string? text, TypedField? field = null)
         => ReadOne(text, field ?? Fields.Force, ForceFamily, si => Show(new Force(si))).As(si => new Force(si), Show);
 
-    /// <summary>120 MPa, or 17405 psi.</summary>
+    /// <summary>120 MPa, or 17,400 psi: no tension is known to a single psi.</summary>
     public string Show(Stress stress) => IsInch
-        ? With(stress.Pascals / Exact.Psi, 0, "psi")
+        ? With(ForFields ? stress.Pascals / Exact.Psi : Math.Round(stress.Pascals / Exact.Psi / 10, MidpointRounding.AwayFromZero) * 10, 0, "psi")
         : With(stress.Megapascals, Math.Abs(stress.Megapascals) < 10 ? 2 : 1, "MPa");
 
     /// <summary>1390 N, or 312.5 lbf.</summary>

@@ -11,8 +11,11 @@ public sealed partial record ShopUnits
     private const double Millimetre = 1e-3;
     private const double Micrometre = 1e-6;
 
-    // Nearest 64th is shown when it is no further off than this: a caliper on a worn blade reads no better.
+    // In a field the nearest 64th stands where it is no further off than this: a caliper on a worn blade reads no better.
     private const double FractionSlack = 0.05 * Millimetre;
+
+    // Elsewhere a fraction says that it is one: 25 mm is no 63/64 in.
+    private const double FractionExact = 0.001 * Millimetre;
     private const int Sixtyfourths = 64;
 
     private static readonly Family LengthFamily = new("length", "mm, cm, m, in or ft", "12.7, 1/2 in or 13 mm", "1/2, 0.5 or 13 mm", "mm", "in", new()
@@ -103,18 +106,25 @@ public sealed partial record ShopUnits
         if (!IsInch)
             return With(length.Millimetres, Math.Abs(length.Millimetres) < 10 ? 3 : 1, "mm");
         var inches = length.Metres / Exact.Inch;
-        return field.Thousandths || Fraction(inches) is not { } fraction
-            ? With(inches, Math.Abs(inches) < 1 ? 4 : 3, "in")
+        return field.Thousandths || Fraction(inches, ForFields ? FractionSlack : FractionExact) is not { } fraction
+            ? With(inches, InchDecimals(Math.Abs(inches), field), "in")
             : fraction + Gap + "in";
     }
+
+    /// <summary>As many as the thing is held to: a body or a width to the thousandth, a loop to the tenth.</summary>
+    private int InchDecimals(double inches, TypedField field) => ForFields ? inches < 1 ? 4 : 3
+        : inches < 0.01 ? 4
+        : inches < 1 || field.Thousandths || field == Fields.BladeWidth || field == Fields.Pitch ? 3
+        : inches < 10 ? 2
+        : 1;
 
     /// <summary>Both systems: 12.7 mm (1/2 in).</summary>
     public string ShowBoth(Length length, TypedField? field = null) => $"{Show(length, field)} ({Other.Show(length, field)})";
 
-    private static string? Fraction(double inches)
+    private static string? Fraction(double inches, double slack)
     {
         var parts = Math.Round(Math.Abs(inches) * Sixtyfourths);
-        if (parts == 0 || Math.Abs((parts / Sixtyfourths) - Math.Abs(inches)) * Exact.Inch > FractionSlack || parts > 1e9)
+        if (parts == 0 || Math.Abs((parts / Sixtyfourths) - Math.Abs(inches)) * Exact.Inch > slack || parts > 1e9)
             return null;
         var whole = (long)parts / Sixtyfourths;
         var top = (long)parts % Sixtyfourths;

@@ -63,7 +63,7 @@ public sealed partial record ShopUnits
     {
         var scale = (UInt128)Scale;
         var size = minor < 0 ? (UInt128)(-(Int128)minor) : (UInt128)minor;
-        var whole = (size / scale).ToString(CultureInfo.InvariantCulture);
+        var whole = (size / scale).ToString(ForFields ? "0" : "#,##0", CultureInfo.InvariantCulture);
         var sign = minor < 0 ? "-" : "";
         return CurrencyDigits == 0
             ? sign + whole

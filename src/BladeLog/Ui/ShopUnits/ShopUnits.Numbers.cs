@@ -56,7 +56,7 @@ public sealed partial record ShopUnits
     public string ShowRevolutions(double perMinute) => With(perMinute, 1, "rpm");
 
     /// <summary>A whole number.</summary>
-    public string Show(long count) => count.ToString(CultureInfo.InvariantCulture);
+    public string Show(long count) => count.ToString(ForFields ? "0" : "#,##0", CultureInfo.InvariantCulture);
 
-    private static string ShowNumber(double n) => Num(n, 0);
+    private string ShowNumber(double n) => Num(n, 0);
 }

@@ -77,8 +77,8 @@ public sealed partial record ShopUnits
         return OnTheClock(at, typed);
     }
 
-    /// <summary>Reads a date: today, yesterday, 2026-03-28, 28.3.2026, 28 Mar 2026.</summary>
-    public Parsed<DateOnly> ReadDate(string? text, DateTime nowUtc)
+    /// <summary>Reads a date: today, yesterday, 2026-03-28, 28.3.2026, 28 Mar 2026. One that lies ahead is refused with such for an example.</summary>
+    public Parsed<DateOnly> ReadDate(string? text, DateTime nowUtc, bool ahead = false)
     {
         var typed = (text ?? "").Trim();
         var clean = Amount.Clean(text);
@@ -96,7 +96,7 @@ public sealed partial record ShopUnits
             date = exact;
         return date is { Year: >= FirstYear and <= LastYear } found
             ? Parsed<DateOnly>.Good(found, typed, Show(found))
-            : Parsed<DateOnly>.Refused(typed, $"{Quote(typed)} is not a date. Write today, yesterday or {Show(today)}.");
+            : Parsed<DateOnly>.Refused(typed, $"{Quote(typed)} is not a date. Write {(ahead ? $"tomorrow or {Show(today.AddDays(7))}" : $"today, yesterday or {Show(today)}")}.");
     }
 
     /// <summary>2026-03-28 14:30 on the shop's clock; with its offset inside the double hour, so it reads back as itself.</summary>

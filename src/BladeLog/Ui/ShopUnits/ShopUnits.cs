@@ -49,6 +49,12 @@ public sealed partial record ShopUnits
     /// <summary>Where the shop's clock hangs.</summary>
     public TimeZoneInfo Zone { get; init; } = TimeZoneInfo.Utc;
 
+    /// <summary>Numbers as a form field holds them: no comma between thousands, so many digits that saving again changes nothing.</summary>
+    public bool ForFields { get; init; }
+
+    /// <summary>The same shop, its numbers as they stand in a form field.</summary>
+    public ShopUnits Typing => this with { ForFields = true };
+
     /// <summary>The same shop in the other system, for the second line under a number.</summary>
     public ShopUnits Other => this with { Units = IsInch ? UnitSystem.Metric : UnitSystem.Inch };
 
@@ -129,8 +135,14 @@ public sealed partial record ShopUnits
 
     private static string Quote(string typed) => $"\"{(typed.Length > 40 ? typed[..40] + "…" : typed)}\"";
 
-    private static string Num(double value, int decimals) =>
-        double.IsFinite(value) ? Figures.Plain(value, decimals) : value.ToString(CultureInfo.InvariantCulture);
+    /// <summary>A number with at most so many decimals and no zeros behind; a comma between thousands except in a form field.</summary>
+    private string Num(double value, int decimals)
+    {
+        if (!double.IsFinite(value))
+            return value.ToString(CultureInfo.InvariantCulture);
+        var rounded = Math.Round(value, decimals, MidpointRounding.AwayFromZero);
+        return (rounded == 0 ? 0 : rounded).ToString((ForFields ? "0." : "#,##0.") + new string('#', decimals), CultureInfo.InvariantCulture);
+    }
 
-    private static string With(double value, int decimals, string unit) => Num(value, decimals) + Gap + unit;
+    private string With(double value, int decimals, string unit) => Num(value, decimals) + Gap + unit;
 }

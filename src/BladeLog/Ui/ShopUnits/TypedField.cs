@@ -50,6 +50,7 @@ public static class Fields
     public static TypedField TyreThickness { get; } = new("a tyre thickness", 0, 0.05);
     public static TypedField CutHeight { get; } = new("a cut height", 0.1e-3, 4) { InchStep = 0.1m };
     public static TypedField Board { get; } = new("a board length", 1e-3, 100) { Large = true, Step = 10, InchStep = 1 };
+    public static TypedField CutLength { get; } = Board with { Name = "the length of one cut" };
     public static TypedField CurveRadius { get; } = new("a curve radius", 0.5e-3, 100) { InchStep = 0.1m };
     public static TypedField Deflection { get; } = new("a deflection", 0, 0.1) { Thousandths = true, Step = 0.01m, InchStep = 0.001m };
     public static TypedField Pitch { get; } = new("a tooth pitch", 0.5e-3, 0.2);
@@ -73,6 +74,7 @@ public static class Fields
     public static TypedField RunHours { get; } = new("a running time", 0, 10_000 * 3600.0) { Bare = "h", Step = 0.1m };
     public static TypedField HourMeter { get; } = new("an hour-meter reading", 0, 1e6 * 3600.0) { Bare = "h", Large = true, Step = 0.1m };
     public static TypedField Minutes { get; } = new("a time", 0, 10_000 * 3600.0) { Bare = "min" };
+    public static TypedField MinutesLost { get; } = new("the time lost", 0, 6000 * 60.0) { Bare = "min" };
     public static TypedField Seconds { get; } = new("a time", 0, 10_000 * 3600.0) { Bare = "s" };
 
     public static TypedField Pieces { get; } = new("a number of pieces", 1, 1e6);

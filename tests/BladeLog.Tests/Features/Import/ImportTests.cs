@@ -121,7 +121,7 @@ public sealed class ImportTests
         using HttpResponseMessage first = await Keep(app, page);
         (HttpStatusCode status, IDocument again) = await Look(app, Cuts);
         Assert.Equal(HttpStatusCode.UnprocessableEntity, status);
-        Assert.Contains("This file was imported on 2026-12-01 10:30 already, with 2 lines.", SampleApp.Text(again.QuerySelector(".problems")), StringComparison.Ordinal);
+        Assert.Contains("This file was imported on 1 Dec 2026 10:30 already, with 2 lines.", SampleApp.Text(again.QuerySelector(".problems")), StringComparison.Ordinal);
         await using ShopDb db = app.NewContext();
         Assert.Equal(17, await db.QueuedCuts.CountAsync());
     }

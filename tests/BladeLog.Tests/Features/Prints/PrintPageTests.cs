@@ -68,7 +68,7 @@ public sealed class PrintPageTests(SampleApp sample) : IClassFixture<SampleApp>
         var q10 = SampleApp.Text(page.QuerySelectorAll(".blade")[1]);
 
         // Specification B4 of the sample: 19 x 0.8 mm, 3 TPI hook, kerf 1.36, so 0.28 a side; 18.2 mm wide by now.
-        Assert.Contains("5080 mm × 18.2 mm × 0.8 mm", q10, StringComparison.Ordinal);
+        Assert.Contains("5,080 mm × 18.2 mm × 0.8 mm", q10, StringComparison.Ordinal);
         Assert.Contains("3 TPI hook, hook 10°", q10, StringComparison.Ordinal);
         Assert.Contains("0.28 mm each side", q10, StringComparison.Ordinal);
         Assert.Contains("Hardened carbon steel teeth, flexible back", q10, StringComparison.Ordinal);
@@ -93,7 +93,7 @@ public sealed class PrintPageTests(SampleApp sample) : IClassFixture<SampleApp>
     {
         var page = await sample.Page("/rackcard?rack=R2");
         Assert.Equal(["Q-04b", "Q-09", "Q-11", "Q-12", "Q-13", "Q-15", "Q-16"], page.QuerySelectorAll(".pegs .t").Select(t => t.TextContent));
-        Assert.StartsWith("Osprey: loop 5080 mm, widths 6 to 50", SampleApp.Text(page.QuerySelector(".paperhead h2")), StringComparison.Ordinal);
+        Assert.StartsWith("Osprey: loop 5,080 mm, widths 6 to 50", SampleApp.Text(page.QuerySelector(".paperhead h2")), StringComparison.Ordinal);
         Assert.All(page.QuerySelectorAll(".pegs .strip"), s => Assert.Equal("0 0 44 16", s.GetAttribute("viewBox")));
         Assert.Contains("rough work only, then scrap", SampleApp.Text(page.QuerySelectorAll(".pegs tbody tr")[1]), StringComparison.Ordinal);
         Assert.NotNull(page.QuerySelector(".rulebar"));

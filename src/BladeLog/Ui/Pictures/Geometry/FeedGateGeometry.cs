@@ -1,5 +1,3 @@
-using System.Globalization;
-
 namespace BladeLog.Ui.Pictures.Geometry;
 
 /// <summary>One limit on the feed, m/min: up to Green it is free, up to Amber with care.</summary>
@@ -30,14 +28,14 @@ public sealed record FeedGateGeometry(GateVerdict Verdict, double From, double T
     public const double High = 20;
     private const int Row = 28;
     private const double ChannelHalf = 10;
-    private static readonly double[] Ticks = [0.1, 0.2, 0.5, 1, 2, 5, 10, 20];
 
     /// <summary>Position of a feed in percent of the axis; what lies outside stands at the end.</summary>
     public static double X(double feed) =>
         feed <= Low ? 0 : Math.Min(100, 100 * Math.Log(feed / Low) / Math.Log(High / Low));
 
-    public static FeedGateGeometry Of(double noChip, double rubs, IReadOnlyList<GateLimit> limits, bool full, bool axis)
+    public static FeedGateGeometry Of(double noChip, double rubs, IReadOnlyList<GateLimit> limits, bool full, bool axis, Drafting? drafting = null)
     {
+        var d = drafting ?? Drafting.Metric;
         var green = limits.MinBy(l => l.Green);
         var amber = limits.MinBy(l => l.Amber);
         var g = green?.Green ?? double.PositiveInfinity;
@@ -46,7 +44,7 @@ public sealed record FeedGateGeometry(GateVerdict Verdict, double From, double T
             : a >= rubs ? GateVerdict.CareByLimit
             : a >= noChip ? GateVerdict.CareByRubbing
             : GateVerdict.Shut;
-        var uppers = Uppers(verdict, limits, amber, g, a, full);
+        var uppers = Uppers(verdict, limits, amber, g, a, full, d);
         var lowers = verdict == GateVerdict.Shut ? [("no chip below", noChip)]
             : full ? new[] { ("rubs below", rubs), ("no chip below", noChip) }
             : [("rubs below", rubs)];
@@ -65,14 +63,14 @@ public sealed record FeedGateGeometry(GateVerdict Verdict, double From, double T
             }
 
             marks.Add(new Upright("lead", X(feed), band.Bottom, yt - 2));
-            marks.Add(new Words(null, X(feed), 7, yt - 4, $"{name} {Figures.Feed(feed)}"));
+            marks.Add(new Words(null, X(feed), 7, yt - 4, $"{name} {d.Feed(feed)}"));
         }
 
         marks.Add(new Bar("bandedge", 0, band.Top, 100, band.Height));
         var ya = band.Bottom + lowers.Length * Row + 12;
         if (axis)
         {
-            AxisLine(marks, ya);
+            AxisLine(marks, ya, d);
         }
 
         var (from, to) = verdict switch
@@ -86,29 +84,30 @@ public sealed record FeedGateGeometry(GateVerdict Verdict, double From, double T
     }
 
     /// <summary>The picture in words, for those who do not see it.</summary>
-    public static string Describe(string tag, double noChip, double rubs, IReadOnlyList<GateLimit> limits)
+    public static string Describe(string tag, double noChip, double rubs, IReadOnlyList<GateLimit> limits, Drafting? drafting = null)
     {
+        var d = drafting ?? Drafting.Metric;
         var gate = Of(noChip, rubs, limits, true, false);
         var ends = gate.Verdict == GateVerdict.Fits ? limits.MinBy(l => l.Green) : limits.MinBy(l => l.Amber);
         var range = gate.Verdict == GateVerdict.Shut ? ""
-            : ends is null ? $"from {Figures.Feed(gate.From)} m/min on, nothing closes it"
-            : $"from {Figures.Feed(gate.From)} to {Figures.Feed(gate.To)} m/min, then {ends.Name} closes it";
+            : ends is null ? $"from {d.Feed(gate.From)} {d.FeedUnit} on, nothing closes it"
+            : $"from {d.Feed(gate.From)} to {d.Feed(gate.To)} {d.FeedUnit}, then {ends.Name} closes it";
         var words = gate.Verdict switch
         {
             GateVerdict.Fits => $"open {range}",
             GateVerdict.CareByLimit => $"with care {range}",
             GateVerdict.CareByRubbing => $"rubbing, with care {range}",
-            _ => $"shut, {ends!.Name} closes it at {Figures.Feed(ends.Amber)} m/min",
+            _ => $"shut, {ends!.Name} closes it at {d.Feed(ends.Amber)} {d.FeedUnit}",
         };
         var care = gate.Verdict == GateVerdict.Fits && limits.MinBy(l => l.Amber) is { } least && least.Amber > gate.To
-            ? $", with care to {Figures.Feed(least.Amber)}" : "";
-        var others = limits.Where(l => l != ends).OrderBy(l => l.Green).Select(l => $"; {l.Name} at {Figures.Feed(l.Green)}");
-        return $"Feed gate of {tag}: no chip below {Figures.Feed(noChip)}, rubs below {Figures.Feed(rubs)}, {words}{care}{string.Concat(others)}";
+            ? $", with care to {d.Feed(least.Amber)}" : "";
+        var others = limits.Where(l => l != ends).OrderBy(l => l.Green).Select(l => $"; {l.Name} at {d.Feed(l.Green)}");
+        return $"Feed gate of {tag}: no chip below {d.Feed(noChip)}, rubs below {d.Feed(rubs)}, {words}{care}{string.Concat(others)}";
     }
 
     // Rising, so that label i hangs at level i from the top and its text passes above every leader to its right.
     private static List<(string Text, double Feed)> Uppers(
-        GateVerdict verdict, IReadOnlyList<GateLimit> limits, GateLimit? amber, double g, double a, bool full)
+        GateVerdict verdict, IReadOnlyList<GateLimit> limits, GateLimit? amber, double g, double a, bool full, Drafting d)
     {
         List<(string Text, double Feed)> all = [];
         if (verdict == GateVerdict.Fits)
@@ -128,7 +127,7 @@ public sealed record FeedGateGeometry(GateVerdict Verdict, double From, double T
         var seen = all.Where(l => l.Feed <= High).OrderBy(l => l.Feed).ToList();
         return full ? seen : [.. seen.Take(1)];
 
-        static string Text(double feed) => feed <= High ? Figures.Feed(feed) : "";
+        string Text(double feed) => feed <= High ? d.Feed(feed) : "";
     }
 
     private static void Parts(List<AxisMark> marks, Band band, GateVerdict verdict, double xn, double xr, double xg, double xa)
@@ -205,17 +204,16 @@ public sealed record FeedGateGeometry(GateVerdict Verdict, double From, double T
         }
     }
 
-    private static void AxisLine(List<AxisMark> marks, double y)
+    private static void AxisLine(List<AxisMark> marks, double y, Drafting d)
     {
         marks.Add(new Level("axis", 0, 100, y));
-        foreach (var tick in Ticks)
+        foreach (var (words, at, css) in d.Ticks)
         {
-            var css = "num" + (tick is 0.2 or 2 or 10 ? " minor" : "") + (tick is 0.2 ? " m2" : "") + (tick is 0.5 ? " m3" : "");
-            marks.Add(new Upright("axis", X(tick), y, y + 7));
-            marks.Add(new Words(css, X(tick), 0, y + 28, tick.ToString(CultureInfo.InvariantCulture), tick == Low ? "start" : "middle"));
+            marks.Add(new Upright("axis", X(at), y, y + 7));
+            marks.Add(new Words("num" + css, X(at), 0, y + 28, words, at == Low ? "start" : "middle"));
         }
 
-        marks.Add(new Words("num", 100, 16, y + 28, "m/min"));
+        marks.Add(new Words("num", 100, 16, y + 28, d.FeedUnit));
     }
 
     private readonly record struct Band(double Top, double Height)

@@ -65,8 +65,9 @@ public sealed record BladeDrawingGeometry(
     private static readonly int[] Heights = [14, 22, 32, 44, 56];
 
     /// <summary>Blades wider than the tallest window are drawn down to its edge and go on.</summary>
-    public static BladeDrawingGeometry Of(ToothSpec now, double newWidth, double leastWidth, double newDepth)
+    public static BladeDrawingGeometry Of(ToothSpec now, double newWidth, double leastWidth, double newDepth, Drafting? drafting = null)
     {
+        var d = drafting ?? Drafting.Metric;
         var worn = Math.Max(0, newWidth - now.Width);
         var y0 = 2.6 + worn;
         var back = y0 + now.Width;
@@ -80,9 +81,9 @@ public sealed record BladeDrawingGeometry(
         var last = -9d;
         (double Y, string Text, bool Bold)[] widths =
         [
-            (back - newWidth, $"{Figures.Number(newWidth, 1)} new", false),
-            (back - now.Width, $"{Figures.Number(now.Width, 1)} now", true),
-            (back - leastWidth, $"{Figures.Number(leastWidth, 1)} least", false),
+            (back - newWidth, $"{d.Length(newWidth, 1)} new", false),
+            (back - now.Width, $"{d.Length(now.Width, 1)} now", true),
+            (back - leastWidth, $"{d.Length(leastWidth, 1)} least", false),
         ];
         foreach (var (y, text, bold) in widths.OrderBy(w => w.Y))
         {
@@ -98,7 +99,7 @@ public sealed record BladeDrawingGeometry(
         var pair = edge.Tips.Where(t => t.X > 30).Take(2).ToArray();
         var (x1, x2) = (pair[0].X, pair[1].X);
         var yd = y0 + Math.Min(now.Width, foot - y0) * 0.62;
-        labels.Add(new(x2 + 1.2, yd + 1.2, $"pitch {Figures.Number(x2 - x1, 2)}", false));
+        labels.Add(new(x2 + 1.2, yd + 1.2, $"pitch {d.Length(x2 - x1, 2)}", false));
 
         return new(height,
             $"M0 0H{Svg.N(Edge)}C{Svg.At(Edge - 1.6, height * 0.25)} {Svg.At(Edge + 1.6, height * 0.6)} {Svg.At(Edge - 0.4, height)}H0Z",
