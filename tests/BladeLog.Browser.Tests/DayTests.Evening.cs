@@ -48,7 +48,8 @@ public sealed partial class DayTests
             // Two are dull: the one that burned, and Longreach's, which has run past the mark after which a grind no longer pays.
             Assert.Contains(lines, l => l.StartsWith("To sharpen: Q-17", StringComparison.Ordinal));
             Assert.Contains(lines, l => l.StartsWith("Dull, no further grind: Q-32 on Longreach", StringComparison.Ordinal));
-            Assert.Contains(lines, l => l.StartsWith("Stock low: ", StringComparison.Ordinal));
+            Assert.Contains(lines, l => l.StartsWith("Spares on the rack: ", StringComparison.Ordinal));
+            Assert.Contains(lines, l => l.StartsWith("Stock: order ", StringComparison.Ordinal));
             // The tablet knows since the morning who is at it.
             await Within(1, "hand-over", null, async () =>
             {

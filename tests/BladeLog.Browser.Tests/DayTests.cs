@@ -192,7 +192,8 @@ public sealed partial class DayTests(Workbench bench) : IClassFixture<Workbench>
             await Within(1, "undo", null, async () =>
             {
                 await tablet.Tap(tablet.Foot.GetByRole(AriaRole.Button, new() { Name = "Undo" }));
-                await Expect(tablet.Foot.GetByText("Indian rosewood")).ToHaveCountAsync(0);
+                await Expect(tablet.Foot).ToContainTextAsync("Undone");
+                await Expect(tablet.Foot.GetByRole(AriaRole.Button, new() { Name = "Undo" })).ToHaveCountAsync(0);
             });
             Assert.Equal(2, await Cuts());
         }

@@ -45,7 +45,7 @@ public sealed class FirstDayTests(Workbench bench) : IClassFixture<Workbench>
         {
             ("Code", "S1"), ("Name", "Tern"), ("Driven wheel, over the tyre", "700"), ("Second wheel, over the tyre", "700"), ("Loop length", "5080"),
             ("Shortest the take-up reaches", "5055"), ("Longest", "5105"), ("Narrowest blade", "6"), ("Widest blade", "50"), ("Blade speed for wood", "23.5"),
-            ("Greatest pull of ONE strand", "5200"), ("Opens to", "450"), ("Motor", "5.5 kW"), ("Longest piece", "3600"), ("Feeder's force", "250"), ("Feeder, slowest", "0.5"), ("Feeder, fastest", "8"),
+            ("Greatest pull in one strand", "5200"), ("Opens to", "450"), ("Motor", "5.5 kW"), ("Longest piece", "3600"), ("Feeder's force", "250"), ("Feeder, slowest", "0.5"), ("Feeder, fastest", "8"),
         })
         {
             await tablet.Fill(label, text);
@@ -110,7 +110,7 @@ public sealed class FirstDayTests(Workbench bench) : IClassFixture<Workbench>
         }
 
         await tablet.Tap(tablet.Choice("a board into thinner ones"));
-        await tablet.Tap(tablet.Choice("bite at most 0.10 mm"));
+        await tablet.Tap(tablet.Choice("bite at most 0.1"));
         await tablet.Tap(tablet.Button("Put it on the list"));
         // "Saved" stands there since the hours; the form's own address goes once the cut is on the list.
         await Expect(tablet.Page).Not.ToHaveURLAsync(new Regex("/cuts/new$"));

@@ -61,7 +61,8 @@ public sealed class SwapJourneyTests(Workbench bench) : IClassFixture<Workbench>
             await Expect(undo).ToContainTextAsync("Q-18");
             var before = tablet.Taps;
             await tablet.Tap(undo);
-            await Expect(tablet.Foot.GetByText("Q-18")).ToHaveCountAsync(0);
+            await Expect(tablet.Foot).ToContainTextAsync("Undone");
+            await Expect(undo).ToHaveCountAsync(0);
             Assert.Equal(1, tablet.Taps - before);
             await tablet.Open("/");
             await Expect(tablet.Tile("S3").Locator(".on")).ToContainTextAsync("Q-17");
