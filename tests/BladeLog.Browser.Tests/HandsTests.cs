@@ -53,6 +53,40 @@ public sealed partial class HandsTests(Workbench bench) : IClassFixture<Workbenc
         });
     }
 
+    /// <summary>Said once on the tablet, what is tapped often stands at the other side; the page fits as it did.</summary>
+    [BrowserTheory]
+    [InlineData("1280x800", false)]
+    [InlineData("800x1280", true)]
+    [InlineData("360x740", true)]
+    public async Task What_is_tapped_often_stands_at_the_side_of_the_hand(string screen, bool script)
+    {
+        await using var shop = await ServedShop.Sample();
+        await bench.At(shop, Screen.Of(screen), async tablet =>
+        {
+            async Task<double> Middle(string path, string which)
+            {
+                await tablet.Open(path);
+                return await tablet.Page.EvaluateAsync<double>("which => { const b = document.querySelector(which).getBoundingClientRect(); return (b.left + b.right) / 2 }", which);
+            }
+
+            var (path, which) = screen == "1280x800" ? ("/saws/S3", ".cols>aside") : ("/", ".tile .hands");
+            var right = await Middle(path, which);
+            await tablet.Open("/more");
+            await tablet.Tap(tablet.Button("Put it at the left"));
+            await Expect(tablet.Button("Put it at the right")).ToBeVisibleAsync();
+            var left = await Middle(path, which);
+            Assert.True(!tablet.Screen.IsTablet || (right > tablet.Screen.Width / 2.0 && left < tablet.Screen.Width / 2.0), $"It stood at {right:0}, then at {left:0}.");
+            var report = new Report();
+            foreach (var page in (string[])["/", "/saws/S2", "/blades/Q-17", "/blades/Q-14", "/cuts/2", "/saws/S2/swap", "/more"])
+            {
+                await tablet.Open(page);
+                report.Add(page, await Look.Measured(tablet));
+            }
+
+            report.MustBeEmpty();
+        }, script);
+    }
+
     [BrowserFact]
     public async Task No_page_asks_for_a_hover_a_drag_or_a_long_press()
     {

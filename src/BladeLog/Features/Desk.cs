@@ -22,6 +22,9 @@ internal sealed class Desk(TimeProvider clock, ShopDb db, ShopWriter writer, IHt
     /// <summary>What was just recorded and can be taken back: entry, words, time.</summary>
     private const string SavedCookie = "saved";
 
+    private const string HandCookie = "hand";
+    private const string Left = "left";
+
     /// <summary>In the place of an entry that can be undone: it was.</summary>
     private const int WasUndone = -1;
 
@@ -87,11 +90,15 @@ internal sealed class Desk(TimeProvider clock, ShopDb db, ShopWriter writer, IHt
         return true;
     }
 
+    /// <summary>At which side of this tablet what is tapped often stands.</summary>
+    public void SayHand(bool left) => Http.Response.Cookies.Append(
+        HandCookie, left ? Left : "right", new CookieOptions { HttpOnly = true, SameSite = SameSiteMode.Strict, MaxAge = TimeSpan.FromDays(400), IsEssential = true });
+
     public async Task<Chrome> Chrome()
     {
         var shop = await Shop();
         var (savedAt, undo, undone) = LastSaved(Units(shop.Shop));
-        return new Chrome(shop.Shop.Name, (await Who())?.Initials, savedAt, undo) { Undone = undone };
+        return new Chrome(shop.Shop.Name, (await Who())?.Initials, savedAt, undo) { Undone = undone, LeftHand = Http.Request.Cookies[HandCookie] == Left };
     }
 
     public async Task<IResult> Page<TView, TModel>(TModel model, int status = StatusCodes.Status200OK)

@@ -23,6 +23,9 @@ public sealed record Chrome(string ShopName, string? Who, string? SavedAt, UndoO
     /// <summary>What was undone last, where nothing was saved since; null: the last was saved and stands.</summary>
     public string? Undone { get; init; }
 
+    /// <summary>What is tapped often stands at the left of this tablet.</summary>
+    public bool LeftHand { get; init; }
+
     /// <summary>A sheet without a shop: first start, sign-in, a failure.</summary>
     public static Chrome Bare { get; } = new("", null, null, null);
 }

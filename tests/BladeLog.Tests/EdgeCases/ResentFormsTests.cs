@@ -12,7 +12,7 @@ namespace BladeLog.Tests.EdgeCases;
 public sealed class ResentFormsTests
 {
     /// <summary>Forms that record nothing in the ledger.</summary>
-    private static readonly string[] Others = ["/who", "/start", "/import"];
+    private static readonly string[] Others = ["/who", "/more/hand", "/start", "/import"];
 
     /// <summary>Route, page, and what is typed.</summary>
     private static readonly (string Route, string Page, string Action, (string Name, string? Value)[] Typed)[] Forms =

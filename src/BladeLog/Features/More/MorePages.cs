@@ -1,6 +1,13 @@
+using Microsoft.AspNetCore.Mvc;
+
 namespace BladeLog.Features.More;
 
 public sealed record MoreRow(string Name, string Says, string Href);
+
+public sealed record HandForm : PostedForm
+{
+    public string? Hand { get; init; }
+}
 
 public sealed record MoreModel(IReadOnlyList<MoreRow> Rows);
 
@@ -24,7 +31,18 @@ internal static class MorePages
         new("Bring in a list", "Blades, saws and hours from a table", "/import"),
     ];
 
-    public static void Map(WebApplication app) => app.MapGet("/more", Get);
+    public static void Map(WebApplication app)
+    {
+        app.MapGet("/more", Get);
+        app.MapPost("/more/hand", SayHand);
+    }
+
+    /// <summary>Of this tablet alone: nothing is recorded.</summary>
+    private static IResult SayHand([FromForm] HandForm? form, Desk desk)
+    {
+        desk.SayHand(form?.Hand == "left");
+        return Results.Redirect("/more");
+    }
 
     private static async Task<IResult> Get(Desk desk, EndpointDataSource endpoints)
     {
