@@ -1,5 +1,6 @@
 using BladeLog.Handbook.Cutting;
 using BladeLog.Handbook.Quantities;
+using BladeLog.Handbook.Units;
 using BladeLog.Records;
 
 namespace BladeLog.Advice;
@@ -15,7 +16,7 @@ public readonly record struct SpellOf(int SawId, int BladeId, DateTime From, Dat
 public readonly record struct WorkDone(double Metres, double AreaM2, long Cuts, double Hours)
 {
     /// <summary>Board feet of boards an inch thick: a square foot of face each.</summary>
-    public double BoardFeet => AreaM2 / (0.3048 * 0.3048);
+    public double BoardFeet => AreaM2 / (Exact.Foot * Exact.Foot);
 
     public static WorkDone operator +(WorkDone a, WorkDone b) => new(a.Metres + b.Metres, a.AreaM2 + b.AreaM2, a.Cuts + b.Cuts, a.Hours + b.Hours);
 }

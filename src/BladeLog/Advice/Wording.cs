@@ -1,4 +1,5 @@
 using System.Globalization;
+using BladeLog.Handbook.Units;
 using BladeLog.Records;
 
 namespace BladeLog.Advice;
@@ -29,10 +30,10 @@ public sealed record Wording(LengthUnit Lengths = LengthUnit.Millimetre, Spellin
     public static string Edge(double metres) => Number(metres * 1e6, 0) + " µm";
 
     public string Feed(double metresPerSecond) => Lengths == LengthUnit.Inch
-        ? Number(metresPerSecond * 60 / 0.3048, 1) + " ft/min"
+        ? Number(metresPerSecond * 60 / Exact.Foot, 1) + " ft/min"
         : Number(metresPerSecond * 60, 1) + " m/min";
 
-    public string Distance(double metres) => Lengths == LengthUnit.Inch ? Number(metres / 0.3048, 0) + " ft" : Number(metres, metres < 9.95 ? 1 : 0) + " m";
+    public string Distance(double metres) => Lengths == LengthUnit.Inch ? Number(metres / Exact.Foot, 0) + " ft" : Number(metres, metres < 9.95 ? 1 : 0) + " m";
 
     public static string Hours(double hours) => Number(hours, hours < 9.95 ? 1 : 0) + " h";
 

@@ -103,6 +103,8 @@ internal static class Said
     public static string Day(DateOnly day, DateTime now, ShopUnits units) =>
         day.ToString(day.Year == Local(now, units).Year ? "d MMM" : "d MMM yyyy", System.Globalization.CultureInfo.InvariantCulture);
 
+    public static string Day(DateTime utc, DateTime now, ShopUnits units) => Day(DateOnly.FromDateTime(Local(utc, units)), now, units);
+
     public static string When(DateTime utc, DateTime now, ShopUnits units)
     {
         ArgumentNullException.ThrowIfNull(units);

@@ -1,4 +1,3 @@
-using System.Globalization;
 using BladeLog.Advice;
 using BladeLog.Records;
 using BladeLog.Ui;
@@ -29,14 +28,8 @@ internal static class StockNow
 
     /// <summary>"Order 2 of E1 by 8 Dec"; null: nothing to order within a year.</summary>
     public static string? Order(StockLine line, DateTime now, ShopUnits units) => line.OrderInDays is { } days
-        ? $"Order {line.Order} of {line.Spec.Code} {(days == 0 ? "now" : "by " + Day(now.AddDays(days), now, units))}"
+        ? $"Order {line.Order} of {line.Spec.Code} {(days == 0 ? "now" : "by " + Said.Day(now.AddDays(days), now, units))}"
         : null;
-
-    public static string Day(DateTime utc, DateTime now, ShopUnits units)
-    {
-        DateTime day = Said.Local(utc, units);
-        return day.ToString(day.Year == Said.Local(now, units).Year ? "d MMM" : "d MMM yyyy", CultureInfo.InvariantCulture);
-    }
 
     private static async Task<Dictionary<int, double>> HoursPerWeek(Desk desk, DateTime since, double weeks)
     {

@@ -1,4 +1,5 @@
 using BladeLog.Handbook.Quantities;
+using Material = BladeLog.Handbook.Tables.Material;
 using MaterialTable = BladeLog.Handbook.Tables.MaterialTable;
 
 namespace BladeLog.Features;
@@ -41,6 +42,15 @@ internal sealed record Wood(string Key, string Typed, string? TakenAs, MaterialK
     {
         string typed = (text ?? "").Trim();
         return typed.Length is 0 or > LongestName || MaterialTable.Find(typed, out _) is not null ? [] : MaterialTable.NearestNames(typed);
+    }
+
+    /// <summary>A wood whose cutting can be reckoned, for a form that is an address.</summary>
+    public static (Material? Found, string? Understood, string? Error) Sawn(string typed)
+    {
+        Material? found = MaterialTable.Find(typed, out string? takenAs);
+        return found is null ? (null, null, Unknown(typed))
+            : found.Density12 is null ? (null, null, $"{found.Name} is not sawn on these saws.")
+            : (found, takenAs is null ? null : $"taken as {takenAs}", null);
     }
 
     /// <summary>What is said beside a field that lists the woods.</summary>

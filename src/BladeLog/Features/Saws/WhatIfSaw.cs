@@ -76,7 +76,7 @@ internal static class WhatIfSaw
         SawSetup setup = saw.Setup;
         Shown shown = new(units);
         AskForm form = new(query, units, true);
-        Material? wood = form.Look("wood", "Wood", "European oak", "default, not yours", Find, [.. MaterialTable.All.Where(m => m.Kind == MaterialKind.Wood).Select(m => m.Name)]);
+        Material? wood = form.Look("wood", "Wood", "European oak", "default, not yours", Wood.Sawn, [.. MaterialTable.All.Where(m => m.Kind == MaterialKind.Wood).Select(m => m.Name)]);
         double? moisture = form.Moisture("moisture", "Moisture", new Given(wood?.DefaultMoisture ?? 10, "default, not yours"));
         double? feed = form.Feed("feed", "Feed that is decent", new Given((setup.FeederN is null ? ByHand : WithFeeder) / 60, "default, not yours"));
         Edges edges = form.Choose("edges", "Edges", Edges.Now, "as the page begins", (Edges.Now, "now", "as they are now"), (Edges.Ground, "ground", "freshly ground"));
@@ -223,14 +223,6 @@ internal static class WhatIfSaw
         Kind = CutKind.Resaw,
         Finish = Finish.Rough,
     };
-
-    private static (Material? Found, string? Understood, string? Error) Find(string typed)
-    {
-        Material? found = MaterialTable.Find(typed, out string? takenAs);
-        return found is null ? (null, null, Wood.Unknown(typed))
-            : found.Density12 is null ? (null, null, $"{found.Name} is not sawn on these saws.")
-            : (found, takenAs is null ? null : $"taken as {takenAs}", null);
-    }
 
     private enum Edges
     {

@@ -1,6 +1,7 @@
 using System.Globalization;
 using BladeLog.Advice;
 using BladeLog.Handbook.Quantities;
+using BladeLog.Handbook.Units;
 using BladeLog.Records;
 using BladeLog.Ui;
 using Microsoft.EntityFrameworkCore;
@@ -22,11 +23,13 @@ internal static class CostPages
         List<CutDone> cuts = await db.CutsDone.AsNoTracking().Include(c => c.Entry).ToListAsync();
         List<Sharpening> sharpenings = await db.Sharpenings.AsNoTracking().ToListAsync();
         IReadOnlyDictionary<int, CostSoFar> costs = Costs.OfBlades(shop.Blades, spells, cuts, sharpenings, await db.Breaks.AsNoTracking().ToListAsync(), shop.Shop);
+        // A foot or a metre sawn, and its square.
+        double side = units.Units == UnitSystem.Inch ? Exact.Foot : 1;
         string Money(double? minor, int digits) => minor is { } m ? Figures.Number(m / Math.Pow(10, shop.Shop.CurrencyDigits), digits) : "";
         CostRow Row(CostSoFar c, string? href) => new(
             c.Name, href, units.ShowMoney(c.Spent.Bought), units.ShowMoney(c.Spent.Sharpened), units.ShowMoney(c.Spent.Broke),
-            Money(units.Units == UnitSystem.Inch ? c.PerMetre * 0.3048 : c.PerMetre, 3),
-            Money(units.Units == UnitSystem.Inch ? c.PerSquareMetre * 0.3048 * 0.3048 : c.PerSquareMetre, 3),
+            Money(c.PerMetre * side, 3),
+            Money(c.PerSquareMetre * side * side, 3),
             Money(c.PerBoardFoot, 4), Money(c.PerCut, 2), Money(c.PerHour, 2));
         BladeFile[] ran = [.. shop.Blades.Where(b => costs[b.Blade.Id].Work.Hours > 0).OrderBy(b => b.Blade.Tag, NaturalOrder.Instance)];
         BladeAdvice? asked = blade is not null && shop.Blade(Tags.Read(blade)) is { } file ? advice.Of(file) : null;
@@ -35,11 +38,11 @@ internal static class CostPages
         CostSoFar all = Costs.Together("All", costs.Values);
         return await desk.Page<CostsPage, CostsModel>(new CostsModel
         {
-            Title = all.PerSquareMetre is { } each ? $"Costs: {Money(units.Units == UnitSystem.Inch ? each * 0.3048 * 0.3048 : each, 3)} for each {(units.Units == UnitSystem.Inch ? "square foot" : "square metre")} sawn" : "Costs: no cut is logged yet",
+            Title = all.PerSquareMetre is { } each ? $"Costs: {Money(each * side * side, 3)} for each {(units.Units == UnitSystem.Inch ? "square foot" : "square metre")} sawn" : "Costs: no cut is logged yet",
             Specs = [.. ran.GroupBy(b => b.Spec.Code).OrderBy(g => g.Key, NaturalOrder.Instance).Select(g => Row(Costs.Together($"{g.Key}: {Said.Section(g.First(), units)}, {Said.Teeth(g.First().Spec, units)}", g.Select(b => costs[b.Blade.Id])), null))],
             Blades = [.. ran.Select(b => Row(costs[b.Blade.Id], $"/blades/{b.Blade.Tag}"))],
             Grinds = [.. Costs.Grinds(sharpenings, shop.Blades).Select(g => (g.InHouse ? "Ground in the shop" : "Ground by a service", Money(g.Each, 2), $"{Said.Count(g.Count, "sharpening", "sharpenings")}, {units.ShowMoney(g.Spent)} together"))],
-            Teeth = saw is null ? [] : [.. Teeth(shop, advice, saw, units).OrderBy(t => t.Minor).Select(t => (t.Code, t.Teeth, Money(units.Units == UnitSystem.Inch ? t.Minor * 0.3048 * 0.3048 : t.Minor, 3)))],
+            Teeth = saw is null ? [] : [.. Teeth(shop, advice, saw, units).OrderBy(t => t.Minor).Select(t => (t.Code, t.Teeth, Money(t.Minor * side * side, 3)))],
             TeethOn = saw is null ? "" : $"On {saw.Saw.Name}, {units.ShowFeed(new Speed(4 / 60.0))}, clean medium wood: a sharpening and the share of the price that goes with each edge, over the metres an edge lasts.",
             Tags = [.. shop.Blades.Where(b => b.Break is null && b.Retirement is null && b.Place != Place.Gone).Select(b => b.Blade.Tag).Order(NaturalOrder.Instance)],
             Tag = asked?.File.Blade.Tag,

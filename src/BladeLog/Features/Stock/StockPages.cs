@@ -95,7 +95,7 @@ internal static class StockPages
         Add(s.Spare, s.Spare == 1 ? "new spare" : "new spares");
         Add(s.ToSharpen, "to sharpen");
         DateTime? back = s.Blades.Select(b => b.File.Away?.PromisedUtc).Min();
-        Add(s.Away, back is { } promised ? $"at the sharpener, promised {StockNow.Day(promised, now, units)}" : "at the sharpener", atHand: false);
+        Add(s.Away, back is { } promised ? $"at the sharpener, promised {Said.Day(promised, now, units)}" : "at the sharpener", atHand: false);
         Add(s.OnHold, "on hold", atHand: false);
         BladeFile drawn = s.Blades.Count > 0 ? s.Blades[0].File with { WidthM = s.Spec.WidthM, GulletM = null } : new BladeFile { Blade = new Blade { Tag = s.Spec.Code, Spec = s.Spec }, Spec = s.Spec, Place = Place.Rack, WidthM = s.Spec.WidthM };
         return new StockRow

@@ -38,7 +38,7 @@ internal static class CutPage
         double? L = form.Length("loop", "Loop", Fields.Loop, Given.Of(from.Blade?.File.LoopM ?? setup?.LoopM, "of the blade", 3.4));
         double? v = form.BandSpeed("speed", "Band speed", from.Speed(16));
         double? H = form.Length("height", "Height of the wood along the blade", Fields.CutHeight, Given.Of(from.Cut?.HeightM, "of the cut", 0.150));
-        Material? wood = form.Look("wood", "Wood", from.Cut?.Material?.Name ?? "Scots pine", from.Cut is null ? "example" : "of the cut", Find, [.. MaterialTable.All.Where(m => m.Density12 is not null).Select(m => m.Name)]);
+        Material? wood = form.Look("wood", "Wood", from.Cut?.Material?.Name ?? "Scots pine", from.Cut is null ? "example" : "of the cut", Wood.Sawn, [.. MaterialTable.All.Where(m => m.Density12 is not null).Select(m => m.Name)]);
         double? rho = form.Density("density", "Density at 12 % moisture", Given.Of(wood?.Density12, $"of {wood?.Name ?? "the wood"}, {Figures.Mark(wood?.Provenance ?? Provenance.FromMemory)}", null));
         double? moisture = form.Moisture("moisture", "Moisture", Given.Of(from.Cut?.Moisture, wood?.DefaultMoisture ?? 12));
         CutDirection direction = form.Choose("direction", "Direction", from.Cut?.Cut.Direction ?? CutDirection.Rip, from.Cut is null ? "example" : "of the cut", (CutDirection.Rip, "rip", "along the grain"), (CutDirection.Cross, "cross", "across the grain"));
@@ -153,12 +153,4 @@ internal static class CutPage
     }
 
     private static string Mark(BladeBody? body) => body is null ? "example" : "specification";
-
-    private static (Material? Found, string? Understood, string? Error) Find(string typed)
-    {
-        Material? found = MaterialTable.Find(typed, out string? takenAs);
-        return found is null ? (null, null, Wood.Unknown(typed))
-            : found.Density12 is null ? (null, null, $"{found.Name} is not sawn on these saws.")
-            : (found, takenAs is null ? null : $"taken as {takenAs}", null);
-    }
 }
